@@ -1,0 +1,60 @@
+package spanwright.sheet;
+
+import com.fasterxml.jackson.core.JsonProcessingException;
+import spanwright.assess.Placement;
+import spanwright.plan.Catalogue;
+import spanwright.plan.Json;
+import spanwright.plan.Plan;
+
+/** Makes sheets and writes them: the front door of the package. */
+public final class Sheets {
+  private Sheets() {}
+
+  /**
+   * Works a sheet out.
+   *
+   * @param plan the survey and the brief, complete
+   * @param catalogue what the placement's ids refer to
+   * @param placement as assessed on that plan
+   * @param options paper, units, times
+   * @throws IllegalArgumentException with a sentence for people when the placement does not belong
+   *     to the plan
+   */
+  public static SheetModel of(
+      Plan plan, Catalogue catalogue, Placement placement, SheetOptions options) {
+    throw new UnsupportedOperationException("the sheet is being built");
+  }
+
+  /** The whole sheet as PDF: list, then drawing. */
+  public static byte[] toPdf(SheetModel model) {
+    throw new UnsupportedOperationException("the sheet is being built");
+  }
+
+  /** The list as CSV (RFC 4180), one section after another, UTF-8. */
+  public static String toCsv(SheetModel model) {
+    throw new UnsupportedOperationException("the sheet is being built");
+  }
+
+  /** The model as JSON. */
+  public static String toJson(SheetModel model) {
+    try {
+      return Json.mapper().writerWithDefaultPrettyPrinter().writeValueAsString(model) + "\n";
+    } catch (JsonProcessingException e) {
+      throw new IllegalStateException("the sheet could not be written as JSON", e);
+    }
+  }
+
+  /** The site drawing as a page of SVG, true to scale in millimetres, standing alone. */
+  public static String toSvg(SheetModel model) {
+    throw new UnsupportedOperationException("the sheet is being built");
+  }
+
+  /**
+   * The site as GeoJSON (RFC 7946), WGS 84.
+   *
+   * @throws NoCoordinatesException when the plan has no latitude and longitude
+   */
+  public static String toGeoJson(SheetModel model) {
+    throw new UnsupportedOperationException("the sheet is being built");
+  }
+}
