@@ -8,8 +8,9 @@ import com.fasterxml.jackson.annotation.JsonProperty;
  * @param id unique among rules
  * @param name in words
  * @param defaultValue in the unit
- * @param unit of the value
+ * @param unit of the value: "m", "degrees", "times"
  * @param least the lowest value a brief may set, or null when it may not be changed
+ * @param most the highest value a brief may set, or null when it may not be changed
  * @param source where the default comes from
  */
 public record RuleKind(
@@ -18,4 +19,11 @@ public record RuleKind(
     @JsonProperty("default") double defaultValue,
     String unit,
     Double least,
-    String source) {}
+    Double most,
+    String source) {
+
+  /** Whether a brief may set another value. */
+  public boolean mayChange() {
+    return least != null && most != null;
+  }
+}
