@@ -1,0 +1,298 @@
+package spanwright.feed;
+
+import org.apache.commons.math3.complex.Complex;
+
+/** Settings of a matching unit for a load: the best state first, then the least loss. */
+final class Matching {
+  /** Steps over a T's capacitor on the line's side, then its refinement. */
+  private static final int STEPS = 48;
+
+  private static final int REFINEMENTS = 36;
+
+  /** A range from 0 F is searched down to this share of its greatest value. */
+  private static final double LEAST_SHARE = 1e-4;
+
+  private final double r;
+  private final double x;
+  private final double omega;
+  private final MatchingNetwork unit;
+  private final double power;
+  private final double targetOhm;
+
+  private Matching(
+      Complex load, double frequencyMHz, MatchingNetwork unit, double power, double targetOhm) {
+    r = load.getReal();
+    x = load.getImaginary();
+    omega = 2e6 * Math.PI * frequencyMHz;
+    this.unit = unit;
+    this.power = power;
+    this.targetOhm = targetOhm;
+  }
+
+  static Match match(Complex load, double frequencyMHz, MatchingNetwork unit, double power) {
+    double target = FeedChain.TRANSMITTER_OHM;
+    return new Matching(load, frequencyMHz, unit, power, target).match();
+  }
+
+  /** The four layouts of an L, in a fixed order. */
+  static LSection[] layouts(
+      Complex load, double frequencyMHz, MatchingNetwork unit, double targetOhm) {
+    return new Matching(load, frequencyMHz, unit, 1, targetOhm).layouts();
+  }
+
+  private Match match() {
+    if (unit.kind() == MatchingNetwork.Kind.BALUN) {
+      return balun();
+    }
+    boolean isT = unit.kind() == MatchingNetwork.Kind.T;
+    Candidate best = isT ? bestT() : bestL();
+    if (best == null) {
+      return new Match(
+          Verdict.FOUL,
+          "its ranges leave it no working coil and capacitor",
+          null,
+          0,
+          FeedChain.swr(new Complex(r, x), targetOhm),
+          0,
+          0);
+    }
+    return new Match(
+        best.state(),
+        why(best, isT),
+        settings(best),
+        best.lossDb(),
+        best.swr(),
+        best.volts(),
+        best.amps());
+  }
+
+  private Match balun() {
+    double swr = FeedChain.swr(new Complex(r, x), targetOhm);
+    double amps = r > 0 ? Math.sqrt(2 * power / r) : Double.POSITIVE_INFINITY;
+    double volts = amps * Math.hypot(r, x);
+    Verdict bySwr = Judgement.of(swr, Judgement.BALUN_CLEAR_SWR, Judgement.BALUN_TIGHT_SWR);
+    Verdict state = bySwr.worse(Judgement.ofVolts(volts, unit.peakVolts()));
+    String why =
+        state != bySwr
+            ? overVolts(volts)
+            : Judgement.said("a balun matches nothing; SWR %s on 50 ohm", shownSwr(swr));
+    return new Match(state, why, null, 0, swr, volts, amps);
+  }
+
+  private LSection[] layouts() {
+    Part seriesCoil = Part.coil(unit, true, omega);
+    Part coilAcross = Part.coil(unit, false, omega);
+    Part seriesCapacitor = Part.capacitor(unit, true, omega);
+    Part capacitorAcross = Part.capacitor(unit, false, omega);
+    return new LSection[] {
+      new LSection(r, x, capacitorAcross, seriesCoil, targetOhm),
+      new LSection(r, x, seriesCoil, capacitorAcross, targetOhm),
+      new LSection(r, x, coilAcross, seriesCapacitor, targetOhm),
+      new LSection(r, x, seriesCapacitor, coilAcross, targetOhm)
+    };
+  }
+
+  private Candidate bestL() {
+    Candidate best = null;
+    for (LSection section : layouts()) {
+      boolean shorted = r == 0 && x == 0 && !section.first().series();
+      if (!shorted) {
+        best = better(best, best(section, 0));
+      }
+    }
+    return best;
+  }
+
+  /** What lies across the T's capacitor on the line's side: coil next to it, capacitor beyond. */
+  private LSection behind(double second) {
+    Part capacitor = Part.capacitor(unit, true, omega);
+    double reactance = capacitor.ofValue(second);
+    return new LSection(
+        r + reactance * capacitor.dissipation(),
+        x - reactance,
+        Part.coil(unit, false, omega),
+        capacitor,
+        targetOhm);
+  }
+
+  private Candidate bestT() {
+    double most = unit.mostCapacitance();
+    if (most == 0 || unit.mostInductance() == 0) {
+      return null;
+    }
+    double least = Math.max(unit.leastCapacitance(), most * LEAST_SHARE);
+    double step = Math.log(most / least) / STEPS;
+    Candidate best = null;
+    int at = 0;
+    for (int k = 0; k <= STEPS; k++) {
+      Candidate here = bestT(most * Math.exp(-k * step));
+      if (better(best, here) != best) {
+        best = here;
+        at = k;
+      }
+    }
+    double low = Math.max(0, at - 1);
+    double high = Math.min(STEPS, at + 1);
+    double golden = (Math.sqrt(5) - 1) / 2;
+    for (int n = 0; n < REFINEMENTS && step > 0; n++) {
+      double left = high - golden * (high - low);
+      double right = low + golden * (high - low);
+      Candidate one = bestT(most * Math.exp(-left * step));
+      Candidate other = bestT(most * Math.exp(-right * step));
+      best = better(better(best, one), other);
+      if (cost(one) <= cost(other)) {
+        high = right;
+      } else {
+        low = left;
+      }
+    }
+    return best;
+  }
+
+  private Candidate bestT(double second) {
+    return best(behind(second), second);
+  }
+
+  /** Exact matches within the ranges; failing those, the least reflection on their edges. */
+  private Candidate best(LSection section, double second) {
+    Candidate best = null;
+    double[] exact = section.exact();
+    for (int k = 0; k < exact.length; k += 2) {
+      if (section.first().reaches(exact[k]) && section.second().reaches(exact[k + 1])) {
+        best = better(best, candidate(section, exact[k], exact[k + 1], second));
+      }
+    }
+    if (best == null) {
+      double[] edges = section.edges();
+      for (int k = 0; k < edges.length; k += 2) {
+        best = better(best, candidate(section, edges[k], edges[k + 1], second));
+      }
+    }
+    return best;
+  }
+
+  private Candidate candidate(LSection section, double t, double back, double second) {
+    LSection.Setting setting = section.setting(t, back, power);
+    if (second == 0) {
+      return Candidate.of(
+          section,
+          setting,
+          0,
+          setting.powerOut(),
+          setting.volts(),
+          setting.amps(),
+          unit.peakVolts());
+    }
+    Part capacitor = Part.capacitor(unit, true, omega);
+    double reactance = capacitor.ofValue(second);
+    double resistance = r + reactance * capacitor.dissipation();
+    double size = Math.hypot(resistance, x - reactance);
+    double amps = setting.drive() / size;
+    return Candidate.of(
+        section,
+        setting,
+        second,
+        r / (size * size),
+        Math.max(setting.volts(), amps * capacitor.size(reactance)),
+        Math.max(setting.amps(), amps),
+        unit.peakVolts());
+  }
+
+  private static Candidate better(Candidate one, Candidate other) {
+    return cost(other) < cost(one) ? other : one;
+  }
+
+  private static double cost(Candidate candidate) {
+    return candidate == null ? Double.POSITIVE_INFINITY : candidate.cost();
+  }
+
+  private static Match.Settings settings(Candidate best) {
+    Part first = best.section().first();
+    Part second = best.section().second();
+    double one = first.toValue(best.setting().first());
+    double other = second.toValue(best.setting().second());
+    double inductance = first.coil() ? one : other;
+    double capacitance = first.coil() ? other : one;
+    if (best.second() > 0) {
+      String layout = "capacitors in series, coil to earth between them";
+      return new Match.Settings(layout, inductance, capacitance, best.second());
+    }
+    String layout =
+        Judgement.said(
+            "%s in series, %s across the %s side",
+            first.series() ? first.named() : second.named(),
+            first.series() ? second.named() : first.named(),
+            first.series() ? "transmitter's" : "line's");
+    return new Match.Settings(layout, inductance, capacitance, null);
+  }
+
+  private String why(Candidate best, boolean isT) {
+    if (Judgement.ofSwr(best.swr()) != Verdict.CLEAR) {
+      String reached = Judgement.said("; SWR %s at best", shownSwr(best.swr()));
+      return runsOut(isT) + reached;
+    }
+    if (Judgement.ofVolts(best.volts(), unit.peakVolts()) == Verdict.FOUL
+        || Judgement.ofLoss(best.lossDb()) == Verdict.CLEAR && best.state() == Verdict.TIGHT) {
+      return overVolts(best.volts());
+    }
+    if (best.state() != Verdict.CLEAR) {
+      return best.lossDb() < 99
+          ? Judgement.said("%.1f dB would heat its parts", best.lossDb())
+          : "the load takes next to no power; all of it would heat the unit";
+    }
+    return Judgement.said("matches to SWR %s, losing %.2f dB", shownSwr(best.swr()), best.lossDb());
+  }
+
+  private String overVolts(double volts) {
+    String how = volts > unit.peakVolts() ? "volts over" : "volts near";
+    return Judgement.said("%s what its parts stand (%.0f of %.0f V)", how, volts, unit.peakVolts());
+  }
+
+  /** Which part a match would want beyond its range: that of the match least far outside. */
+  private String runsOut(boolean isT) {
+    LSection[] sections = isT ? sectionsOfT() : layouts();
+    double least = Double.POSITIVE_INFINITY;
+    String found = "no setting of its circuit matches this load";
+    for (LSection section : sections) {
+      double[] exact = section.exact();
+      for (int k = 0; k < exact.length; k += 2) {
+        double one = section.first().beyond(exact[k]);
+        double other = section.second().beyond(exact[k + 1]);
+        if (one + other < least) {
+          least = one + other;
+          found = runsOut(section, exact[k], exact[k + 1], one, other);
+        }
+      }
+    }
+    return found;
+  }
+
+  private static String runsOut(LSection section, double t, double back, double one, double other) {
+    if (one > 0 && other > 0) {
+      return "both its coil and its capacitor run out";
+    }
+    Part part = one > 0 ? section.first() : section.second();
+    double wants = part.toValue(one > 0 ? t : back);
+    double limit = wants > part.most() ? part.most() : part.least();
+    return Judgement.said(
+        "its %s runs out (a match wants %s, it goes %s to %s)",
+        part.named(),
+        Part.shown(part.coil(), wants),
+        wants > part.most() ? "up" : "down",
+        Part.shown(part.coil(), limit));
+  }
+
+  private LSection[] sectionsOfT() {
+    double most = unit.mostCapacitance();
+    double least = Math.max(unit.leastCapacitance(), most * LEAST_SHARE);
+    LSection[] sections = new LSection[STEPS + 1];
+    for (int k = 0; k <= STEPS; k++) {
+      sections[k] = behind(most * Math.pow(least / most, (double) k / STEPS));
+    }
+    return sections;
+  }
+
+  private static String shownSwr(double swr) {
+    return swr > 99 ? "over 99" : Judgement.said("%.1f", swr);
+  }
+}
