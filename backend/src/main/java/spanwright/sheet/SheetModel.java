@@ -227,7 +227,8 @@ public record SheetModel(
    * @param to where it goes
    * @param madeOff how it is made off there
    * @param run without allowances [m]
-   * @param allowance added [m]
+   * @param lowering what it takes to bring the end down to the ground [m], or null when it cannot
+   * @param allowance added to the longer of the two [m]
    * @param cut length, rounded up to 0.5 m [m]
    */
   public record Rope(
@@ -239,6 +240,7 @@ public record SheetModel(
       String to,
       String madeOff,
       double run,
+      Double lowering,
       double allowance,
       double cut) {}
 
@@ -341,7 +343,8 @@ public record SheetModel(
    * @param check level tape from C [m], or null
    * @param crossing angle at which the two tapes cross [degrees]
    * @param flat whether that is under 30° or over 150°
-   * @param better what to use instead when it is flat, or null
+   * @param blocked what stands in the way of a tape, as words, or null
+   * @param better what to use instead when it is flat or blocked, or null
    * @param bearing true, from A [degrees]
    * @param magnetic by the compass, from A [degrees]
    * @param height of what is there above the ground [m]
@@ -356,10 +359,22 @@ public record SheetModel(
       Double check,
       double crossing,
       boolean flat,
-      String better,
+      String blocked,
+      Pair better,
       double bearing,
       double magnetic,
       double height) {}
+
+  /**
+   * Two tapes that serve better than those from A and B.
+   *
+   * @param from first known point
+   * @param fromTape level tape [m]
+   * @param with second known point
+   * @param withTape level tape [m]
+   * @param crossing angle at which they cross [degrees]
+   */
+  public record Pair(String from, double fromTape, String with, double withTape, double crossing) {}
 
   /**
    * What a sweep at the station's end of the line should find.

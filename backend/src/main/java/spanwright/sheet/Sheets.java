@@ -22,7 +22,7 @@ public final class Sheets {
    */
   public static SheetModel of(
       Plan plan, Catalogue catalogue, Placement placement, SheetOptions options) {
-    throw new UnsupportedOperationException("the sheet is being built");
+    return SheetMaker.make(plan, catalogue, placement, options);
   }
 
   /** The whole sheet as PDF: list, then drawing. */

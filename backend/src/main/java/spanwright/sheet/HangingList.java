@@ -1,0 +1,81 @@
+package spanwright.sheet;
+
+import java.util.ArrayList;
+import java.util.List;
+import spanwright.assess.Placement;
+import spanwright.plan.Place;
+import spanwright.plan.Point;
+
+/** Attachments with their pulls, and the sag to sight in each span. */
+final class HangingList {
+  private HangingList() {}
+
+  static List<SheetModel.Holding> holdings(Job job, SheetModel.SetOut setOut) {
+    double datum = setOut.a().at().z();
+    List<SheetModel.Holding> rows = new ArrayList<>();
+    for (int i = 0; i < job.placement.attachments().size(); i++) {
+      Placement.Attachment held = job.placement.attachments().get(i);
+      rows.add(
+          new SheetModel.Holding(
+              i + 1,
+              held.on(),
+              job.holder(held),
+              held.aboveGround(),
+              held.at().z() - datum,
+              held.held(),
+              held.pull(),
+              held.pullInWind(),
+              held.pullLimit(),
+              held.state(),
+              held.kilograms()));
+    }
+    return rows;
+  }
+
+  static List<SheetModel.Sag> sags(Job job) {
+    return job.placement.spans().stream()
+        .filter(s -> s.points().size() >= 2)
+        .map(s -> sag(job, s))
+        .toList();
+  }
+
+  private static SheetModel.Sag sag(Job job, Placement.Span span) {
+    Place from = span.points().get(0);
+    Place to = span.points().get(span.points().size() - 1);
+    Point a = from.onPlan();
+    Point b = to.onPlan();
+    Place middle = middle(span.points());
+    double bearing = a.distance(b) < 0.01 ? 0 : job.bearing(a, b);
+    return new SheetModel.Sag(
+        (span.from() + 1) + "–" + (span.to() + 1),
+        a.distance(b),
+        Math.max(0, (from.z() + to.z()) / 2 - middle.z()),
+        span.sag(),
+        middle.z() - job.groundAt(middle.x(), middle.y()),
+        span.sagInWind(),
+        span.blowOut(),
+        bearing,
+        job.magnetic(bearing));
+  }
+
+  /** Where a run passes half way along its chord. */
+  static Place middle(List<Place> run) {
+    Place from = run.get(0);
+    Place to = run.get(run.size() - 1);
+    double dx = to.x() - from.x();
+    double dy = to.y() - from.y();
+    double square = dx * dx + dy * dy;
+    for (int i = 1; i < run.size() && square > 1e-6; i++) {
+      Place p = run.get(i - 1);
+      Place q = run.get(i);
+      double s = ((p.x() - from.x()) * dx + (p.y() - from.y()) * dy) / square;
+      double t = ((q.x() - from.x()) * dx + (q.y() - from.y()) * dy) / square;
+      if (s <= 0.5 && t >= 0.5 && t > s) {
+        double f = (0.5 - s) / (t - s);
+        return new Place(
+            p.x() + f * (q.x() - p.x()), p.y() + f * (q.y() - p.y()), p.z() + f * (q.z() - p.z()));
+      }
+    }
+    return run.get(run.size() / 2);
+  }
+}

@@ -1,0 +1,324 @@
+package spanwright.sheet;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.stream.Collectors;
+import spanwright.assess.Placement;
+import spanwright.plan.Building;
+import spanwright.plan.Datum;
+import spanwright.plan.Place;
+import spanwright.plan.Point;
+
+/**
+ * Every point by two level tapes from known points, with a third to catch a point set out on the
+ * wrong side or a tape misread. Tapes are level: distances are those of the plan.
+ */
+final class SetOutList {
+  /** Tapes that cross under this angle, or over 180° less it, fix a point poorly [degrees]. */
+  static final double FLAT = 30;
+
+  /** Known points nearer to each other than this are one point [m]. */
+  private static final double APART = 1.0;
+
+  /**
+   * A tape longer than this is awkward; farther known points are taken only when none is nearer.
+   */
+  private static final double TAPE = 30;
+
+  /** A feedpoint this near to an attachment in plan needs no point of its own [m]. */
+  private static final double SAME = 0.3;
+
+  private final Job job;
+  private final List<SheetModel.Known> corners = new ArrayList<>();
+  private final List<String> notes = new ArrayList<>();
+
+  private SetOutList(Job job) {
+    this.job = job;
+    for (Building building : job.plan.buildings()) {
+      for (Point corner : building.footprint()) {
+        String wind = job.cornerWind(building.footprint(), corner);
+        addCorner(wind + " corner of " + job.name(building.id()), corner);
+      }
+    }
+    for (Point corner : job.plan.boundary()) {
+      addCorner(job.cornerWind(job.plan.boundary(), corner) + " corner of the boundary", corner);
+    }
+  }
+
+  private void addCorner(String what, Point at) {
+    corners.add(new SheetModel.Known("", what, job.onGround(at)));
+  }
+
+  static SheetModel.SetOut of(Job job) {
+    return new SetOutList(job).work();
+  }
+
+  /**
+   * A point before it has its tapes.
+   *
+   * @param name in words
+   * @param at its place on the ground
+   * @param height of what is there above the ground [m]
+   */
+  private record Wanted(String name, Place at, double height) {}
+
+  private SheetModel.SetOut work() {
+    List<Wanted> wanted = wanted();
+    List<SheetModel.Known> pair = firstTwo(wanted);
+    SheetModel.Known a = pair.get(0);
+    SheetModel.Known b = pair.get(1);
+    SheetModel.Known c = third(a, b, wanted);
+    List<SheetModel.Mark> marks = new ArrayList<>();
+    for (int i = 0; i < wanted.size(); i++) {
+      marks.add(mark(i + 1, wanted.get(i), a, b, c));
+    }
+    addNotes(marks, c);
+    return new SheetModel.SetOut(a, b, c, marks, notes);
+  }
+
+  private List<Wanted> wanted() {
+    List<Wanted> wanted = new ArrayList<>();
+    for (Placement.Attachment held : job.placement.attachments()) {
+      String part = job.mastOf(held).isPresent() ? ", foot" : "";
+      wanted.add(
+          new Wanted(
+              job.holder(held) + part, job.onGround(held.at().onPlan()), held.aboveGround()));
+    }
+    for (Placement.NewMast mast : job.placement.masts()) {
+      for (Place foot : mast.guyFeet()) {
+        String wind = Job.wind(job.bearing(mast.foot().onPlan(), foot.onPlan()));
+        wanted.add(new Wanted("Guy, " + wind, job.onGround(foot.onPlan()), 0));
+      }
+    }
+    Place feed = job.placement.feed().at();
+    if (wanted.stream().allMatch(w -> w.at().onPlan().distance(feed.onPlan()) > SAME)) {
+      Place below = job.onGround(feed.onPlan());
+      wanted.add(new Wanted("Plumb below the feedpoint", below, feed.z() - below.z()));
+    }
+    if (job.plan.entry() != null) {
+      wanted.add(
+          new Wanted(
+              "Entry, centre of plate",
+              job.onGround(job.plan.entry().at()),
+              job.plan.entry().height()));
+    }
+    return wanted;
+  }
+
+  private List<SheetModel.Known> firstTwo(List<Wanted> wanted) {
+    List<SheetModel.Known> known = new ArrayList<>();
+    for (Datum datum : job.plan.datums()) {
+      SheetModel.Known next = datum(datum, known.isEmpty() ? "A" : "B");
+      if (known.isEmpty() || apart(known.get(0), next)) {
+        known.add(next);
+      }
+      if (known.size() == 2) {
+        return known;
+      }
+    }
+    notes.add(
+        known.isEmpty()
+            ? "The plan has no datum points: corners are used instead."
+            : "The plan has only one datum point: a corner is used as the other.");
+    while (known.size() < 2) {
+      String letter = known.isEmpty() ? "A" : "B";
+      SheetModel.Known best =
+          corners.stream()
+              .filter(corner -> known.isEmpty() || apart(known.get(0), corner))
+              .min(Comparator.comparingDouble(corner -> cost(corner, known, wanted)))
+              .orElseThrow(
+                  () ->
+                      new IllegalArgumentException(
+                          "The plan has no two known points apart: draw its boundary first."));
+      known.add(new SheetModel.Known(letter, best.what(), best.at()));
+    }
+    return known;
+  }
+
+  /** Datums keep their own short name as their letter. */
+  private SheetModel.Known datum(Datum datum, String letter) {
+    String name = datum.name() == null ? "" : datum.name().strip();
+    boolean shortName = !name.isEmpty() && name.length() <= 2;
+    String what = name.isEmpty() || shortName ? "datum " + (shortName ? name : letter) : name;
+    String where = cornerAt(datum.at());
+    return new SheetModel.Known(
+        shortName ? name : letter,
+        where == null ? what : what + ", " + where,
+        job.onGround(datum.at()));
+  }
+
+  private String cornerAt(Point at) {
+    return corners.stream()
+        .filter(c -> c.at().onPlan().distance(at) < 0.1)
+        .map(SheetModel.Known::what)
+        .findFirst()
+        .orElse(null);
+  }
+
+  private static boolean apart(SheetModel.Known one, SheetModel.Known other) {
+    return one.at().onPlan().distance(other.at().onPlan()) >= APART;
+  }
+
+  /** Longest tape, and a penalty for each point that a building hides or a flat crossing spoils. */
+  private double cost(SheetModel.Known corner, List<SheetModel.Known> known, List<Wanted> wanted) {
+    double cost = 0;
+    for (Wanted w : wanted) {
+      double tape = tape(corner, w.at());
+      cost += tape + (tape > TAPE ? 50 : 0);
+      cost += job.between(corner.at().onPlan(), w.at().onPlan()) != null ? 40 : 0;
+      if (!known.isEmpty() && isFlat(crossing(known.get(0).at(), corner.at(), w.at()))) {
+        cost += 30;
+      }
+    }
+    return cost;
+  }
+
+  /** The third known point: off the line from A to B, near, and in sight of most. */
+  private SheetModel.Known third(SheetModel.Known a, SheetModel.Known b, List<Wanted> wanted) {
+    List<SheetModel.Known> from = new ArrayList<>();
+    for (Datum datum : job.plan.datums()) {
+      from.add(datum(datum, "C"));
+    }
+    from.addAll(corners);
+    double base = a.at().onPlan().distance(b.at().onPlan());
+    double enough = Math.min(3, Math.max(1, 0.15 * base));
+    return from.stream()
+        .filter(c -> apart(a, c) && apart(b, c))
+        .filter(c -> Math.abs(offset(a, b, c.at())) >= enough)
+        .min(Comparator.comparingDouble(c -> cost(c, List.of(), wanted)))
+        .map(c -> new SheetModel.Known(letter(c, a, b), c.what(), c.at()))
+        .orElse(null);
+  }
+
+  private static String letter(SheetModel.Known c, SheetModel.Known a, SheetModel.Known b) {
+    List<String> taken = List.of(a.letter(), b.letter());
+    if (!c.letter().isEmpty() && !taken.contains(c.letter())) {
+      return c.letter();
+    }
+    return List.of("C", "D", "E").stream().filter(l -> !taken.contains(l)).findFirst().orElse("C");
+  }
+
+  /** Distance to the left of the line from A to B [m]. */
+  private static double offset(SheetModel.Known a, SheetModel.Known b, Place p) {
+    double ux = b.at().x() - a.at().x();
+    double uy = b.at().y() - a.at().y();
+    return (ux * (p.y() - a.at().y()) - uy * (p.x() - a.at().x())) / Math.hypot(ux, uy);
+  }
+
+  private SheetModel.Mark mark(
+      int number, Wanted w, SheetModel.Known a, SheetModel.Known b, SheetModel.Known c) {
+    double crossing = crossing(a.at(), b.at(), w.at());
+    boolean flat = isFlat(crossing);
+    String blocked = blocked(w.at(), a, b);
+    double side = offset(a, b, w.at());
+    double bearing = job.bearing(a.at().onPlan(), w.at().onPlan());
+    return new SheetModel.Mark(
+        number,
+        w.name(),
+        w.at(),
+        tape(a, w.at()),
+        tape(b, w.at()),
+        Math.abs(side) < 0.05 ? "on" : side > 0 ? "left" : "right",
+        c == null ? null : Double.valueOf(tape(c, w.at())),
+        crossing,
+        flat,
+        blocked,
+        flat || blocked != null ? better(w.at(), a, b, c) : null,
+        bearing,
+        job.magnetic(bearing),
+        w.height());
+  }
+
+  private String blocked(Place at, SheetModel.Known a, SheetModel.Known b) {
+    List<String> found = new ArrayList<>();
+    for (SheetModel.Known known : List.of(a, b)) {
+      Building building = job.between(known.at().onPlan(), at.onPlan());
+      if (building != null) {
+        found.add(job.name(building.id()) + " stands between it and " + known.letter());
+      }
+    }
+    return found.isEmpty() ? null : String.join("; ", found);
+  }
+
+  /** The pair of known points in sight that cross nearest to square, lettered points first. */
+  private SheetModel.Pair better(
+      Place at, SheetModel.Known a, SheetModel.Known b, SheetModel.Known c) {
+    List<SheetModel.Known> known = new ArrayList<>(List.of(a, b));
+    if (c != null) {
+      known.add(c);
+    }
+    int lettered = known.size();
+    corners.stream()
+        .filter(k -> known.stream().limit(lettered).allMatch(l -> apart(l, k)))
+        .forEach(known::add);
+    SheetModel.Pair best = null;
+    double least = Double.POSITIVE_INFINITY;
+    for (int i = 0; i < known.size(); i++) {
+      for (int k = Math.max(i + 1, 1); k < known.size(); k++) {
+        SheetModel.Known one = known.get(i);
+        SheetModel.Known two = known.get(k);
+        double crossing = crossing(one.at(), two.at(), at);
+        if (isFlat(crossing) || !inSight(one, at) || !inSight(two, at)) {
+          continue;
+        }
+        double cost =
+            Math.abs(crossing - 90)
+                + tape(one, at)
+                + tape(two, at)
+                + (i >= lettered ? 100 : 0)
+                + (k >= lettered ? 100 : 0);
+        if (cost < least) {
+          least = cost;
+          best =
+              new SheetModel.Pair(label(one), tape(one, at), label(two), tape(two, at), crossing);
+        }
+      }
+    }
+    return best;
+  }
+
+  private boolean inSight(SheetModel.Known known, Place at) {
+    return tape(known, at) > 0.2 && job.between(known.at().onPlan(), at.onPlan()) == null;
+  }
+
+  private static String label(SheetModel.Known known) {
+    return known.letter().isEmpty() ? known.what() : known.letter();
+  }
+
+  private static double tape(SheetModel.Known known, Place at) {
+    return known.at().onPlan().distance(at.onPlan());
+  }
+
+  static boolean isFlat(double crossing) {
+    return crossing < FLAT || crossing > 180 - FLAT;
+  }
+
+  /** Angle at a point between the tapes to two known points [degrees, 0 to 180]. */
+  static double crossing(Place a, Place b, Place p) {
+    double ax = a.x() - p.x();
+    double ay = a.y() - p.y();
+    double bx = b.x() - p.x();
+    double by = b.y() - p.y();
+    if (Math.hypot(ax, ay) < 1e-9 || Math.hypot(bx, by) < 1e-9) {
+      return 0;
+    }
+    return Math.toDegrees(Math.abs(Math.atan2(ax * by - ay * bx, ax * bx + ay * by)));
+  }
+
+  private void addNotes(List<SheetModel.Mark> marks, SheetModel.Known c) {
+    notes.add("Hold tapes level, and plumb down where the ground falls.");
+    if (c == null) {
+      notes.add(
+          "No third known point lies off the line from A to B: check each point by its side.");
+    }
+    String poor =
+        marks.stream()
+            .filter(m -> (m.flat() || m.blocked() != null) && m.better() == null)
+            .map(m -> String.valueOf(m.number()))
+            .collect(Collectors.joining(", "));
+    if (!poor.isEmpty()) {
+      notes.add("No pair of known points serves " + poor + " well: measure twice.");
+    }
+  }
+}

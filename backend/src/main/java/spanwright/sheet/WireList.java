@@ -1,0 +1,167 @@
+package spanwright.sheet;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.stream.IntStream;
+import spanwright.assess.Placement;
+import spanwright.plan.LineKind;
+import spanwright.plan.Place;
+import spanwright.plan.WireKind;
+
+/** Pieces of wire and the feed line: what to cut, and from where to where it goes. */
+final class WireList {
+  /** A feedpoint this near the end of its conductor feeds the end [share of its length]. */
+  private static final double AT_THE_END = 0.005;
+
+  private WireList() {}
+
+  /**
+   * A piece before it has its allowances.
+   *
+   * @param mark "W1"
+   * @param conductor index
+   * @param from share of the conductor's length where it begins
+   * @param to share where it ends
+   * @param fed whether its first end is at the feedpoint
+   * @param far index of the attachment at its other end
+   * @param loop whether it comes back to where it began
+   */
+  record Piece(
+      String mark, int conductor, double from, double to, boolean fed, int far, boolean loop) {}
+
+  static List<Piece> pieces(Job job) {
+    List<Piece> pieces = new ArrayList<>();
+    for (int c = 0; c < job.placement.conductors().size(); c++) {
+      Placement.Conductor conductor = job.placement.conductors().get(c);
+      Place first = conductor.points().get(0);
+      Place last = conductor.points().get(conductor.points().size() - 1);
+      double fed = job.placement.feed().conductor() == c ? job.placement.feed().fraction() : -1;
+      if (first.distance(last) < 0.05) {
+        pieces.add(new Piece(mark(pieces), c, 0, 1, fed >= 0, nearest(job, first), true));
+      } else if (fed > AT_THE_END && fed < 1 - AT_THE_END) {
+        pieces.add(new Piece(mark(pieces), c, 0, fed, true, nearest(job, first), false));
+        pieces.add(new Piece(mark(pieces), c, fed, 1, true, nearest(job, last), false));
+      } else {
+        boolean fedAtLast = fed >= 1 - AT_THE_END;
+        int far = nearest(job, fedAtLast ? first : last);
+        pieces.add(new Piece(mark(pieces), c, 0, 1, fed >= 0, far, false));
+      }
+    }
+    return pieces;
+  }
+
+  private static String mark(List<Piece> before) {
+    return "W" + (before.size() + 1);
+  }
+
+  private static int nearest(Job job, Place end) {
+    List<Placement.Attachment> held = job.placement.attachments();
+    return IntStream.range(0, held.size())
+        .boxed()
+        .min(Comparator.comparingDouble(i -> held.get(i).at().distance(end)))
+        .orElse(0);
+  }
+
+  static List<SheetModel.WirePiece> of(Job job) {
+    return pieces(job).stream().map(piece -> cut(job, piece)).toList();
+  }
+
+  private static SheetModel.WirePiece cut(Job job, Piece piece) {
+    Placement.Conductor conductor = job.placement.conductors().get(piece.conductor());
+    WireKind kind = job.wire(conductor.wire());
+    double finished = conductor.length() * (piece.to() - piece.from());
+    double turnsBack = 2 * Allowances.TURN_BACK;
+    double trim =
+        Figures.upToCentimetre(Math.max(Allowances.TRIM_LEAST, Allowances.TRIM_SHARE * finished));
+    return new SheetModel.WirePiece(
+        piece.mark(),
+        describe(job, piece),
+        kind.id(),
+        kind.name(),
+        finished,
+        2,
+        turnsBack,
+        trim,
+        Figures.upToCentimetre(finished + turnsBack + trim));
+  }
+
+  private static String describe(Job job, Piece piece) {
+    String far = job.holder(job.placement.attachments().get(piece.far()));
+    if (piece.loop()) {
+      return piece.fed() ? "loop, feedpoint round to feedpoint" : "loop, closed on itself";
+    }
+    if (piece.fed()) {
+      return "feedpoint to " + far;
+    }
+    return "to " + far + ", not fed";
+  }
+
+  static SheetModel.FeedLine feedLine(Job job) {
+    Placement.Feed feed = job.placement.feed();
+    LineKind kind = job.line(feed.line());
+    double run = Job.length(feed.path());
+    double madeOff = 2 * Allowances.LINE_END;
+    double reach =
+        kind.balanced()
+            ? Figures.upToCentimetre(Math.max(Allowances.STAND_OFF_LEAST, 4 * kind.diameter()))
+            : 0;
+    return new SheetModel.FeedLine(
+        "L1",
+        kind.id(),
+        kind.name(),
+        run,
+        feed.lineLength() - run,
+        feed.lineLength(),
+        madeOff,
+        Figures.upToCentimetre(feed.lineLength() + madeOff),
+        standOffs(job),
+        reach,
+        lineNotes(job, kind, reach, feed.lineLength() - run));
+  }
+
+  /** One at the entry, and one for each metre that the line runs close to a building. */
+  private static int standOffs(Job job) {
+    List<Place> path = job.placement.feed().path();
+    double close = 0;
+    for (int i = 1; i < path.size(); i++) {
+      Place a = path.get(i - 1);
+      Place b = path.get(i);
+      int steps = Math.max(1, (int) Math.ceil(a.distance(b) / 0.1));
+      for (int k = 0; k < steps; k++) {
+        double t = (k + 0.5) / steps;
+        double x = a.x() + t * (b.x() - a.x());
+        double y = a.y() + t * (b.y() - a.y());
+        if (Sight.nearBuilding(job.plan, x, y)) {
+          close += a.distance(b) / steps;
+        }
+      }
+    }
+    return 1 + (int) Math.ceil(close / Allowances.STAND_OFF_EVERY - 1e-6);
+  }
+
+  private static List<String> lineNotes(Job job, LineKind kind, double reach, double slack) {
+    List<String> notes = new ArrayList<>();
+    if (kind.balanced()) {
+      notes.add(
+          "Stand-offs hold the line "
+              + job.figures.say(reach)
+              + " off walls, and farther off metal: four times its width at least.");
+    } else {
+      notes.add("Clip the line to the wall; bend it no tighter than ten times its thickness.");
+    }
+    if (slack < -0.005) {
+      notes.add(
+          "The line is "
+              + job.figures.say(-slack)
+              + " shorter than its run. Do not cut: choose a longer line and assess again.");
+    } else {
+      notes.add(
+          "Lead the slack, "
+              + job.figures.say(slack)
+              + ", in wide bends clear of metal; do not coil it. A drip loop hangs below the"
+              + " entry.");
+    }
+    return notes;
+  }
+}
