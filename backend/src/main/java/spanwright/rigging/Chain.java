@@ -197,8 +197,7 @@ final class Chain {
     end[2] -= pz * s;
   }
 
-  private void addStraight(
-      int i, double s, double mx, double my, double mz, boolean withSlope) {
+  private void addStraight(int i, double s, double mx, double my, double mz, boolean withSlope) {
     for (int node = -1; node <= 1; node++) {
       double weight = s * (node == 0 ? 8.0 : 5.0) / 18;
       double offset = node * GAUSS * s;

@@ -49,8 +49,7 @@ public final class Hanging {
       chord = given.from().distance(given.to());
       double level = Math.hypot(dx, dy);
       // Upright spans have no side of their own; the wind then blows along y.
-      side =
-          level < 1e-9 * chord ? new double[] {0, 1} : new double[] {-dy / level, dx / level};
+      side = level < 1e-9 * chord ? new double[] {0, 1} : new double[] {-dy / level, dx / level};
       fraction = given.load() == null ? 0.5 : given.load().fraction();
       tightening = new Tightening(chain, dx, dy, dz);
       Double stiffness = given.wire().stiffness();
@@ -73,8 +72,7 @@ public final class Hanging {
 
     private void setLoads(double wind) {
       double weight = given.wire().weight() * GRAVITY;
-      double push =
-          0.5 * given.air() * wind * wind * given.drag() * given.wire().diameter();
+      double push = 0.5 * given.air() * wind * wind * given.drag() * given.wire().diameter();
       for (int i = 0; i < 2; i++) {
         chain.setLoad(i, push * side[0], push * side[1], -weight);
       }
@@ -152,8 +150,7 @@ public final class Hanging {
         double y = each.y() - given.from().y();
         out = Math.max(out, Math.abs(x * side[0] + y * side[1]));
       }
-      return new HangAnswer.InWind(
-          points, chain.stretchedLength(), sag, out, pullFrom(), pullTo());
+      return new HangAnswer.InWind(points, chain.stretchedLength(), sag, out, pullFrom(), pullTo());
     }
 
     private double drop(Place at) {
@@ -209,9 +206,7 @@ public final class Hanging {
       place("from", given.from());
       place("to", given.to());
       double apart = given.from().distance(given.to());
-      require(
-          apart >= 1e-3,
-          "to: the holding points are less than 1 mm apart. Move one of them.");
+      require(apart >= 1e-3, "to: the holding points are less than 1 mm apart. Move one of them.");
       require(given.wire() != null, "wire: is missing. Give its weight and diameter.");
       number("wire.weight", given.wire().weight(), 0, 1000, "kg/m");
       number("wire.diameter", given.wire().diameter(), 0, 1, "m");
