@@ -1,0 +1,324 @@
+package spanwright.search;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import spanwright.plan.Place;
+import spanwright.plan.Plan;
+import spanwright.plan.Shape;
+import spanwright.rigging.Layout;
+
+/**
+ * Makes layouts from the places that can hold a wire: level and sloping spans between two of them, fed in the middle or off centre, and legs
+ * from a held middle to two ends. Ideas are ordered by promise and taken family by family, so that no one pair of supports takes all the
+ * work.
+ */
+final class Candidates {
+  private static final double LONGEST_SPAN = 150;
+  private static final double LEVEL_WITHIN = 0.25;
+  private static final double APEX_ABOVE = 0.5;
+  private static final double OFF_CENTRE = 0.34;
+  private static final double LEAST_LEG = 2.0;
+
+  private final Plan plan;
+  private final List<HoldSite> sites;
+  private final WireRoom room;
+  private final Promise promise;
+  private final WireLengths lengths;
+  private final Effort effort;
+  private final Set<Shape> shapes;
+  private final String wire;
+  private final String line;
+
+  /** Holding points at their heights, before the wire is fitted between them. */
+  private record Idea(List<HoldSite> sites, List<Place> at, double promise, String family) {}
+
+  Candidates(
+      Plan plan,
+      List<HoldSite> sites,
+      WireRoom room,
+      Promise promise,
+      WireLengths lengths,
+      Effort effort,
+      String wire,
+      String line) {
+    this.plan = plan;
+    this.sites = sites;
+    this.room = room;
+    this.promise = promise;
+    this.lengths = lengths;
+    this.effort = effort;
+    this.shapes = Set.copyOf(plan.brief().shapes());
+    this.wire = wire;
+    this.line = line;
+  }
+
+  /** Every layout worth checking, best promise first within what the effort allows. */
+  List<Candidate> list() {
+    List<Candidate> made = new ArrayList<>();
+    for (Idea idea : byFamily(ideas(), effort.considered)) {
+      if (made.size() >= effort.considered) {
+        break;
+      }
+      if (idea.at.size() == 2) {
+        addSpans(idea, made);
+      } else {
+        addLegs(idea, made);
+      }
+    }
+    return made;
+  }
+
+  private List<Idea> ideas() {
+    List<Idea> ideas = new ArrayList<>();
+    for (int i = 0; i < sites.size(); i++) {
+      for (int j = i + 1; j < sites.size(); j++) {
+        if (mayPair(sites.get(i), sites.get(j))) {
+          addPairs(sites.get(i), sites.get(j), ideas);
+        }
+      }
+    }
+    if (shapes.contains(Shape.APEX) || shapes.contains(Shape.BENT)) {
+      List<HoldSite> ends = ends();
+      for (HoldSite middle : middles()) {
+        addTriples(middle, ends, ideas);
+      }
+    }
+    return ideas;
+  }
+
+  private boolean mayPair(HoldSite a, HoldSite b) {
+    double span = a.at().distance(b.at());
+    boolean sameThing = a.on().equals(b.on()) && !a.newMast();
+    return span > lengths.least() + 2 * WireRoom.LEAST_TAIL
+        && span < LONGEST_SPAN
+        && !sameThing
+        && masts(List.of(a, b)) <= plan.brief().newMasts();
+  }
+
+  private static int masts(List<HoldSite> used) {
+    return (int) used.stream().filter(HoldSite::newMast).count();
+  }
+
+  private void addPairs(HoldSite a, HoldSite b, List<Idea> ideas) {
+    Set<List<Double>> heights = new HashSet<>();
+    for (double ha : a.heights()) {
+      for (double hb : b.heights()) {
+        double za = a.ground() + ha;
+        double zb = b.ground() + hb;
+        double low = Math.min(za, zb);
+        if (a.reaches(low) && b.reaches(low) && shapes.contains(Shape.LEVEL)) {
+          addPair(a, b, low, low, heights, ideas);
+        }
+        addPair(a, b, za, zb, heights, ideas);
+      }
+    }
+  }
+
+  private void addPair(
+      HoldSite a, HoldSite b, double za, double zb, Set<List<Double>> heights, List<Idea> ideas) {
+    Shape shape = Math.abs(za - zb) <= LEVEL_WITHIN ? Shape.LEVEL : Shape.SLOPING;
+    boolean wanted = shapes.contains(shape) || shapes.contains(Shape.OFF_CENTRE);
+    if (wanted && heights.add(List.of(za, zb))) {
+      List<Place> at = List.of(place(a, za), place(b, zb));
+      double span = at.get(0).distance(at.get(1));
+      double worth = promise.of(at, span - 2 * WireRoom.LEAST_TAIL, plan.site().planNorth());
+      ideas.add(new Idea(List.of(a, b), at, worth, shape + ":" + a.on() + "+" + b.on()));
+    }
+  }
+
+  /** Middles hold the wire itself, so no crowns and no rope-only supports; at their two highest heights. */
+  private List<HoldSite> middles() {
+    return sites.stream().filter(site -> site.takesWire() && !site.crowned()).toList();
+  }
+
+  /** Ends for legs: every standing thing, and new masts thinned to every second place to bound the triples. */
+  private List<HoldSite> ends() {
+    List<HoldSite> ends = new ArrayList<>();
+    int masts = 0;
+    for (HoldSite site : sites) {
+      if (!site.newMast() || masts++ % 2 == 0) {
+        ends.add(site);
+      }
+    }
+    return ends;
+  }
+
+  private void addTriples(HoldSite middle, List<HoldSite> ends, List<Idea> ideas) {
+    for (int i = 0; i < ends.size(); i++) {
+      HoldSite a = ends.get(i);
+      if (!mayLeg(middle, a)) {
+        continue;
+      }
+      for (int j = i + 1; j < ends.size(); j++) {
+        HoldSite b = ends.get(j);
+        boolean sameThing = a.on().equals(b.on()) && !a.newMast();
+        boolean allowed =
+            mayLeg(middle, b)
+                && !sameThing
+                && masts(List.of(a, middle, b)) <= plan.brief().newMasts();
+        if (allowed) {
+          addTriple(middle, a, b, ideas);
+        }
+      }
+    }
+  }
+
+  private static boolean mayLeg(HoldSite middle, HoldSite end) {
+    double leg = middle.at().distance(end.at());
+    boolean sameThing = middle.on().equals(end.on()) && !middle.newMast();
+    return leg > LEAST_LEG + WireRoom.LEAST_TAIL && leg < LONGEST_SPAN / 2 && !sameThing;
+  }
+
+  private void addTriple(HoldSite middle, HoldSite a, HoldSite b, List<Idea> ideas) {
+    double ax = a.at().x() - middle.at().x();
+    double ay = a.at().y() - middle.at().y();
+    double bx = b.at().x() - middle.at().x();
+    double by = b.at().y() - middle.at().y();
+    double cosine = (ax * bx + ay * by) / (Math.hypot(ax, ay) * Math.hypot(bx, by));
+    if (cosine > 0.35) {
+      return; // legs closer than about 70 degrees work against each other
+    }
+    for (double hm : middle.heights().subList(0, Math.min(2, middle.heights().size()))) {
+      double zm = middle.ground() + hm;
+      double za = a.ground() + a.heights().get(0);
+      double zb = b.ground() + b.heights().get(0);
+      boolean apex = zm >= za + APEX_ABOVE && zm >= zb + APEX_ABOVE;
+      Shape shape = apex ? Shape.APEX : Shape.BENT;
+      if (!shapes.contains(shape)) {
+        continue;
+      }
+      List<Place> at = List.of(place(a, za), place(middle, zm), place(b, zb));
+      double span = at.get(0).distance(at.get(1)) + at.get(1).distance(at.get(2));
+      double worth = promise.of(at, span - 2 * WireRoom.LEAST_TAIL, plan.site().planNorth());
+      String family = shape + ":" + a.on() + "+" + middle.on() + "+" + b.on();
+      ideas.add(new Idea(List.of(a, middle, b), at, worth, family));
+    }
+  }
+
+  private static Place place(HoldSite site, double z) {
+    return new Place(site.at().x(), site.at().y(), z);
+  }
+
+  /** Takes the best of every family in turn: first each family's best, then each one's second, and so on. */
+  private static List<Idea> byFamily(List<Idea> ideas, int most) {
+    List<Idea> ordered = new ArrayList<>(ideas);
+    ordered.sort(Comparator.comparingDouble((Idea idea) -> -idea.promise));
+    Map<String, Integer> taken = new LinkedHashMap<>();
+    List<List<Idea>> rounds = new ArrayList<>();
+    for (Idea idea : ordered) {
+      int round = taken.merge(idea.family, 1, Integer::sum) - 1;
+      while (rounds.size() <= round) {
+        rounds.add(new ArrayList<>());
+      }
+      rounds.get(round).add(idea);
+    }
+    List<Idea> chosen = new ArrayList<>();
+    for (List<Idea> round : rounds) {
+      for (Idea idea : round) {
+        if (chosen.size() >= most) {
+          return chosen;
+        }
+        chosen.add(idea);
+      }
+    }
+    return chosen;
+  }
+
+  private void addSpans(Idea idea, List<Candidate> made) {
+    Place a = idea.at.get(0);
+    Place b = idea.at.get(1);
+    WireRoom.Room free = room.along(a, b, WireRoom.LEAST_TAIL, WireRoom.LEAST_TAIL);
+    double span = a.distance(b);
+    Shape shape = Math.abs(a.z() - b.z()) <= LEVEL_WITHIN ? Shape.LEVEL : Shape.SLOPING;
+    for (double length : lengths.in(free.length())) {
+      double start = free.from() + (free.length() - length) / 2;
+      List<Place> wirePoints =
+          List.of(between(a, b, start / span), between(a, b, (start + length) / span));
+      if (shapes.contains(shape)) {
+        made.add(candidate(idea, shape, wirePoints, length, 0.5, made.size()));
+      }
+      if (shapes.contains(Shape.OFF_CENTRE)) {
+        made.add(candidate(idea, Shape.OFF_CENTRE, wirePoints, length, OFF_CENTRE, made.size()));
+      }
+    }
+  }
+
+  private void addLegs(Idea idea, List<Candidate> made) {
+    Place a = idea.at.get(0);
+    Place middle = idea.at.get(1);
+    Place b = idea.at.get(2);
+    WireRoom.Room roomA = room.along(middle, a, 0, WireRoom.LEAST_TAIL);
+    WireRoom.Room roomB = room.along(middle, b, 0, WireRoom.LEAST_TAIL);
+    if (roomA.from() > 0.01
+        || roomB.from() > 0.01
+        || roomA.length() < LEAST_LEG
+        || roomB.length() < LEAST_LEG) {
+      return;
+    }
+    Shape shape = idea.family.startsWith(Shape.APEX.name()) ? Shape.APEX : Shape.BENT;
+    Set<Double> tried = new HashSet<>();
+    for (double length : lengths.in(roomA.length() + roomB.length())) {
+      // Legs as equal as the room allows.
+      double legA = Math.min(roomA.length(), Math.max(length / 2, length - roomB.length()));
+      double legB = Math.min(roomB.length(), length - legA);
+      addLegPair(idea, shape, a, middle, b, legA, legB, tried, made);
+    }
+    double equal = Math.min(roomA.length(), roomB.length());
+    addLegPair(idea, shape, a, middle, b, equal, equal, tried, made);
+  }
+
+  private void addLegPair(
+      Idea idea,
+      Shape shape,
+      Place a,
+      Place middle,
+      Place b,
+      double legA,
+      double legB,
+      Set<Double> tried,
+      List<Candidate> made) {
+    double length = legA + legB;
+    boolean fits = legA >= LEAST_LEG && legB >= LEAST_LEG && length >= lengths.least();
+    if (!fits || !tried.add((double) Math.round(20 * length))) {
+      return;
+    }
+    List<Place> points =
+        List.of(
+            between(middle, a, legA / middle.distance(a)),
+            middle,
+            between(middle, b, legB / middle.distance(b)));
+    made.add(candidate(idea, shape, points, length, legA / length, made.size()));
+  }
+
+  private static Place between(Place a, Place b, double t) {
+    return new Place(
+        a.x() + t * (b.x() - a.x()), a.y() + t * (b.y() - a.y()), a.z() + t * (b.z() - a.z()));
+  }
+
+  private Candidate candidate(
+      Idea idea, Shape shape, List<Place> points, double length, double fraction, int number) {
+    List<Layout.Hold> holds = new ArrayList<>();
+    for (int i = 0; i < idea.sites.size(); i++) {
+      holds.add(new Layout.Hold(idea.sites.get(i).on(), idea.at.get(i)));
+    }
+    String word = ShapeWord.of(shape);
+    Layout layout =
+        new Layout(
+            word,
+            holds,
+            List.of(new Layout.Run(points, wire)),
+            new Layout.FeedChoice(0, fraction, line, null));
+    String family = word + idea.family.substring(idea.family.indexOf(':'));
+    return new Candidate(
+        layout,
+        masts(idea.sites),
+        promise.of(points, length, plan.site().planNorth()),
+        family,
+        number);
+  }
+}

@@ -1,0 +1,74 @@
+package spanwright.search;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.stream.Collectors;
+import spanwright.assess.Placement;
+
+/** Keeps a list from holding ten copies of the same idea. */
+final class Variety {
+  /** Of placements on the same supports in the same shape, as many come before any other idea. */
+  private static final int PER_FAMILY = 2;
+
+  private static final double NEAR_PLAN = 1.5;
+  private static final double NEAR_HEIGHT = 0.8;
+  private static final double NEAR_LENGTH = 0.1;
+
+  private Variety() {}
+
+  /** The best placements in order, near copies left out, no family more than twice while others wait. */
+  static List<Placement> choose(List<Placement> bestFirst, int top) {
+    List<Placement> chosen = new ArrayList<>();
+    List<Placement> waiting = new ArrayList<>();
+    Map<String, Integer> families = new HashMap<>();
+    for (Placement placement : bestFirst) {
+      if (chosen.stream().anyMatch(other -> same(placement, other))) {
+        continue;
+      }
+      if (families.merge(family(placement), 1, Integer::sum) > PER_FAMILY) {
+        waiting.add(placement);
+      } else if (chosen.size() < top) {
+        chosen.add(placement);
+      }
+    }
+    for (Placement placement : waiting) {
+      if (chosen.size() < top && chosen.stream().noneMatch(other -> same(placement, other))) {
+        chosen.add(placement);
+      }
+    }
+    chosen.sort((a, b) -> Double.compare(b.score(), a.score()));
+    return chosen;
+  }
+
+  static String family(Placement placement) {
+    return placement.shape()
+        + ":"
+        + placement.attachments().stream()
+            .map(Placement.Attachment::on)
+            .collect(Collectors.joining("+"));
+  }
+
+  private static boolean same(Placement a, Placement b) {
+    if (!family(a).equals(family(b))) {
+      return false;
+    }
+    for (int i = 0; i < a.attachments().size(); i++) {
+      var p = a.attachments().get(i).at();
+      var q = b.attachments().get(i).at();
+      if (Math.hypot(p.x() - q.x(), p.y() - q.y()) > NEAR_PLAN
+          || Math.abs(p.z() - q.z()) > NEAR_HEIGHT) {
+        return false;
+      }
+    }
+    double la = wire(a);
+    double lb = wire(b);
+    return Math.abs(la - lb) < NEAR_LENGTH * Math.max(la, lb)
+        && Math.abs(a.feed().fraction() - b.feed().fraction()) < 0.05;
+  }
+
+  private static double wire(Placement placement) {
+    return placement.conductors().stream().mapToDouble(Placement.Conductor::length).sum();
+  }
+}
