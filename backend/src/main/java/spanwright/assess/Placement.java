@@ -56,6 +56,27 @@ public record Placement(
     notes = List.copyOf(notes);
   }
 
+  /** The same placement at its place in a list. */
+  public Placement ranked(int newRank) {
+    return new Placement(
+        String.format(java.util.Locale.ROOT, "p%02d", newRank),
+        newRank,
+        score,
+        scoreParts,
+        shape,
+        conductors,
+        attachments,
+        feed,
+        clearances,
+        bands,
+        spans,
+        ropes,
+        masts,
+        state,
+        notes,
+        exposure);
+  }
+
   /**
    * The mean or a named deduction.
    *

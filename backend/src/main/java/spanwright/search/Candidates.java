@@ -3,9 +3,7 @@ package spanwright.search;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashSet;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Set;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
@@ -13,9 +11,9 @@ import spanwright.plan.Shape;
 import spanwright.rigging.Layout;
 
 /**
- * Makes layouts from the places that can hold a wire: level and sloping spans between two of them, fed in the middle or off centre, and legs
- * from a held middle to two ends. Ideas are ordered by promise and taken family by family, so that no one pair of supports takes all the
- * work.
+ * Makes layouts from the places that can hold a wire: level and sloping spans between two of them,
+ * fed in the middle or off centre, and legs from a held middle to two ends. Ideas are ordered by
+ * promise and taken family by family, so that no one pair of supports takes all the work.
  */
 final class Candidates {
   private static final double LONGEST_SPAN = 150;
@@ -131,12 +129,18 @@ final class Candidates {
     }
   }
 
-  /** Middles hold the wire itself, so no crowns and no rope-only supports; at their two highest heights. */
+  /**
+   * Middles hold the wire itself, so no crowns and no rope-only supports; at their two highest
+   * heights.
+   */
   private List<HoldSite> middles() {
     return sites.stream().filter(site -> site.takesWire() && !site.crowned()).toList();
   }
 
-  /** Ends for legs: every standing thing, and new masts thinned to every second place to bound the triples. */
+  /**
+   * Ends for legs: every standing thing, and new masts thinned to every second place to bound the
+   * triples.
+   */
   private List<HoldSite> ends() {
     List<HoldSite> ends = new ArrayList<>();
     int masts = 0;
@@ -204,29 +208,18 @@ final class Candidates {
     return new Place(site.at().x(), site.at().y(), z);
   }
 
-  /** Takes the best of every family in turn: first each family's best, then each one's second, and so on. */
+  /**
+   * Takes the best of every family in turn: first each family's best, then each one's second, and
+   * so on.
+   */
   private static List<Idea> byFamily(List<Idea> ideas, int most) {
     List<Idea> ordered = new ArrayList<>(ideas);
     ordered.sort(Comparator.comparingDouble((Idea idea) -> -idea.promise));
-    Map<String, Integer> taken = new LinkedHashMap<>();
-    List<List<Idea>> rounds = new ArrayList<>();
-    for (Idea idea : ordered) {
-      int round = taken.merge(idea.family, 1, Integer::sum) - 1;
-      while (rounds.size() <= round) {
-        rounds.add(new ArrayList<>());
-      }
-      rounds.get(round).add(idea);
-    }
     List<Idea> chosen = new ArrayList<>();
-    for (List<Idea> round : rounds) {
-      for (Idea idea : round) {
-        if (chosen.size() >= most) {
-          return chosen;
-        }
-        chosen.add(idea);
-      }
+    for (List<Idea> round : ByFamily.rounds(ordered, Idea::family)) {
+      chosen.addAll(round);
     }
-    return chosen;
+    return chosen.subList(0, Math.min(most, chosen.size()));
   }
 
   private void addSpans(Idea idea, List<Candidate> made) {

@@ -4,8 +4,8 @@ import java.util.Locale;
 import java.util.Optional;
 
 /**
- * How much work a search may do. A budget of work, never of time, so that the answer is the same on any machine and with any number of
- * threads.
+ * How much work a search may do. A budget of work, never of time, so that the answer is the same on
+ * any machine and with any number of threads.
  */
 public enum Effort {
   QUICK(6, 1, 2, 4_000, 700, 90, 16),
@@ -33,8 +33,7 @@ public enum Effort {
   /** Placements assessed in full at most. */
   final int full;
 
-  Effort(
-      int mastPlaces, int heights, int lengths, int considered, int hung, int coarse, int full) {
+  Effort(int mastPlaces, int heights, int lengths, int considered, int hung, int coarse, int full) {
     this.mastPlaces = mastPlaces;
     this.heights = heights;
     this.lengths = lengths;

@@ -38,7 +38,8 @@ final class HoldSites {
   record MastFoot(MastZone zone, Point at) {}
 
   /**
-   * @param mastLimit highest top above the ground that the overhead lines allow a mast with that foot [m]
+   * @param mastLimit highest top above the ground that the overhead lines allow a mast with that
+   *     foot [m]
    */
   private HoldSites(
       Plan plan,
@@ -162,7 +163,8 @@ final class HoldSites {
   }
 
   /**
-   * Places spread over a zone: corners first (they make the longest spans), then points of a grid shifted by the seed.
+   * Places spread over a zone: corners first (they make the longest spans), then points of a grid
+   * shifted by the seed.
    */
   private List<Point> placesIn(MastZone zone) {
     Polygon area = polygon(zone.area());

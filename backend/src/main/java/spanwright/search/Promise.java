@@ -6,9 +6,10 @@ import spanwright.plan.GroundSurface;
 import spanwright.plan.Place;
 
 /**
- * A rough estimate of what a wire would deliver, from its mean height, length and direction: the interference of the direct wave with one
- * reflected at 0.75, a dipole's figure of eight softened by a tenth, and a penalty for wire much shorter than half a wave. It orders work
- * and decides nothing.
+ * A rough estimate of what a wire would deliver, from its mean height, length and direction: the
+ * interference of the direct wave with one reflected at 0.75, a dipole's figure of eight softened
+ * by a tenth, and a penalty for wire much shorter than half a wave. It orders work and decides
+ * nothing.
  */
 final class Promise {
   private static final double LIGHT = 299.792458; // metres times MHz
@@ -23,7 +24,8 @@ final class Promise {
   }
 
   /**
-   * @param legs wire as straight pieces from the feed outward or from end to end, z above the plan's zero
+   * @param legs wire as straight pieces from the feed outward or from end to end, z above the
+   *     plan's zero
    * @param length of wire [m]
    * @param planNorth true bearing of the plan's +y [degrees]
    */
@@ -58,9 +60,7 @@ final class Promise {
       double k = 2 * Math.PI * aim.frequencyMHz() / LIGHT;
       double up = Math.toRadians((aim.fromElevation() + aim.toElevation()) / 2);
       double direct =
-          1
-              + REFLECTED * REFLECTED
-              - 2 * REFLECTED * Math.cos(2 * k * height * Math.sin(up));
+          1 + REFLECTED * REFLECTED - 2 * REFLECTED * Math.cos(2 * k * height * Math.sin(up));
       double side = 1;
       if (!aim.allRound()) {
         double across = Math.sin(Math.toRadians(aim.bearing() - axisDegrees));

@@ -30,6 +30,9 @@ public record Result(
     Reference reference,
     List<Refusal> refusals) {
 
+  /** The format's name and version. */
+  public static final String FORMAT = "spanwright-result/1";
+
   public Result {
     placements = List.copyOf(placements);
     refusals = List.copyOf(refusals);

@@ -18,7 +18,10 @@ final class Variety {
 
   private Variety() {}
 
-  /** The best placements in order, near copies left out, no family more than twice while others wait. */
+  /**
+   * The best placements in order, near copies left out, no family more than twice while others
+   * wait.
+   */
   static List<Placement> choose(List<Placement> bestFirst, int top) {
     List<Placement> chosen = new ArrayList<>();
     List<Placement> waiting = new ArrayList<>();

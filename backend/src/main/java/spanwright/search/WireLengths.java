@@ -4,7 +4,10 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 
-/** Lengths of wire worth trying in the room there is: all of it, half waves of the wanted bands, and some between. */
+/**
+ * Lengths of wire worth trying in the room there is: all of it, half waves of the wanted bands, and
+ * some between.
+ */
 final class WireLengths {
   private static final double LIGHT = 299.792458; // metres times MHz
   private static final double NEARLY_SAME = 0.035;

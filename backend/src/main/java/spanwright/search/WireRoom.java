@@ -15,8 +15,9 @@ import spanwright.plan.Point;
 import spanwright.plan.Zone;
 
 /**
- * Which part of a straight chord between two holding points may be wire. The rest becomes rope. Only a proposal: every layout is still
- * checked against every rule, so a generous answer costs time and a mean one costs a candidate, never safety.
+ * Which part of a straight chord between two holding points may be wire. The rest becomes rope.
+ * Only a proposal: every layout is still checked against every rule, so a generous answer costs
+ * time and a mean one costs a candidate, never safety.
  */
 final class WireRoom {
   /** Rope and insulator between a bare holding point and the wire [m]. */
@@ -55,8 +56,7 @@ final class WireRoom {
     if (canopy != null) {
       double ground = surface.heightAt(at.x(), at.y());
       crowns.add(
-          new Crown(
-              at.x(), at.y(), canopy.radius(), ground + canopy.from(), ground + canopy.to()));
+          new Crown(at.x(), at.y(), canopy.radius(), ground + canopy.from(), ground + canopy.to()));
     }
   }
 

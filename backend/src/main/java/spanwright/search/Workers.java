@@ -10,7 +10,10 @@ import java.util.concurrent.Future;
 import java.util.function.BooleanSupplier;
 import java.util.function.Function;
 
-/** Runs the same pure work on many items over some threads; answers come in the order of the items, whatever the threads do. */
+/**
+ * Runs the same pure work on many items over some threads; answers come in the order of the items,
+ * whatever the threads do.
+ */
 final class Workers implements AutoCloseable {
   private final ExecutorService pool;
   private final BooleanSupplier cancelled;

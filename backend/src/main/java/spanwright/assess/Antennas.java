@@ -1,0 +1,88 @@
+package spanwright.assess;
+
+import java.util.ArrayList;
+import java.util.List;
+import spanwright.moments.AntennaModel;
+import spanwright.moments.Sheath;
+import spanwright.moments.Vertex;
+import spanwright.moments.WireSpec;
+import spanwright.plan.Catalogue;
+import spanwright.plan.GroundSurface;
+import spanwright.plan.Place;
+import spanwright.plan.WireKind;
+import spanwright.rigging.Rigged;
+
+/**
+ * Puts a hanging wire before the field solver: the calm shape over a level plane at the mean height
+ * of the ground under it.
+ */
+final class Antennas {
+  private final Catalogue catalogue;
+  private final GroundSurface surface;
+  private final Metal metal;
+
+  Antennas(Catalogue catalogue, GroundSurface surface, Metal metal) {
+    this.catalogue = catalogue;
+    this.surface = surface;
+    this.metal = metal;
+  }
+
+  /** Whether the plan has metalwork to be solved with the wire. */
+  boolean hasMetal() {
+    return !metal.isEmpty();
+  }
+
+  AntennaModel of(Rigged rigged, boolean withMetal) {
+    double plane = plane(rigged);
+    List<WireSpec> wires = new ArrayList<>();
+    for (Rigged.Conductor conductor : rigged.conductors()) {
+      WireKind kind = catalogue.wire(conductor.wire());
+      List<Vertex> points = new ArrayList<>();
+      for (Place p : conductor.shapes().calm()) {
+        points.add(new Vertex(p.x(), p.y(), p.z() - plane));
+      }
+      Sheath sheath =
+          kind.insulation() == null
+              ? null
+              : new Sheath(kind.insulation().radius(), kind.insulation().permittivity());
+      wires.add(
+          new WireSpec(points, kind.radius(), kind.conductivity(), kind.permeability(), sheath));
+    }
+    if (withMetal) {
+      wires.addAll(metal.over(plane));
+    }
+    var feed = rigged.layout().feed();
+    return AntennaModel.of(wires, feed.conductor(), feed.fraction());
+  }
+
+  /** Mean height of the ground under the wire above the plan's zero [m]. */
+  double plane(Rigged rigged) {
+    double sum = 0;
+    double length = 0;
+    for (Rigged.Conductor conductor : rigged.conductors()) {
+      List<Place> points = conductor.shapes().calm();
+      for (int i = 1; i < points.size(); i++) {
+        Place a = points.get(i - 1);
+        Place b = points.get(i);
+        double step = Math.hypot(b.x() - a.x(), b.y() - a.y()) + 1e-9;
+        sum += step * surface.heightAt((a.x() + b.x()) / 2, (a.y() + b.y()) / 2);
+        length += step;
+      }
+    }
+    return length == 0 ? 0 : sum / length;
+  }
+
+  /** Greatest and least height of the ground under the wire, above the plan's zero [m]. */
+  double fall(Rigged rigged) {
+    double least = Double.POSITIVE_INFINITY;
+    double greatest = Double.NEGATIVE_INFINITY;
+    for (Rigged.Conductor conductor : rigged.conductors()) {
+      for (Place p : conductor.shapes().calm()) {
+        double ground = surface.heightAt(p.x(), p.y());
+        least = Math.min(least, ground);
+        greatest = Math.max(greatest, ground);
+      }
+    }
+    return Math.max(0, greatest - least);
+  }
+}

@@ -1,0 +1,25 @@
+package spanwright.assess;
+
+import java.util.List;
+import spanwright.path.ReferenceVertical;
+import spanwright.plan.Band;
+import spanwright.plan.Soil;
+
+/** The reference vertical over a plan's soil, for documents and drawings. */
+public final class ReferenceGains {
+  /** In words, as result documents say it. */
+  public static final String WHAT = "quarter-wave ground-mounted vertical over the same ground";
+
+  private ReferenceGains() {}
+
+  /** Gain on a band's middle frequency [dBi]. */
+  public static double dbi(Band band, Soil soil, double elevationDegrees) {
+    List<Double> frequencies = band.frequencies();
+    return Rounded.hundredth(
+        ReferenceVertical.gainDbi(
+            Math.toRadians(elevationDegrees),
+            frequencies.get(frequencies.size() / 2),
+            soil.permittivity(),
+            soil.conductivity()));
+  }
+}

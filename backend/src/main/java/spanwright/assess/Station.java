@@ -1,0 +1,142 @@
+package spanwright.assess;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.apache.commons.math3.complex.Complex;
+import spanwright.clearance.State;
+import spanwright.feed.FeedChain;
+import spanwright.feed.FeedResult;
+import spanwright.feed.Line;
+import spanwright.feed.MatchingNetwork;
+import spanwright.feed.Verdict;
+import spanwright.plan.Catalogue;
+import spanwright.plan.LineKind;
+import spanwright.plan.LineLengths;
+import spanwright.plan.MatchingUnit;
+import spanwright.plan.Plan;
+
+/** From the feedpoint to the transmitter's socket: the line, its length, the matching unit. */
+final class Station {
+  /** Lengths are proposed this far apart [m], and this far beyond the shortest. */
+  private static final double STEP = 0.5;
+
+  private static final double MOST_EXTRA = 6;
+
+  /**
+   * What a band without a match is worth, and one with little to spare, when lengths are weighed
+   * [dB].
+   */
+  private static final double FOUL_COSTS = 10;
+
+  private static final double TIGHT_COSTS = 1;
+
+  private final Plan plan;
+  private final Catalogue catalogue;
+  private final MatchingNetwork unit;
+
+  Station(Plan plan, Catalogue catalogue) {
+    this.plan = plan;
+    this.catalogue = catalogue;
+    this.unit = network(catalogue.matchingUnit(plan.brief().matching()));
+  }
+
+  /**
+   * A load that a line length is chosen for.
+   *
+   * @param frequencyMHz of the load
+   * @param impedance ohm
+   * @param weight of the band
+   */
+  record Load(double frequencyMHz, Complex impedance, double weight) {}
+
+  private static MatchingNetwork network(MatchingUnit unit) {
+    if (unit.network() == MatchingUnit.Network.BALUN) {
+      return MatchingNetwork.balun(unit.peakVolts());
+    }
+    MatchingNetwork.Kind kind =
+        unit.network() == MatchingUnit.Network.L ? MatchingNetwork.Kind.L : MatchingNetwork.Kind.T;
+    return new MatchingNetwork(
+        kind,
+        unit.inductance().get(0),
+        unit.inductance().get(1),
+        unit.capacitance().get(0),
+        unit.capacitance().get(1),
+        unit.coilQ(),
+        unit.capacitorQ(),
+        unit.peakVolts());
+  }
+
+  private Line line(String id) {
+    LineKind kind = catalogue.line(id);
+    return Line.of(
+            kind.impedance(), kind.velocityFactor(), kind.conductorLoss(), kind.dielectricLoss())
+        .withPeakVolts(kind.peakVolts());
+  }
+
+  FeedResult run(String lineId, double length, double frequencyMHz, Complex load) {
+    return FeedChain.run(
+        passive(load), frequencyMHz, line(lineId), length, unit, plan.brief().power());
+  }
+
+  /** A feedpoint takes power; rounding may not say otherwise. */
+  private static Complex passive(Complex load) {
+    return load.getReal() > 0 ? load : new Complex(1e-6, load.getImaginary());
+  }
+
+  /**
+   * The length that serves the loads best of those that reach: least loss, matched wherever it can
+   * be; the shorter of equals.
+   */
+  double bestLength(String lineId, double shortest, List<Load> loads) {
+    double best = shortest;
+    double least = Double.POSITIVE_INFINITY;
+    for (double length : lengths(shortest)) {
+      double cost = 0;
+      for (Load load : loads) {
+        cost += load.weight() * cost(run(lineId, length, load.frequencyMHz(), load.impedance()));
+      }
+      if (cost < least - 1e-6) {
+        least = cost;
+        best = length;
+      }
+    }
+    return best;
+  }
+
+  private static double cost(FeedResult result) {
+    double loss = Math.min(60, result.lossDb());
+    if (result.matching() == null) {
+      return loss;
+    }
+    double matching = Math.min(60, result.matching().lossDb());
+    return loss
+        + matching
+        + switch (result.matching().state()) {
+          case CLEAR -> 0;
+          case TIGHT -> TIGHT_COSTS;
+          case FOUL -> FOUL_COSTS;
+        };
+  }
+
+  private List<Double> lengths(double shortest) {
+    LineLengths atHand = plan.brief().lineLengths();
+    List<Double> lengths = new ArrayList<>();
+    if (!atHand.isFree()) {
+      atHand.lengths().stream().filter(length -> length >= shortest - 1e-9).forEach(lengths::add);
+    } else {
+      double first = Math.ceil(shortest * 10 - 1e-9) / 10;
+      for (double extra = 0; extra <= MOST_EXTRA + 1e-9; extra += STEP) {
+        lengths.add(Math.round((first + extra) * 10) / 10.0);
+      }
+    }
+    return lengths.isEmpty() ? List.of(shortest) : lengths;
+  }
+
+  static State state(Verdict verdict) {
+    return switch (verdict) {
+      case CLEAR -> State.CLEAR;
+      case TIGHT -> State.TIGHT;
+      case FOUL -> State.FOUL;
+    };
+  }
+}

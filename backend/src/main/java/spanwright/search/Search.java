@@ -1,0 +1,344 @@
+package spanwright.search;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.IntStream;
+import spanwright.assess.Assessor;
+import spanwright.assess.Hung;
+import spanwright.assess.Placement;
+import spanwright.assess.ReferenceGains;
+import spanwright.clearance.Refusal;
+import spanwright.plan.Band;
+import spanwright.plan.Catalogue;
+import spanwright.plan.Place;
+import spanwright.plan.Plan;
+
+/**
+ * Searches a plan for places to hang a wire and ranks them. The same plan, seed and effort give the
+ * same answer on any machine and with any number of threads: budgets count work, answers are taken
+ * in the order of the questions, and every tie is settled by number.
+ */
+public final class Search {
+  /** Layouts that screening dropped and that are looked at again only to say why. */
+  private static final int EXPLAINED = 60;
+
+  private final Plan plan;
+  private final Catalogue catalogue;
+  private final Options options;
+  private final Listener listener;
+  private final Assessor assessor;
+  private final Refused refused = new Refused();
+  private int considered;
+  private int refusals;
+  private int solved;
+
+  /**
+   * How to search.
+   *
+   * @param effort budget of work
+   * @param seed shifts the sampling of mast zones
+   * @param top most placements to return
+   * @param threads to use, at least 1
+   */
+  public record Options(Effort effort, long seed, int top, int threads) {
+    /** What the command line and the page ask for when nothing is said. */
+    public static Options standard() {
+      return new Options(Effort.NORMAL, 1, 12, Runtime.getRuntime().availableProcessors());
+    }
+  }
+
+  /**
+   * How far a search has come.
+   *
+   * @param share 0 to 1
+   * @param what is being tried, in words
+   * @param considered layouts made
+   * @param refused by a rule
+   * @param solved assessed in full
+   */
+  public record Progress(double share, String what, int considered, int refused, int solved) {}
+
+  /** Hears of a search's progress; called from its threads, one call at a time. */
+  public interface Listener {
+    /** Work went on. */
+    default void progress(Progress progress) {}
+
+    /** A placement was assessed in full; its rank is provisional. */
+    default void found(Placement placement) {}
+
+    /** Whether to stop as soon as may be. */
+    default boolean cancelled() {
+      return false;
+    }
+  }
+
+  /** Thrown out of {@link #run} when the listener said to stop. */
+  public static final class CancelledException extends RuntimeException {
+    private static final long serialVersionUID = 1L;
+
+    CancelledException(Throwable cause) {
+      super("the search was cancelled", cause);
+    }
+  }
+
+  private Search(Plan plan, Catalogue catalogue, Options options, Listener listener) {
+    this.plan = plan;
+    this.catalogue = catalogue;
+    this.options = options;
+    this.listener = listener;
+    this.assessor = Assessor.of(plan, catalogue);
+  }
+
+  /**
+   * Searches and ranks.
+   *
+   * @throws CancelledException when the listener said to stop
+   */
+  public static Result run(Plan plan, Catalogue catalogue, Options options, Listener listener) {
+    long start = System.nanoTime();
+    Search search = new Search(plan, catalogue, options, listener);
+    try (Workers workers = new Workers(options.threads(), listener::cancelled)) {
+      List<Placement> ranked = search.rank(workers);
+      List<Refusal> why = search.refused.list(search.assessor);
+      double seconds = Math.round((System.nanoTime() - start) / 1e7) / 100.0;
+      return search.result(ranked, why, seconds);
+    } catch (Workers.Cancelled e) {
+      throw new CancelledException(e);
+    }
+  }
+
+  private List<Placement> rank(Workers workers) {
+    Effort effort = options.effort();
+    say(0.01, "looking for places to hold a wire");
+    List<Candidate> candidates = candidates();
+    considered = candidates.size();
+    List<Candidate> fitting = screen(workers, candidates);
+    List<Free> free = hang(workers, byPromise(fitting, effort.hung));
+    prepareTables(free);
+    List<Free> coarse = coarse(workers, freeByPromise(free, effort.coarse));
+    List<Placement> full = new ArrayList<>(full(workers, freeByScore(coarse, effort.full)));
+    full.sort(Comparator.comparingDouble((Placement p) -> -p.score()));
+    List<Placement> varied = Variety.choose(full, options.top());
+    return IntStream.range(0, varied.size()).mapToObj(i -> varied.get(i).ranked(i + 1)).toList();
+  }
+
+  /** A candidate that hangs free of everything, with its coarse score once it has one. */
+  private record Free(Candidate candidate, Hung hung, double score) {
+    double promise() {
+      return candidate.promise();
+    }
+
+    String family() {
+      return candidate.family();
+    }
+
+    int number() {
+      return candidate.number();
+    }
+  }
+
+  private List<Candidate> candidates() {
+    MastLimits limits = new MastLimits(plan, catalogue, assessor.surface());
+    List<HoldSite> sites =
+        HoldSites.of(
+            plan,
+            assessor.surface(),
+            options.effort(),
+            options.seed(),
+            foot -> limits.highest(foot.zone(), foot.at()));
+    List<Double> centres = plan.brief().bands().stream().map(Search::centre).toList();
+    return new Candidates(
+            plan,
+            sites,
+            new WireRoom(plan, assessor.surface()),
+            new Promise(assessor.aims(), assessor.surface()),
+            new WireLengths(centres, options.effort().lengths),
+            options.effort(),
+            assessor.wireId(),
+            assessor.lineId())
+        .list();
+  }
+
+  private static double centre(Band band) {
+    return band.frequencies().get(band.frequencies().size() / 2);
+  }
+
+  private static List<Candidate> byPromise(List<Candidate> all, int most) {
+    return ByFamily.take(all, most, Candidate::promise, Candidate::family, Candidate::number);
+  }
+
+  private static List<Free> freeByPromise(List<Free> all, int most) {
+    return ByFamily.take(all, most, Free::promise, Free::family, Free::number);
+  }
+
+  private static List<Free> freeByScore(List<Free> all, int most) {
+    return ByFamily.take(all, most, Free::score, Free::family, Free::number);
+  }
+
+  /**
+   * Drops what cannot pass; looks again at the most promising of that only to be able to say why.
+   */
+  private List<Candidate> screen(Workers workers, List<Candidate> candidates) {
+    Stage stage = new Stage(0.02, 0.08, candidates.size(), "screening");
+    List<Boolean> passes =
+        workers.map(candidates, c -> assessor.clearances().screen(c.layout()), stage::tick);
+    List<Candidate> fitting = new ArrayList<>();
+    List<Candidate> dropped = new ArrayList<>();
+    for (int i = 0; i < candidates.size(); i++) {
+      (passes.get(i) ? fitting : dropped).add(candidates.get(i));
+    }
+    refusals += dropped.size();
+    List<Candidate> explained = byPromise(dropped, EXPLAINED);
+    List<Optional<Hung>> hung = workers.map(explained, this::hangOne, () -> {});
+    for (int i = 0; i < explained.size(); i++) {
+      Candidate candidate = explained.get(i);
+      hung.get(i).filter(h -> !h.allowed()).ifPresent(h -> refused.offer(candidate, h));
+    }
+    return fitting;
+  }
+
+  private List<Free> hang(Workers workers, List<Candidate> candidates) {
+    Stage stage = new Stage(0.08, 0.30, candidates.size(), "hanging and measuring distances");
+    List<Optional<Hung>> hung = workers.map(candidates, this::hangOne, stage::tick);
+    List<Free> free = new ArrayList<>();
+    for (int i = 0; i < candidates.size(); i++) {
+      if (hung.get(i).isPresent() && hung.get(i).get().allowed()) {
+        free.add(new Free(candidates.get(i), hung.get(i).get(), 0));
+      } else {
+        refusals++;
+        Candidate candidate = candidates.get(i);
+        hung.get(i).ifPresent(h -> refused.offer(candidate, h));
+      }
+    }
+    return free;
+  }
+
+  /** Empty when the layout cannot be hung at all, so that there is nothing to measure. */
+  private Optional<Hung> hangOne(Candidate candidate) {
+    try {
+      return Optional.of(assessor.hang(candidate.layout()));
+    } catch (IllegalArgumentException impossible) {
+      return Optional.empty();
+    }
+  }
+
+  private void prepareTables(List<Free> free) {
+    if (free.isEmpty()) {
+      return;
+    }
+    say(0.30, "working out the ground");
+    double left = Double.POSITIVE_INFINITY;
+    double right = Double.NEGATIVE_INFINITY;
+    double bottom = Double.POSITIVE_INFINITY;
+    double top = Double.NEGATIVE_INFINITY;
+    double highest = 1;
+    for (Free one : free) {
+      for (var hold : one.candidate.layout().attachments()) {
+        Place at = hold.at();
+        left = Math.min(left, at.x());
+        right = Math.max(right, at.x());
+        bottom = Math.min(bottom, at.y());
+        top = Math.max(top, at.y());
+        highest = Math.max(highest, at.z() - assessor.surface().heightAt(at.x(), at.y()));
+      }
+    }
+    assessor.prepareTables(Math.hypot(right - left, top - bottom), highest, options.threads());
+  }
+
+  private List<Free> coarse(Workers workers, List<Free> free) {
+    Stage stage = new Stage(0.35, 0.60, free.size(), "a first look at gain and matching");
+    List<Double> scores = workers.map(free, f -> assessor.coarseScore(f.hung), stage::tick);
+    List<Free> scored = new ArrayList<>();
+    for (int i = 0; i < free.size(); i++) {
+      if (scores.get(i) > Double.NEGATIVE_INFINITY) {
+        scored.add(new Free(free.get(i).candidate, free.get(i).hung, scores.get(i)));
+      }
+    }
+    return scored;
+  }
+
+  private List<Placement> full(Workers workers, List<Free> free) {
+    Stage stage = new Stage(0.60, 0.98, free.size(), "solving every band in full");
+    List<Placement> placements =
+        workers.map(
+            free,
+            f -> {
+              Placement placement = assessor.assess(f.hung);
+              found(placement);
+              return placement;
+            },
+            stage::tick);
+    solved = placements.size();
+    return placements;
+  }
+
+  private synchronized void found(Placement placement) {
+    solved++;
+    listener.found(placement.ranked(solved));
+  }
+
+  private synchronized void say(double share, String what) {
+    listener.progress(new Progress(share, what, considered, refusals, solved));
+  }
+
+  /** Progress through one stage, told at every hundredth part of it. */
+  private final class Stage {
+    private final double from;
+    private final double to;
+    private final int size;
+    private final String what;
+    private int done;
+
+    Stage(double from, double to, int size, String what) {
+      this.from = from;
+      this.to = to;
+      this.size = size;
+      this.what = what;
+      say(from, what);
+    }
+
+    void tick() {
+      done++;
+      if (done % Math.max(1, size / 100) == 0) {
+        say(from + (to - from) * done / size, what);
+      }
+    }
+  }
+
+  private Result result(List<Placement> ranked, List<Refusal> why, double seconds) {
+    Result.Counts counts =
+        new Result.Counts(
+            considered,
+            refusals,
+            considered - refusals - solved,
+            solved,
+            assessor.tally().systems(),
+            assessor.tally().meanUnknowns());
+    return new Result(
+        Result.FORMAT,
+        plan.title() == null ? "" : plan.title(),
+        options.seed(),
+        options.effort().word(),
+        counts,
+        seconds,
+        options.threads(),
+        ranked,
+        reference(),
+        why);
+  }
+
+  private Result.Reference reference() {
+    List<Result.ReferenceBand> bands = new ArrayList<>();
+    for (Band band : plan.brief().bands()) {
+      List<Result.ReferenceGain> gains = new ArrayList<>();
+      for (int elevation = 1; elevation <= 89; elevation += 2) {
+        double dbi = ReferenceGains.dbi(band, plan.site().ground(), elevation);
+        gains.add(new Result.ReferenceGain(elevation, dbi));
+      }
+      bands.add(new Result.ReferenceBand(band.name(), gains));
+    }
+    return new Result.Reference(ReferenceGains.WHAT, bands);
+  }
+}
