@@ -38,7 +38,7 @@ function same(a, b) {
  */
 export function createStore(initial) {
   /** @type {State} */
-  let state = /** @type {any} */ ({ undoLabel: null, redoLabel: null, ...initial });
+  let state = /** @type {any} */ ({ undoLabel: null, redoLabel: null, opened: 0, ...initial });
   /** @type {{label: string, plan: Plan, selection: any}[]} */
   let past = [];
   /** @type {{label: string, plan: Plan, selection: any}[]} */
@@ -117,7 +117,7 @@ export function createStore(initial) {
       past = [];
       future = [];
       openGroup = undefined;
-      put({ selection: null, ...patch, plan });
+      put({ selection: null, ...patch, plan, opened: state.opened + 1 });
     },
     set: (patch) => put(patch),
     subscribe(selector, callback) {

@@ -47,6 +47,7 @@
  * @property {string|null} pinned id of the pinned placement
  * @property {any|null} shownRefusal
  * @property {View|null} view null: fit the plot
+ * @property {number} opened counts the plans taken by `load`
  * @property {number} hint which of the three hints is shown; 0 none
  * @property {string|null} undoLabel
  * @property {string|null} redoLabel

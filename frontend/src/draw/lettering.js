@@ -1,0 +1,175 @@
+// @ts-check
+/** Lettering of the plan: measured, placed without collisions, drawn with a halo of paper. */
+import { placeLabels } from '../geometry/labels.js';
+import { set, svg } from './svg.js';
+
+/** @typedef {import('./kinds/env.js').Label} Label */
+
+const LINE = 13;
+const SIZE = 11.5;
+
+/**
+ * @param {import('./planview.js').PlanView} view
+ */
+export function createLettering(view) {
+  const layer = view.layer('labels');
+  set(layer, { 'aria-hidden': 'true' });
+  const measure = createMeasure();
+  /** @type {Label[]} */
+  let labels = [];
+  /** @type {number[][]} */
+  let symbols = [];
+  /** @type {number|undefined} */
+  let waiting;
+
+  function place() {
+    const sight = view.sight();
+    const frame = view.frame();
+    const local = (/** @type {number[]} */ p) => {
+      const [left, top] = view.toScreen(p);
+      return [left - frame.left, top - frame.top];
+    };
+    const wanted = labels.map((label) => ({
+      id: label.id,
+      weight: label.weight,
+      spots: spotsOf(label, local, measure),
+    }));
+    const taken = symbols.map((p) => {
+      const [x, y] = local(p);
+      return { left: x - 6, top: y - 6, width: 12, height: 12 };
+    });
+    taken.push({ left: frame.width - 84, top: 6, width: 80, height: 112 });
+    taken.push({ left: frame.width - 220, top: frame.height - 36, width: 216, height: 34 });
+    const whole = { left: 2, top: 2, width: frame.width - 4, height: frame.height - 4 };
+    const first = wanted.filter((w) => !isInstead(w.id));
+    const boxes = (/** @type {typeof wanted} */ list) =>
+      list.map((w) => ({ id: w.id, weight: w.weight, places: w.spots.map((s) => s.box) }));
+    let placed = placeLabels(boxes(first), taken, whole);
+    // A short form stands in for a label that found no room.
+    const second = labels.filter((l) => l.insteadOf && !placed.has(l.insteadOf)).map((l) => l.id);
+    if (second.length) {
+      const chosen = wanted.filter((w) => !isInstead(w.id) || second.includes(w.id));
+      placed = placeLabels(boxes(chosen.filter((w) => !dropped(w.id, placed, second))), taken, whole);
+    }
+    const px = 1 / sight.ppm;
+    layer.replaceChildren(
+      ...labels.flatMap((label) => {
+        const index = placed.get(label.id);
+        if (index === undefined) return [];
+        const spot = wanted.find((w) => w.id === label.id)?.spots[index];
+        return spot ? [letter(label, spot, sight, px)] : [];
+      }),
+    );
+  }
+
+  /** @param {string} id */
+  const isInstead = (id) => labels.some((l) => l.id === id && l.insteadOf);
+  /** A long form whose short form is to be tried. @param {string} id @param {Map<string, number>} placed @param {string[]} second */
+  const dropped = (id, placed, second) =>
+    !placed.has(id) && labels.some((l) => l.insteadOf === id && second.includes(l.id));
+
+  return {
+    /** @param {Label[]} all @param {number[][]} points of symbols */
+    show(all, points) {
+      labels = all;
+      symbols = points;
+      place();
+    },
+    /** The view moved at the same scale: lettering moves with the plan, and is placed anew when it rests. */
+    moved() {
+      clearTimeout(waiting);
+      waiting = setTimeout(place, 120);
+    },
+  };
+}
+
+/**
+ * @typedef {{x: number, y: number, anchor: 'start'|'middle'|'end', box: import('../geometry/labels.js').Box}} Spot
+ *   x, y: pixels in the frame; y is the middle of the lettering
+ */
+
+/**
+ * @param {Label} label @param {(p: number[]) => number[]} local
+ * @param {(text: string, bold: boolean, big: boolean) => number} measure
+ * @returns {Spot[]}
+ */
+function spotsOf(label, local, measure) {
+  const big = label.look === 'big';
+  const width = Math.max(...label.lines.map((l) => measure(l.text, Boolean(l.bold), big))) + 4;
+  const height = label.lines.length * LINE + 2;
+  const gap = label.gap ?? 8;
+  const [x, y] = local(label.at);
+  const spots = [];
+  if (label.sit === 'around') {
+    const up = height / 2 + gap - 2;
+    spots.push(
+      spot(x + gap, y, 'start'), spot(x - gap, y, 'end'), spot(x, y - up, 'middle'), spot(x, y + up, 'middle'),
+      spot(x + gap * 0.7, y - up, 'start'), spot(x + gap * 0.7, y + up, 'start'),
+      spot(x - gap * 0.7, y - up, 'end'), spot(x - gap * 0.7, y + up, 'end'),
+    );
+  } else if (label.sit === 'right') {
+    spots.push(spot(x + gap, y, 'start'), spot(x - gap, y, 'end'));
+  } else if (label.sit === 'above' || label.sit === 'below') {
+    const up = (label.sit === 'above' ? -1 : 1) * (height / 2 + gap);
+    spots.push(spot(x, y + up, 'middle'), spot(x, y - up, 'middle'));
+  } else {
+    spots.push(spot(x, y, 'middle'));
+  }
+  for (const p of label.also ?? []) {
+    const [u, v] = local(p);
+    spots.push(spot(u, v, 'middle'));
+  }
+  return spots;
+
+  /** @param {number} u @param {number} v @param {'start'|'middle'|'end'} anchor @returns {Spot} */
+  function spot(u, v, anchor) {
+    const left = anchor === 'start' ? u : anchor === 'end' ? u - width : u - width / 2;
+    const box = { left, top: v - height / 2, width, height };
+    return { x: u, y: v, anchor, box: label.turn ? around(u, v, width, height, label.turn) : box };
+  }
+}
+
+/** The upright box round a turned one. @param {number} u @param {number} v @param {number} w @param {number} h @param {number} turn */
+function around(u, v, w, h, turn) {
+  const a = (turn * Math.PI) / 180;
+  const width = Math.abs(w * Math.cos(a)) + Math.abs(h * Math.sin(a));
+  const height = Math.abs(w * Math.sin(a)) + Math.abs(h * Math.cos(a));
+  return { left: u - width / 2, top: v - height / 2, width, height };
+}
+
+/** @param {Label} label @param {Spot} spot @param {import('./planview.js').Sight} sight @param {number} px */
+function letter(label, spot, sight, px) {
+  const x = sight.x + spot.x * px;
+  const y = sight.y + sight.height - spot.y * px;
+  const first = (-(label.lines.length - 1) * LINE) / 2 + 4;
+  return svg(
+    'text',
+    {
+      class: `lettering ${label.look ?? ''}`,
+      'text-anchor': spot.anchor,
+      transform: `translate(${x} ${y}) scale(${px} ${-px})${label.turn ? ` rotate(${label.turn.toFixed(2)})` : ''}`,
+    },
+    label.lines.map((line, i) =>
+      svg('tspan', { x: 0, y: first + i * LINE, class: line.bold ? 'bold' : null }, [line.text]),
+    ),
+  );
+}
+
+/** @returns {(text: string, bold: boolean, big: boolean) => number} width in pixels, remembered */
+function createMeasure() {
+  const context = document.createElement('canvas').getContext('2d');
+  const family = getComputedStyle(document.documentElement).getPropertyValue('--narrow') || 'sans-serif';
+  /** @type {Map<string, number>} */
+  const known = new Map();
+  return (text, bold, big) => {
+    const font = `${bold ? 700 : 400} ${big ? 13 : SIZE}px ${family}`;
+    const key = `${font} ${text}`;
+    let width = known.get(key);
+    if (width === undefined) {
+      if (context) context.font = font;
+      width = context ? context.measureText(text).width : text.length * 6;
+      known.set(key, width);
+    }
+    return width;
+  };
+}

@@ -1,0 +1,55 @@
+// @ts-check
+/**
+ * Placing lettering so that none covers another: the weightier goes first and takes the first free
+ * one of its places; a lesser that finds none is left out. Pixels, y down.
+ */
+
+/** @typedef {{left: number, top: number, width: number, height: number}} Box */
+/**
+ * @typedef {object} Wanted
+ * @property {string} id
+ * @property {number} weight the greater goes first; Infinity must be shown wherever it falls
+ * @property {Box[]} places in order of liking
+ */
+
+/** @param {Box} a @param {Box} b @returns {number} area of their overlap, square pixels */
+export function overlap(a, b) {
+  const w = Math.min(a.left + a.width, b.left + b.width) - Math.max(a.left, b.left);
+  const h = Math.min(a.top + a.height, b.top + b.height) - Math.max(a.top, b.top);
+  return w > 0 && h > 0 ? w * h : 0;
+}
+
+/**
+ * @param {Wanted[]} wanted
+ * @param {Box[]} taken what lettering must not cover (symbols, the north point)
+ * @param {Box} frame labels lie wholly inside it
+ * @returns {Map<string, number>} id to the index of its place; no entry: left out
+ */
+export function placeLabels(wanted, taken, frame) {
+  const held = [...taken];
+  const placed = new Map();
+  const order = [...wanted].sort((a, b) => b.weight - a.weight);
+  for (const label of order) {
+    let best = -1;
+    for (let i = 0; i < label.places.length; i++) {
+      const box = label.places[i];
+      if (!inside(box, frame)) continue;
+      if (held.every((other) => overlap(box, other) === 0)) {
+        best = i;
+        break;
+      }
+    }
+    if (best < 0 && label.weight === Infinity && label.places.length) best = 0;
+    if (best < 0) continue;
+    placed.set(label.id, best);
+    held.push(label.places[best]);
+  }
+  return placed;
+}
+
+/** @param {Box} box @param {Box} frame */
+const inside = (box, frame) =>
+  box.left >= frame.left &&
+  box.top >= frame.top &&
+  box.left + box.width <= frame.left + frame.width &&
+  box.top + box.height <= frame.top + frame.height;
