@@ -3,12 +3,17 @@ package spanwright.plan;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
-import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
 import java.util.List;
 
 /**
- * Reads plan files. Every fault is gathered, not only the first; a plan comes out only when there
- * is none.
+ * Reads plan files. Every fault is gathered, not only the first: first the text (line and column),
+ * then fields, types and sizes against the schema, then whether the things make sense, each alone
+ * and together. A plan comes out only when there is no fault; absent scalars are then filled in.
+ * Any text is answered quickly: size, depth and number of values are bounded before anything is
+ * built.
+ *
+ * <p>Pure and safe between threads.
  */
 public final class PlanReader {
   private PlanReader() {}
@@ -40,37 +45,65 @@ public final class PlanReader {
     public Draft {
       faults = List.copyOf(faults);
     }
+
+    /** Whether there is a document. */
+    public boolean isGood() {
+      return json != null;
+    }
   }
 
-  /** Reads a whole plan from UTF-8 text. */
+  /** Reads a whole plan from UTF-8. */
   public static Outcome read(byte[] utf8) {
-    return read(new String(utf8, StandardCharsets.UTF_8));
+    return whole(JsonText.parse(utf8));
   }
 
   /** Reads a whole plan. */
   public static Outcome read(String json) {
-    Draft draft = readDraft(json);
-    if (draft.json() == null) {
-      return new Outcome(null, draft.faults());
-    }
-    try {
-      return new Outcome(
-          Json.mapper().treeToValue(PlanDefaults.filled((ObjectNode) draft.json()), Plan.class),
-          List.of());
-    } catch (JsonProcessingException e) {
-      return new Outcome(null, List.of(Fault.of("", Wording.NOT_A_PLAN, "its fields do not fit")));
-    }
+    return whole(JsonText.parse(json));
   }
 
-  /** Checks syntax, types, sizes and unknown fields only. */
+  /** Reads a draft from UTF-8: syntax, types, sizes and unknown fields only. */
+  public static Draft readDraft(byte[] utf8) {
+    return draft(JsonText.parse(utf8));
+  }
+
+  /** Reads a draft: syntax, types, sizes and unknown fields only. */
   public static Draft readDraft(String json) {
+    return draft(JsonText.parse(json));
+  }
+
+  private static Draft draft(JsonText.Parsed parsed) {
+    List<Fault> faults = checked(parsed, true);
+    return new Draft(faults.isEmpty() ? parsed.root() : null, faults);
+  }
+
+  private static Outcome whole(JsonText.Parsed parsed) {
+    List<Fault> faults = checked(parsed, false);
+    if (parsed.root() instanceof ObjectNode) {
+      faults.addAll(SurveyChecks.faults(parsed.root()));
+      faults.addAll(BriefChecks.faults(parsed.root()));
+    }
+    if (!faults.isEmpty()) {
+      return new Outcome(null, faults);
+    }
+    return new Outcome(mapped((ObjectNode) parsed.root()), List.of());
+  }
+
+  private static List<Fault> checked(JsonText.Parsed parsed, boolean draft) {
+    List<Fault> faults = new ArrayList<>(parsed.faults());
+    if (parsed.root() instanceof ObjectNode plan) {
+      faults.addAll(SchemaWalk.faults(plan, parsed.lengths(), draft));
+    } else if (parsed.root() != null) {
+      faults.add(Fault.of("", Wording.NOT_AN_OBJECT, SchemaWalk.found(parsed.root())));
+    }
+    return faults;
+  }
+
+  private static Plan mapped(ObjectNode plan) {
     try {
-      JsonNode node = Json.mapper().readTree(json);
-      return node.isObject()
-          ? new Draft(node, List.of())
-          : new Draft(null, List.of(Fault.of("", Wording.NOT_A_PLAN, "it must be an object")));
+      return Json.mapper().treeToValue(PlanDefaults.filled(plan), Plan.class);
     } catch (JsonProcessingException e) {
-      return new Draft(null, List.of(Fault.of("", Wording.NOT_A_PLAN, "it is not JSON")));
+      throw new IllegalStateException("the schema lets through what the records do not hold", e);
     }
   }
 }
