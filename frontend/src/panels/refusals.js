@@ -1,10 +1,122 @@
 // @ts-check
+import { html, redrawer } from '../charts/html.js';
+import { count } from '../charts/figures.js';
+import { stateMark } from '../charts/marks.js';
+import { planOf, nameOf, ownOf, shapeTitle } from './placement-facts.js';
+
 /**
  * Refusals: why layouts are not allowed, and what would cure each.
- * @param {HTMLElement} root empty element that this panel owns
- * @param {import('../state/store.js').Store} store the page's one store
+ * @typedef {import('../state/store.js').Store} Store
+ * @typedef {import('../state/types.js').State} State
+ * @typedef {import('./placements-search.js').Shell} Shell
  */
-export function mount(root, store) {
+
+const SHOWN_AT_FIRST = 3;
+
+/**
+ * @param {HTMLElement} root empty element that this panel owns
+ * @param {Store} store the page's one store
+ * @param {Shell} shell
+ */
+export function mount(root, store, shell) {
   root.classList.add('refusals');
-  void store;
+  const open = { all: false, busy: /** @type {any} */ (null), error: /** @type {string|null} */ (null) };
+  const ask = redrawer(root, () => render(store.get()));
+  store.subscribe((state) => [state.search.result, state.shownRefusal, state.units], ask);
+
+  /** @param {State} state */
+  function render(state) {
+    const result = state.search.result;
+    if (!result) return [];
+    const { refusals, counts } = result;
+    if (!refusals.length) return [html('p', { class: 'soft' }, counts.refused ? `${count(counts.refused)} refused.` : 'Nothing was refused.')];
+    const shown = open.all || result.placements.length === 0 ? refusals : refusals.slice(0, SHOWN_AT_FIRST);
+    return [
+      html('div', { class: 'line section-head' },
+        html('h3', {}, `${count(counts.refused)} refused`),
+        refusals.length > SHOWN_AT_FIRST ? html('button', {
+          type: 'button', class: 'link', 'data-key': 'all', 'aria-expanded': String(open.all), onclick: () => { open.all = !open.all; ask(); },
+        }, open.all ? 'only the nearest' : `the nearest ${refusals.length}, and their ghosts`) : null),
+      html('ul', {}, ...shown.map((/** @type {any} */ refusal, /** @type {number} */ index) => item(state, refusal, index))),
+    ];
+  }
+
+  /**
+   * @param {State} state
+   * @param {any} refusal
+   * @param {number} index
+   */
+  function item(state, refusal, index) {
+    const chosen = state.shownRefusal === refusal;
+    const plan = planOf(state);
+    const names = refusal.attachments.map((/** @type {string} */ id) => nameOf(plan, id)).join(' to ');
+    return html('li', { class: chosen ? 'shown' : null },
+      html('button', {
+        type: 'button', class: 'plain', 'data-key': `refusal-${index}`, 'aria-pressed': String(chosen),
+        onclick: () => store.set({ shownRefusal: chosen ? null : refusal }),
+      }, stateMark('foul', 'Refused'), ' ', html('b', {}, `${shapeTitle(refusal.shape)}, ${names}. `), reasonWithoutNames(refusal)),
+      html('p', {}, html('b', {}, 'Cure: '), refusal.cure, ' ',
+        refusal.cured?.length ? html('button', {
+          type: 'button', class: 'link', 'data-key': `cure-${index}`, disabled: open.busy === refusal, onclick: () => takeCure(refusal),
+        }, open.busy === refusal ? 'working it out' : 'Take it') : null),
+      open.error !== null && chosen ? html('p', { class: 'problem' }, stateMark('foul', 'Error'), ` ${open.error}`) : null);
+  }
+
+  /**
+   * Assesses the cured layout and shows it as a placement of its own.
+   * @param {any} refusal
+   */
+  async function takeCure(refusal) {
+    const state = store.get();
+    open.busy = refusal;
+    open.error = null;
+    ask();
+    try {
+      const placement = await shell.api.assess(planOf(state), curedLayout(planOf(state), state.catalogue, refusal));
+      addOwn(store, { ...placement, id: `cured-${ownOf(store.get()).length + 1}`, rank: 0, madeFrom: 'Cured' });
+      shell.say('The cured placement is worked out and chosen.');
+    } catch (problem) {
+      open.error = /** @type {Error} */ (problem).message;
+      store.set({ shownRefusal: refusal });
+    }
+    open.busy = null;
+    ask();
+  }
+}
+
+/**
+ * The names stand before the reason already.
+ * @param {any} refusal
+ */
+function reasonWithoutNames(refusal) {
+  const text = refusal.reason.replace(/^[^:.]{0,80}: /, '');
+  return text.charAt(0).toUpperCase() + text.slice(1);
+}
+
+/**
+ * What `assess` reads: the refused layout with its attachments moved. The wire's own points move with the ends.
+ * @param {any} plan
+ * @param {any} catalogue
+ * @param {any} refusal
+ */
+export function curedLayout(plan, catalogue, refusal) {
+  const wire = plan.brief?.wire ?? catalogue?.wires?.find((/** @type {any} */ one) => one.default)?.id;
+  const line = plan.brief?.line ?? catalogue?.lines?.find((/** @type {any} */ one) => one.default)?.id;
+  return {
+    shape: refusal.shape,
+    attachments: refusal.cured,
+    conductors: refusal.wire.map((/** @type {number[][]} */ points) => ({ points, wire })),
+    feed: { conductor: 0, fraction: refusal.fraction ?? 0.5, line },
+  };
+}
+
+/**
+ * Adds a placement made by hand or by a cure, and chooses it.
+ * @param {Store} store
+ * @param {any} placement
+ */
+export function addOwn(store, placement) {
+  const { search } = store.get();
+  const own = [placement, ...ownOf(store.get()).filter((one) => one.id !== placement.id)];
+  store.set({ search: /** @type {any} */ ({ ...search, own }), chosen: placement.id, shownRefusal: null });
 }
