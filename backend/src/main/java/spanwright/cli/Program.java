@@ -40,6 +40,9 @@ final class Program {
     CommandLine line = new CommandLine(new Root());
     line.addSubcommand(new ServeCommand(console));
     line.addSubcommand(new CheckCommand(console));
+    line.addSubcommand(new SolveCommand(console));
+    line.addSubcommand(new FeedCommand(console));
+    line.addSubcommand(new HangCommand(console));
     line.addSubcommand(new CatalogueCommand(console));
     line.addSubcommand(new VersionCommand(console));
     line.setOut(new java.io.PrintWriter(console.out(), true));
@@ -62,10 +65,21 @@ final class Program {
   }
 
   private static int badUsage(Console console, ParameterException e) {
-    console.err().println(e.getMessage());
+    console.err().println(sentence(e));
     String name = e.getCommandLine().getCommandSpec().qualifiedName(" ");
     console.err().println("Try: " + name + " --help");
     return Exit.BAD_USAGE;
+  }
+
+  private static String sentence(ParameterException e) {
+    if (e instanceof CommandLine.UnmatchedArgumentException unmatched) {
+      boolean root = e.getCommandLine().getParent() == null;
+      String first = unmatched.getUnmatched().get(0);
+      return root && !first.startsWith("-")
+          ? "There is no command " + first + "."
+          : "What is meant by " + first + " is not known here.";
+    }
+    return e.getMessage();
   }
 
   private static int failed(Console console, Exception e) {
