@@ -1,12 +1,14 @@
 // @ts-check
 /** Lettering of the plan: measured, placed without collisions, drawn with a halo of paper. */
 import { placeLabels } from '../geometry/labels.js';
+import { markPath } from './mark.js';
 import { set, svg } from './svg.js';
 
 /** @typedef {import('./kinds/env.js').Label} Label */
 
 const LINE = 13;
 const SIZE = 11.5;
+const MARK = 15;
 
 /**
  * @param {import('./planview.js').PlanView} view
@@ -57,7 +59,7 @@ export function createLettering(view) {
         const index = placed.get(label.id);
         if (index === undefined) return [];
         const spot = wanted.find((w) => w.id === label.id)?.spots[index];
-        return spot ? [letter(label, spot, sight, px)] : [];
+        return spot ? [letter(label, spot, sight, px, measure)] : [];
       }),
     );
   }
@@ -95,7 +97,7 @@ export function createLettering(view) {
  */
 function spotsOf(label, local, measure) {
   const big = label.look === 'big';
-  const width = Math.max(...label.lines.map((l) => measure(l.text, Boolean(l.bold), big))) + 4;
+  const width = Math.max(...label.lines.map((l) => measure(l.text, Boolean(l.bold), big) + (label.mark ? MARK : 0))) + 4;
   const height = label.lines.length * LINE + 2;
   const gap = label.gap ?? 8;
   const [x, y] = local(label.at);
@@ -137,22 +139,27 @@ function around(u, v, w, h, turn) {
   return { left: u - width / 2, top: v - height / 2, width, height };
 }
 
-/** @param {Label} label @param {Spot} spot @param {import('./planview.js').Sight} sight @param {number} px */
-function letter(label, spot, sight, px) {
+/**
+ * @param {Label} label @param {Spot} spot @param {import('./planview.js').Sight} sight @param {number} px
+ * @param {(text: string, bold: boolean, big: boolean) => number} measure
+ */
+function letter(label, spot, sight, px, measure) {
   const x = sight.x + spot.x * px;
   const y = sight.y + sight.height - spot.y * px;
   const first = (-(label.lines.length - 1) * LINE) / 2 + 4;
-  return svg(
+  const transform = `translate(${x} ${y}) scale(${px} ${-px})${label.turn ? ` rotate(${label.turn.toFixed(2)})` : ''}`;
+  const shift = !label.mark || spot.anchor === 'end' ? 0 : spot.anchor === 'start' ? MARK : MARK / 2;
+  const text = svg(
     'text',
-    {
-      class: `lettering ${label.look ?? ''}`,
-      'text-anchor': spot.anchor,
-      transform: `translate(${x} ${y}) scale(${px} ${-px})${label.turn ? ` rotate(${label.turn.toFixed(2)})` : ''}`,
-    },
+    { class: `lettering ${label.look ?? ''}`, 'text-anchor': spot.anchor, transform: label.mark ? null : transform },
     label.lines.map((line, i) =>
-      svg('tspan', { x: 0, y: first + i * LINE, class: line.bold ? 'bold' : null }, [line.text]),
+      svg('tspan', { x: i ? 0 : shift, y: first + i * LINE, class: line.bold ? 'bold' : null }, [line.text]),
     ),
   );
+  if (!label.mark) return text;
+  const wide = measure(label.lines[0].text, Boolean(label.lines[0].bold), label.look === 'big');
+  const left = spot.anchor === 'start' ? 6 : spot.anchor === 'end' ? -wide - 9 : -wide / 2 - 2;
+  return svg('g', { transform }, [text, svg('g', { transform: `translate(${left} ${first - 4})` }, [markPath(label.mark)])]);
 }
 
 /** @returns {(text: string, bold: boolean, big: boolean) => number} width in pixels, remembered */

@@ -21,6 +21,10 @@ import { figure, set, svg } from './svg.js';
  * @property {() => void} fit shows the whole plot
  * @property {(clientX: number, clientY: number) => Point} toPlan
  * @property {(p: Point) => [number, number]} toScreen pixels from the left and top of the box
+ * @property {(name: string, letters: import('./kinds/env.js').Letters|null) => void} letter
+ *   gives the lettering of one drawing over the plot; null takes it away
+ * @property {() => import('./kinds/env.js').Letters[]} letters
+ * @property {(callback: () => void) => void} onLetters whenever `letter` was called
  * @property {() => {left: number, top: number, width: number, height: number}} frame
  *   the drawing's frame within the box, pixels
  */
@@ -47,6 +51,10 @@ export function createPlanView(box, store, extent) {
   const layers = new Map();
   /** @type {Set<(sight: Sight) => void>} */
   const watchers = new Set();
+  /** @type {Map<string, import('./kinds/env.js').Letters>} */
+  const letters = new Map();
+  /** @type {Set<() => void>} */
+  const letterers = new Set();
   let frame = { left: 0, top: 0, width: 1, height: 1 };
   /** @type {Sight} */
   let sight = { x: 0, y: 0, width: 1, height: 1, ppm: 1 };
@@ -122,6 +130,14 @@ export function createPlanView(box, store, extent) {
       frame.left + (p[0] - sight.x) * sight.ppm,
       frame.top + (sight.y + sight.height - p[1]) * sight.ppm,
     ],
+    letter(name, part) {
+      if (part === null && !letters.has(name)) return;
+      if (part === null) letters.delete(name);
+      else letters.set(name, part);
+      for (const letterer of letterers) letterer();
+    },
+    letters: () => [...letters.values()],
+    onLetters: (callback) => void letterers.add(callback),
     frame: () => frame,
   };
 }

@@ -29,6 +29,8 @@ export function mountSurvey(view, store) {
   const lettering = createLettering(view);
   addPatterns(view);
   let pending = 0;
+  /** @type {{labels: import('./kinds/env.js').Label[], symbols: number[][]}} */
+  let own = { labels: [], symbols: [] };
 
   /** @param {string} ref @returns {SVGGElement} */
   const group = (ref) => /** @type {SVGGElement} */ (svg('g', { 'data-ref': ref, class: 'thing' }));
@@ -81,7 +83,18 @@ export function mountSurvey(view, store) {
       if (one) one.plan = plan;
       labels.push(...(one?.labels ?? []));
     }
-    lettering.show(labels, symbolsOf(all));
+    own = { labels, symbols: symbolsOf(all) };
+    letter();
+  }
+
+  function letter() {
+    const others = view.letters();
+    const hidden = new Set(others.flatMap((other) => other.hide));
+    const labels = own.labels.filter((label) => !hidden.has(label.id) && !hidden.has(label.insteadOf ?? ''));
+    lettering.show(
+      [...labels, ...others.flatMap((other) => other.labels)],
+      [...own.symbols, ...others.flatMap((other) => other.symbols)],
+    );
   }
 
   function soon() {
@@ -89,6 +102,7 @@ export function mountSurvey(view, store) {
   }
 
   store.subscribe((s) => [s.plan, s.units, s.selection], soon);
+  view.onLetters(letter);
   let scale = 0;
   view.onView((sight) => {
     if (sight.ppm !== scale) {

@@ -23,6 +23,12 @@
  * @property {number} [gap] pixels from the place, for all but middle
  * @property {number} [turn] degrees clockwise on the screen, for lettering along a line
  * @property {number[][]} [also] further places to try
+ * @property {'clear'|'tight'|'foul'} [mark] drawn before its first line
  * @property {string} [insteadOf] id of the label it stands in for when that finds no room
+ *
+ * @typedef {object} Letters lettering of another drawing over the plot, placed together with the plot's own
+ * @property {Label[]} labels
+ * @property {number[][]} symbols places on the plan that no lettering may cover
+ * @property {string[]} hide ids of the plot's labels that these stand in for
  */
 export {};
