@@ -1,5 +1,7 @@
 package spanwright.feed;
 
+import java.util.ArrayList;
+import java.util.List;
 import org.apache.commons.math3.complex.Complex;
 
 /** Settings of a matching unit for a load: the best state first, then the least loss. */
@@ -45,8 +47,9 @@ final class Matching {
       return balun();
     }
     boolean isT = unit.kind() == MatchingNetwork.Kind.T;
-    Candidate best = isT ? bestT() : bestL();
-    if (best == null) {
+    List<Candidate> tunings = isT ? tuningOfT() : tunings();
+    Candidate tuned = tuned(tunings);
+    if (tuned == null) {
       return new Match(
           Verdict.FOUL,
           "its ranges leave it no working coil and capacitor",
@@ -56,9 +59,16 @@ final class Matching {
           0,
           0);
     }
+    Candidate best = tuned;
+    for (Candidate one : tuned.state() == Verdict.CLEAR ? List.<Candidate>of() : tunings) {
+      Candidate detuned = detuned(one);
+      if (detuned.state().compareTo(tuned.state()) < 0) {
+        best = better(best, detuned);
+      }
+    }
     return new Match(
         best.state(),
-        why(best, isT),
+        best == tuned ? why(best, isT) : whyDetuned(best, tuned, isT),
         settings(best),
         best.lossDb(),
         best.swr(),
@@ -66,10 +76,23 @@ final class Matching {
         best.amps());
   }
 
+  /** The least costly when that is clear, else the least costly full match, if there is one. */
+  private Candidate tuned(List<Candidate> tunings) {
+    Candidate best = null;
+    Candidate full = null;
+    for (Candidate one : tunings) {
+      best = better(best, one);
+      full = one.isExact() ? better(full, one) : full;
+    }
+    boolean take = full == null || best.state() == Verdict.CLEAR;
+    return take ? best : full;
+  }
+
   private Match balun() {
     double swr = FeedChain.swr(new Complex(r, x), targetOhm);
     double amps = r > 0 ? Math.sqrt(2 * power / r) : Double.POSITIVE_INFINITY;
-    double volts = amps * Math.hypot(r, x);
+    double size = Math.hypot(r, x);
+    double volts = size == 0 ? 0 : amps * size;
     Verdict bySwr = Judgement.of(swr, Judgement.BALUN_CLEAR_SWR, Judgement.BALUN_TIGHT_SWR);
     Verdict state = bySwr.worse(Judgement.ofVolts(volts, unit.peakVolts()));
     String why =
@@ -92,15 +115,17 @@ final class Matching {
     };
   }
 
-  private Candidate bestL() {
-    Candidate best = null;
+  /** The best of each layout of an L. */
+  private List<Candidate> tunings() {
+    List<Candidate> tunings = new ArrayList<>();
     for (LSection section : layouts()) {
       boolean shorted = r == 0 && x == 0 && !section.first().series();
-      if (!shorted) {
-        best = better(best, best(section, 0));
+      Candidate best = shorted ? null : best(section, 0);
+      if (best != null) {
+        tunings.add(best);
       }
     }
-    return best;
+    return tunings;
   }
 
   /** What lies across the T's capacitor on the line's side: coil next to it, capacitor beyond. */
@@ -115,11 +140,14 @@ final class Matching {
         targetOhm);
   }
 
+  private List<Candidate> tuningOfT() {
+    boolean lacksPart = unit.mostCapacitance() == 0 || unit.mostInductance() == 0;
+    Candidate best = lacksPart ? null : bestT();
+    return best == null ? List.of() : List.of(best);
+  }
+
   private Candidate bestT() {
     double most = unit.mostCapacitance();
-    if (most == 0 || unit.mostInductance() == 0) {
-      return null;
-    }
     double least = Math.max(unit.leastCapacitance(), most * LEAST_SHARE);
     double step = Math.log(most / least) / STEPS;
     Candidate best = null;
@@ -171,6 +199,43 @@ final class Matching {
     return best;
   }
 
+  /**
+   * What is not clear is tried a little off: some SWR taken on may bring volts or loss inside their
+   * limits. A compass search in the logarithms of the settings, diagonals included. A part set to
+   * nothing stays so.
+   */
+  private Candidate detuned(Candidate start) {
+    Candidate best = start;
+    for (double step = 0.2; step > 5e-4; ) {
+      Candidate found = best;
+      int sides = best.second() > 0 ? 1 : 0; // the second capacitor is a T's alone
+      for (int i = -1; i <= 1; i++) {
+        for (int j = -1; j <= 1; j++) {
+          for (int k = -sides; k <= sides; k++) {
+            found = better(found, moved(best, i * step, j * step, k * step));
+          }
+        }
+      }
+      step = found == best ? step / 2 : step;
+      best = found;
+    }
+    return best;
+  }
+
+  private Candidate moved(Candidate from, double one, double other, double second) {
+    LSection section = from.section();
+    double capacitance = from.second();
+    if (second != 0) {
+      double least = Math.max(unit.leastCapacitance(), unit.mostCapacitance() * LEAST_SHARE);
+      capacitance *= Math.exp(second);
+      capacitance = Math.max(least, Math.min(unit.mostCapacitance(), capacitance));
+      section = behind(capacitance);
+    }
+    double t = section.first().within(from.setting().first() * Math.exp(one));
+    double back = section.second().within(from.setting().second() * Math.exp(other));
+    return candidate(section, t, back, capacitance);
+  }
+
   private Candidate candidate(LSection section, double t, double back, double second) {
     LSection.Setting setting = section.setting(t, back, power);
     if (second == 0) {
@@ -198,12 +263,12 @@ final class Matching {
         unit.peakVolts());
   }
 
-  private static Candidate better(Candidate one, Candidate other) {
+  private Candidate better(Candidate one, Candidate other) {
     return cost(other) < cost(one) ? other : one;
   }
 
-  private static double cost(Candidate candidate) {
-    return candidate == null ? Double.POSITIVE_INFINITY : candidate.cost();
+  private double cost(Candidate candidate) {
+    return candidate == null ? Double.POSITIVE_INFINITY : candidate.cost(unit.peakVolts());
   }
 
   private static Match.Settings settings(Candidate best) {
@@ -243,6 +308,11 @@ final class Matching {
     return Judgement.said("matches to SWR %s, losing %.2f dB", shownSwr(best.swr()), best.lossDb());
   }
 
+  private String whyDetuned(Candidate best, Candidate tuned, boolean isT) {
+    return Judgement.said(
+        "left at SWR %s on purpose; tuned full out, %s", shownSwr(best.swr()), why(tuned, isT));
+  }
+
   private String overVolts(double volts) {
     String how = volts > unit.peakVolts() ? "volts over" : "volts near";
     return Judgement.said("%s what its parts stand (%.0f of %.0f V)", how, volts, unit.peakVolts());
@@ -264,7 +334,7 @@ final class Matching {
         }
       }
     }
-    return found;
+    return least > 0 ? found : "a full match would ask still more of its parts";
   }
 
   private static String runsOut(LSection section, double t, double back, double one, double other) {

@@ -66,6 +66,11 @@ record Part(
     return t >= lowest() * (1 - 1e-9) && t <= highest() * (1 + 1e-9);
   }
 
+  /** The nearest t the part reaches. */
+  double within(double t) {
+    return Math.max(lowest(), Math.min(highest(), t));
+  }
+
   /** How far a wanted t lies outside the range: a ratio's logarithm, 0 inside. */
   double beyond(double t) {
     double over = Math.log(t / highest());

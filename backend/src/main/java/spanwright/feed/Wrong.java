@@ -1,5 +1,7 @@
 package spanwright.feed;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.Locale;
 
 /** Sentences for input that cannot be used. */
@@ -25,8 +27,9 @@ final class Wrong {
     if (Double.isNaN(value) || Double.isInfinite(value)) {
       return "not a number";
     }
-    return value == Math.rint(value) && Math.abs(value) < 1e9
-        ? String.format(Locale.ROOT, "%.0f", value)
-        : String.format(Locale.ROOT, "%.4g", value);
+    double rounded = new BigDecimal(value).round(new MathContext(4)).doubleValue();
+    return Math.abs(rounded) >= 1e9 || Math.abs(rounded) < 1e-3
+        ? Double.toString(rounded).replaceFirst("\\.0(?=E|$)", "")
+        : new BigDecimal(Double.toString(rounded)).stripTrailingZeros().toPlainString();
   }
 }
