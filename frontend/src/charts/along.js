@@ -1,6 +1,7 @@
 // @ts-check
+import { contains } from '../geometry/polygon.js';
 import { groundOf } from './ground.js';
-import { inside, roofHeight } from './roof.js';
+import { roofHeight } from './roof.js';
 
 /**
  * What lies along the wire: the placement and the plan unrolled onto a vertical plane. `s` is the distance along the
@@ -25,6 +26,7 @@ export function alongWire(plan, placement) {
   const places = new Map(['supports', 'mastZones', 'bracketLines']
     .flatMap((kind) => (plan[kind] ?? []).map((/** @type {any} */ thing) => [thing.id, { ...thing, is: kind }])));
   const stations = walk(track);
+  /** @type {BuildingCut[]} */
   const buildings = (plan.buildings ?? []).flatMap((/** @type {any} */ building) => cutBuilding(building, stations, ground));
   return {
     length: track.length,
@@ -179,7 +181,7 @@ function cutBuilding(building, stations, ground) {
     roof = [];
   };
   for (const { s, x, y } of stations) {
-    if (inside(building.footprint, x, y)) roof.push([s, ground(x, y) + roofHeight(building, x, y)]);
+    if (contains([x, y], building.footprint)) roof.push([s, ground(x, y) + roofHeight(building, x, y)]);
     else close();
   }
   close();

@@ -1,41 +1,13 @@
 // @ts-check
-/** Numbers as text: a true minus, a thin space in thousands, one count of digits in a column. Lengths are in units/. */
+import { MINUS, number } from '../units/figures.js';
 
-const MINUS = '\u2212';
-const THIN_SPACE = '\u2009';
-
-/**
- * @param {number} value
- * @param {number} [digits] after the point
- * @returns {string} never "−0.0"
- */
-export function fixed(value, digits = 1) {
-  const text = Math.abs(value).toFixed(digits);
-  const [whole, part] = text.split('.');
-  const grouped = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, THIN_SPACE) : whole;
-  const sign = value < 0 && Number(text) !== 0 ? MINUS : '';
-  return sign + grouped + (part === undefined ? '' : `.${part}`);
-}
-
-/**
- * A figure whose sign is its meaning.
- * @param {number} value
- * @param {number} [digits] after the point
- * @returns {string} "+4.1", "−0.3", "0.0"
- */
-export function signed(value, digits = 1) {
-  const text = fixed(value, digits);
-  return value > 0 && Number(value.toFixed(digits)) !== 0 ? `+${text}` : text;
-}
+/** Figures of the radio side as text. Plain numbers and lengths are in units/. */
 
 /**
  * @param {number} value
- * @returns {string} a whole number with thin spaces
+ * @returns {string} a whole number
  */
-export function count(value) {
-  const text = String(Math.round(Math.abs(value))).replace(/\B(?=(\d{3})+$)/g, THIN_SPACE);
-  return value < 0 ? MINUS + text : text;
-}
+export const count = (value) => number(Math.round(value), 0);
 
 /**
  * @param {number} degrees clockwise from true north
@@ -52,7 +24,7 @@ export function bearing(degrees) {
  * @returns {string} "3–14°"
  */
 export function range(from, to) {
-  return `${fixed(from, 0)}–${fixed(to, 0)}°`;
+  return `${number(from, 0)}–${number(to, 0)}°`;
 }
 
 /**
@@ -61,7 +33,7 @@ export function range(from, to) {
  */
 export function ohms(ohms) {
   const size = Math.abs(ohms);
-  return size >= 1000 ? count(Math.round(ohms / 10) * 10) : fixed(ohms, 0);
+  return size >= 1000 ? count(Math.round(ohms / 10) * 10) : number(ohms, 0);
 }
 
 /**

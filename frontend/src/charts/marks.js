@@ -1,14 +1,14 @@
 // @ts-check
-import { svg } from '../draw/svg.js';
+import { mark, markPath } from '../draw/mark.js';
+import { set, svg } from '../draw/svg.js';
 
-/** The marks of the three states, drawn on a box of 12, so that no state rests on hue or on a font. */
+/** The marks of the three states beside text and inside charts. */
 
-/** @type {Record<string, string>} */
-const PATHS = {
-  clear: 'M2 6.6 4.8 9.6 10.4 2.6',
-  tight: 'M6 1.6V7.4M6 9.4V11',
-  foul: 'M2.4 2.4 9.6 9.6M9.6 2.4 2.4 9.6',
-};
+/** Worst last. */
+const ORDER = /** @type {const} */ (['clear', 'tight', 'foul']);
+
+/** @param {string} state @returns {typeof ORDER[number]} a state not known is shown as tight, never as clear */
+const known = (state) => ORDER.find((one) => one === state) ?? 'tight';
 
 /**
  * @param {string} state clear, tight or foul
@@ -16,32 +16,25 @@ const PATHS = {
  * @returns {SVGElement}
  */
 export function stateMark(state, label) {
-  return svg('svg', {
-    class: `mark mark-${state}`, viewBox: '0 0 12 12', width: 12, height: 12,
-    role: label ? 'img' : null, 'aria-label': label ?? null, 'aria-hidden': label ? null : 'true',
-  }, [svg('path', { d: PATHS[state] ?? PATHS.tight })]);
+  const box = mark(known(state));
+  if (label) set(box, { role: 'img', 'aria-label': label, 'aria-hidden': null });
+  return box;
 }
 
 /**
- * The same mark inside another drawing.
  * @param {string} state
  * @param {number} x centre
  * @param {number} y centre
- * @returns {SVGElement}
+ * @returns {SVGElement} inside another drawing
  */
 export function markAt(state, x, y) {
-  return svg('path', {
-    class: `mark mark-${state}`, d: PATHS[state] ?? PATHS.tight, transform: `translate(${x - 6} ${y - 6})`,
-  });
+  return svg('g', { transform: `translate(${x.toFixed(1)} ${y.toFixed(1)})` }, [markPath(known(state))]);
 }
-
-/** Worst last, as they are ranked. */
-const ORDER = ['clear', 'tight', 'foul'];
 
 /**
  * @param {ReadonlyArray<string>} states
  * @returns {string} the worst of them, clear when there are none
  */
 export function worst(states) {
-  return ORDER[Math.max(0, ...states.map(state => ORDER.indexOf(state)))];
+  return ORDER[Math.max(0, ...states.map((state) => ORDER.indexOf(known(state))))];
 }

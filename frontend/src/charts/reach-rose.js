@@ -33,7 +33,9 @@ export function screenDirection(azimuth, planNorth) {
  */
 export function roseGeometry(rose, ring, planNorth) {
   const outline = [];
+  /** @type {number[][][]} */
   const better = [];
+  /** @type {number[][][]} */
   const worse = [];
   for (let azimuth = 0; azimuth < 360; azimuth += STROKE_EVERY_DEGREES) {
     const over = sample([...rose.dbi, rose.dbi[0]], rose.step, azimuth) - rose.referenceDbi;

@@ -2,20 +2,6 @@
 /** Height of a building's roof over a place in its footprint. Pure. Metres above the local ground. */
 
 /**
- * @param {number[][]} ring corners in order
- * @param {number} x
- * @param {number} y
- */
-export function inside(ring, x, y) {
-  let within = false;
-  for (let i = 0, j = ring.length - 1; i < ring.length; j = i++) {
-    const [a, b] = [ring[i], ring[j]];
-    if (a[1] > y !== b[1] > y && x < ((b[0] - a[0]) * (y - a[1])) / (b[1] - a[1]) + a[0]) within = !within;
-  }
-  return within;
-}
-
-/**
  * @param {{footprint: number[][], eaves: number, ridge?: number, roof?: string, ridgeLine?: number[][]}} building
  * @param {number} x
  * @param {number} y

@@ -1,7 +1,7 @@
 // @ts-check
 import { html } from '../charts/html.js';
 import { pullBar } from '../charts/bars.js';
-import { fixed } from '../charts/figures.js';
+import { number } from '../units/figures.js';
 import { stateMark } from '../charts/marks.js';
 import { nameOf } from './placement-facts.js';
 
@@ -18,23 +18,23 @@ export function pullsTable(plan, placement) {
   const most = Math.max(1, ...placement.attachments.flatMap((/** @type {any} */ hold) => [hold.pullInWind, hold.pullLimit ?? 0]));
   const wind = plan.brief?.rules?.wind ?? 25;
   return html('section', { class: 'pulls' },
-    html('div', { class: 'line section-head' }, html('h3', {}, 'Pulls, newtons'), html('span', { class: 'soft' }, `filled calm, open in a ${fixed(wind, 0)} m/s gust`)),
+    html('div', { class: 'line section-head' }, html('h3', {}, 'Pulls, newtons'), html('span', { class: 'soft' }, `filled calm, open in a ${number(wind, 0)} m/s gust`)),
     html('table', {},
       html('thead', {}, html('tr', {},
         html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'holding point')), html('th', { scope: 'col', class: 'n' }, 'calm'), html('th', { scope: 'col', class: 'n' }, 'gust'),
         html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'bars')), html('th', { scope: 'col', class: 'n' }, 'limit'), html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'state')))),
       html('tbody', {}, ...placement.attachments.map((/** @type {any} */ hold) => html('tr', {},
         html('th', { scope: 'row' }, nameOf(plan, hold.on), held(hold)),
-        html('td', { class: 'n' }, fixed(hold.pull, 0)),
-        html('td', { class: 'n' }, fixed(hold.pullInWind, 0)),
+        html('td', { class: 'n' }, number(hold.pull, 0)),
+        html('td', { class: 'n' }, number(hold.pullInWind, 0)),
         html('td', { class: 'bar-cell' }, pullBar({ calm: hold.pull, gust: hold.pullInWind, limit: hold.pullLimit ?? null }, most, { width: 120, height: 16 })),
-        html('td', { class: 'n' }, hold.pullLimit === undefined || hold.pullLimit === null ? html('span', { class: 'soft' }, 'not known') : fixed(hold.pullLimit, 0)),
+        html('td', { class: 'n' }, hold.pullLimit === undefined || hold.pullLimit === null ? html('span', { class: 'soft' }, 'not known') : number(hold.pullLimit, 0)),
         html('td', { class: 'mark-cell' }, stateMark(hold.state, hold.state)))))));
 }
 
 /** @param {any} hold */
 function held(hold) {
-  if (hold.held === 'weight' && hold.kilograms) return html('span', { class: 'soft' }, `, weight ${fixed(hold.kilograms, 1)} kg`);
+  if (hold.held === 'weight' && hold.kilograms) return html('span', { class: 'soft' }, `, weight ${number(hold.kilograms, 1)} kg`);
   return hold.held ? html('span', { class: 'soft' }, `, ${hold.held === 'centre' ? 'middle' : hold.held}`) : null;
 }
 

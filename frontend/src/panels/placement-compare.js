@@ -1,7 +1,7 @@
 // @ts-check
 import { html } from '../charts/html.js';
-import { fixed, signed } from '../charts/figures.js';
-import { lengthFigure } from '../charts/lengths.js';
+import { number, signed } from '../units/figures.js';
+import { formatLength } from '../units/length.js';
 import { stateMark } from '../charts/marks.js';
 import { bandSummaries, concerns, placementOf, placementTitle, planOf, shapeTitle, toBuild, wireLength } from './placement-facts.js';
 
@@ -17,7 +17,7 @@ export function comparison(state, placement, store) {
   const pinned = placementOf(state, state.pinned);
   if (!pinned) return null;
   const plan = planOf(state);
-  const length = (/** @type {number} */ metres) => lengthFigure(metres, state.units);
+  const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
   const bandsHere = bandSummaries(plan, placement);
   const bandsThere = bandSummaries(plan, pinned);
   const worstOf = (/** @type {any} */ one) => concerns(plan, one, length)[0];
@@ -25,13 +25,13 @@ export function comparison(state, placement, store) {
   /** @type {[string, string|Node, string|Node, string][]} */
   const rows = [
     ['shape', shapeTitle(placement.shape), shapeTitle(pinned.shape), ''],
-    ['score, dB', signed(placement.score), signed(pinned.score), signed(placement.score - pinned.score)],
+    ['score, dB', signed(placement.score, 1), signed(pinned.score, 1), signed(placement.score - pinned.score, 1)],
     ...bandsHere.map((band, index) => /** @type {[string, string, string, string]} */ ([
-      `${band.name}, dB over`, signed(band.over), bandsThere[index] ? signed(bandsThere[index].over) : '–',
-      bandsThere[index] ? signed(band.over - bandsThere[index].over) : '',
+      `${band.name}, dB over`, signed(band.over, 1), bandsThere[index] ? signed(bandsThere[index].over, 1) : '–',
+      bandsThere[index] ? signed(band.over - bandsThere[index].over, 1) : '',
     ])),
     [`wire, ${state.units}`, length(wireLength(placement)), length(wireLength(pinned)), difference(wireLength(placement) - wireLength(pinned), length)],
-    ['greatest pull in the gust, N', fixed(gust(placement), 0), fixed(gust(pinned), 0), signed(gust(placement) - gust(pinned), 0)],
+    ['greatest pull in the gust, N', number(gust(placement), 0), number(gust(pinned), 0), signed(gust(placement) - gust(pinned), 0)],
     ['nearest', concernCell(worstOf(placement)), concernCell(worstOf(pinned)), ''],
     ['to build', toBuild(placement).replace(/^new: /, ''), toBuild(pinned).replace(/^new: /, ''), ''],
   ];

@@ -150,6 +150,7 @@ export function bandSummaries(plan, placement) {
  * @returns {Concern[]}
  */
 export function concerns(plan, placement, length) {
+  /** @type {Record<string, number>} */
   const rank = { foul: 0, tight: 1, clear: 2 };
   const clearances = placement.clearances.map((/** @type {any} */ one) => clearanceConcern(plan, one, length));
   const pulls = placement.attachments.filter((/** @type {any} */ hold) => hold.state !== 'clear').map((/** @type {any} */ hold) => ({

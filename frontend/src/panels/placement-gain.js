@@ -1,8 +1,9 @@
 // @ts-check
 import { html } from '../charts/html.js';
 import { overBar } from '../charts/bars.js';
-import { bearing, fixed, impedance, megahertz, range, signed, count } from '../charts/figures.js';
-import { lengthText } from '../charts/lengths.js';
+import { bearing, impedance, megahertz, range, count } from '../charts/figures.js';
+import { number, signed } from '../units/figures.js';
+import { lengthWithUnit } from '../units/length.js';
 import { stateMark, worst } from '../charts/marks.js';
 import { bandsOf } from './placement-facts.js';
 
@@ -29,10 +30,10 @@ export function gainTable(placement, shown, choose) {
         index === 0 ? html('th', { scope: 'rowgroup', rowspan: targets.length }, html('button', { type: 'button', class: 'plain', 'data-key': `gain-${name}`, 'aria-pressed': String(name === shown), onclick: () => choose(name) }, name)) : null,
         html('td', { class: 'name' }, target ? target.name : 'no target on this band'),
         html('td', { class: 'n soft' }, target ? range(target.window[0], target.window[1]) : ''),
-        html('td', { class: 'n' }, target ? html('b', {}, signed(target.deliveredDbi)) : ''),
-        html('td', { class: 'n' }, target ? signed(over) : ''),
+        html('td', { class: 'n' }, target ? html('b', {}, signed(target.deliveredDbi, 1)) : ''),
+        html('td', { class: 'n' }, target ? signed(over, 1) : ''),
         html('td', { class: 'bar-cell' }, target ? overBar(over, span, { width: 54, height: 16 }) : ''),
-        index === 0 ? html('td', { class: 'n', rowspan: targets.length }, fixed(loss)) : null,
+        index === 0 ? html('td', { class: 'n', rowspan: targets.length }, number(loss, 1)) : null,
         index === 0 ? html('td', { class: 'mark-cell', rowspan: targets.length, title: `${state}: ${why}` }, stateMark(state, `Matching ${state}: ${why}`)) : null);
     }));
   });
@@ -54,10 +55,10 @@ export function gainTable(placement, shown, choose) {
 export function feedFacts(state, placement) {
   const line = (state.catalogue?.lines ?? []).find((/** @type {any} */ one) => one.id === placement.feed.line);
   const fraction = placement.feed.fraction;
-  const where = Math.abs(fraction - 0.5) < 0.005 ? 'in the middle' : `at ${fixed(fraction * 100, 0)} % of the wire`;
+  const where = Math.abs(fraction - 0.5) < 0.005 ? 'in the middle' : `at ${number(fraction * 100, 0)} % of the wire`;
   return html('section', { class: 'feed' },
     html('h3', {}, 'Feed'),
-    html('p', {}, `Fed ${where}; ${lengthText(placement.feed.lineLength, state.units)} of ${line?.name ?? placement.feed.line}.`),
+    html('p', {}, `Fed ${where}; ${lengthWithUnit(placement.feed.lineLength, state.units, 2)} of ${line?.name ?? placement.feed.line}.`),
     html('table', {},
       html('thead', {}, html('tr', {},
         html('th', { scope: 'col' }, 'MHz'), html('th', { scope: 'col', class: 'n' }, 'feedpoint, Ω'), html('th', { scope: 'col', class: 'n' }, 'SWR'),
@@ -66,10 +67,10 @@ export function feedFacts(state, placement) {
       html('tbody', {}, ...placement.bands.map((/** @type {any} */ row) => html('tr', {},
         html('th', { scope: 'row' }, megahertz(row.frequency)),
         html('td', { class: 'n' }, impedance(row.impedance)),
-        html('td', { class: 'n' }, fixed(row.lineSwr, row.lineSwr < 10 ? 1 : 0)),
+        html('td', { class: 'n' }, number(row.lineSwr, row.lineSwr < 10 ? 1 : 0)),
         html('td', { class: 'n' }, impedance(row.atStation)),
         html('td', { class: 'n' }, count(row.matching.peakVolts)),
-        html('td', { class: 'n', title: `${bearing(row.peakAzimuth)}, ${fixed(row.peakElevation, 0)}° up` }, signed(row.peakGainDbi)),
+        html('td', { class: 'n', title: `${bearing(row.peakAzimuth)}, ${number(row.peakElevation, 0)}° up` }, signed(row.peakGainDbi, 1)),
         html('td', { class: 'mark-cell', title: row.matching.why }, stateMark(row.matching.state, `${row.matching.state}: ${row.matching.why}`)))))),
     ...matchingRemarks(placement));
 }

@@ -1,7 +1,7 @@
 // @ts-check
 import { alongWire } from '../charts/along.js';
 import { html } from '../charts/html.js';
-import { lengthFigure } from '../charts/lengths.js';
+import { formatLength } from '../units/length.js';
 import { sideView } from '../charts/side-view.js';
 import { placementOf, planOf } from './placement-facts.js';
 
@@ -18,14 +18,14 @@ import { placementOf, planOf } from './placement-facts.js';
  */
 export function sideViewNode(state, placement, size) {
   const plan = planOf(state);
-  const length = (/** @type {number} */ metres) => lengthFigure(metres, state.units, 1);
+  const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 1);
   const out = Math.max(0, ...placement.spans.map((/** @type {any} */ span) => span.blowOut));
   const sag = Math.max(0, ...placement.spans.map((/** @type {any} */ span) => span.sagInWind));
   const calm = Math.max(0, ...placement.spans.map((/** @type {any} */ span) => span.sag));
   return sideView(alongWire(plan, placement), {
     ...size, length, title: 'Along the wire',
-    notes: [`${state.units === 'm' ? 'metres; ' : ''}sag ${lengthFigure(calm, state.units)}`,
-      `in the gust: out ${lengthFigure(out, state.units)}, sag ${lengthFigure(sag, state.units)}`],
+    notes: [`${state.units === 'm' ? 'metres; ' : ''}sag ${formatLength(calm, state.units, 2)}`,
+      `in the gust: out ${formatLength(out, state.units, 2)}, sag ${formatLength(sag, state.units, 2)}`],
     stateOf: (to) => stateUnder(plan, placement, to),
   });
 }

@@ -1,8 +1,8 @@
 // @ts-check
 import { html, redrawer } from '../charts/html.js';
-import { signed } from '../charts/figures.js';
+import { number, signed } from '../units/figures.js';
 import { launchProfile } from '../charts/launch-profile.js';
-import { lengthFigure, lengthText } from '../charts/lengths.js';
+import { formatLength, lengthWithUnit } from '../units/length.js';
 import { stateMark } from '../charts/marks.js';
 import { clearancesTable, pullsTable } from './placement-checks.js';
 import { comparison } from './placement-compare.js';
@@ -59,7 +59,7 @@ export function mount(root, store, shell) {
     if (!placement) return [unchosen(state)];
     const plan = planOf(state);
     const band = shownBand(state, placement);
-    const length = (/** @type {number} */ metres) => lengthFigure(metres, state.units);
+    const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
     const rank = listOf(state).indexOf(placement);
     return [
       headLine(state, placement, rank, store),
@@ -91,19 +91,19 @@ export function mount(root, store, shell) {
    * @param {any} placement
    */
   function head(state, plan, placement) {
-    const list = concerns(plan, placement, (metres) => lengthFigure(metres, state.units));
+    const list = concerns(plan, placement, (metres) => formatLength(metres, state.units, 2));
     const pinned = state.pinned === placement.id;
     return html('section', { class: 'placement-head' },
       html('p', { class: 'soft line' },
-        html('span', {}, `${placementTitle(state, placement)}, ${placement.shape}, ${lengthText(wireLength(placement), state.units, 1)} of wire`),
+        html('span', {}, `${placementTitle(state, placement)}, ${placement.shape}, ${lengthWithUnit(wireLength(placement), state.units, 1)} of wire`),
         isStale(state) ? html('span', { class: 'tight' }, stateMark('tight'), ' plan changed since') : null),
-      html('h2', {}, `${signed(placement.score)} dB ${placement.score < 0 ? 'against' : 'over'} the reference`),
+      html('h2', {}, `${signed(placement.score, 1)} dB ${placement.score < 0 ? 'against' : 'over'} the reference`),
       html('ul', { class: 'concerns' }, ...list.slice(0, 4).map((one) => html('li', {},
         stateMark(one.state), ' ', html('b', { class: one.state }, one.state), ` ${one.words}`))),
       list.length > 4 ? html('p', { class: 'soft' }, `and ${list.length - 4} more under Pulls and Clearances`) : null,
       html('p', { class: 'soft hangs' }, hangsOn(plan, placement).join(' – ')),
       ...placement.masts.filter((/** @type {any} */ mast) => mast.consent && mast.consent !== 'none').map((/** @type {any} */ mast) =>
-        html('p', { class: 'consent' }, stateMark('tight', 'Consent'), ` The new ${lengthText(mast.height, state.units, 1)} mast needs ${mast.consent}.`)),
+        html('p', { class: 'consent' }, stateMark('tight', 'Consent'), ` The new ${lengthWithUnit(mast.height, state.units, 1)} mast needs ${mast.consent}.`)),
       html('p', { class: 'actions' },
         html('button', { type: 'button', class: 'link', 'data-key': 'pin', 'aria-pressed': String(pinned), onclick: () => store.set({ pinned: pinned ? null : placement.id }) }, pinned ? 'Unpin' : 'Pin to compare'),
         html('button', { type: 'button', class: 'link', 'data-key': 'sheet', onclick: () => shell.go('sheet') }, 'Open its sheet'),
@@ -129,6 +129,7 @@ export function mount(root, store, shell) {
       html('div', { class: 'tabs band-tabs', role: 'group', 'aria-label': 'Band shown' }, ...bands.map((one) => html('button', {
         type: 'button', class: 'tab', 'aria-pressed': String(one.name === band), 'data-key': `band-${one.name}`, onclick: () => store.set({ chosenBand: one.name }),
       }, one.name))),
+      shown?.rose ? html('p', { class: 'soft' }, `The reach rose on the plan is for ${number(shown.rose.elevation, 0)}° up; it betters the reference over ${number(shown.rose.betterShare * 100, 0)} % of azimuths.`) : null,
       profiles.length ? launchProfile({
         profiles: profiles.map((/** @type {any} */ one) => ({ ...one, name: one.name === 'peak' ? 'strongest direction' : one.name })),
         windows: targets.map((/** @type {any} */ target) => ({ name: target.name, from: target.window[0], to: target.window[1] })),

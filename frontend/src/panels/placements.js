@@ -1,8 +1,9 @@
 // @ts-check
 import { html, redrawer } from '../charts/html.js';
 import { rowBars } from '../charts/bars.js';
-import { count, fixed, signed } from '../charts/figures.js';
-import { lengthFigure } from '../charts/lengths.js';
+import { count } from '../charts/figures.js';
+import { number, signed } from '../units/figures.js';
+import { formatLength } from '../units/length.js';
 import { stateMark } from '../charts/marks.js';
 import { thumbnail } from '../charts/thumbnail.js';
 import {
@@ -109,7 +110,7 @@ export function mount(root, store, shell) {
   /** @param {State} state */
   function ended(state) {
     const search = /** @type {any} */ (state.search);
-    const number = listOf(state).length;
+    const found = listOf(state).length;
     if (search.state === 'failed') {
       return html('div', { class: 'search-ended' },
         html('p', { class: 'problem' }, stateMark('foul', 'Failed'), ' ', html('b', {}, 'The search stopped. '), search.error ?? ''),
@@ -117,10 +118,10 @@ export function mount(root, store, shell) {
         efforts(), startButton('Search again'));
     }
     const said = search.state === 'cancelled' ? 'cancelled'
-      : `searched ${count(search.result.counts.considered)} in ${search.result.seconds < 10 ? fixed(search.result.seconds, 1) : fixed(search.result.seconds, 0)} s`;
+      : `searched ${count(search.result.counts.considered)} in ${search.result.seconds < 10 ? number(search.result.seconds, 1) : number(search.result.seconds, 0)} s`;
     return html('div', { class: 'search-ended' },
       html('p', { class: 'line' },
-        html('b', { class: 'title' }, `${number} placement${number === 1 ? '' : 's'}`),
+        html('b', { class: 'title' }, `${found} placement${found === 1 ? '' : 's'}`),
         html('span', { class: 'soft' }, said),
         html('button', { type: 'button', class: 'link', 'data-key': 'again', 'aria-expanded': String(choice.again), onclick: () => { choice.again = !choice.again; ask(); } }, 'again')),
       choice.again ? html('div', { class: 'again' }, efforts(), startButton('Search again')) : null);
@@ -168,7 +169,7 @@ export function mount(root, store, shell) {
   function row(state, placement, rank) {
     const plan = planOf(state);
     const bars = bandSummaries(plan, placement);
-    const [concern] = concerns(plan, placement, (metres) => lengthFigure(metres, state.units));
+    const [concern] = concerns(plan, placement, (metres) => formatLength(metres, state.units, 2));
     const names = hangsOn(plan, placement).join(', ');
     return html('li', {}, html('button', {
       type: 'button', class: 'row', 'data-key': `row-${placement.id}`, 'aria-current': placement.id === state.chosen ? 'true' : null,
@@ -186,7 +187,7 @@ export function mount(root, store, shell) {
       concern ? html('span', { class: 'row-state' }, stateMark(concern.state), ' ', html('b', { class: concern.state }, concern.state), ` ${short(concern.words)}`) : null,
       html('span', { class: 'soft' }, toBuild(placement))),
     html('span', { class: 'row-figures' },
-      html('span', { class: 'score' }, html('b', {}, signed(placement.score)), ' dB'),
+      html('span', { class: 'score' }, html('b', {}, signed(placement.score, 1)), ' dB'),
       rowBars(bars, { width: 98, height: 30 }))));
   }
 }

@@ -12,7 +12,7 @@ const STEP = 0.1;
 const BIG_STEP = 1;
 
 /**
- * @param {{toPlan: (x: number, y: number) => [number, number]}} planView
+ * @param {{toPlan: (x: number, y: number) => number[]}} planView
  * @param {import('../../state/store.js').Store} store
  * @param {{api: any, say: (sentence: string) => void}} shell
  * @returns {(placement: any, plan: any, view: any) => SVGElement[]} makes the handles
@@ -105,8 +105,8 @@ export function handles(planView, store, shell) {
       const point = planView.toPlan(next.clientX, next.clientY);
       if (!moved && Math.hypot(point[0] - start.at[0], point[1] - start.at[1]) * view.ppm < 4) return;
       moved = true;
-      held = { index, point };
-      void move(plan, origin, index, point, start.aboveGround);
+      held = { index, point: [point[0], point[1]] };
+      void move(plan, origin, index, [point[0], point[1]], start.aboveGround);
     };
     const end = () => {
       window.removeEventListener('pointermove', follow);

@@ -1,5 +1,6 @@
 // @ts-check
-import { inside } from '../../charts/roof.js';
+import { nearestOnPath } from '../../geometry/line.js';
+import { contains } from '../../geometry/polygon.js';
 
 /**
  * Where an attachment may go when it is dragged: onto a support, along a bracket line, about a mast zone. Pure.
@@ -19,10 +20,10 @@ export function holdings(plan, point) {
     on: one.id, at: one.at, lowest: one.lowest, highest: one.highest, base: 0,
   }));
   const brackets = (plan.bracketLines ?? []).map((/** @type {any} */ one) => ({
-    on: one.id, at: nearestOnPath(one.path, point, false), lowest: one.lowest, highest: one.highest, base: 0,
+    on: one.id, at: nearest(point, one.path, false), lowest: one.lowest, highest: one.highest, base: 0,
   }));
   const zones = (plan.mastZones ?? []).map((/** @type {any} */ one) => ({
-    on: one.id, at: inside(one.area, point[0], point[1]) ? [point[0], point[1]] : nearestOnPath(one.area, point, true),
+    on: one.id, at: contains(point, one.area) ? [point[0], point[1]] : nearest(point, one.area, true),
     lowest: (one.base ?? 0) + LEAST_MAST, highest: one.highest, base: one.base ?? 0,
   }));
   return [...supports, ...brackets, ...zones]
@@ -30,27 +31,10 @@ export function holdings(plan, point) {
     .sort((a, b) => a.distance - b.distance);
 }
 
-/**
- * @param {number[][]} path
- * @param {number[]} point
- * @param {boolean} closed
- * @returns {[number, number]}
- */
-export function nearestOnPath(path, point, closed) {
-  /** @type {[number, number]} */
-  let best = [path[0][0], path[0][1]];
-  let least = Infinity;
-  const last = closed ? path.length : path.length - 1;
-  for (let index = 0; index < last; index++) {
-    const [a, b] = [path[index], path[(index + 1) % path.length]];
-    const [dx, dy] = [b[0] - a[0], b[1] - a[1]];
-    const square = dx * dx + dy * dy;
-    const share = square === 0 ? 0 : Math.min(1, Math.max(0, ((point[0] - a[0]) * dx + (point[1] - a[1]) * dy) / square));
-    const [x, y] = [a[0] + share * dx, a[1] + share * dy];
-    const distance = Math.hypot(x - point[0], y - point[1]);
-    if (distance < least) [least, best] = [distance, [x, y]];
-  }
-  return best;
+/** @param {number[]} point @param {number[][]} path @param {boolean} closed @returns {[number, number]} */
+function nearest(point, path, closed) {
+  const found = nearestOnPath(point, path, closed)?.point ?? path[0];
+  return [found[0], found[1]];
 }
 
 /**

@@ -1,11 +1,11 @@
 // @ts-check
-import { range } from '../../charts/figures.js';
-import { lengthFigure } from '../../charts/lengths.js';
-import { dimension, toDimension } from './dimensions.js';
+import { number } from '../../units/figures.js';
+import { formatLength } from '../../units/length.js';
+import { dimension, dimensionLabel, toDimension } from './dimensions.js';
 import { handles } from './drag.js';
 import { candidates, ghosts } from './ghosts.js';
-import { inPixels, labelRoom, lettering, toPixels } from './labels.js';
-import { bearings, blockBearings, roseFrame, roseNode } from './rose.js';
+import { along, inPixels, toMetres, toPixels, WEIGHT } from './labels.js';
+import { bearings, roseFrame, roseNode } from './rose.js';
 import { chosenWire, wireLengths } from './wire.js';
 
 /**
@@ -14,7 +14,8 @@ import { chosenWire, wireLengths } from './wire.js';
  *
  * @typedef {import('../../state/types.js').State} State
  * @typedef {{layer: (name: string) => SVGGElement, onView: (callback: (view: any) => void) => void,
- *   toPlan: (x: number, y: number) => [number, number]}} PlanView
+ *   letter: (name: string, letters: import('../kinds/env.js').Letters|null) => void,
+ *   toPlan: (x: number, y: number) => number[]}} PlanView
  */
 
 /**
@@ -36,6 +37,7 @@ export function mount(planView, store, shell) {
     const shown = state.place === 'placements' && view !== null;
     const focused = document.activeElement?.closest('.placement-layer [data-key]')?.getAttribute('data-key');
     for (const layer of Object.values(layers)) layer.replaceChildren();
+    if (!shown || !placementsOf(state).chosen) planView.letter('placement', null);
     if (!shown) return;
     const { list, chosen } = placementsOf(state);
     layers.candidates.append(...candidates(list.filter((one) => one !== chosen), (id) => store.set({ chosen: id, shownRefusal: null })));
@@ -56,59 +58,37 @@ export function mount(planView, store, shell) {
   function drawChosen(state, chosen) {
     const plan = state.search.planAtSearch ?? state.plan;
     const planNorth = plan.site?.planNorth ?? 0;
-    const size = { width: view.width * view.ppm, height: view.height * view.ppm };
-    const room = labelRoom(size.width, size.height);
-    const length = (/** @type {number} */ metres) => lengthFigure(metres, state.units);
-    blockSymbols(chosen, room);
+    const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
+    const clearances = toDimension(chosen.clearances);
     const band = bandShown(state, chosen);
     const frame = roseFrame(chosen, view);
-    const targets = band?.rose ? targetsOf(plan, band) : [];
-    blockBearings(targets, frame, size, planNorth, room);
-    const lengths = wireLengths(chosen, view.ppm, length, (middle, unit) => {
-      const [x, y] = toPixels(view, middle);
-      for (let far = -30; far <= 30; far += 10) {
-        const [px, py] = [x + unit[0] * far, y - unit[1] * far];
-        room.block({ x0: px - 14, y0: py - 14, x1: px + 14, y1: py + 14 });
-      }
-    });
-    const dimensions = toDimension(chosen.clearances).flatMap((one) => dimension(one, view, room, {
-      figure: length(one.distance),
-      words: [`to ${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`, `must keep ${length(one.required)}`],
-    }));
-    const names = chosen.attachments.flatMap((/** @type {any} */ hold) => holdLabel(plan, hold, room, state));
-    if (band?.rose) {
-      const legend = roseLegend(band, room);
-      layers.rose.append(inPixels(view, [
-        ...bearings(targets, frame, size, planNorth, room), roseNode(band.rose, frame, planNorth), ...legend,
-      ], 'rose-drawing'));
-    }
+    const aims = bearings(band?.rose ? targetsOf(plan, band) : [], frame, view, planNorth);
+    layers.rose.append(inPixels(view, [
+      ...aims.nodes, band?.rose ? roseNode(band.rose, frame, planNorth) : null,
+    ], 'rose-drawing'));
     layers.placement.append(
-      ...chosenWire(chosen, view.ppm), ...lengths,
-      inPixels(view, [...dimensions, ...names], 'placement-lettering'),
+      ...chosenWire(chosen, view.ppm),
+      inPixels(view, clearances.flatMap((one) => dimension(one, view)), 'placement-dimensions'),
       ...drag(chosen, plan, view),
     );
-  }
-
-  /** @param {any} chosen @param {ReturnType<typeof labelRoom>} room */
-  function blockSymbols(chosen, room) {
-    const spots = [chosen.feed.at, ...chosen.attachments.map((/** @type {any} */ hold) => hold.at)];
-    for (const spot of spots) {
-      const [x, y] = toPixels(view, spot);
-      room.block({ x0: x - 7, y0: y - 7, x1: x + 7, y1: y + 7 });
-    }
-    for (const point of chosen.conductors.flatMap((/** @type {any} */ one) => one.points)) {
-      const [x, y] = toPixels(view, point);
-      room.block({ x0: x - 3, y0: y - 3, x1: x + 3, y1: y + 3 });
-    }
-  }
-
-  /** @param {any} plan @param {any} hold @param {ReturnType<typeof labelRoom>} room @param {State} state */
-  function holdLabel(plan, hold, room, state) {
-    const [x, y] = toPixels(view, hold.at);
-    const isNew = (plan.mastZones ?? []).some((/** @type {any} */ zone) => zone.id === hold.on);
-    const words = `${isNew ? 'New mast' : nameIn(plan, hold.on)} ${lengthFigure(hold.aboveGround, state.units, 1)}`;
-    const spot = room.place(x, y, [words], 13);
-    return spot ? [lettering(spot.x, spot.y, [words], 'bold', spot.anchor)] : [];
+    planView.letter('placement', {
+      labels: [
+        ...clearances.map((one, index) => dimensionLabel(one, index, {
+          figure: length(one.distance),
+          words: [`to ${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`, `must keep ${length(one.required)}`],
+        })),
+        ...aims.labels,
+        ...(band?.rose ? [roseLegend(band, view)] : []),
+        ...chosen.attachments.map((/** @type {any} */ hold, /** @type {number} */ index) => holdLabel(plan, hold, index, state)),
+        ...wireLengths(chosen, view.ppm, length),
+      ],
+      symbols: [
+        ...aims.symbols, chosen.feed.at,
+        ...chosen.conductors.flatMap((/** @type {any} */ one) => one.points.slice(1).flatMap((/** @type {number[]} */ point, /** @type {number} */ index) =>
+          along(view, toPixels(view, one.points[index]), toPixels(view, point)))),
+      ],
+      hide: chosen.attachments.flatMap((/** @type {any} */ hold) => ['supports', 'supports-short'].map((kind) => `${kind}:${hold.on}`)),
+    });
   }
 
   store.subscribe((state) => [state.search, state.chosen, state.chosenBand, state.shownRefusal, state.units, state.place], ask);
@@ -160,12 +140,35 @@ function targetsOf(plan, band) {
   });
 }
 
-/** @param {any} band @param {ReturnType<typeof labelRoom>} room */
-function roseLegend(band, room) {
-  const lines = [`${band.name}, ${range(band.rose.elevation, band.rose.elevation).replace(/–.*$/, '°')} up; outward is better`, `betters the reference over ${Math.round(band.rose.betterShare * 100)} % of azimuths`];
-  const [x, y] = [12, 22];
-  room.block({ x0: x, y0: y - 12, x1: x + 220, y1: y + 32 });
-  return [lettering(x, y, ['Reach rose'], 'bold rose-title'), lettering(x, y + 15, lines, 'soft')];
+/**
+ * The legend takes a free corner; the same is said in the panel for when there is none.
+ * @param {any} band
+ * @param {import('./labels.js').View} view
+ * @returns {import('../kinds/env.js').Label}
+ */
+function roseLegend(band, view) {
+  const [width, height] = [view.width * view.ppm, view.height * view.ppm];
+  const [first, ...others] = [[100, 28], [100, height - 28], [width - 200, 28], [width - 330, height - 28], [width / 2, 28]]
+    .map((at) => toMetres(view, at));
+  return {
+    id: 'rose', weight: WEIGHT.legend, at: first, also: others, sit: 'middle',
+    lines: [{ text: `Reach rose, ${band.name} at ${number(band.rose.elevation, 0)}° up`, bold: true }, { text: 'outside the dotted ring is better' }],
+  };
+}
+
+/**
+ * @param {any} plan
+ * @param {any} hold
+ * @param {number} index
+ * @param {State} state
+ * @returns {import('../kinds/env.js').Label}
+ */
+function holdLabel(plan, hold, index, state) {
+  const isNew = (plan.mastZones ?? []).some((/** @type {any} */ zone) => zone.id === hold.on);
+  return {
+    id: `hold-${index}`, weight: WEIGHT.hold - index, at: hold.at, sit: 'around', gap: 13,
+    lines: [{ text: `${isNew ? 'New mast' : nameIn(plan, hold.on)} ${formatLength(hold.aboveGround, state.units, 1)}`, bold: true }],
+  };
 }
 
 /** @param {any} plan @param {string} id */

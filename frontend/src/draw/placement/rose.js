@@ -1,7 +1,7 @@
 // @ts-check
 import { ringRadius, roseGeometry, screenDirection } from '../../charts/reach-rose.js';
 import { svg, pathOf } from '../svg.js';
-import { lettering, toPixels } from './labels.js';
+import { along, toMetres, toPixels, WEIGHT } from './labels.js';
 
 /** The reach rose round the wire and the bearings of the targets out to the frame. Pixels about the view's north-west corner. */
 
@@ -58,51 +58,55 @@ export function toFrame(middle, [ux, uy], width, height, inset) {
 }
 
 /**
- * @param {{name: string, bearing: number, distance: string}[]} targets
+ * @typedef {{name: string, bearing: number, distance: string}} Aim
+ * @param {Aim[]} targets
  * @param {{middle: [number, number], ring: number}} frame
- * @param {{width: number, height: number}} size px in sight
+ * @param {import('./labels.js').View} view
  * @param {number} planNorth
- * @param {ReturnType<typeof import('./labels.js').labelRoom>} room
- * @returns {SVGElement[]}
+ * @returns {{nodes: SVGElement[], labels: import('../kinds/env.js').Label[], symbols: number[][]}}
  */
-export function bearings(targets, { middle, ring }, size, planNorth, room) {
-  return targets.flatMap((target) => {
+export function bearings(targets, { middle, ring }, view, planNorth) {
+  const [width, height] = [view.width * view.ppm, view.height * view.ppm];
+  const drawn = targets.map((target) => {
     const [ux, uy] = screenDirection(target.bearing, planNorth);
-    const end = toFrame(middle, [ux, uy], size.width, size.height, 4);
+    const end = toFrame(middle, [ux, uy], width, height, 4);
     const reach = Math.hypot(end[0] - middle[0], end[1] - middle[1]);
     const start = Math.min(ring, reach * 0.8);
     const from = [middle[0] + ux * start, middle[1] + uy * start];
-    const head = `M${(end[0] - ux * 11 - uy * 4).toFixed(1)} ${(end[1] - uy * 11 + ux * 4).toFixed(1)}L${end[0].toFixed(1)} ${end[1].toFixed(1)}L${(end[0] - ux * 11 + uy * 4).toFixed(1)} ${(end[1] - uy * 11 - ux * 4).toFixed(1)}Z`;
-    const foot = [end[0] - ux * 30, end[1] - uy * 30];
-    const spot = room.place(foot[0], foot[1], [target.name, target.distance], 12);
-    return [
-      svg('path', { class: 'bearing-inside', d: pathOf([middle, from]) }),
-      svg('path', { class: 'bearing', d: pathOf([from, end]) }),
-      svg('path', { class: 'bearing-head', d: head }),
-      ...(spot ? [
-        lettering(spot.x, spot.y, [target.name], 'bold', spot.anchor),
-        lettering(spot.x, spot.y + 13, [target.distance], 'soft', spot.anchor),
-      ] : []),
-    ];
+    const back = (/** @type {number} */ far) => [end[0] - ux * far, end[1] - uy * far];
+    const head = [-1, 0, 1].map((way) => (way ? [end[0] - ux * 11 + way * uy * 4, end[1] - uy * 11 - way * ux * 4] : end));
+    return {
+      nodes: [
+        svg('path', { class: 'bearing-inside', d: pathOf([middle, from]) }),
+        svg('path', { class: 'bearing', d: pathOf([from, end]) }),
+        svg('path', { class: 'bearing-head', d: pathOf(head, true) }),
+      ],
+      label: bearingLabel(target, view, [34, 60, 90, 20].map(back), [ux, uy]),
+      symbols: along(view, from, end),
+    };
   });
+  return {
+    nodes: drawn.flatMap((one) => one.nodes), labels: drawn.map((one) => one.label), symbols: drawn.flatMap((one) => one.symbols),
+  };
 }
 
 /**
- * Keeps lettering off the bearings outside the rose.
- * @param {{bearing: number}[]} targets
- * @param {{middle: [number, number], ring: number}} frame
- * @param {{width: number, height: number}} size
- * @param {number} planNorth
- * @param {ReturnType<typeof import('./labels.js').labelRoom>} room
+ * Beside the line near the frame; wherever there is room along it.
+ * @param {Aim} target
+ * @param {import('./labels.js').View} view
+ * @param {number[][]} feet places along the line, px
+ * @param {number[]} unit direction of the line on the screen
+ * @returns {import('../kinds/env.js').Label}
  */
-export function blockBearings(targets, { middle, ring }, size, planNorth, room) {
-  for (const { bearing } of targets) {
-    const unit = screenDirection(bearing, planNorth);
-    const end = toFrame(middle, unit, size.width, size.height, 4);
-    const reach = Math.hypot(end[0] - middle[0], end[1] - middle[1]);
-    for (let far = Math.min(ring, reach); far <= reach; far += 10) {
-      const [x, y] = [middle[0] + unit[0] * far, middle[1] + unit[1] * far];
-      room.block({ x0: x - 3, y0: y - 3, x1: x + 3, y1: y + 3 });
-    }
-  }
+function bearingLabel(target, view, feet, [ux, uy]) {
+  const half = Math.max(target.name.length, target.distance.length) * 2.9;
+  // Far enough to the side that the lettering's own box clears the line whatever its slope.
+  const aside = 12 + Math.abs(uy) * half + Math.abs(ux) * 12;
+  const beside = (/** @type {number[]} */ [x, y], /** @type {number} */ way) =>
+    toMetres(view, [x - uy * way * aside, y + ux * way * aside]);
+  const [first, ...others] = feet.flatMap((foot) => [beside(foot, 1), beside(foot, -1)]);
+  return {
+    id: `bearing-${target.name}`, weight: WEIGHT.bearing, at: first, also: others, sit: 'middle',
+    lines: [{ text: target.name, bold: true }, { text: target.distance }],
+  };
 }

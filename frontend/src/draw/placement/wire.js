@@ -1,5 +1,7 @@
 // @ts-check
+import { readingTurn } from '../dimension.js';
 import { atPlace, pathOf, svg } from '../svg.js';
+
 
 /** The chosen placement on the plan: wire, ropes, feed line, guys, envelope in the wind, symbols. Plan metres. */
 
@@ -53,25 +55,23 @@ function endsOf(points) {
 }
 
 /**
- * The finished length of wire in each span, written along it; only where the span is long enough on the screen.
+ * The finished length of wire in each span, to be written along it where the span is long enough on the screen.
  * @param {any} placement
  * @param {number} ppm
  * @param {(metres: number) => string} length
- * @param {(middle: number[], unit: number[]) => void} block tells where lettering now stands, plan metres
- * @returns {SVGElement[]}
+ * @returns {import('../kinds/env.js').Label[]}
  */
-export function wireLengths(placement, ppm, length, block) {
-  return placement.spans.flatMap((/** @type {any} */ span) => {
+export function wireLengths(placement, ppm, length) {
+  return placement.spans.flatMap((/** @type {any} */ span, /** @type {number} */ index) => {
     const [a, b] = [span.points[0], span.points[span.points.length - 1]];
     const pixels = Math.hypot(b[0] - a[0], b[1] - a[1]) * ppm;
-    if (pixels < 90) return [];
-    let turn = (-Math.atan2(b[1] - a[1], b[0] - a[0]) * 180) / Math.PI;
-    if (turn > 90) turn -= 180;
-    if (turn <= -90) turn += 180;
-    const middle = [a[0] + (b[0] - a[0]) * 0.55, a[1] + (b[1] - a[1]) * 0.55];
-    block(middle, [((b[0] - a[0]) * ppm) / pixels, ((b[1] - a[1]) * ppm) / pixels]);
-    return [atPlace(middle, ppm, [svg('text', {
-      class: 'drawn bold halo middle wire-length', y: -8, transform: `rotate(${turn.toFixed(1)})`,
-    }, [`${length(span.wireLength)} wire`])])];
+    if (pixels < 90 || span.wireLength < 0.05) return [];
+    const side = [-(b[1] - a[1]) / pixels, (b[0] - a[0]) / pixels].map((part) => part * 12);
+    const at = (/** @type {number} */ share, /** @type {number} */ way) =>
+      [0, 1].map((k) => a[k] + (b[k] - a[k]) * share + way * side[k]);
+    return [{
+      id: `span-${index}`, weight: Infinity, at: at(0.55, 1), also: [at(0.45, -1), at(0.35, 1), at(0.65, -1), at(0.3, -1)],
+      lines: [{ text: `${length(span.wireLength)} wire`, bold: true }], look: 'copper', sit: 'middle', turn: readingTurn(a, b),
+    }];
   });
 }
