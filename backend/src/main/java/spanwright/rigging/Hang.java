@@ -41,8 +41,7 @@ final class Hang {
       throw new IllegalArgumentException("feed: is missing. Say where the feed line joins.");
     }
     if (layout.feed().conductor() != 0) {
-      throw new IllegalArgumentException(
-          "feed.conductor: there is only conductor 0. Give 0.");
+      throw new IllegalArgumentException("feed.conductor: there is only conductor 0. Give 0.");
     }
     layout.attachments().forEach(each -> holders.add(rigging.holder(each.on())));
     course = Course.of(layout);
@@ -95,8 +94,7 @@ final class Hang {
     LineRun.Hung hung = LineRun.hang(near, feet, length, weight, 0, 0);
     double share = Math.max(0, -hung.pull().z()) / weight;
     feedWeight = share * weight + Practice.CENTRE_WEIGHT * G;
-    feedIced =
-        share * LineRun.weight(line, materials, true) + Practice.CENTRE_WEIGHT * G;
+    feedIced = share * LineRun.weight(line, materials, true) + Practice.CENTRE_WEIGHT * G;
     feedPush = materials.push(line.diameter(), rigging.isIcy()) * length / 2;
   }
 
@@ -124,9 +122,7 @@ final class Hang {
   }
 
   private double held(int attachment) {
-    return attachment == 0
-        ? course.headTail()
-        : course.spans().get(attachment - 1).to();
+    return attachment == 0 ? course.headTail() : course.spans().get(attachment - 1).to();
   }
 
   private SpanStatics span(int i) {
@@ -161,8 +157,7 @@ final class Hang {
     return attachment == 0 || attachment == layout.attachments().size() - 1;
   }
 
-  private SpanStatics statics(
-      int i, SpanStatics.Make make, boolean atEnd, boolean weight) {
+  private SpanStatics statics(int i, SpanStatics.Make make, boolean atEnd, boolean weight) {
     for (int end = i; end <= i + 1; end++) {
       weightSpan[end] = weightSpan[end] == i ? -1 : weightSpan[end];
     }
@@ -256,8 +251,7 @@ final class Hang {
   }
 
   private double pullByWeight(int i, int end) {
-    double pull =
-        Math.min(Practice.CALM_SHARE * materials.wireBreaking(), materials.ropeWorking());
+    double pull = Math.min(Practice.CALM_SHARE * materials.wireBreaking(), materials.ropeWorking());
     Double here = holders.get(end).pullLimit();
     Double there = holders.get(end == i ? i + 1 : i).pullLimit();
     pull = here == null ? pull : Math.min(pull, here / 1.45);

@@ -96,7 +96,9 @@ public record Holder(Support support, BracketLine bracket, MastZone zone) {
     if (support != null) {
       return at.distance(support.at());
     }
-    return bracket != null ? PlanShapes.toPath(bracket.path(), at, false) : outside(zone.area(), at);
+    return bracket != null
+        ? PlanShapes.toPath(bracket.path(), at, false)
+        : outside(zone.area(), at);
   }
 
   private static double outside(List<Point> area, Point at) {

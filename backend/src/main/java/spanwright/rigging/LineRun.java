@@ -46,8 +46,7 @@ final class LineRun {
           double ny = (a.x() - b.x()) / length;
           double mx = (a.x() + b.x()) / 2;
           double my = (a.y() + b.y()) / 2;
-          boolean inside =
-              PlanShapes.contains(outline, mx + 1e-3 * nx, my + 1e-3 * ny);
+          boolean inside = PlanShapes.contains(outline, mx + 1e-3 * nx, my + 1e-3 * ny);
           best = inside ? new Point(-nx, -ny) : new Point(nx, ny);
           least = away;
         }

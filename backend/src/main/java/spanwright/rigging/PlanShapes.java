@@ -35,8 +35,7 @@ public final class PlanShapes {
   }
 
   /** Distance from (x, y) to the segment a–b [m]. */
-  public static double toSegment(
-      double ax, double ay, double bx, double by, double x, double y) {
+  public static double toSegment(double ax, double ay, double bx, double by, double x, double y) {
     double dx = bx - ax;
     double dy = by - ay;
     double square = dx * dx + dy * dy;

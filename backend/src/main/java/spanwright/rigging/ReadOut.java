@@ -230,8 +230,7 @@ final class ReadOut {
         attachment,
         0,
         length,
-        new Rigged.Shapes(
-            calm, blown.get(0), blown.get(1), rigging.isIcy() ? calm : List.of()));
+        new Rigged.Shapes(calm, blown.get(0), blown.get(1), rigging.isIcy() ? calm : List.of()));
   }
 
   // --- the conductor
@@ -263,10 +262,7 @@ final class ReadOut {
     }
     Rigged.Shapes shapes =
         new Rigged.Shapes(
-            whole.get(0),
-            whole.get(1),
-            whole.get(2),
-            whole.size() > 3 ? whole.get(3) : List.of());
+            whole.get(0), whole.get(1), whole.get(2), whole.size() > 3 ? whole.get(3) : List.of());
     return new Rigged.Conductor(hang.wire.id(), course.total(), shapes);
   }
 
@@ -343,7 +339,9 @@ final class ReadOut {
     boolean head = course.feedAt() < course.headTail();
     Rigged.Tail tail = head ? loose.get(0) : loose.get(loose.size() - 1);
     double down =
-        head ? course.headTail() - course.feedAt() : course.feedAt() - course.total() + tail.length();
+        head
+            ? course.headTail() - course.feedAt()
+            : course.feedAt() - course.total() + tail.length();
     int points = tail.shapes().calm().size() - 1;
     int index = (int) Math.round(points * Math.min(1, down / tail.length()));
     return tail.shapes().part(index, index);

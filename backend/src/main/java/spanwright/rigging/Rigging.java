@@ -76,8 +76,8 @@ public final class Rigging {
   }
 
   /**
-   * The calm shape alone, for screening: as {@link #hang(Layout)}, but the blown shapes are the calm
-   * ones again, pulls in wind are the calm pulls, and the pull is not let out for the gust.
+   * The calm shape alone, for screening: as {@link #hang(Layout)}, but the blown shapes are the
+   * calm ones again, pulls in wind are the calm pulls, and the pull is not let out for the gust.
    */
   public Rigged hangCalm(Layout layout) {
     return new Hang(this, layout, false).rigged();

@@ -197,9 +197,20 @@ public final class Roof {
           if (run > 1e-9) {
             double px = ox + end * half * ux;
             double py = oy + end * half * uy;
-            parts = cut(parts, px - ox, py - oy, end * ux * run - uy * left, end * uy * run + ux * left);
             parts =
-                cut(parts, px - ox, py - oy, end * ux * run + uy * right, end * uy * run - ux * right);
+                cut(
+                    parts,
+                    px - ox,
+                    py - oy,
+                    end * ux * run - uy * left,
+                    end * uy * run + ux * left);
+            parts =
+                cut(
+                    parts,
+                    px - ox,
+                    py - oy,
+                    end * ux * run + uy * right,
+                    end * uy * run - ux * right);
           }
         }
       }

@@ -48,7 +48,13 @@ final class Shortcomings {
   }
 
   private void add(
-      String rule, String to, String what, Place at, double found, double allowed, String reason,
+      String rule,
+      String to,
+      String what,
+      Place at,
+      double found,
+      double allowed,
+      String reason,
       String cure) {
     all.add(new Rigged.Shortcoming(rule, to, what, at, found, allowed, reason, cure));
   }
@@ -129,9 +135,7 @@ final class Shortcomings {
           say(
               "The pull on %s is %.0f N in the gust; it may take %.0f N, and the wire already"
                   + " hangs as loose as is sensible.",
-              holder.name(),
-              found,
-              limit),
+              holder.name(), found, limit),
           null);
     }
   }
@@ -179,9 +183,7 @@ final class Shortcomings {
           say(
               "The wire would carry %.0f N in the gust, %.0f %% of what breaks it; at most %.0f %%"
                   + " is allowed.",
-              span.greatestTension(),
-              100 * share,
-              100 * allowed),
+              span.greatestTension(), 100 * share, 100 * allowed),
           null);
     }
     double working = span.greatestTension() / hang.materials.ropeWorking();
@@ -196,8 +198,7 @@ final class Shortcomings {
           most,
           say(
               "The rope would carry %.0f N in the gust; its working load is %.0f N.",
-              span.greatestTension(),
-              hang.materials.ropeWorking()),
+              span.greatestTension(), hang.materials.ropeWorking()),
           say(
               "Take a rope with a working load of at least %.0f N.",
               Math.ceil(span.greatestTension() / most)));
@@ -220,10 +221,7 @@ final class Shortcomings {
           0.25 * chord,
           say(
               "The wire is %.1f m longer than the way between %s and %s; it would hang %.1f m deep.",
-              over,
-              hang.holders.get(i).name(),
-              hang.holders.get(i + 1).name(),
-              span.sag()),
+              over, hang.holders.get(i).name(), hang.holders.get(i + 1).name(), span.sag()),
           say("Shorten the wire by %.1f m.", over));
     }
     if (statics.lifted) {
@@ -278,8 +276,7 @@ final class Shortcomings {
           line.runLength(),
           say(
               "The feed line of %.1f m does not reach: the way to the entry takes %.1f m.",
-              line.length(),
-              line.runLength()),
+              line.length(), line.runLength()),
           say("Take a feed line of at least %.1f m.", Math.ceil(line.runLength() * 10) / 10));
     } else if (line.stowed() > 0.5) {
       notes.add(

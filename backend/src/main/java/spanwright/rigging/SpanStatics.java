@@ -125,8 +125,7 @@ final class SpanStatics {
     double wire = make.wire() + make.wireAfter();
     double level = Math.hypot(dx, dy);
     double even =
-        (materials.wireWeight() * wire
-                + materials.ropeWeight() * Math.max(0, chordLength - wire))
+        (materials.wireWeight() * wire + materials.ropeWeight() * Math.max(0, chordLength - wire))
             * G
             / chordLength;
     double at = (make.ropeFrom() + make.wire()) / chordLength;

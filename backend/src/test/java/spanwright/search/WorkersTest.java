@@ -24,8 +24,7 @@ class WorkersTest {
     AtomicInteger done = new AtomicInteger();
     try (Workers workers = new Workers(2, () -> done.get() >= 10)) {
       assertThrows(
-          Workers.Cancelled.class,
-          () -> workers.map(ITEMS, i -> done.incrementAndGet(), () -> {}));
+          Workers.Cancelled.class, () -> workers.map(ITEMS, i -> done.incrementAndGet(), () -> {}));
     }
     assertEquals(true, done.get() < 20);
   }
