@@ -10,11 +10,11 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.util.List;
-import spanwright.plan.Fault;
 import spanwright.plan.Json;
 import spanwright.plan.Plan;
 import spanwright.plan.PlanReader;
 import spanwright.web.BadJson;
+import spanwright.web.Finite;
 import spanwright.web.JsonText;
 
 /** Files in and out, with a sentence for each way that can fail. */
@@ -75,11 +75,7 @@ final class Documents {
   /** A document as text, every number in it finite. */
   static String json(Object document) {
     try {
-      JsonNode tree = Json.mapper().valueToTree(document);
-      List<Fault> faults = Finite.faults(tree);
-      if (!faults.isEmpty()) {
-        throw new IllegalStateException("not finite: " + faults.get(0).path());
-      }
+      JsonNode tree = Finite.tree(document);
       return Json.mapper().writerWithDefaultPrettyPrinter().writeValueAsString(tree) + "\n";
     } catch (JsonProcessingException e) {
       throw new IllegalStateException(e);

@@ -18,6 +18,7 @@ import spanwright.plan.Catalogue;
 import spanwright.plan.Fault;
 import spanwright.plan.LineKind;
 import spanwright.plan.MatchingUnit;
+import spanwright.web.Form;
 
 /** Reads the case of {@code feed} and writes its answer. */
 final class FeedCases {

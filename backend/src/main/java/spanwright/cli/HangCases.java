@@ -7,6 +7,7 @@ import java.util.Map;
 import spanwright.plan.Fault;
 import spanwright.plan.Place;
 import spanwright.rigging.HangCase;
+import spanwright.web.Form;
 
 /** Reads the case of {@code hang}. */
 final class HangCases {

@@ -40,9 +40,12 @@ final class Program {
     CommandLine line = new CommandLine(new Root());
     line.addSubcommand(new ServeCommand(console));
     line.addSubcommand(new CheckCommand(console));
+    line.addSubcommand(new RankCommand(console));
+    line.addSubcommand(new AssessCommand(console));
     line.addSubcommand(new SolveCommand(console));
     line.addSubcommand(new FeedCommand(console));
     line.addSubcommand(new HangCommand(console));
+    line.addSubcommand(new SheetCommand(console));
     line.addSubcommand(new CatalogueCommand(console));
     line.addSubcommand(new VersionCommand(console));
     line.setOut(new java.io.PrintWriter(console.out(), true));

@@ -9,6 +9,7 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
+import spanwright.moments.Solver;
 import spanwright.store.DataFolder;
 import spanwright.store.PlanStore;
 import spanwright.web.WebServer;
@@ -65,8 +66,17 @@ final class ServeCommand implements Callable<Integer> {
     console.out().println("Spanwright answers at " + server.address());
     console.out().println("Plans are kept in " + store.folder() + ". Ctrl-C stops the server.");
     console.out().flush();
+    warmUp();
     stopped.await();
     return Exit.DONE;
+  }
+
+  /** The first search then starts at full speed; the page is not kept waiting for it. */
+  private static void warmUp() {
+    Thread thread = new Thread(Solver::warmUp, "warm-up");
+    thread.setDaemon(true);
+    thread.setPriority(Thread.MIN_PRIORITY);
+    thread.start();
   }
 
   private WebServer start(PlanStore store) {

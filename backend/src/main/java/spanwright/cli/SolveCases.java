@@ -18,6 +18,7 @@ import spanwright.moments.Vertex;
 import spanwright.moments.WireSpec;
 import spanwright.plan.Fault;
 import spanwright.plan.Place;
+import spanwright.web.Form;
 
 /** Reads the case of {@code solve} and writes its answer. Angles in the file are degrees. */
 final class SolveCases {

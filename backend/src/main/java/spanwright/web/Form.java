@@ -1,4 +1,4 @@
-package spanwright.cli;
+package spanwright.web;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
@@ -13,13 +13,13 @@ import spanwright.plan.Fault;
 import spanwright.plan.Place;
 
 /**
- * One object of a case file, read field by field. Each fault is noted with its path and reading
- * goes on with a stand-in, so that all of them are found; whoever reads must ask {@link #finish} of
+ * One object of a document, read field by field. Each fault is noted with its path and reading goes
+ * on with a stand-in, so that all of them are found; whoever reads must ask {@link #finish} of
  * every form and look at the faults before using anything.
  */
-final class Form {
+public final class Form {
   /** Coordinates further out than this are not of a plot [m]. */
-  static final double FARTHEST = 1e5;
+  public static final double FARTHEST = 1e5;
 
   private final JsonNode node;
   private final String path;
@@ -36,28 +36,33 @@ final class Form {
   }
 
   /** The whole document. */
-  static Form of(JsonNode tree, List<Fault> faults) {
+  public static Form of(JsonNode tree, List<Fault> faults) {
     return new Form(tree, "", faults);
   }
 
+  /** An object inside a document. */
+  public static Form at(String path, JsonNode node, List<Fault> faults) {
+    return new Form(node, path, faults);
+  }
+
   /** Whether the field is there; null counts as absent. */
-  boolean has(String name) {
+  public boolean has(String name) {
     known.add(name);
     return node.hasNonNull(name);
   }
 
   /** Whether the field is there and a text, for fields that may be a word or an object. */
-  boolean isText(String name) {
+  public boolean isText(String name) {
     return has(name) && node.get(name).isTextual();
   }
 
   /** Whether the field is there and a number. */
-  boolean isNumber(String name) {
+  public boolean isNumber(String name) {
     return has(name) && node.get(name).isNumber();
   }
 
   /** A number that must be there. */
-  double number(String name, double least, double most, String unit) {
+  public double number(String name, double least, double most, String unit) {
     if (!has(name)) {
       note(name, "this is missing. Give a number" + in(unit) + ".");
       return least;
@@ -66,7 +71,7 @@ final class Form {
   }
 
   /** A number that may be absent. */
-  Double number(String name, double least, double most, String unit, Double absent) {
+  public Double number(String name, double least, double most, String unit, Double absent) {
     return has(name) ? Double.valueOf(number(node.get(name), name, least, most, unit)) : absent;
   }
 
@@ -100,7 +105,7 @@ final class Form {
   }
 
   /** A whole number that must be there. */
-  int index(String name, int most) {
+  public int index(String name, int most) {
     double value = number(name, 0, most, "");
     if (value != Math.rint(value)) {
       note(name, "this must be a whole number, counted from 0.");
@@ -109,8 +114,18 @@ final class Form {
     return (int) value;
   }
 
+  /** A whole number that may be absent. */
+  public long whole(String name, double least, double most, long absent) {
+    double value = number(name, least, most, "", (double) absent);
+    if (value != Math.rint(value)) {
+      note(name, "this must be a whole number.");
+      return absent;
+    }
+    return (long) value;
+  }
+
   /** A word out of a few. */
-  <E> E word(String name, Map<String, E> words, E absent) {
+  public <E> E word(String name, Map<String, E> words, E absent) {
     if (!has(name)) {
       if (absent == null) {
         note(name, "this is missing. Say one of " + listed(words) + ".");
@@ -129,7 +144,7 @@ final class Form {
   }
 
   /** A text that must be there. */
-  String text(String name) {
+  public String text(String name) {
     if (!has(name) || !node.get(name).isTextual()) {
       note(name, "this must be a text in double quotes.");
       return "";
@@ -138,7 +153,7 @@ final class Form {
   }
 
   /** An object; when it is missing or none, a form with nothing in it. */
-  Form form(String name) {
+  public Form form(String name) {
     if (!has(name)) {
       note(name, "this is missing. Give an object in braces.");
       return new Form(
@@ -150,7 +165,7 @@ final class Form {
   }
 
   /** A list of objects. */
-  <T> List<T> forms(String name, int least, int most, Function<Form, T> reader) {
+  public <T> List<T> forms(String name, int least, int most, Function<Form, T> reader) {
     List<T> all = new ArrayList<>();
     JsonNode list = list(name, least, most);
     for (int i = 0; i < list.size(); i++) {
@@ -161,7 +176,8 @@ final class Form {
   }
 
   /** A list of numbers. */
-  double[] numbers(String name, int fewest, int longest, double least, double most, String unit) {
+  public double[] numbers(
+      String name, int fewest, int longest, double least, double most, String unit) {
     JsonNode list = list(name, fewest, longest);
     double[] all = new double[list.size()];
     for (int i = 0; i < all.length; i++) {
@@ -171,13 +187,13 @@ final class Form {
   }
 
   /** A place that must be there. */
-  Place place(String name) {
+  public Place place(String name) {
     has(name);
     return place(node.path(name), name);
   }
 
   /** A list of places. */
-  List<Place> places(String name, int fewest, int longest) {
+  public List<Place> places(String name, int fewest, int longest) {
     JsonNode list = list(name, fewest, longest);
     List<Place> all = new ArrayList<>();
     for (int i = 0; i < list.size(); i++) {
@@ -220,7 +236,7 @@ final class Form {
   }
 
   /** Notes every field that nobody asked about. */
-  void finish() {
+  public void finish() {
     node.fieldNames()
         .forEachRemaining(
             name -> {
@@ -237,7 +253,7 @@ final class Form {
   }
 
   /** Notes a fault at a field of this object, or at the object itself when the name is empty. */
-  void note(String name, String message) {
+  public void note(String name, String message) {
     String upper = message.substring(0, 1).toUpperCase(Locale.ROOT) + message.substring(1);
     faults.add(new Fault(at(name), upper));
   }
