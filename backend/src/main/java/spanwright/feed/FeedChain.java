@@ -37,7 +37,7 @@ public final class FeedChain {
     requireUsable(load);
     Wrong.unlessWithin("The frequency", frequencyMHz, 0.1, 1000, "MHz");
     Wrong.unlessWithin("The length of the feed line", length, 0, 10_000, "m");
-    Wrong.unlessWithin("The power", power, 1e-6, 1e7, "W");
+    Wrong.unlessWithin("The power", power, 0, 1e7, "W");
     LineConstants constants = line.at(frequencyMHz);
     LineRun run = LineRun.of(load, constants, length);
     Complex atStation = run.input();

@@ -29,6 +29,10 @@ public final class TakeOff {
   public static final double ANTIPODE_KM = 100;
 
   private static final double ROUND_THE_EARTH_KM = 2 * Math.PI * Hop.EARTH_RADIUS_KM;
+
+  /** Once round, on whichever great circle, rounded up [km]. */
+  private static final double FARTHEST_KM = 40_100;
+
   private static final double FARTHEST_NEAR_VERTICAL_KM = 2000;
 
   /** Hop numbers reported beyond the least. */
@@ -47,10 +51,10 @@ public final class TakeOff {
    */
   public static Windows toward(double distanceKm, double frequencyMHz) {
     requireFrequency(frequencyMHz);
-    if (!(distanceKm >= 0 && distanceKm <= ROUND_THE_EARTH_KM)) {
+    if (!(distanceKm >= 0 && distanceKm <= FARTHEST_KM)) {
       throw new IllegalArgumentException(
           said(
-              "A target %s km away is farther than once round the earth. Give 0 to 40,030 km.",
+              "A target %s km away is farther than once round the earth. Give 0 to 40,100 km.",
               distanceKm));
     }
     List<Window> f2 = windows(Layer.F2, distanceKm, frequencyMHz, MORE_F2_HOPS, 99);

@@ -96,6 +96,19 @@ class FeedChainTest {
   }
 
   @Test
+  void without_power_there_are_no_volts_and_the_rest_stands() {
+    MatchingNetwork unit =
+        new MatchingNetwork(MatchingNetwork.Kind.L, 0, 3e-5, 1e-11, 5e-10, 150, 1000, 3000);
+    Complex load = new Complex(200, 30);
+    FeedResult none = FeedChain.run(load, 7.1, OPEN_WIRE, 12, unit, 0);
+    FeedResult some = FeedChain.run(load, 7.1, OPEN_WIRE, 12, unit, 100);
+    assertEquals(0, none.peakVolts());
+    assertEquals(0, none.matching().peakVolts());
+    assertEquals(some.lossDb(), none.lossDb());
+    assertEquals(some.matching().lossDb(), none.matching().lossDb(), 1e-12);
+  }
+
+  @Test
   void the_line_is_judged_by_what_it_stands() {
     Complex load = new Complex(4000, 0);
     double volts = run(load, OPEN_WIRE, 20).peakVolts();
@@ -117,7 +130,7 @@ class FeedChainTest {
     assertSays("The length of the feed line is -1 m", () -> run(Complex.ONE, OPEN_WIRE, -1));
     assertSays(
         "from 0.1 to 1000 MHz", () -> FeedChain.run(Complex.ONE, 7.1e6, OPEN_WIRE, 1, null, 100));
-    assertSays("The power is 0 W", () -> FeedChain.run(Complex.ONE, 7, OPEN_WIRE, 1, null, 0));
+    assertSays("The power is -1 W", () -> FeedChain.run(Complex.ONE, 7, OPEN_WIRE, 1, null, -1));
     assertSays("velocity factor is 1.2", () -> Line.of(400, 1.2, 0, 0));
     assertSays("loss is not a number", () -> Line.ofLoss(400, 0.9, Double.NaN));
     assertSays("impedance is 0 ohm", () -> Line.of(0, 0.9, 0, 0));
