@@ -1,6 +1,11 @@
 package spanwright.moments;
 
+import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import org.apache.commons.math3.complex.Complex;
 
 /**
  * Solves wires over ground. Thread-safe; solutions are the same bits whatever the threads.
@@ -8,6 +13,9 @@ import java.util.List;
  * <p>Share one solver, and with it one set of ground tables, among all candidates.
  */
 public final class Solver {
+  /** Frequencies within this ratio share a mesh. */
+  private static final double SAME_MESH = 1.2;
+
   private final GroundTables tables;
 
   /** A solver with tables of its own. */
@@ -42,13 +50,55 @@ public final class Solver {
    */
   public List<Solution> solve(
       AntennaModel model, Ground ground, double[] frequenciesMHz, MeshAim aim) {
-    throw new UnsupportedOperationException("not yet");
+    ModelCheck.model(model, ground);
+    for (double frequencyMHz : frequenciesMHz) {
+      ModelCheck.frequency(frequencyMHz);
+    }
+    double[] rising = frequenciesMHz.clone();
+    java.util.Arrays.sort(rising);
+    Map<Double, Solution> solved = new HashMap<>();
+    int top = rising.length - 1;
+    while (top >= 0) {
+      PreparedModel prepared = new PreparedModel(model, ground, rising[top], aim);
+      double least = rising[top] / SAME_MESH;
+      for (; top >= 0 && rising[top] >= least; top--) {
+        double f = rising[top];
+        solved.computeIfAbsent(f, x -> prepared.solve(x, tables.reflection(ground, x)));
+      }
+    }
+    List<Solution> inOrder = new ArrayList<>();
+    for (double frequencyMHz : frequenciesMHz) {
+      inOrder.add(solved.get(frequencyMHz));
+    }
+    return inOrder;
   }
 
   /** As {@link #solve}, solved again on a finer mesh to say how far refinement moves it. */
   public Solution solveAndRefine(
       AntennaModel model, Ground ground, double frequencyMHz, MeshAim aim) {
-    throw new UnsupportedOperationException("not yet");
+    Solution solution = solve(model, ground, frequencyMHz, aim);
+    MeshAim next = aim == MeshAim.COARSE ? MeshAim.FULL : MeshAim.FINE;
+    Solution finer = solve(model, ground, frequencyMHz, next);
+    double change =
+        reflectionCoefficient(solution.impedance())
+            .subtract(reflectionCoefficient(finer.impedance()))
+            .abs();
+    double allowed = aim == MeshAim.COARSE ? 0.05 : 0.01;
+    List<String> more =
+        change <= allowed
+            ? List.of()
+            : List.of(
+                String.format(
+                    Locale.ROOT,
+                    "A finer mesh moves the reflection coefficient (400 ohm) by %.3f, more than"
+                        + " the %.2f aimed at: solve with a finer mesh.",
+                    change,
+                    allowed));
+    return solution.refined(change, more);
+  }
+
+  private static Complex reflectionCoefficient(Complex z) {
+    return z.subtract(400).divide(z.add(400));
   }
 
   /** Solves something small until the machine runs at speed; call it once when a server starts. */

@@ -1,0 +1,84 @@
+package spanwright.moments;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.apache.commons.math3.complex.Complex;
+
+/**
+ * One model meshed for frequencies up to some highest: everything that does not depend on the
+ * frequency, worked out once.
+ */
+final class PreparedModel {
+  /** Points may stray from an element by this part of a wavelength. */
+  private static final double STRAY = 1.0 / 800;
+
+  /** And by this part of the lowest height. */
+  private static final double STRAY_OF_HEIGHT = 0.02;
+
+  private final AntennaModel model;
+  private final Ground ground;
+  private final Mesh mesh;
+  private final StaticPairs statics;
+  private final SourcePoints points;
+  private final List<String> warnings;
+
+  PreparedModel(AntennaModel model, Ground ground, double highestMHz, MeshAim aim) {
+    this.model = model;
+    this.ground = ground;
+    double k = Constants.waveNumber(highestMHz);
+    double stray = 2 * Math.PI / k * STRAY;
+    if (ground.kind() != Ground.Kind.NONE) {
+      for (WireSpec wire : model.wires()) {
+        for (Vertex p : wire.points()) {
+          stray = Math.min(stray, STRAY_OF_HEIGHT * p.z());
+        }
+      }
+    }
+    Outline outline = Outline.of(model, stray);
+    mesh = Mesh.of(model, outline, MeshRule.of(aim), k);
+    statics = new StaticPairs(mesh);
+    points = new SourcePoints(mesh);
+    warnings = Doubts.about(model, ground, mesh, statics);
+  }
+
+  Solution solve(double frequencyMHz, Reflection reflection) {
+    double k = Constants.waveNumber(frequencyMHz);
+    MatrixFill fill = new MatrixFill(mesh, statics, points, reflection, k);
+    SymmetricSystem system = fill.fields();
+    int wires = model.wires().size();
+    Complex[] internal = new Complex[wires];
+    double[] resistance = new double[wires];
+    double[] elastance = new double[wires];
+    for (int w = 0; w < wires; w++) {
+      internal[w] = Material.internalImpedance(model.wires().get(w), frequencyMHz);
+      resistance[w] = internal[w].getReal();
+      elastance[w] = Material.sheathElastance(model.wires().get(w));
+    }
+    fill.addMaterial(internal, elastance);
+    system.solve(mesh.excitation);
+    double ir = 0;
+    double ii = 0;
+    for (int i = 0; i < mesh.unknowns; i++) {
+      ir += mesh.excitation[i] * system.answerRe[i];
+      ii += mesh.excitation[i] * system.answerIm[i];
+    }
+    Complex impedance = new Complex(ir, ii).reciprocal();
+    if (impedance.isNaN() || impedance.isInfinite() || !(ir > 0)) {
+      throw new ModelFault(
+          "At "
+              + frequencyMHz
+              + " MHz the wires take no power that can be told from rounding: "
+              + ModelCheck.name(model.feedWire())
+              + " is too short for this frequency, or nearly closed on itself. Lengthen it or"
+              + " raise the frequency.");
+    }
+    Currents currents = new Currents(mesh, system.answerRe, system.answerIm);
+    FarField far = new FarField(currents, points, ground, k);
+    List<String> all = new ArrayList<>(warnings);
+    Doubts.ofAnswer(impedance, system, ground, all);
+    Solution.Found found =
+        new Solution.Found(
+            frequencyMHz, impedance, 0.5 * ir, currents.loss(resistance), system.residual, all);
+    return new Solution(found, currents, far, reflection, ground, model.wires(), Double.NaN);
+  }
+}
