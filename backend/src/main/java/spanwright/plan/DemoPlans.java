@@ -8,7 +8,8 @@ import java.util.List;
 
 /** The plots that come with the program, invented, to look at and to start from. */
 public final class DemoPlans {
-  private static final List<String> NAMES = List.of();
+  private static final List<String> NAMES =
+      List.of("old-orchard", "garden-in-steps", "corner-plot");
 
   private DemoPlans() {}
 

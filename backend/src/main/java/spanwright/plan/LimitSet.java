@@ -1,5 +1,6 @@
 package spanwright.plan;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import com.fasterxml.jackson.annotation.JsonProperty;
 import java.util.List;
 import java.util.Map;
@@ -19,7 +20,7 @@ public record LimitSet(
     String name,
     double averagingMinutes,
     List<Row> rows,
-    @JsonProperty("default") boolean isDefault,
+    @JsonProperty("default") @JsonInclude(JsonInclude.Include.NON_DEFAULT) boolean isDefault,
     Map<String, String> sources) {
 
   public LimitSet {

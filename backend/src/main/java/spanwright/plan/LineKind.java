@@ -1,5 +1,6 @@
 package spanwright.plan;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import com.fasterxml.jackson.annotation.JsonProperty;
 import java.util.Map;
 
@@ -30,5 +31,5 @@ public record LineKind(
     double weight,
     double diameter,
     double peakVolts,
-    @JsonProperty("default") boolean isDefault,
+    @JsonProperty("default") @JsonInclude(JsonInclude.Include.NON_DEFAULT) boolean isDefault,
     Map<String, String> sources) {}

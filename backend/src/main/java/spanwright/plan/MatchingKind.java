@@ -1,5 +1,6 @@
 package spanwright.plan;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import com.fasterxml.jackson.annotation.JsonProperty;
 import java.util.Map;
 
@@ -16,5 +17,5 @@ public record MatchingKind(
     String id,
     String name,
     MatchingUnit unit,
-    @JsonProperty("default") boolean isDefault,
+    @JsonProperty("default") @JsonInclude(JsonInclude.Include.NON_DEFAULT) boolean isDefault,
     Map<String, String> sources) {}

@@ -1,5 +1,6 @@
 package spanwright.plan;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import com.fasterxml.jackson.annotation.JsonProperty;
 import java.util.Map;
 
@@ -24,5 +25,5 @@ public record RopeKind(
     double breaking,
     double stiffness,
     double workingShare,
-    @JsonProperty("default") boolean isDefault,
+    @JsonProperty("default") @JsonInclude(JsonInclude.Include.NON_DEFAULT) boolean isDefault,
     Map<String, String> sources) {}

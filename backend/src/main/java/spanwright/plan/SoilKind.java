@@ -1,5 +1,6 @@
 package spanwright.plan;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import com.fasterxml.jackson.annotation.JsonProperty;
 import java.util.Map;
 
@@ -18,5 +19,5 @@ public record SoilKind(
     String name,
     double permittivity,
     double conductivity,
-    @JsonProperty("default") boolean isDefault,
+    @JsonProperty("default") @JsonInclude(JsonInclude.Include.NON_DEFAULT) boolean isDefault,
     Map<String, String> sources) {}

@@ -1,5 +1,6 @@
 package spanwright.plan;
 
+import com.fasterxml.jackson.annotation.JsonIgnore;
 import java.util.List;
 
 /**
@@ -24,6 +25,7 @@ public record Target(
   }
 
   /** Whether the target is near-vertical cover. */
+  @JsonIgnore
   public boolean isNearVertical() {
     return nearVerticalKm != null;
   }
