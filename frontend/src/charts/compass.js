@@ -75,7 +75,7 @@ export function compass(targets, size) {
   };
   const ticks = Array.from({ length: 36 }, (_, index) => tick(index * 10, index % 3 === 0 ? 6 : 3)).join('');
   return svg('svg', { class: 'chart compass', viewBox: `${-middle} ${-middle} ${size} ${size}`, width: size, height: size, role: 'group', 'aria-label': 'Targets by bearing and distance' }, [
-    ...RINGS_KM.map((km) => svg('circle', { class: km === HALF_WAY_KM ? 'compass-rim' : 'compass-ring', r: radiusOf(km, radius) })),
+    ...[...RINGS_KM].reverse().map((km) => svg('circle', { class: km === HALF_WAY_KM ? 'compass-rim' : 'compass-ring', r: radiusOf(km, radius) })),
     svg('path', { class: 'compass-ticks', d: ticks }),
     svg('path', { class: 'compass-axes', d: `M0 ${-radius}V${radius}M${-radius} 0H${radius}` }),
     ...RINGS_KM.slice(0, 3).map((km) => svg('text', { class: 'axis middle halo', x: 0, y: radiusOf(km, radius) + 4 }, [`${km / 1000}`])),

@@ -1,4 +1,5 @@
 // @ts-check
+import { bearing as bearingText } from '../../charts/figures.js';
 import { number } from '../../units/figures.js';
 import { formatLength } from '../../units/length.js';
 import { dimension, dimensionLabel, toDimension } from './dimensions.js';
@@ -35,6 +36,10 @@ export function mount(planView, store, shell) {
     asked = false;
     const state = store.get();
     const shown = state.place === 'placements' && view !== null;
+    if (state.place === 'brief' && view !== null) {
+      drawAims(state);
+      return;
+    }
     const focused = document.activeElement?.closest('.placement-layer [data-key]')?.getAttribute('data-key');
     for (const layer of Object.values(layers)) layer.replaceChildren();
     if (!shown || !placementsOf(state).chosen) planView.letter('placement', null);
@@ -50,6 +55,22 @@ export function mount(planView, store, shell) {
     asked = true;
     requestAnimationFrame(draw);
   };
+
+  /**
+   * In the brief, the bearings of its targets from the middle of the plot.
+   * @param {State} state
+   */
+  function drawAims(state) {
+    for (const layer of Object.values(layers)) layer.replaceChildren();
+    const corners = state.plan.boundary ?? [];
+    const centre = corners.length ? [0, 1].map((k) => (Math.min(...corners.map((/** @type {number[]} */ corner) => corner[k])) + Math.max(...corners.map((/** @type {number[]} */ corner) => corner[k]))) / 2)
+      : [view.x + view.width / 2, view.y + view.height / 2];
+    const targets = (state.plan.brief?.targets ?? []).filter((/** @type {any} */ target) => typeof target.bearing === 'number')
+      .map((/** @type {any} */ target) => ({ name: target.name ?? 'target', bearing: target.bearing, distance: distanceWords(target.bearing, target.distanceKm) }));
+    const aims = bearings(targets, { middle: toPixels(view, centre), ring: 0 }, view, state.plan.site?.planNorth ?? 0);
+    layers.rose.append(inPixels(view, aims.nodes, 'rose-drawing'));
+    planView.letter('placement', { labels: aims.labels, symbols: aims.symbols, hide: [] });
+  }
 
   /**
    * @param {State} state
@@ -91,7 +112,7 @@ export function mount(planView, store, shell) {
     });
   }
 
-  store.subscribe((state) => [state.search, state.chosen, state.chosenBand, state.shownRefusal, state.units, state.place], ask);
+  store.subscribe((state) => [state.search, state.chosen, state.chosenBand, state.shownRefusal, state.units, state.place, state.plan.brief, state.plan.boundary, state.plan.site], ask);
   planView.onView((next) => {
     view = next;
     ask();
@@ -135,9 +156,13 @@ function bandShown(state, placement) {
 function targetsOf(plan, band) {
   return band.targets.filter((/** @type {any} */ target) => typeof target.bearing === 'number').map((/** @type {any} */ target) => {
     const km = (plan.brief?.targets ?? []).find((/** @type {any} */ one) => one.name === target.name)?.distanceKm;
-    const far = km === undefined ? '' : ` ${String(Math.round(km)).replace(/\B(?=(\d{3})+$)/g, '\u2009')} km`;
-    return { name: target.name, bearing: target.bearing, distance: `${Math.round(target.bearing)}°${far}` };
+    return { name: target.name, bearing: target.bearing, distance: distanceWords(target.bearing, km) };
   });
+}
+
+/** @param {number} bearing @param {number|undefined} km */
+function distanceWords(bearing, km) {
+  return `${bearingText(bearing)}${km === undefined ? '' : `  ${number(km, 0)} km`}`;
 }
 
 /**
