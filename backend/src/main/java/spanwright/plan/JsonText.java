@@ -19,9 +19,11 @@ import java.nio.charset.CharacterCodingException;
 import java.nio.charset.CoderResult;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
@@ -55,6 +57,7 @@ final class JsonText {
   private final JsonParser parser;
   private final List<Fault> faults = new ArrayList<>();
   private final Map<JsonNode, Integer> lengths = new IdentityHashMap<>();
+  private final Set<String> twice = new HashSet<>();
   private int values;
 
   private JsonText(JsonParser parser) {
@@ -171,7 +174,7 @@ final class JsonText {
       String name = parser.currentName();
       String inner = Paths.field(path, name);
       parser.nextToken();
-      if (object.has(name)) {
+      if (object.has(name) && twice.add(inner)) {
         faults.add(Fault.of(inner, Wording.TWICE, Wording.clean(name)));
       }
       object.set(name, value(inner));
@@ -249,7 +252,7 @@ final class JsonText {
     if (said.contains("expected a valid value") || said.contains("expected a value")) {
       return "+.".contains(found) ? Wording.MISWRITTEN_NUMBER : Wording.VALUE_EXPECTED;
     }
-    if (said.contains("CTRL-CHAR")) {
+    if (said.contains("unquoted character")) {
       return Wording.BROKEN_TEXT;
     }
     return said.contains("escape") ? Wording.BAD_ESCAPE : Wording.NOT_JSON;

@@ -16,6 +16,9 @@ import java.util.List;
  * <p>Pure and safe between threads.
  */
 public final class PlanReader {
+  /** More faults than this are not even counted. */
+  private static final int MOST = 2000;
+
   private PlanReader() {}
 
   /**
@@ -26,7 +29,7 @@ public final class PlanReader {
    */
   public record Outcome(Plan plan, List<Fault> faults) {
     public Outcome {
-      faults = List.copyOf(faults);
+      faults = List.copyOf(faults.subList(0, Math.min(MOST, faults.size())));
     }
 
     /** Whether there is a plan. */
@@ -43,7 +46,7 @@ public final class PlanReader {
    */
   public record Draft(JsonNode json, List<Fault> faults) {
     public Draft {
-      faults = List.copyOf(faults);
+      faults = List.copyOf(faults.subList(0, Math.min(MOST, faults.size())));
     }
 
     /** Whether there is a document. */

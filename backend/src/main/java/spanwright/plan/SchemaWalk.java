@@ -64,8 +64,12 @@ final class SchemaWalk {
   }
 
   private void value(JsonNode value, JsonNode part, String path, String label) {
+    value(value, part, path, label, "");
+  }
+
+  private void value(JsonNode value, JsonNode part, String path, String label, String called) {
     JsonNode form = resolved(part);
-    String title = part.path("title").asText(form.path("title").asText());
+    String title = part.path("title").asText(form.path("title").asText(called));
     if (form.has("oneOf")) {
       choice(value, form, path, label, title);
     } else if (form.has("x-numbers")) {
@@ -99,12 +103,12 @@ final class SchemaWalk {
     List<String> kinds = new ArrayList<>();
     for (JsonNode option : form.path("oneOf")) {
       if (fits(value, option)) {
-        value(value, option, path, label);
+        value(value, option, path, label, title);
         return;
       }
       kinds.add(kind(option));
     }
-    say(path, Wording.WRONG_TYPE, label, title, Wording.either(kinds), found(value));
+    say(path, Wording.MUST_BE, label, title, Wording.either(kinds), found(value));
   }
 
   private void object(JsonNode value, JsonNode form, String path, String label) {
@@ -180,7 +184,10 @@ final class SchemaWalk {
     for (int i = 0; i < value.size(); i++) {
       JsonNode entry = value.get(i);
       String inner = Paths.entry(path, i);
-      if (items.path("type").asText().equals("object")) {
+      if (items.path("type").asText().equals("object") && !entry.isObject()) {
+        String thing = label(items.path("title").asText(), entry, i);
+        say(inner, Wording.MUST_BE, thing, "it", kind(items), found(entry));
+      } else if (items.path("type").asText().equals("object")) {
         value(entry, form.path("items"), inner, label(items.path("title").asText(), entry, i));
       } else if (items.has("x-numbers")) {
         point(entry, items, inner, label, "point " + (i + 1) + " of " + title);
@@ -210,7 +217,7 @@ final class SchemaWalk {
       right &= number.isNumber();
     }
     if (!right) {
-      say(path, Wording.BAD_POINT, label, title, pointKind(form), pointFound(value));
+      say(path, Wording.MUST_BE, label, title, pointKind(form), pointFound(value));
       return;
     }
     JsonNode most = form.path("items").path("maximum");
@@ -225,7 +232,7 @@ final class SchemaWalk {
         return;
       }
       if (!draft && number.asDouble() < form.path("items").path("minimum").asDouble()) {
-        say(path, Wording.OUT_OF_RANGE, label, title, "at least 0", number.asDouble());
+        say(path, Wording.MUST_BE, label, title, "at least 0", number.asDouble());
         return;
       }
     }
@@ -263,8 +270,7 @@ final class SchemaWalk {
       List<String> words = new ArrayList<>();
       form.path("enum").forEach(word -> words.add(word.asText()));
       if (!words.contains(text)) {
-        String list = Wording.either(words);
-        say(path, Wording.NOT_A_WORD, label, title, list, Wording.quoted(text));
+        say(path, Wording.MUST_BE, label, title, words(form), "the text " + Wording.quoted(text));
       }
       return;
     }
@@ -306,7 +312,7 @@ final class SchemaWalk {
     boolean elsewhere = form.path("x-unit").asText().equals("MHz");
     if (out && !draft && !elsewhere) {
       String range = range(above, least, most) + unit(form);
-      say(path, Wording.OUT_OF_RANGE, label, title, range, Wording.number(number) + unit(form));
+      say(path, Wording.MUST_BE, label, title, range, Wording.number(number) + unit(form));
     }
   }
 
@@ -328,9 +334,8 @@ final class SchemaWalk {
         form.path("type").asText().matches("number|integer")
             && value.isTextual()
             && value.asText().strip().matches("[-+]?[0-9].*");
-    Wording wording = digits ? Wording.NUMBER_IN_QUOTES : Wording.WRONG_TYPE;
-    String thing = title.isEmpty() ? "the entry" : title;
-    say(path, wording, label, thing, kind(form), found(value));
+    Wording wording = digits ? Wording.NUMBER_IN_QUOTES : Wording.MUST_BE;
+    say(path, wording, label, title, kind(form), found(value));
   }
 
   private static String unit(JsonNode form) {
@@ -341,8 +346,8 @@ final class SchemaWalk {
     if (form.has("x-numbers")) {
       return pointKind(form);
     }
-    if (form.has("enum") && form.path("enum").size() == 1) {
-      return "the word " + form.path("enum").get(0).asText();
+    if (form.has("enum")) {
+      return words(form);
     }
     return switch (form.path("type").asText()) {
       case "object" -> "an object in braces";
@@ -352,6 +357,12 @@ final class SchemaWalk {
       case "boolean" -> "true or false";
       default -> "a number" + (form.has("x-unit") ? " in " + form.path("x-unit").asText() : "");
     };
+  }
+
+  private static String words(JsonNode form) {
+    List<String> words = new ArrayList<>();
+    form.path("enum").forEach(word -> words.add(word.asText()));
+    return (words.size() == 1 ? "the word " : "one of ") + Wording.either(words);
   }
 
   static String found(JsonNode value) {

@@ -55,19 +55,17 @@ enum Wording {
   UNKNOWN_FIELD("%s: \"%s\" is not a field of the plan format here. Take it out."),
   UNKNOWN_FIELD_LIKE("%s: \"%s\" is not a field of the plan format here. Did you mean \"%s\"?"),
   MISSING("%s: \"%s\" is missing. Add %s: %s."),
-  WRONG_TYPE("%s: %s must be %s; found %s."),
+  MUST_BE("%s: %s must be %s; found %s."),
   NUMBER_IN_QUOTES("%s: %s must be %s; found %s. Write the number alone, without quotes and unit."),
   NOT_WHOLE("%s: %s must be a whole number; found %s."),
   NOT_FINITE("%s: %s holds a number too large to be used. Give a smaller one."),
-  OUT_OF_RANGE("%s: %s must be %s; found %s."),
-  NOT_A_WORD("%s: %s must be one of %s; found %s."),
   WRONG_FORMAT("%s: %s must be \"%s\", but is %s. This program reads no other."),
-  BAD_POINT("%s: %s must be %s; found %s."),
   FAR_AWAY(
       "%s: %s has the coordinate %s m; coordinates lie within 100 km (100000 m) of the plan's"
           + " origin. Is it in the right unit?"),
   TOO_MANY(
-      "%s: %s: %s entries are too many, at most %s are allowed. Leave out those that change nothing."),
+      "%s: %s: %s entries are too many, at most %s are allowed. Leave out those that change"
+          + " nothing."),
   TOO_FEW("%s: %s: at least %s needed, found %s."),
   TOO_LONG("%s: %s has %s characters; at most %s are allowed. Shorten it."),
   NOTHING_WRITTEN("%s: %s is empty. Write something."),
@@ -181,14 +179,16 @@ enum Wording {
     return String.format(Locale.ROOT, form, words);
   }
 
-  /** A number as people write it: six digits at most, no trailing zeros. */
+  /** A number as people write it: seven digits at most, no trailing zeros. */
   static String number(double value) {
     if (value == 0 || Double.isNaN(value) || Double.isInfinite(value)) {
       return value == 0 ? "0" : String.valueOf(value);
     }
     BigDecimal rounded = new BigDecimal(value).round(new MathContext(7)).stripTrailingZeros();
-    double size = Math.abs(value);
-    return size >= 1e-4 && size < 1e12 ? rounded.toPlainString() : rounded.toString();
+    int tens = rounded.precision() - rounded.scale() - 1;
+    return tens >= -3 && tens < 12
+        ? rounded.toPlainString()
+        : rounded.scaleByPowerOfTen(-tens).toPlainString() + "e" + tens;
   }
 
   /** A user's text in quotes, shortened, with nothing in it that could upset a terminal. */

@@ -63,7 +63,8 @@ class PlanReaderTest {
                     """
                     "buildings": [{"id": "h", "footprint": [[1,1],[9,1],[9,6],[1,6]], "eaves": 5}],
                     "mastZones": [{"id": "m", "area": [[1,9],[9,9],[9,16],[1,16]], "highest": 9}],
-                    "supports\""""))
+                    "supports\"\
+                    """))
             .plan();
     assertEquals(5, plan.buildings().get(0).ridge());
     assertEquals(Building.Roof.FLAT, plan.buildings().get(0).roof());
