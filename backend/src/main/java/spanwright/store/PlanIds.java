@@ -21,6 +21,7 @@ final class PlanIds {
   static String word(String title) {
     String plain =
         Normalizer.normalize(title == null ? "" : title, Normalizer.Form.NFKD)
+            .replaceAll("['’]", "")
             .replaceAll("\\p{M}+", "")
             .toLowerCase(Locale.ROOT)
             .replaceAll("[^a-z0-9]+", "-");

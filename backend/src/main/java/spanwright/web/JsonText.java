@@ -2,14 +2,15 @@ package spanwright.web;
 
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonLocation;
+import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.StreamReadConstraints;
 import com.fasterxml.jackson.core.StreamReadFeature;
 import com.fasterxml.jackson.core.exc.StreamConstraintsException;
 import com.fasterxml.jackson.core.io.JsonEOFException;
-import com.fasterxml.jackson.databind.DeserializationFeature;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.json.JsonMapper;
+import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
@@ -44,7 +45,6 @@ public final class JsonText {
                           .build())
                   .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
                   .build())
-          .enable(DeserializationFeature.FAIL_ON_TRAILING_TOKENS)
           .build();
 
   private static final Pattern CHARACTER = Pattern.compile("character \\((.*) \\(code");
@@ -63,14 +63,26 @@ public final class JsonText {
 
   /** Reads one document. */
   public static JsonNode read(String text) throws BadJson {
-    try {
-      JsonNode tree = MAPPER.readTree(text);
-      if (tree == null || tree.isMissingNode()) {
-        throw new BadJson(new Fault("", "There is no JSON in it: the text is empty."));
+    JsonLocation reached = null;
+    try (JsonParser parser = MAPPER.createParser(text)) {
+      try {
+        JsonNode tree = MAPPER.readTree(parser);
+        if (tree == null || tree.isMissingNode()) {
+          throw new BadJson(new Fault("", "There is no JSON in it: the text is empty."));
+        }
+        if (parser.nextToken() != null) {
+          String more = "Something follows after the end of the document. Remove it.";
+          throw new BadJson(new Fault(where(parser.currentTokenLocation()), more));
+        }
+        return tree;
+      } finally {
+        reached = parser.currentLocation();
       }
-      return tree;
     } catch (JsonProcessingException e) {
-      throw new BadJson(new Fault(where(e.getLocation()), words(e)));
+      JsonLocation at = e.getLocation() == null ? reached : e.getLocation();
+      throw new BadJson(new Fault(where(at), words(e)));
+    } catch (IOException e) {
+      throw new IllegalStateException("a text is read without any input", e);
     }
   }
 
@@ -101,12 +113,15 @@ public final class JsonText {
           + " is not JSON. Text stands in double quotes; besides it there are numbers, true, false"
           + " and null.";
     }
-    if (inner.startsWith("Trailing token")) {
-      return "Something follows after the end of the document. Remove it.";
-    }
     Matcher found = CHARACTER.matcher(inner);
     if (found.find()) {
       return "The character " + found.group(1) + " cannot stand here in JSON.";
+    }
+    if (inner.startsWith("Illegal unquoted character")) {
+      return "A text holds a control character, such as a line break. Write \\n or leave it out.";
+    }
+    if (inner.startsWith("Unexpected close marker")) {
+      return "The bracket or brace " + quoted(inner) + " closes what was not opened.";
     }
     if (inner.startsWith("Invalid numeric value")) {
       return "This is not a number as JSON writes it.";

@@ -95,7 +95,8 @@ public final class WebServer implements AutoCloseable {
     cfg.jetty.modifyServer(
         server -> {
           server.setErrorHandler(new JettyErrors());
-          server.setStopTimeout(1000);
+          // By then searches and event streams have ended, and a save is whole or not there.
+          server.setStopTimeout(0);
         });
     cfg.jetty.modifyHttpConfiguration(WebServer::configureHttp);
   }
@@ -141,30 +142,28 @@ public final class WebServer implements AutoCloseable {
   }
 
   private static ServerTrouble trouble(Options options, RuntimeException e) {
-    for (Throwable t = e; t != null; t = t.getCause()) {
-      if (t instanceof BindException || t instanceof IOException) {
-        String where = Gate.bracketed(options.host()) + ":" + options.port();
-        boolean taken = String.valueOf(t.getMessage() + e.getMessage()).contains("in use");
-        return new ServerTrouble(
-            taken || isBindTaken(t)
-                ? "Port "
-                    + options.port()
-                    + " is taken by another program. Stop it, or choose another with --port (0"
-                    + " takes a free one)."
-                : "The server cannot answer on "
-                    + where
-                    + ". Choose an address of this machine with --host and a port above 1023 with"
-                    + " --port.",
-            e);
-      }
+    Throwable deepest = e;
+    while (deepest.getCause() != null) {
+      deepest = deepest.getCause();
     }
-    throw e;
-  }
-
-  private static boolean isBindTaken(Throwable t) {
-    return t instanceof BindException
-        && !String.valueOf(t.getMessage()).contains("assign")
-        && !String.valueOf(t.getMessage()).contains("ermission");
+    if (!(deepest instanceof IOException)) {
+      throw e;
+    }
+    boolean taken =
+        deepest instanceof BindException && String.valueOf(deepest.getMessage()).contains("in use");
+    return new ServerTrouble(
+        taken
+            ? "Port "
+                + options.port()
+                + " is taken by another program. Stop it, or choose another with --port (0 takes a"
+                + " free one)."
+            : "The server cannot answer on "
+                + Gate.bracketed(options.host())
+                + ", port "
+                + options.port()
+                + ". Choose an address of this machine with --host and a port above 1023 with"
+                + " --port.",
+        e);
   }
 
   /** The port it answers on. */
