@@ -11,14 +11,17 @@ import { between, distance, left, tidyPoint, unit } from './vector.js';
  * wall, cut to the outline for a gable and drawn in by half the width for a hip; along the longest
  * wall itself for a lean-to (its high side).
  * @param {Point[]} footprint @param {'gable'|'hip'|'lean-to'|'flat'} roof
+ * @param {number} [beside] the wall it runs beside instead of the longest
  * @returns {[Point, Point]|null} null for a flat roof or no outline
  */
-export function defaultRidge(footprint, roof) {
+export function defaultRidge(footprint, roof, beside) {
   if (roof === 'flat' || footprint.length < 3) return null;
-  let longest = 0;
-  footprint.forEach((p, i) => {
-    if (wall(footprint, i) > wall(footprint, longest) + 1e-6) longest = i;
-  });
+  let longest = beside ?? 0;
+  if (beside === undefined) {
+    footprint.forEach((_, i) => {
+      if (wall(footprint, i) > wall(footprint, longest) + 1e-6) longest = i;
+    });
+  }
   const a = footprint[longest];
   const b = footprint[(longest + 1) % footprint.length];
   if (roof === 'lean-to') return [tidyPoint(a.slice(0, 2)), tidyPoint(b.slice(0, 2))];

@@ -1,6 +1,7 @@
 // @ts-check
 /** Edits of a plan as pure functions: plan in, another plan out; nothing is changed in place. */
-import { moved, tidyPoint } from '../geometry/vector.js';
+import { defaultRidge } from '../geometry/roof.js';
+import { distance, moved, tidyPoint } from '../geometry/vector.js';
 import { find, KINDS, listOf, nameOf, partsOf, pointsOf, refOf, withPoints } from './kinds.js';
 
 /** @typedef {import('./types.js').Plan} Plan */
@@ -82,18 +83,31 @@ export function moveVertex(plan, ref, vertex, at) {
     if (!old) return thing;
     const next = tidyPoint([at[0], at[1], ...(at.length > 2 ? at.slice(2) : old.slice(2))]);
     if (next.every((value, i) => value === old[i])) return thing;
-    return ridgeFollows(withPoints(kind, thing, points.map((p, i) => (i === vertex ? next : p))), old, next);
+    return ridgeFollows(thing, withPoints(kind, thing, points.map((p, i) => (i === vertex ? next : p))), old, next);
   });
 }
 
-/** The ends of a ridge that stood on a corner or on a moved wall go with it. @param {any} thing @param {Point} old @param {Point} next */
-function ridgeFollows(thing, old, next) {
-  if (!thing.ridgeLine?.length) return thing;
-  const line = thing.ridgeLine.map((/** @type {Point} */ p) =>
-    Math.hypot(p[0] - old[0], p[1] - old[1]) < 1e-3 ? next.slice(0, 2) : p,
-  );
-  return { ...thing, ridgeLine: line };
+/**
+ * A ridge that was the footprint's own default stays so; else its ends on a moved corner go with it.
+ * @param {any} before @param {any} after @param {Point} [old] @param {Point} [next]
+ */
+function ridgeFollows(before, after, old, next) {
+  if (before.ridgeLine?.length !== 2 || !before.footprint) return after;
+  for (const beside of [undefined, ...before.footprint.keys()]) {
+    const own = defaultRidge(before.footprint, before.roof, beside);
+    if (!own || !sameLine(own, before.ridgeLine)) continue;
+    const keep = beside === undefined || before.footprint.length === after.footprint.length;
+    return { ...after, ridgeLine: defaultRidge(after.footprint, before.roof, keep ? beside : undefined) ?? [] };
+  }
+  if (!old || !next) return after;
+  const line = before.ridgeLine.map((/** @type {Point} */ p) => (distance(p, old) < 1e-3 ? next.slice(0, 2) : p));
+  return { ...after, ridgeLine: line };
 }
+
+/** @param {Point[]} a @param {Point[]} b */
+const sameLine = (a, b) =>
+  (distance(a[0], b[0]) < 2e-3 && distance(a[1], b[1]) < 2e-3) ||
+  (distance(a[0], b[1]) < 2e-3 && distance(a[1], b[0]) < 2e-3);
 
 /** @param {Plan} plan @param {string} ref @param {number} edge the new corner comes after this one @param {Point} at @returns {Plan} */
 export function insertVertex(plan, ref, edge, at) {
@@ -104,7 +118,7 @@ export function insertVertex(plan, ref, edge, at) {
     const b = points[(edge + 1) % points.length];
     const height = KINDS[kind].heights ? [tidyPoint([((a[2] ?? 0) + (b[2] ?? 0)) / 2])[0]] : [];
     const corner = tidyPoint([at[0], at[1], ...height]);
-    return withPoints(kind, thing, [...points.slice(0, edge + 1), corner, ...points.slice(edge + 1)]);
+    return ridgeFollows(thing, withPoints(kind, thing, [...points.slice(0, edge + 1), corner, ...points.slice(edge + 1)]));
   });
   return kind === 'boundary' ? shiftRules(next, edge, 1) : next;
 }
@@ -116,7 +130,7 @@ export function removeVertex(plan, ref, vertex) {
   const points = pointsOf(found.kind, found.thing);
   if (points.length <= KINDS[found.kind].least) return plan;
   const next = changeThing(plan, ref, (thing) =>
-    withPoints(found.kind, thing, points.filter((_, i) => i !== vertex)),
+    ridgeFollows(thing, withPoints(found.kind, thing, points.filter((_, i) => i !== vertex))),
   );
   return found.kind === 'boundary' ? shiftRules(next, vertex, -1) : next;
 }

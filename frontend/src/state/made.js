@@ -104,3 +104,51 @@ export function newPlan(title = 'New plot') {
     },
   };
 }
+
+/**
+ * Sets a figure that others follow: a roof's form brings its ridge, an overhead line's kind its kept
+ * distance, a support's kind its crown, a zone's rule its height.
+ * @param {any} thing @param {string} kind of thing @param {string} path @param {any} value
+ * @returns {any} the thing with the figure and what follows it, or null where nothing follows
+ */
+export function withFollowing(thing, kind, path, value) {
+  if (kind === 'buildings' && path === 'roof') {
+    const ridge = value === 'flat' ? thing.eaves : thing.ridge > thing.eaves ? thing.ridge : thing.eaves + 1.5;
+    return { ...thing, roof: value, ridge, ridgeLine: defaultRidge(thing.footprint, value) ?? [] };
+  }
+  if (kind === 'buildings' && path === 'eaves' && thing.roof === 'flat') {
+    return { ...thing, eaves: value, ridge: value };
+  }
+  if (kind === 'overheadLines' && path === 'kind') {
+    return { ...thing, kind: value, clearance: KEPT[/** @type {'unknown'} */ (value)] };
+  }
+  if (kind === 'supports' && path === 'kind') {
+    const fresh = thing.canopy || value !== 'tree' ? {} : { canopy: SUPPORTS.tree.canopy };
+    const { canopy, ...bare } = thing;
+    return value === 'tree' ? { ...thing, kind: value, ...fresh } : { ...bare, kind: value };
+  }
+  if (kind === 'supports' && path === 'canopy') {
+    const { canopy: _gone, ...bare } = thing;
+    return value ? { ...thing, canopy: { ...SUPPORTS.tree.canopy } } : bare;
+  }
+  if (kind === 'zones' && path === 'rule') {
+    const { height, ...bare } = thing;
+    return value === 'headroom' ? { ...bare, rule: value, height: height ?? 5 } : { ...bare, rule: value };
+  }
+  return null;
+}
+
+/** A ridge turned to run the other way of its building. @param {any} building @returns {any} */
+export function ridgeTurned(building) {
+  const [a, b] = building.ridgeLine ?? [];
+  if (!a || !b) return { ...building, ridgeLine: defaultRidge(building.footprint, building.roof) ?? [] };
+  const i = building.footprint.reduce((/** @type {number} */ best, /** @type {Point} */ p, /** @type {number} */ k) => {
+    const q = building.footprint[(k + 1) % building.footprint.length];
+    const across = Math.abs((q[0] - p[0]) * (b[0] - a[0]) + (q[1] - p[1]) * (b[1] - a[1]));
+    const length = Math.hypot(q[0] - p[0], q[1] - p[1]);
+    return length > best.length + 1e-6 && across < 0.5 * length * Math.hypot(b[0] - a[0], b[1] - a[1]) ? { k, length } : best;
+  }, /** @type {any} */ ({ k: -1, length: 0 }));
+  if (i.k < 0) return building;
+  // The ring begun at that wall, alone made longest, gives the other ridge.
+  return { ...building, ridgeLine: defaultRidge(building.footprint, building.roof, i.k) ?? building.ridgeLine };
+}

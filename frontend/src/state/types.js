@@ -30,6 +30,7 @@
  * @property {string} etag
  * @property {Saved} saved
  * @property {string|null} notice one sentence about the plot as a whole, or null
+ * @property {string|null} [clash] id of the plot another window saved first
  * @property {'survey'|'brief'|'placements'|'sheet'} place
  * @property {Selection|null} selection
  * @property {string} tool name of the tool in hand; `select` when none is

@@ -50,3 +50,19 @@ export function degreesInBox(value) {
   if (value === null || value === undefined || !Number.isFinite(value)) return '';
   return String(Math.round(value * 1e6) / 1e6).replace('-', MINUS);
 }
+
+/**
+ * A direction typed while drawing: as `parseDirection`, or from the last wall: `L` and `R` square to
+ * the left and right, `A` straight ahead, `L30` and `R12.5` by so many degrees.
+ * @param {string} text @param {number|null} before direction of the last wall
+ * @returns {number|null}
+ */
+export function parseDirectionFrom(text, before) {
+  const turn = /^([lr])\s*(\d+\.?\d*)?$/i.exec(plain(text).replace(/\s*°$/, ''));
+  if (turn && before !== null) {
+    const by = turn[2] === undefined ? 90 : Number(turn[2]);
+    return (before + (turn[1].toLowerCase() === 'l' ? -by : by) + 720) % 360;
+  }
+  if (/^a$/i.test(plain(text)) && before !== null) return before;
+  return parseDirection(text);
+}
