@@ -13,8 +13,6 @@ import { mountSurvey } from './draw/survey.js';
 import { mount as mountBrief } from './panels/brief.js';
 import { mount as mountHints } from './panels/hints.js';
 import { createPlots } from './panels/plots.js';
-import { mount as mountPlacementHead } from './panels/placement-head.js';
-import { mount as mountPlacementSide } from './panels/placement-side.js';
 import { mount as mountPlacement } from './panels/placement.js';
 import { mount as mountPlacements } from './panels/placements.js';
 import { mount as mountRefusals } from './panels/refusals.js';
@@ -69,6 +67,7 @@ const plots = createPlots(store, keeper, say);
 document.body.append(plots.root);
 const shell = {
   api, say, go, planView, desk, keeper, strip: STRIP, saveNow: keeper.saveNow, plots: plots.open,
+  sideView: part('side-view'),
   zoom: (/** @type {number} */ factor) => zoomBy(planView, factor),
 };
 
@@ -89,8 +88,6 @@ mountBrief(part('brief'), store, shell);
 mountPlacements(part('placements'), store, shell);
 mountRefusals(part('refusals'), store, shell);
 mountPlacement(part('placement'), store, shell);
-mountPlacementHead(part('placement-head'), store, shell);
-mountPlacementSide(part('side-view'), store, shell);
 mountSheet(part('sheet'), store, shell);
 
 /** Once a hand is on the plan its view stays as it is when the window changes. @param {any} event */
