@@ -71,6 +71,11 @@ final class Figures {
     return required(metres);
   }
 
+  /** A length to cut in a sentence, with its unit. */
+  String sayCut(double metres) {
+    return cut(metres) + suffix();
+  }
+
   /** A rope to cut: to 0.5 m or the foot, upward. */
   String ropeCut(double metres) {
     return feet

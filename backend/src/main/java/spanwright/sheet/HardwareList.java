@@ -33,29 +33,25 @@ final class HardwareList {
 
   private void add(String what, int count, int spares, String note) {
     if (count > 0) {
-      items.add(new SheetModel.Item(what, count, spares, note));
+      items.add(new SheetModel.Item(what, count, null, spares, note));
     }
   }
 
   /** Totals by kind, which is how wire and rope are bought. */
   private void addLengths(
       List<SheetModel.WirePiece> wires, SheetModel.FeedLine line, List<SheetModel.Rope> ropes) {
-    Map<String, Double> wire = new LinkedHashMap<>();
-    wires.forEach(w -> wire.merge(w.kind(), w.cut(), Double::sum));
-    wire.forEach((kind, sum) -> add(kind, 1, 0, job.figures.cut(sum) + unit() + " in all"));
-    add(line.kind(), 1, 0, job.figures.cut(line.cut()) + unit());
-    Map<String, Double> rope = new LinkedHashMap<>();
-    ropes.forEach(r -> rope.merge(r.kind(), r.cut(), Double::sum));
-    rope.forEach((kind, sum) -> add(kind, 1, 0, job.figures.ropeCut(sum) + unit() + " in all"));
-  }
-
-  private String unit() {
-    return job.figures.unit().equals("m") ? " m" : "";
+    Map<String, Double> sums = new LinkedHashMap<>();
+    wires.forEach(w -> sums.merge(w.kind(), w.cut(), Double::sum));
+    sums.merge(line.kind(), line.cut(), Double::sum);
+    ropes.forEach(r -> sums.merge(r.kind(), r.cut(), Double::sum));
+    sums.forEach(
+        (kind, sum) ->
+            items.add(new SheetModel.Item(kind, 1, Math.round(sum * 100) / 100.0, 0, "in all")));
   }
 
   private void addInsulators() {
     int ends = 0;
-    for (WireList.Piece piece : WireList.pieces(job)) {
+    for (WireList.Piece piece : WireList.pieces(job.placement)) {
       ends += piece.loop() ? 0 : 1;
     }
     add("end insulators, 100 mm", ends, 1, null);

@@ -73,7 +73,11 @@ sealed interface Ink {
       double turn,
       double halo,
       double shade)
-      implements Ink {}
+      implements Ink {
+    public Lettering {
+      text = Letters.printable(text);
+    }
+  }
 
   /** What x is of the lettering. */
   enum Anchor {

@@ -48,7 +48,7 @@ final class Job {
               + " Assess it on this plan first.");
     }
     for (Placement.Attachment held : placement.attachments()) {
-      if (find(held.on()).isEmpty()) {
+      if (find(plan, held.on()).isEmpty()) {
         throw new IllegalArgumentException(
             "The placement hangs on \""
                 + held.on()
@@ -119,10 +119,14 @@ final class Job {
 
   /** What is shown to people for an id of the plan: its name, or the id itself. */
   String name(String id) {
-    return find(id).map(n -> n.isBlank() ? id : n).orElse(id);
+    return name(plan, id);
   }
 
-  private Optional<String> find(String id) {
+  static String name(Plan plan, String id) {
+    return find(plan, id).map(n -> n.isBlank() ? id : n).orElse(id);
+  }
+
+  private static Optional<String> find(Plan plan, String id) {
     return Stream.of(
             plan.supports().stream().map(s -> new String[] {s.id(), s.name()}),
             plan.bracketLines().stream().map(s -> new String[] {s.id(), s.name()}),

@@ -8,6 +8,7 @@ import org.apache.fontbox.ttf.CmapLookup;
 import org.apache.fontbox.ttf.TTFParser;
 import org.apache.fontbox.ttf.TrueTypeFont;
 import org.apache.pdfbox.io.RandomAccessReadBuffer;
+import org.apache.pdfbox.pdmodel.PDDocument;
 
 /**
  * How wide lettering is, from the font that the PDF embeds, and which characters it has. Bold is
@@ -36,10 +37,7 @@ final class Letters {
   private Letters() {}
 
   static InputStream font() {
-    InputStream stream = RandomAccessReadBuffer.class.getResourceAsStream(FONT);
-    if (stream == null) {
-      stream = org.apache.pdfbox.pdmodel.PDDocument.class.getResourceAsStream(FONT);
-    }
+    InputStream stream = PDDocument.class.getResourceAsStream(FONT);
     if (stream == null) {
       throw new IllegalStateException("the sheet's font is not on the class path");
     }

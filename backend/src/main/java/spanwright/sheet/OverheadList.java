@@ -34,8 +34,9 @@ final class OverheadList {
       lines.add(line(job, line));
     }
     lines.sort(
-        Comparator.comparingDouble(
-            l -> l.nearest() == null ? Double.NEGATIVE_INFINITY : l.nearest().distance()));
+        Comparator.comparing((SheetModel.Line l) -> !countsWhenThingsFall(l))
+            .thenComparingDouble(
+                l -> l.nearest() == null ? Double.NEGATIVE_INFINITY : l.nearest().distance()));
     return new SheetModel.Overhead(
         List.of(
             "Treat every line as live. Check these distances on site, by eye and by laser from the"

@@ -18,7 +18,7 @@ final class RopeList {
 
   private RopeList(Job job) {
     this.job = job;
-    this.pieces = WireList.pieces(job);
+    this.pieces = WireList.pieces(job.placement);
   }
 
   static List<SheetModel.Rope> of(Job job) {

@@ -74,7 +74,12 @@ public record SheetModel(
    * @param catalogue wires, lines, ropes, rules
    * @param placement as assessed
    */
-  public record Source(Plan plan, Catalogue catalogue, Placement placement) {}
+  public record Source(Plan plan, Catalogue catalogue, Placement placement) {
+    /** What is shown to people for an id of the plan. */
+    String name(String id) {
+      return Job.name(plan, id);
+    }
+  }
 
   /**
    * The head of the sheet.
@@ -115,7 +120,7 @@ public record SheetModel(
    * Overhead lines, first of all.
    *
    * @param say what to read aloud before work
-   * @param lines every line of the plan, the nearest first
+   * @param lines every line of the plan, power before telephone, the nearest first
    */
   public record Overhead(List<String> say, List<Line> lines) {
     public Overhead {
@@ -249,10 +254,11 @@ public record SheetModel(
    *
    * @param what it is
    * @param count needed
+   * @param length in all where it goes by length [m], or null
    * @param spares to bring besides
    * @param note or null
    */
-  public record Item(String what, int count, int spares, String note) {}
+  public record Item(String what, int count, Double length, int spares, String note) {}
 
   /**
    * A holding point.

@@ -27,12 +27,12 @@ public final class Sheets {
 
   /** The whole sheet as PDF: list, then drawing. */
   public static byte[] toPdf(SheetModel model) {
-    throw new UnsupportedOperationException("the sheet is being built");
+    return PdfWriter.write(model.head().title() + ", " + model.head().name(), PageMaker.all(model));
   }
 
   /** The list as CSV (RFC 4180), one section after another, UTF-8. */
   public static String toCsv(SheetModel model) {
-    throw new UnsupportedOperationException("the sheet is being built");
+    return CsvWriter.write(model);
   }
 
   /** The model as JSON. */
@@ -46,7 +46,9 @@ public final class Sheets {
 
   /** The site drawing as a page of SVG, true to scale in millimetres, standing alone. */
   public static String toSvg(SheetModel model) {
-    throw new UnsupportedOperationException("the sheet is being built");
+    return SvgWriter.write(
+        "Site drawing of " + model.head().title() + ", " + model.head().name(),
+        PageMaker.drawing(model));
   }
 
   /**
@@ -55,6 +57,6 @@ public final class Sheets {
    * @throws NoCoordinatesException when the plan has no latitude and longitude
    */
   public static String toGeoJson(SheetModel model) {
-    throw new UnsupportedOperationException("the sheet is being built");
+    return GeoJsonWriter.write(model);
   }
 }

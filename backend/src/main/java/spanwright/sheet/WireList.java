@@ -30,21 +30,21 @@ final class WireList {
   record Piece(
       String mark, int conductor, double from, double to, boolean fed, int far, boolean loop) {}
 
-  static List<Piece> pieces(Job job) {
+  static List<Piece> pieces(Placement placement) {
     List<Piece> pieces = new ArrayList<>();
-    for (int c = 0; c < job.placement.conductors().size(); c++) {
-      Placement.Conductor conductor = job.placement.conductors().get(c);
+    for (int c = 0; c < placement.conductors().size(); c++) {
+      Placement.Conductor conductor = placement.conductors().get(c);
       Place first = conductor.points().get(0);
       Place last = conductor.points().get(conductor.points().size() - 1);
-      double fed = job.placement.feed().conductor() == c ? job.placement.feed().fraction() : -1;
+      double fed = placement.feed().conductor() == c ? placement.feed().fraction() : -1;
       if (first.distance(last) < 0.05) {
-        pieces.add(new Piece(mark(pieces), c, 0, 1, fed >= 0, nearest(job, first), true));
+        pieces.add(new Piece(mark(pieces), c, 0, 1, fed >= 0, nearest(placement, first), true));
       } else if (fed > AT_THE_END && fed < 1 - AT_THE_END) {
-        pieces.add(new Piece(mark(pieces), c, 0, fed, true, nearest(job, first), false));
-        pieces.add(new Piece(mark(pieces), c, fed, 1, true, nearest(job, last), false));
+        pieces.add(new Piece(mark(pieces), c, 0, fed, true, nearest(placement, first), false));
+        pieces.add(new Piece(mark(pieces), c, fed, 1, true, nearest(placement, last), false));
       } else {
         boolean fedAtLast = fed >= 1 - AT_THE_END;
-        int far = nearest(job, fedAtLast ? first : last);
+        int far = nearest(placement, fedAtLast ? first : last);
         pieces.add(new Piece(mark(pieces), c, 0, 1, fed >= 0, far, false));
       }
     }
@@ -55,8 +55,8 @@ final class WireList {
     return "W" + (before.size() + 1);
   }
 
-  private static int nearest(Job job, Place end) {
-    List<Placement.Attachment> held = job.placement.attachments();
+  private static int nearest(Placement placement, Place end) {
+    List<Placement.Attachment> held = placement.attachments();
     return IntStream.range(0, held.size())
         .boxed()
         .min(Comparator.comparingDouble(i -> held.get(i).at().distance(end)))
@@ -64,7 +64,7 @@ final class WireList {
   }
 
   static List<SheetModel.WirePiece> of(Job job) {
-    return pieces(job).stream().map(piece -> cut(job, piece)).toList();
+    return pieces(job.placement).stream().map(piece -> cut(job, piece)).toList();
   }
 
   private static SheetModel.WirePiece cut(Job job, Piece piece) {
@@ -163,5 +163,37 @@ final class WireList {
               + " entry.");
     }
     return notes;
+  }
+
+  /** Part of a run, between two shares of its length. */
+  static List<Place> part(List<Place> run, double from, double to) {
+    double whole = Job.length(run);
+    List<Place> out = new ArrayList<>();
+    out.add(at(run, from * whole));
+    double sum = 0;
+    for (int i = 1; i < run.size(); i++) {
+      sum += run.get(i - 1).distance(run.get(i));
+      if (sum > from * whole + 1e-6 && sum < to * whole - 1e-6) {
+        out.add(run.get(i));
+      }
+    }
+    out.add(at(run, to * whole));
+    return out;
+  }
+
+  private static Place at(List<Place> run, double along) {
+    double left = along;
+    for (int i = 1; i < run.size(); i++) {
+      Place a = run.get(i - 1);
+      Place b = run.get(i);
+      double step = a.distance(b);
+      if (left <= step && step > 0) {
+        double t = Math.max(0, left / step);
+        return new Place(
+            a.x() + t * (b.x() - a.x()), a.y() + t * (b.y() - a.y()), a.z() + t * (b.z() - a.z()));
+      }
+      left -= step;
+    }
+    return run.get(run.size() - 1);
   }
 }

@@ -37,7 +37,9 @@ final class WorkOrder {
     }
     ropeSteps();
     steps.add(
-        WireList.pieces(job).stream().map(WireList.Piece::mark).collect(Collectors.joining(", "))
+        WireList.pieces(job.placement).stream()
+                .map(WireList.Piece::mark)
+                .collect(Collectors.joining(", "))
             + " and L1: join at the feedpoint on the ground, strain relief taking the pull.");
     hoist();
     sag();

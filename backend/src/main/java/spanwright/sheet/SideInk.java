@@ -1,0 +1,454 @@
+package spanwright.sheet;
+
+import java.util.ArrayList;
+import java.util.List;
+import spanwright.assess.Placement;
+import spanwright.plan.Building;
+import spanwright.plan.Canopy;
+import spanwright.plan.GroundSurface;
+import spanwright.plan.OverheadLine;
+import spanwright.plan.Place;
+import spanwright.plan.Plan;
+import spanwright.plan.Point;
+import spanwright.plan.Support;
+
+/**
+ * The side view: spans unfolded one after another along the wire, heights true, at the plan's own
+ * scale, with the ground and whatever stands in the plane of each span.
+ */
+final class SideInk {
+  /** Metres shown beyond the first and last attachment. */
+  static final double BEYOND = 2.5;
+
+  /** Metres of paper's height kept over the highest attachment. */
+  static final double ABOVE = 1.6;
+
+  /**
+   * A span unfolded.
+   *
+   * @param span as assessed
+   * @param start metres along the row at its first attachment
+   * @param length level [m]
+   */
+  record Leg(Placement.Span span, double start, double length) {
+    Point from() {
+      return span.points().get(0).onPlan();
+    }
+
+    Point to() {
+      return span.points().get(span.points().size() - 1).onPlan();
+    }
+
+    /** Metres along the row of a place, dropped square onto the span's course. */
+    double along(Point p) {
+      Point a = from();
+      Point b = to();
+      if (length < 1e-6) {
+        return start;
+      }
+      double s = ((p.x() - a.x()) * (b.x() - a.x()) + (p.y() - a.y()) * (b.y() - a.y())) / length;
+      return start + s;
+    }
+
+    /** Metres to the side of the span's course. */
+    double aside(Point p) {
+      Point a = from();
+      Point b = to();
+      return length < 1e-6
+          ? a.distance(p)
+          : ((b.x() - a.x()) * (p.y() - a.y()) - (b.y() - a.y()) * (p.x() - a.x())) / length;
+    }
+
+    Point at(double along) {
+      double t = length < 1e-6 ? 0 : (along - start) / length;
+      return new Point(
+          from().x() + t * (to().x() - from().x()), from().y() + t * (to().y() - from().y()));
+    }
+  }
+
+  private final SheetModel model;
+  private final Plan plan;
+  private final Placement placement;
+  private final GroundSurface ground;
+  private final Figures figures;
+  private final Frame frame;
+  private final List<Leg> legs;
+  private final Labels labels;
+  private final Pen pen;
+
+  SideInk(SheetModel model, Frame frame, List<Leg> legs, Labels labels, Pen pen) {
+    this.model = model;
+    this.plan = model.source().plan();
+    this.placement = model.source().placement();
+    this.ground = GroundSurface.of(plan);
+    this.figures = new Figures(model.options().units());
+    this.frame = frame;
+    this.legs = legs;
+    this.labels = labels;
+    this.pen = pen;
+  }
+
+  /** Packs spans into rows no longer than asked [m], in order. */
+  static List<List<Leg>> rows(Placement placement, double longest) {
+    List<List<Leg>> rows = new ArrayList<>();
+    List<Leg> row = new ArrayList<>();
+    double at = 0;
+    for (Placement.Span span : placement.spans()) {
+      if (span.points().size() < 2) {
+        continue;
+      }
+      Point a = span.points().get(0).onPlan();
+      double length = a.distance(span.points().get(span.points().size() - 1).onPlan());
+      boolean joined = !row.isEmpty() && row.get(row.size() - 1).span().to() == span.from();
+      if (!row.isEmpty() && (!joined || at + length + 2 * BEYOND > longest)) {
+        rows.add(row);
+        row = new ArrayList<>();
+        at = 0;
+      }
+      row.add(new Leg(span, at, length));
+      at += length;
+    }
+    if (!row.isEmpty()) {
+      rows.add(row);
+    }
+    return rows;
+  }
+
+  void draw() {
+    axis();
+    for (int i = 0; i < legs.size(); i++) {
+      Leg leg = legs.get(i);
+      double from = leg.start() - (i == 0 ? BEYOND : 0);
+      double to = leg.start() + leg.length() + (i == legs.size() - 1 ? BEYOND : 0);
+      obstacles(leg, from, to);
+      groundLine(leg, from, to);
+    }
+    holders();
+    legs.forEach(this::ropesAndLine);
+    legs.forEach(this::wire);
+    levels();
+  }
+
+  private void axis() {
+    double step = frame.mm(5) >= 9 ? 5 : frame.mm(10) >= 9 ? 10 : 50;
+    double top = frame.metres(frame.height()) + frame.y0();
+    for (double z = Math.ceil(frame.y0() / step) * step; z < top; z += step) {
+      double y = frame.y(z);
+      pen.line(frame.left() - 1.5, y, frame.left(), y, 0.25, 1);
+      pen.line(frame.left(), y, frame.left() + frame.width(), y, 0.1, 0.2);
+      pen.text(frame.left() - 2.2, y + 0.9, Figures.whole(z), 7, Ink.Anchor.END, false, 0.8);
+    }
+  }
+
+  private void groundLine(Leg leg, double from, double to) {
+    List<double[]> line = new ArrayList<>();
+    int steps = Math.max(2, (int) Math.ceil((to - from) / Math.max(0.5, frame.metres(2))));
+    for (int i = 0; i <= steps; i++) {
+      double s = from + (to - from) * i / steps;
+      line.add(new double[] {frame.x(s), frame.y(ground.heightAt(leg.at(s)))});
+    }
+    List<Ink.Stroke> earth = new ArrayList<>();
+    for (double[] p : line) {
+      earth.add(
+          Pen.stroke(
+              List.of(new double[] {p[0], p[1]}, new double[] {p[0] - 1.2, p[1] + 1.4}), false));
+    }
+    pen.shape(earth, 0.13, 0.6, Ink.NONE);
+    pen.path(line, 0.5, 1);
+    labels.avoid(line, 3);
+  }
+
+  private void obstacles(Leg leg, double from, double to) {
+    plan.trees().forEach(t -> crown(leg, t.at(), t.canopy(), from, to));
+    plan.supports().forEach(s -> crown(leg, s.at(), s.canopy(), from, to));
+    plan.buildings().forEach(b -> building(leg, b, from, to));
+    plan.overheadLines().forEach(l -> overhead(leg, l, from, to));
+  }
+
+  /** A crown cut by the plane is solid, one within two metres of it dashed. */
+  private void crown(Leg leg, Point at, Canopy canopy, double from, double to) {
+    if (canopy == null) {
+      return;
+    }
+    double s = leg.along(at);
+    double aside = Math.abs(leg.aside(at));
+    double near = aside - canopy.radius();
+    if (near > 2 || s < from - canopy.radius() || s > to + canopy.radius()) {
+      return;
+    }
+    double half =
+        near < 0
+            ? Math.sqrt(canopy.radius() * canopy.radius() - aside * aside)
+            : canopy.radius() * 0.8;
+    double base = ground.heightAt(at);
+    double middle = base + (canopy.from() + canopy.to()) / 2;
+    double tall = frame.mm(canopy.to() - canopy.from()) / 2;
+    Ink.Stroke round = Pen.round(frame.x(s), frame.y(middle), frame.mm(half), tall);
+    if (near < 0) {
+      pen.shape(List.of(round), 0.25, 0.6, 0.06);
+      double foot = frame.y(base);
+      double crown = frame.y(base + canopy.from());
+      pen.line(frame.x(s) - 0.4, foot, frame.x(s) - 0.4, crown, 0.2, 0.6);
+      pen.line(frame.x(s) + 0.4, foot, frame.x(s) + 0.4, crown, 0.2, 0.6);
+    } else {
+      pen.shape(List.of(round), 0.2, 0.55, Ink.NONE, 1.2, 0.8);
+    }
+  }
+
+  private void building(Leg leg, Building building, double from, double to) {
+    if (building.footprint().size() < 3) {
+      return;
+    }
+    Roof roof = new Roof(building);
+    List<double[]> run = new ArrayList<>();
+    double step = Math.max(0.05, (to - from) / 1500);
+    for (double s = from; s <= to + step / 2; s += step) {
+      Point at = leg.at(s);
+      if (roof.covers(at)) {
+        run.add(new double[] {s, ground.heightAt(at) + roof.heightAt(at)});
+      } else if (!run.isEmpty()) {
+        section(leg, building, run);
+        run.clear();
+      }
+    }
+    if (!run.isEmpty()) {
+      section(leg, building, run);
+    }
+  }
+
+  private void section(Leg leg, Building building, List<double[]> run) {
+    List<double[]> outline = new ArrayList<>();
+    double first = run.get(0)[0];
+    double last = run.get(run.size() - 1)[0];
+    if (last - first < 0.06) {
+      return;
+    }
+    outline.add(new double[] {frame.x(first), frame.y(ground.heightAt(leg.at(first)))});
+    for (double[] p : run) {
+      outline.add(new double[] {frame.x(p[0]), frame.y(p[1])});
+    }
+    outline.add(new double[] {frame.x(last), frame.y(ground.heightAt(leg.at(last)))});
+    pen.area(outline, 0, Ink.NONE, 0);
+    Hatching.draw(pen, Hatching.area(outline).buffer(0), 1.8, true, 0.13, 0.55);
+    pen.area(outline, 0.4, 1, Ink.NONE);
+    double x = frame.x((first + last) / 2);
+    double y = frame.y(ground.heightAt(leg.at((first + last) / 2)) + building.eaves() / 2);
+    labels.ask(
+        60,
+        List.of(
+            Labels.text(x, y, model.source().name(building.id()), SurveyInk.SMALL, false, 0, 0),
+            Labels.text(
+                x, y - 3.5, model.source().name(building.id()), SurveyInk.SMALL, false, 0, 1),
+            Labels.text(
+                x, y + 3.5, model.source().name(building.id()), SurveyInk.SMALL, false, 0, 1)));
+  }
+
+  /** Where an overhead line passes through the plane of a span, with its kept distance. */
+  private void overhead(Leg leg, OverheadLine line, double from, double to) {
+    Double keep =
+        model.overhead().lines().stream()
+            .filter(l -> l.id().equals(line.id()))
+            .map(SheetModel.Line::keep)
+            .findFirst()
+            .orElse(null);
+    for (int i = 1; i < line.path().size(); i++) {
+      Place p = ground.raise(line.path().get(i - 1));
+      Place q = ground.raise(line.path().get(i));
+      double a = leg.aside(p.onPlan());
+      double b = leg.aside(q.onPlan());
+      if (leg.length() < 1e-6 || (a > 0) == (b > 0)) {
+        continue;
+      }
+      double t = a / (a - b);
+      double s = leg.along(p.onPlan()) * (1 - t) + leg.along(q.onPlan()) * t;
+      double z = p.z() * (1 - t) + q.z() * t;
+      if (s < from || s > to) {
+        continue;
+      }
+      double x = frame.x(s);
+      double y = frame.y(z);
+      if (keep != null) {
+        pen.circle(x, y, frame.mm(keep), 0.2, 0.85, Ink.NONE, 2, 0.9);
+      }
+      pen.path(
+          List.of(
+              new double[] {x - 0.9, y - 1.7},
+              new double[] {x + 0.7, y - 0.5},
+              new double[] {x - 0.7, y + 0.5},
+              new double[] {x + 0.9, y + 1.7}),
+          0.5,
+          1);
+      String text =
+          model.source().name(line.id()) + " " + figures.height(z - ground.heightAt(leg.at(s)));
+      labels.ask(10, Labels.around(x, y, text, SurveyInk.BODY, true, 1.8));
+    }
+  }
+
+  /** What holds each attachment, from the ground up. */
+  private void holders() {
+    for (Leg leg : legs) {
+      holder(leg, leg.span().from(), leg.start());
+      holder(leg, leg.span().to(), leg.start() + leg.length());
+    }
+  }
+
+  private void holder(Leg leg, int index, double s) {
+    Placement.Attachment held = placement.attachments().get(index);
+    double foot = ground.heightAt(held.at().onPlan());
+    double x = frame.x(s);
+    Support support =
+        plan.supports().stream().filter(p -> p.id().equals(held.on())).findFirst().orElse(null);
+    boolean tree = support != null && support.kind() == Support.Kind.TREE;
+    boolean stands =
+        support != null
+            && (support.kind() == Support.Kind.MAST || support.kind() == Support.Kind.POLE);
+    for (Placement.NewMast mast : placement.masts()) {
+      if (!mast.zone().equals(held.on())
+          || mast.foot().onPlan().distance(held.at().onPlan()) > 0.5) {
+        continue;
+      }
+      stands = true;
+      foot = mast.foot().z();
+      for (Place guy : mast.guyFeet()) {
+        double along = leg.along(guy.onPlan());
+        pen.line(x, frame.y(mast.top().z()), frame.x(along), frame.y(guy.z()), 0.25, 1);
+      }
+    }
+    if (stands) {
+      pen.line(x, frame.y(foot), x, frame.y(held.at().z()), 0.7, 1);
+    } else if (!tree) {
+      pen.circle(x, frame.y(held.at().z()), 0.8, 0.3, 1, 0);
+    }
+  }
+
+  private void ropesAndLine(Leg leg) {
+    for (Placement.RopeRun rope : placement.ropes()) {
+      boolean fall = rope.what().equals("fall") || rope.what().equals("halyard");
+      boolean here = rope.attachment() == leg.span().from() || rope.attachment() == leg.span().to();
+      if (!fall || !here || rope.points().size() < 2) {
+        continue;
+      }
+      List<double[]> path = new ArrayList<>();
+      for (Place p : rope.points()) {
+        path.add(new double[] {frame.x(leg.along(p.onPlan())) + 0.9, frame.y(p.z())});
+      }
+      pen.path(path, 0.3, 1);
+      if (rope.what().equals("fall")) {
+        double[] end = path.get(path.size() - 1);
+        pen.rect(end[0] - 1, end[1], 2, 2.4, 0.3, 1, 0);
+        Double kilograms = placement.attachments().get(rope.attachment()).kilograms();
+        if (kilograms != null) {
+          labels.ask(
+              30,
+              Labels.around(
+                  end[0], end[1] + 1.2, Figures.kilograms(kilograms) + " kg", 7.5, true, 1.6));
+        }
+      }
+    }
+    Place feed = placement.feed().at();
+    double s = leg.along(feed.onPlan());
+    boolean first = s >= leg.start() - 0.3 && s < leg.start() + leg.length() - 0.3;
+    boolean last = leg == legs.get(legs.size() - 1) && s <= leg.start() + leg.length() + 0.3;
+    if (Math.abs(leg.aside(feed.onPlan())) < 1 && (first || last)) {
+      List<double[]> path = new ArrayList<>();
+      for (Place p : placement.feed().path()) {
+        path.add(new double[] {frame.x(leg.along(p.onPlan())), frame.y(p.z())});
+      }
+      pen.path(path, 1.1, 0);
+      pen.path(path, 0.4, 1, 1.3, 0.7);
+    }
+  }
+
+  private void wire(Leg leg) {
+    List<double[]> run = new ArrayList<>();
+    for (Place p : leg.span().points()) {
+      run.add(new double[] {frame.x(leg.along(p.onPlan())), frame.y(p.z())});
+    }
+    pen.path(run, 0.35, 1);
+    for (Placement.Conductor conductor : placement.conductors()) {
+      List<double[]> wire = new ArrayList<>();
+      for (Place p : conductor.points()) {
+        double s = leg.along(p.onPlan());
+        boolean on =
+            Math.abs(leg.aside(p.onPlan())) < 0.6
+                && s > leg.start() - 0.3
+                && s < leg.start() + leg.length() + 0.3;
+        if (on) {
+          wire.add(new double[] {frame.x(s), frame.y(p.z())});
+        }
+      }
+      pen.path(wire, 0.8, 1);
+    }
+    labels.avoid(run, 8);
+    Place feed = placement.feed().at();
+    double s = leg.along(feed.onPlan());
+    if (Math.abs(leg.aside(feed.onPlan())) < 0.6
+        && s > leg.start() - 0.3
+        && s < leg.start() + leg.length() + 0.3) {
+      pen.rect(frame.x(s) - 1, frame.y(feed.z()) - 1, 2, 2, 0.4, 0, 1);
+    }
+    dimensions(leg, run);
+  }
+
+  private void dimensions(Leg leg, List<double[]> run) {
+    Place middle = HangingList.middle(leg.span().points());
+    double s = leg.along(middle.onPlan());
+    double low = ground.heightAt(leg.at(s));
+    double[] up = {frame.x(s), frame.y(middle.z())};
+    double[] down = {frame.x(s), frame.y(low)};
+    labels.ask(
+        22, Dimensions.beside(up, down, figures.height(middle.z() - low), 0.01, 4, -4, 8, -8));
+    model.sags().stream()
+        .filter(g -> g.span().equals((leg.span().from() + 1) + "–" + (leg.span().to() + 1)))
+        .findFirst()
+        .ifPresent(
+            g ->
+                labels.ask(
+                    20,
+                    Labels.around(
+                        up[0],
+                        up[1],
+                        "sag " + figures.length(g.middle()),
+                        SurveyInk.BODY,
+                        true,
+                        2)));
+  }
+
+  /** Point numbers, heights and level distances along the ground. */
+  private void levels() {
+    double y = frame.top() + frame.height() - 2.4;
+    List<double[]> ends = new ArrayList<>();
+    for (int i = 0; i < legs.size(); i++) {
+      Leg leg = legs.get(i);
+      if (i == 0) {
+        ends.add(new double[] {leg.start(), leg.span().from()});
+      }
+      ends.add(new double[] {leg.start() + leg.length(), leg.span().to()});
+      double a = frame.x(leg.start()) + 2.6;
+      double b = frame.x(leg.start() + leg.length()) - 2.6;
+      String text = figures.length(leg.length());
+      if (b - a > Letters.width(text, 8, true, true) + 4) {
+        pen.line(a, y, b, y, 0.2, 1);
+        pen.add(
+            new Ink.Lettering(
+                (a + b) / 2, y + 1, text, 8, Ink.Anchor.MIDDLE, true, true, 0, 0.8, 1));
+      }
+    }
+    double last = Double.NEGATIVE_INFINITY;
+    for (double[] end : ends) {
+      Placement.Attachment held = placement.attachments().get((int) end[1]);
+      double x = Math.max(frame.x(end[0]), last + 4.6);
+      Symbols.number(pen, x, y, String.valueOf((int) end[1] + 1));
+      last = x;
+      labels.ask(
+          5,
+          Labels.around(
+              frame.x(end[0]),
+              frame.y(held.at().z()),
+              figures.height(held.aboveGround()),
+              9,
+              true,
+              1.4));
+    }
+  }
+}

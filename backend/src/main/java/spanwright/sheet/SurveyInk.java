@@ -1,0 +1,432 @@
+package spanwright.sheet;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Envelope;
+import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.geom.LineString;
+import org.locationtech.jts.geom.Polygon;
+import spanwright.plan.Building;
+import spanwright.plan.Canopy;
+import spanwright.plan.Metalwork;
+import spanwright.plan.OverheadLine;
+import spanwright.plan.PeopleVolume;
+import spanwright.plan.Place;
+import spanwright.plan.Plan;
+import spanwright.plan.Point;
+import spanwright.plan.Support;
+import spanwright.plan.Tree;
+import spanwright.plan.Zone;
+
+/** Draws what was surveyed, thin: boundary, buildings, crowns, zones, metalwork, overhead lines. */
+final class SurveyInk {
+  static final double SMALL = 7.5;
+  static final double BODY = 8;
+
+  private final SheetModel model;
+  private final Plan plan;
+  private final Frame frame;
+  private final Figures figures;
+  private final Labels labels;
+  private final Pen pen;
+
+  SurveyInk(SheetModel model, Frame frame, Labels labels, Pen pen) {
+    this.model = model;
+    this.plan = model.source().plan();
+    this.frame = frame;
+    this.figures = new Figures(model.options().units());
+    this.labels = labels;
+    this.pen = pen;
+  }
+
+  void draw() {
+    grid();
+    plan.overheadLines().forEach(this::corridor);
+    plan.trees().forEach(this::crown);
+    plan.supports().stream().filter(s -> s.canopy() != null).forEach(this::crown);
+    plan.zones().forEach(this::zone);
+    plan.people().forEach(this::people);
+    plan.buildings().forEach(this::building);
+    boundary();
+    plan.metalwork().forEach(this::metal);
+    plan.overheadLines().forEach(this::overhead);
+    plan.supports().forEach(this::support);
+  }
+
+  private void grid() {
+    double step = gridStep();
+    for (double x = Math.ceil(frame.x0() / step) * step; frame.x(x) < right(); x += step) {
+      pen.line(frame.x(x), frame.top(), frame.x(x), frame.top() + frame.height(), 0.1, 0.16);
+    }
+    for (double y = Math.ceil(frame.y0() / step) * step; frame.y(y) > frame.top(); y += step) {
+      pen.line(frame.left(), frame.y(y), right(), frame.y(y), 0.1, 0.16);
+    }
+  }
+
+  /** Metres between grid lines: 12 mm of paper at least. */
+  double gridStep() {
+    double step = 1;
+    for (double next : new double[] {5, 10, 20, 50, 100, 200, 500, 1000, 5000, 20000, 100000}) {
+      if (frame.mm(step) < 12) {
+        step = next;
+      }
+    }
+    return step;
+  }
+
+  private double right() {
+    return frame.left() + frame.width();
+  }
+
+  private Polygon window(double margin) {
+    return (Polygon)
+        Sight.SHAPES.toGeometry(
+            new Envelope(
+                frame.left() - margin,
+                right() + margin,
+                frame.top() - margin,
+                frame.top() + frame.height() + margin));
+  }
+
+  /** The pieces of a path on paper that show in the window. */
+  private List<List<double[]>> shown(List<double[]> path, double margin) {
+    List<List<double[]>> pieces = new ArrayList<>();
+    if (path.size() < 2) {
+      return pieces;
+    }
+    Geometry cut = window(margin).intersection(line(path));
+    for (int i = 0; i < cut.getNumGeometries(); i++) {
+      if (cut.getGeometryN(i) instanceof LineString piece && piece.getLength() > 0.2) {
+        List<double[]> points = new ArrayList<>();
+        for (var c : piece.getCoordinates()) {
+          points.add(new double[] {c.x, c.y});
+        }
+        pieces.add(points);
+      }
+    }
+    return pieces;
+  }
+
+  private static LineString line(List<double[]> path) {
+    return Sight.SHAPES.createLineString(
+        path.stream().map(p -> new Coordinate(p[0], p[1])).toArray(Coordinate[]::new));
+  }
+
+  private SheetModel.Line row(OverheadLine line) {
+    return model.overhead().lines().stream()
+        .filter(l -> l.id().equals(line.id()))
+        .findFirst()
+        .orElseThrow();
+  }
+
+  private void corridor(OverheadLine line) {
+    Double keep = row(line).keep();
+    List<double[]> path = frame.places(line.path());
+    if (keep == null || path.size() < 2) {
+      return;
+    }
+    Geometry area = line(path).buffer(Math.max(0.1, frame.mm(keep)));
+    Geometry seen = area.intersection(window(2));
+    if (seen.isEmpty()) {
+      return;
+    }
+    Hatching.draw(pen, seen, 1.9, false, 0.1, 0.4);
+    for (int i = 0; i < area.getNumGeometries(); i++) {
+      if (area.getGeometryN(i) instanceof Polygon part) {
+        pen.area(Hatching.outline(part), 0.2, 0.85, Ink.NONE, 2, 0.9);
+      }
+    }
+    String text = "keep " + figures.required(keep);
+    List<Labels.Spot> spots = new ArrayList<>();
+    for (List<double[]> piece : shown(path, 0)) {
+      for (double share : new double[] {0.5, 0.3, 0.7, 0.15, 0.85}) {
+        double[] at = along(piece, share);
+        double turn = Labels.along(at[2], at[3]);
+        for (double side : new double[] {-1, 1}) {
+          double off = side * (frame.mm(keep) + 1.9);
+          spots.add(
+              Labels.text(at[0] - at[3] * off, at[1] + at[2] * off, text, SMALL, true, turn, 1));
+        }
+      }
+    }
+    labels.ask(30, spots);
+  }
+
+  /** A point at a share of a path and the direction there: x, y, ux, uy. */
+  static double[] along(List<double[]> path, double share) {
+    double whole = 0;
+    for (int i = 1; i < path.size(); i++) {
+      whole += Math.hypot(path.get(i)[0] - path.get(i - 1)[0], path.get(i)[1] - path.get(i - 1)[1]);
+    }
+    double want = share * whole;
+    for (int i = 1; i < path.size(); i++) {
+      double[] a = path.get(i - 1);
+      double[] b = path.get(i);
+      double piece = Math.hypot(b[0] - a[0], b[1] - a[1]);
+      if (piece > 1e-9 && (want <= piece || i == path.size() - 1)) {
+        double t = Math.min(1, want / piece);
+        return new double[] {
+          a[0] + t * (b[0] - a[0]),
+          a[1] + t * (b[1] - a[1]),
+          (b[0] - a[0]) / piece,
+          (b[1] - a[1]) / piece
+        };
+      }
+      want -= piece;
+    }
+    return new double[] {path.get(0)[0], path.get(0)[1], 1, 0};
+  }
+
+  private void overhead(OverheadLine line) {
+    boolean telephone = line.kind() == OverheadLine.Kind.TELEPHONE;
+    SheetModel.Line row = row(line);
+    String words = row.name() + ", " + row.kind();
+    List<Labels.Spot> spots = new ArrayList<>();
+    for (List<double[]> piece : shown(frame.places(line.path()), 15)) {
+      List<double[]> drawn = Symbols.zigZag(piece);
+      pen.path(drawn, telephone ? 1.1 : 1.5, 0);
+      pen.path(drawn, telephone ? 0.25 : 0.5, 1);
+      labels.avoid(piece, 6);
+    }
+    for (List<double[]> piece : shown(frame.places(line.path()), -2)) {
+      for (double share : new double[] {0.5, 0.35, 0.65, 0.2, 0.8}) {
+        double[] at = along(piece, share);
+        for (double off : new double[] {-3, 3, -5, 5}) {
+          spots.add(
+              Labels.text(
+                  at[0] - at[3] * off,
+                  at[1] + at[2] * off,
+                  words,
+                  BODY,
+                  true,
+                  Labels.along(at[2], at[3]),
+                  Math.abs(share - 0.5) + Math.abs(off) / 10));
+        }
+      }
+    }
+    labels.ask(10, spots);
+    for (Place p : line.path()) {
+      double[] at = frame.at(p);
+      if (frame.holds(at, 0)) {
+        pen.circle(at[0], at[1], 0.75, 0.2, 1, 1);
+        labels.ask(12, Labels.around(at[0], at[1], figures.height(p.z()), BODY, true, 1.6));
+      }
+    }
+  }
+
+  private void crown(Tree tree) {
+    crown(tree.at(), tree.canopy());
+    double[] at = frame.at(tree.at());
+    Symbols.tree(pen, at[0], at[1]);
+    String text = model.source().name(tree.id()) + heights(tree.canopy());
+    labels.ask(70, Labels.around(at[0], at[1], text, SMALL, false, 2));
+  }
+
+  private void crown(Support support) {
+    crown(support.at(), support.canopy());
+  }
+
+  private String heights(Canopy canopy) {
+    return canopy == null
+        ? ""
+        : ", " + figures.height(canopy.from()) + "–" + figures.height(canopy.to());
+  }
+
+  /** A scalloped ring with a dotted one inside. */
+  private void crown(Point at, Canopy canopy) {
+    if (canopy == null) {
+      return;
+    }
+    double[] c = frame.at(at);
+    double r = frame.mm(canopy.radius());
+    int lobes = Math.max(8, (int) Math.round(2 * Math.PI * r / 4.2));
+    List<Ink.Step> path = new ArrayList<>();
+    for (int i = 0; i <= lobes; i++) {
+      double a = 2 * Math.PI * i / lobes;
+      double x = c[0] + 0.96 * r * Math.cos(a);
+      double y = c[1] + 0.96 * r * Math.sin(a);
+      if (i == 0) {
+        path.add(Ink.Step.to(x, y));
+        continue;
+      }
+      double before = 2 * Math.PI * (i - 1) / lobes;
+      double out = 1.1 * r;
+      double third = (a - before) / 4;
+      path.add(
+          new Ink.Step(
+              true,
+              c[0] + out * Math.cos(before + third),
+              c[1] + out * Math.sin(before + third),
+              c[0] + out * Math.cos(a - third),
+              c[1] + out * Math.sin(a - third),
+              x,
+              y));
+    }
+    pen.shape(List.of(new Ink.Stroke(List.copyOf(path), true)), 0.25, 0.6, 0.05);
+    pen.circle(c[0], c[1], 0.55 * r, 0.2, 0.5, Ink.NONE, 0.3, 1.2);
+  }
+
+  private void zone(Zone zone) {
+    List<double[]> area = frame.points(zone.area());
+    pen.area(area, 0.22, 0.7, Ink.NONE, 1.6, 1);
+    String rule =
+        switch (zone.rule()) {
+          case NO_WIRE -> "no wire";
+          case NO_MAST -> "no mast";
+          case HEADROOM ->
+              "headroom " + (zone.height() == null ? "" : figures.height(zone.height()));
+        };
+    label(zone.area(), model.source().name(zone.id()) + ", " + rule, 80);
+  }
+
+  private void people(PeopleVolume people) {
+    pen.area(frame.points(people.area()), 0.22, 0.55, Ink.NONE, 0.3, 0.9);
+    label(
+        people.area(),
+        model.source().name(people.id()) + ", people to " + figures.height(people.to()),
+        82);
+  }
+
+  /** Lettering inside an outline, or beside it. */
+  private void label(List<Point> outline, String text, int rank) {
+    if (outline.size() < 3) {
+      return;
+    }
+    Geometry seen = Hatching.area(frame.points(outline)).buffer(0).intersection(window(0));
+    if (seen.isEmpty()) {
+      return;
+    }
+    var in = seen.getInteriorPoint().getCoordinate();
+    var box = seen.getEnvelopeInternal();
+    List<Labels.Spot> spots = new ArrayList<>();
+    for (double dy : new double[] {0, -4, 4, -8, 8, -12, 12}) {
+      for (double dx : new double[] {0, -8, 8, -16, 16}) {
+        double out = in.y + dy < box.getMinY() || in.y + dy > box.getMaxY() ? 3 : 0;
+        spots.add(
+            Labels.text(in.x + dx, in.y + dy, text, SMALL, false, 0, Math.hypot(dx, dy) / 8 + out));
+      }
+    }
+    labels.ask(rank, spots);
+  }
+
+  private void building(Building building) {
+    if (building.footprint().size() < 3) {
+      return;
+    }
+    List<double[]> outline = frame.points(building.footprint());
+    pen.area(outline, 0, Ink.NONE, 0);
+    Geometry area = Hatching.area(outline).buffer(0);
+    List<double[]> ridge = frame.points(building.ridgeLine());
+    if (ridge.size() == 2 && building.roof() != Building.Roof.LEAN_TO) {
+      area = area.difference(line(ridge).buffer(0.7));
+    }
+    Hatching.draw(pen, area.intersection(window(2)), 1.8, true, 0.13, 0.55);
+    if (building.metalRoof()) {
+      Hatching.draw(pen, area.intersection(window(2)), 1.8, false, 0.13, 0.55);
+    }
+    pen.area(outline, 0.45, 1, Ink.NONE);
+    labels.avoid(area, 2);
+    labels.avoid(Hatching.area(outline).getBoundary(), 2);
+    if (ridge.size() == 2) {
+      pen.path(ridge, 0.28, 1);
+    }
+    String top =
+        building.ridge() > building.eaves() + 0.01
+            ? ", eaves "
+                + figures.height(building.eaves())
+                + ", ridge "
+                + figures.height(building.ridge())
+            : ", " + figures.height(building.eaves());
+    label(building.footprint(), model.source().name(building.id()) + top, 60);
+  }
+
+  private void boundary() {
+    List<double[]> corners = frame.points(plan.boundary());
+    pen.area(corners, 0.4, 1, Ink.NONE, 4, 1, 0.6, 1);
+    for (int i = 0; i < corners.size(); i++) {
+      double[] a = corners.get(i);
+      double[] b = corners.get((i + 1) % corners.size());
+      pen.circle(a[0], a[1], 0.65, 0.25, 1, 0);
+      labels.avoid(List.of(a, b), 1);
+      double metres =
+          plan.boundary().get(i).distance(plan.boundary().get((i + 1) % corners.size()));
+      String text = figures.length(metres);
+      double length = Math.hypot(b[0] - a[0], b[1] - a[1]);
+      if (length < Letters.width(text, BODY, false, true) + 3) {
+        continue;
+      }
+      List<Labels.Spot> spots = new ArrayList<>();
+      for (double share : new double[] {0.5, 0.4, 0.6, 0.25, 0.75}) {
+        for (double off : new double[] {outward() * 2.3, -outward() * 2.3}) {
+          double ux = (b[0] - a[0]) / length;
+          double uy = (b[1] - a[1]) / length;
+          spots.add(
+              Labels.text(
+                  a[0] + share * (b[0] - a[0]) - uy * off,
+                  a[1] + share * (b[1] - a[1]) + ux * off,
+                  text,
+                  BODY,
+                  false,
+                  Labels.along(ux, uy),
+                  Math.abs(share - 0.5) * 4 + (off * outward() < 0 ? 2 : 0)));
+        }
+      }
+      labels.ask(50, spots);
+    }
+  }
+
+  /** Which side of its edges on paper lies outside the boundary: 1 or −1. */
+  private double outward() {
+    double twice = 0;
+    List<Point> b = plan.boundary();
+    for (int i = 0; i < b.size(); i++) {
+      Point p = b.get(i);
+      Point q = b.get((i + 1) % b.size());
+      twice += p.x() * q.y() - q.x() * p.y();
+    }
+    return twice > 0 ? 1 : -1;
+  }
+
+  private void metal(Metalwork metal) {
+    List<double[]> path = frame.places(metal.path());
+    pen.path(path, 0.25, 0.8, 0.3, 0.6);
+    for (int i = 1; i < path.size(); i++) {
+      double[] a = path.get(i - 1);
+      double[] b = path.get(i);
+      int beads = (int) Math.min(400, Math.hypot(b[0] - a[0], b[1] - a[1]) / 5);
+      for (int k = 0; k <= beads; k++) {
+        double t = beads == 0 ? 0 : (double) k / beads;
+        pen.circle(a[0] + t * (b[0] - a[0]), a[1] + t * (b[1] - a[1]), 0.35, 0, Ink.NONE, 0.8);
+      }
+    }
+    if (!path.isEmpty()) {
+      double[] middle = along(path, 0.5);
+      String text = model.source().name(metal.id()) + " " + figures.height(metal.path().get(0).z());
+      labels.ask(90, Labels.around(middle[0], middle[1], text, SMALL, false, 1.2));
+    }
+  }
+
+  private void support(Support support) {
+    double[] at = frame.at(support.at());
+    switch (support.kind()) {
+      case TREE -> Symbols.tree(pen, at[0], at[1]);
+      case MAST -> Symbols.mast(pen, at[0], at[1], true);
+      case POLE -> Symbols.pole(pen, at[0], at[1]);
+      case CHIMNEY, WALL -> Symbols.wall(pen, at[0], at[1]);
+      default -> Symbols.other(pen, at[0], at[1]);
+    }
+    boolean used =
+        model.source().placement().attachments().stream()
+            .anyMatch(a -> a.on().equals(support.id()));
+    labels.ask(
+        used ? 42 : 55,
+        Labels.around(
+            at[0],
+            at[1],
+            model.source().name(support.id()) + heights(support.canopy()),
+            SMALL,
+            false,
+            2.2));
+  }
+}
