@@ -1,10 +1,167 @@
 // @ts-check
+import { html, redrawer } from '../charts/html.js';
+import { stateMark } from '../charts/marks.js';
+import { signed } from '../units/figures.js';
+import { isStale, listOf, ownOf, placementOf, placementTitle, planOf, shapeTitle } from './placement-facts.js';
+import { sheetList } from './sheet-list.js';
+
 /**
  * Sheet: the rigging list and the drawing as they print, and the downloads.
- * @param {HTMLElement} root empty element that this panel owns
- * @param {import('../state/store.js').Store} store the page's one store
+ * @typedef {import('../state/store.js').Store} Store
+ * @typedef {import('../state/types.js').State} State
+ * @typedef {import('./placements-search.js').Shell} Shell
+ * @typedef {{key: string, model: any|null, drawing: string|null, error: string|null}} Loaded
  */
-export function mount(root, store) {
+
+const FORMATS = /** @type {const} */ ([
+  ['pdf', 'PDF, list and drawing'], ['csv', 'CSV, the list'], ['svg', 'SVG, the drawing'], ['geojson', 'GeoJSON, the site'], ['json', 'JSON, all of it'],
+]);
+
+/**
+ * @param {HTMLElement} root empty element that this panel owns
+ * @param {Store} store the page's one store
+ * @param {Shell} shell
+ */
+export function mount(root, store, shell) {
   root.classList.add('sheet');
-  void store;
+  const choice = { paper: 'A4' };
+  /** @type {Loaded} */
+  let loaded = { key: '', model: null, drawing: null, error: null };
+  const ask = redrawer(root, () => render(store.get()));
+  store.subscribe((state) => [state.place, state.chosen, state.search, state.units, state.plan], () => {
+    if (store.get().place !== 'sheet') return;
+    void load();
+    ask();
+  });
+
+  /**
+   * Fetches list and drawing for what is chosen, once for each choice; the latest wins.
+   */
+  async function load() {
+    const state = store.get();
+    const placement = placementOf(state);
+    if (!placement) return;
+    const key = [state.search.id, placement.id, choice.paper, state.units, placement.madeFrom ? JSON.stringify(placement.attachments) : ''].join(' ');
+    if (loaded.key === key) return;
+    if (loaded.drawing) URL.revokeObjectURL(loaded.drawing);
+    loaded = { key, model: null, drawing: null, error: null };
+    const options = { paper: choice.paper, units: state.units };
+    try {
+      const [list, drawing] = await Promise.all([
+        shell.api.sheet(planOf(state), placement, 'json', options), shell.api.sheet(planOf(state), placement, 'svg', options),
+      ]);
+      const model = JSON.parse(await list.text());
+      if (loaded.key !== key) return;
+      loaded = { key, model, drawing: URL.createObjectURL(drawing), error: null };
+    } catch (problem) {
+      if (loaded.key !== key) return;
+      loaded = { key, model: null, drawing: null, error: /** @type {Error} */ (problem).message };
+    }
+    ask();
+  }
+
+  /** @param {State} state */
+  function render(state) {
+    const placement = placementOf(state);
+    if (!placement) return [none(state)];
+    return [bar(state, placement), pages(state)];
+  }
+
+  /** @param {State} state */
+  function none(state) {
+    const searched = listOf(state).length > 0;
+    return html('div', { class: 'sheet-none' },
+      html('h2', {}, 'Sheet'),
+      html('p', {}, searched ? 'Choose a placement first; its rigging list and drawing stand here.' : 'The rigging list and the site drawing of a placement stand here once a search has found one.'),
+      html('button', { type: 'button', class: 'go', onclick: () => shell.go('placements') }, 'To placements'));
+  }
+
+  /**
+   * @param {State} state
+   * @param {any} placement
+   */
+  function bar(state, placement) {
+    const all = [...listOf(state), ...ownOf(state)];
+    return html('div', { class: 'sheet-bar' },
+      html('div', { class: 'field' },
+        html('label', { for: 'sheet-placement' }, 'Placement'),
+        html('select', { id: 'sheet-placement', 'data-key': 'placement', value: placement.id, onchange: (/** @type {Event} */ event) => store.set({ chosen: /** @type {HTMLSelectElement} */ (event.target).value }) },
+          ...all.map((one) => html('option', { value: one.id }, `${placementTitle(state, one)}: ${shapeTitle(one.shape).toLowerCase()}, ${signed(one.score, 1)} dB`)))),
+      html('fieldset', { class: 'ticks' }, html('legend', {}, 'Paper'), ...['A4', 'Letter'].map((paper) => html('label', { class: 'tick' }, html('input', {
+        type: 'radio', name: 'paper', checked: choice.paper === paper, 'data-key': `paper-${paper}`,
+        onchange: () => {
+          choice.paper = paper;
+          void load();
+          ask();
+        },
+      }), paper))),
+      html('p', { class: 'soft' }, state.units === 'm' ? 'Lengths in metres; change them at the head of the page.' : 'Lengths in feet and inches; change them at the head of the page.'),
+      isStale(state) ? html('p', {}, stateMark('tight', 'Out of date'), ' The plan has changed since the search; this sheet is of the plan as it was searched.') : null,
+      html('div', { class: 'downloads' },
+        html('h3', {}, 'Download'),
+        html('ul', {}, ...FORMATS.map(([type, words]) => html('li', {}, downloadButton(state, placement, type, words))))),
+      html('button', { type: 'button', class: 'go', 'data-key': 'print', disabled: !loaded.model, onclick: () => window.print() }, 'Print'));
+  }
+
+  /**
+   * @param {State} state
+   * @param {any} placement
+   * @param {typeof FORMATS[number][0]} type
+   * @param {string} words
+   */
+  function downloadButton(state, placement, type, words) {
+    const name = fileName(planOf(state), placement, type);
+    const options = { paper: choice.paper, units: state.units };
+    const held = state.search.id !== null && state.search.result && !placement.madeFrom;
+    if (held) {
+      return html('a', { href: shell.api.sheetAddress(/** @type {string} */ (state.search.id), placement.id, type, options), download: name, 'data-key': `get-${type}` }, words, html('span', { class: 'soft' }, name));
+    }
+    return html('button', { type: 'button', class: 'link', 'data-key': `get-${type}`, onclick: () => fetchAndSave(planOf(state), placement, type, options, name) }, words, html('span', { class: 'soft' }, name));
+  }
+
+  /**
+   * A placement made by hand is not held by the server under an address: it is sent, and the answer saved.
+   * @param {any} plan
+   * @param {any} placement
+   * @param {typeof FORMATS[number][0]} type
+   * @param {{paper: string, units: string}} options
+   * @param {string} name
+   */
+  async function fetchAndSave(plan, placement, type, options, name) {
+    try {
+      const address = URL.createObjectURL(await shell.api.sheet(plan, placement, type, options));
+      html('a', { href: address, download: name }).click();
+      setTimeout(() => URL.revokeObjectURL(address), 10000);
+    } catch (problem) {
+      loaded = { ...loaded, error: /** @type {Error} */ (problem).message };
+      ask();
+    }
+  }
+
+  /** @param {State} state */
+  function pages(state) {
+    if (loaded.error !== null) {
+      return html('div', { class: 'sheet-pages' }, html('p', { class: 'problem' }, stateMark('foul', 'Error'), html('b', {}, ' The sheet could not be made. '), loaded.error, ' ',
+        html('button', { type: 'button', class: 'link', onclick: () => {
+          loaded = { key: '', model: null, drawing: null, error: null };
+          void load();
+          ask();
+        } }, 'Try again')));
+    }
+    if (!loaded.model) return html('div', { class: 'sheet-pages' }, html('p', { class: 'soft', role: 'status' }, 'Working out the sheet.'));
+    return html('div', { class: `sheet-pages paper-${choice.paper.toLowerCase()}` },
+      sheetList(loaded.model, state.units),
+      loaded.drawing ? html('div', { class: 'page drawing' }, html('img', { src: loaded.drawing, alt: `Site drawing to scale: ${loaded.model.head.name}; the list before it says the same in figures` })) : null);
+  }
+}
+
+/**
+ * @param {any} plan
+ * @param {any} placement
+ * @param {string} type
+ * @returns {string} "corner-lot-p01.pdf"
+ */
+export function fileName(plan, placement, type) {
+  const title = (plan.title ?? '').normalize('NFKD').toLowerCase().replace(/[^a-z0-9]+/g, '-').replace(/^-|-$/g, '').slice(0, 32).replace(/-$/, '') || 'plot';
+  return `${title}-${placement.id}.${type}`;
 }
