@@ -9,7 +9,8 @@ import java.util.List;
  * @param wires all conductors
  * @param feedWire index of the fed wire, from 0
  * @param feedFraction where along its arc length the middle of the feed gap is, between 0 and 1
- * @param gap width of the feed gap [m], across which the applied field is uniform
+ * @param gap width of the feed gap [m]: the feed keeps half of it from ends and junctions, and the
+ *     mesh there is no finer; the charge of the gap's own length is not counted as input
  */
 public record AntennaModel(List<WireSpec> wires, int feedWire, double feedFraction, double gap) {
   /** Ends of wires nearer than this are one point [m]. */

@@ -5,8 +5,8 @@ package spanwright.moments;
  * uphill by halving steps.
  */
 final class PeakSearch {
-  private static final int STARTS = 4;
-  private static final double LAST_STEP = 2e-4;
+  private static final int STARTS = 3;
+  private static final double LAST_STEP = 5e-4;
 
   private final FarField field;
   private final boolean grounded;
@@ -20,8 +20,8 @@ final class PeakSearch {
   }
 
   Peak find(double extent) {
-    int up = Math.min(90, 12 + (int) (1.2 * extent)) * (grounded ? 1 : 2);
-    int across = Math.min(144, 20 + (int) (1.5 * extent));
+    int up = Math.min(90, 9 + (int) (0.9 * extent)) * (grounded ? 1 : 2);
+    int across = Math.min(144, 14 + (int) (1.2 * extent));
     double low = grounded ? 0 : -0.5 * Math.PI;
     double rise = (0.5 * Math.PI - low) / up;
     double[] azimuths = new double[across * (up + 1)];
@@ -29,7 +29,8 @@ final class PeakSearch {
     for (int j = 0; j <= up; j++) {
       for (int i = 0; i < across; i++) {
         azimuths[j * across + i] = 2 * Math.PI * i / across;
-        elevations[j * across + i] = low + rise * j;
+        // without a ground level directions come first, and keep the peak where all are equal
+        elevations[j * across + i] = low + rise * (grounded ? j : (j + up / 2) % (up + 1));
       }
     }
     double[] gain = gains(azimuths, elevations);
@@ -38,7 +39,7 @@ final class PeakSearch {
     for (int s = 0; s < STARTS; s++) {
       int top = 0;
       for (int i = 1; i < gain.length; i++) {
-        if (gain[i] > gain[top] * (1 + 1e-9)) {
+        if (gain[i] > gain[top] * (1 + 1e-7)) {
           top = i;
         }
       }
@@ -89,7 +90,7 @@ final class PeakSearch {
       if (gain[top] > here[0] * (1 + 1e-12)) {
         here = new double[] {gain[top], az[top], el[top]};
       } else {
-        step *= 0.5;
+        step *= 0.4;
       }
     }
     double full = 2 * Math.PI;

@@ -22,7 +22,7 @@ final class PreparedModel {
   private final SourcePoints points;
   private final List<String> warnings;
 
-  PreparedModel(AntennaModel model, Ground ground, double highestMHz, MeshAim aim) {
+  PreparedModel(AntennaModel model, Ground ground, double highestMHz, MeshRule rule) {
     this.model = model;
     this.ground = ground;
     double k = Constants.waveNumber(highestMHz);
@@ -35,7 +35,7 @@ final class PreparedModel {
       }
     }
     Outline outline = Outline.of(model, stray);
-    mesh = Mesh.of(model, outline, MeshRule.of(aim), k);
+    mesh = Mesh.of(model, outline, rule, k);
     statics = new StaticPairs(mesh);
     points = new SourcePoints(mesh);
     warnings = Doubts.about(model, ground, mesh, statics);

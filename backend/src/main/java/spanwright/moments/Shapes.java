@@ -94,17 +94,4 @@ final class Shapes {
     }
     return sum;
   }
-
-  /** Integral of shape a from t = from to t = to. */
-  static double integral(int a, double from, double to) {
-    double sum = 0;
-    double f = from;
-    double t = to;
-    for (int m = 0; m < POWERS[a].length; m++) {
-      sum += POWERS[a][m] * (t - f) / (m + 1);
-      f *= from;
-      t *= to;
-    }
-    return sum;
-  }
 }

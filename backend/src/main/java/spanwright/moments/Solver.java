@@ -59,7 +59,7 @@ public final class Solver {
     Map<Double, Solution> solved = new HashMap<>();
     int top = rising.length - 1;
     while (top >= 0) {
-      PreparedModel prepared = new PreparedModel(model, ground, rising[top], aim);
+      PreparedModel prepared = new PreparedModel(model, ground, rising[top], MeshRule.of(aim));
       double least = rising[top] / SAME_MESH;
       for (; top >= 0 && rising[top] >= least; top--) {
         double f = rising[top];
@@ -102,5 +102,26 @@ public final class Solver {
   }
 
   /** Solves something small until the machine runs at speed; call it once when a server starts. */
-  public static void warmUp() {}
+  public static void warmUp() {
+    Solver solver = new Solver();
+    Ground ground = Ground.real(13, 0.005);
+    Directions ring = Directions.ring(72, 0.3);
+    for (int i = 0; i < 150; i++) {
+      double z = 6 + 0.01 * i;
+      AntennaModel model =
+          AntennaModel.of(
+              List.of(
+                  WireSpec.of(
+                      List.of(
+                          new Vertex(-9, 0.4, z - 2), new Vertex(0, 0, z), new Vertex(9, 1, z - 1)),
+                      0.001,
+                      WireSpec.COPPER)),
+              0,
+              0.45);
+      Solution solution = solver.solve(model, ground, 14.1 + 7 * (i % 3), MeshAim.FULL);
+      solution.powerGains(ring);
+      solution.peak();
+      solution.efficiency();
+    }
+  }
 }
