@@ -1,5 +1,6 @@
 package spanwright.sheet;
 
+import java.util.DoubleSummaryStatistics;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
@@ -173,9 +174,12 @@ final class Job {
 
   /** The wind in which a corner of an outline lies, seen from the outline's middle. */
   String cornerWind(List<Point> outline, Point corner) {
-    double x = outline.stream().mapToDouble(Point::x).average().orElse(0);
-    double y = outline.stream().mapToDouble(Point::y).average().orElse(0);
-    return wind(bearing(new Point(x, y), corner));
+    DoubleSummaryStatistics x = outline.stream().mapToDouble(Point::x).summaryStatistics();
+    DoubleSummaryStatistics y = outline.stream().mapToDouble(Point::y).summaryStatistics();
+    // as if the outline were square, so that the corners of a long house are named alike
+    double right = (corner.x() - (x.getMin() + x.getMax()) / 2) / (x.getMax() - x.getMin());
+    double up = (corner.y() - (y.getMin() + y.getMax()) / 2) / (y.getMax() - y.getMin());
+    return wind(bearing(new Point(0, 0), new Point(right, up)));
   }
 
   /** A building that stands between two points of the plan, or null. */

@@ -40,27 +40,32 @@ final class ListPages {
     flow.gap(GAP);
     List<Flow.Block> left = new ArrayList<>(List.of(wire()));
     List<Flow.Block> right = new ArrayList<>(List.of(rope()));
-    (left.get(0).height() < right.get(0).height() ? left : right).add(sags());
+    (height(left) < height(right) ? left : right).add(sags());
     flow.pair(left, right, GUTTER, GAP);
     flow.gap(GAP);
     flow.add(attachments());
     flow.gap(GAP);
     flow.add(setOut());
     flow.gap(GAP);
-    flow.pair(
-        List.of(order(), hardware()),
+    left = new ArrayList<>(List.of(order(), hardware()));
+    right = new ArrayList<>(List.of(cautions()));
+    for (Flow.Block block :
         List.of(
-            cautions(),
             checks("Checks before", model.before()),
             checks("Checks after", model.after()),
-            sweep()),
-        GUTTER,
-        GAP);
+            sweep())) {
+      (height(left) < height(right) ? left : right).add(block);
+    }
+    flow.pair(left, right, GUTTER, GAP);
     List<Pen> pages = flow.pages();
     for (int i = 1; i < pages.size(); i++) {
       runningHead(pages.get(i));
     }
     return pages;
+  }
+
+  private static double height(List<Flow.Block> blocks) {
+    return blocks.stream().mapToDouble(b -> b.height() + GAP).sum();
   }
 
   private double head(Pen pen) {
@@ -214,11 +219,12 @@ final class ListPages {
             Setting.Cell.bold(figures.cut(line.cut()))));
     List<String> notes = new ArrayList<>();
     notes.add(
-        model.wires().stream()
+        "Wire: "
+            + model.wires().stream()
                 .map(SheetModel.WirePiece::kind)
                 .distinct()
                 .collect(Collectors.joining(", "))
-            + "; line: "
+            + ". Line: "
             + line.kind()
             + ". Lengths are those of the wire as it hangs, its insulation reckoned: do not"
             + " shorten it again.");
@@ -265,7 +271,7 @@ final class ListPages {
             .distinct()
             .collect(Collectors.joining(", "));
     if (!kinds.isEmpty()) {
-      notes.add(kinds + ".");
+      notes.add("Rope: " + kinds + ".");
     }
     if (model.ropes().stream().anyMatch(r -> r.lowering() != null && r.lowering() > r.run())) {
       notes.add(
@@ -275,7 +281,7 @@ final class ListPages {
     return Setting.table(
         "Rope",
         List.of(
-            left("", 9.5),
+            left("", 11),
             left("From, over, to", 0),
             right("Run", wide(11, 15)),
             right("Knots, tail", wide(12, 14)),

@@ -68,7 +68,7 @@ final class RiggingInk {
       List<double[]> path = frame.places(conductor.points());
       pen.path(path, WIRE + 1.2, 0);
       pen.path(path, WIRE, 1);
-      labels.avoid(path, 8);
+      labels.avoid(path, 14);
       double[] first = path.get(0);
       double[] last = path.get(path.size() - 1);
       if (Math.hypot(first[0] - last[0], first[1] - last[1]) > 0.3) {

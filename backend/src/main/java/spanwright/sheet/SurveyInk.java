@@ -330,6 +330,7 @@ final class SurveyInk {
     labels.avoid(Hatching.area(outline).getBoundary(), 2);
     if (ridge.size() == 2) {
       pen.path(ridge, 0.28, 1);
+      labels.avoid(ridge, 2);
     }
     String top =
         building.ridge() > building.eaves() + 0.01

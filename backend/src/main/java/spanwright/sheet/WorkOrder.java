@@ -111,7 +111,10 @@ final class WorkOrder {
       if (rope.over() == null) {
         steps.add(rope.mark() + ": tie to " + rope.to() + " by ladder; one foots, one works.");
       } else if (rope.over().contains("limb")) {
-        steps.add(rope.mark() + ": by throw line over " + rope.over() + ". Nobody climbs.");
+        steps.add(
+            rope.mark()
+                + ": by throw line over the limb, or draw the pulley up to it;"
+                + " from the ground, nobody climbs.");
       } else {
         steps.add(rope.mark() + ": reeve through the " + rope.over() + ", both parts in hand.");
       }
@@ -150,7 +153,7 @@ final class WorkOrder {
     }
     String each =
         sags.stream()
-            .map(s -> s.span() + " " + job.figures.say(s.middle()))
+            .map(s -> s.span() + ": " + job.figures.say(s.middle()))
             .collect(Collectors.joining(", "));
     steps.add("Sight the sag at mid-span: " + each + ". Tied ends: take up or let out to suit.");
   }

@@ -1,0 +1,154 @@
+package spanwright.sheet;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertNull;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import spanwright.plan.Place;
+
+/** Every length of the fixture's list, worked out again with a pencil. */
+class CutListTest {
+  private static final double EXACT = 1e-9;
+
+  private final SheetModel model = Fixture.model(SheetOptions.Paper.A4, SheetOptions.Units.METRES);
+
+  @Test
+  void wire_is_cut_with_both_ends_turned_back_and_two_per_cent_to_trim() {
+    // 30.20 m fed at 0.54: 16.308 and 13.892; ends 2 × 0.15; trim 2 %, up to 10 mm: 0.33 and 0.28
+    SheetModel.WirePiece w1 = model.wires().get(0);
+    assertEquals("W1", w1.mark());
+    assertEquals("feedpoint to Old ash", w1.piece());
+    assertEquals(16.308, w1.finished(), EXACT);
+    assertEquals(0.30, w1.turnsBack(), EXACT);
+    assertEquals(0.33, w1.trim(), EXACT);
+    assertEquals(16.94, w1.cut(), EXACT);
+    SheetModel.WirePiece w2 = model.wires().get(1);
+    assertEquals(13.892, w2.finished(), EXACT);
+    assertEquals(0.28, w2.trim(), EXACT);
+    // 13.892 + 0.30 + 0.28 = 14.472, up to 14.48
+    assertEquals(14.48, w2.cut(), EXACT);
+    assertEquals(2, model.wires().size());
+  }
+
+  @Test
+  void a_short_wire_keeps_the_least_trim() {
+    assertTrue(Allowances.TRIM_SHARE * 9 < Allowances.TRIM_LEAST);
+    var short9 =
+        new spanwright.assess.Placement.Conductor(
+            Fixture.placement().conductors().get(0).points(), "wire", 9);
+    SheetModel.WirePiece piece =
+        Sheets.of(
+                Fixture.plan(),
+                Fixture.catalogue(),
+                Placements.withConductors(Fixture.placement(), List.of(short9)),
+                SheetOptions.standard())
+            .wires()
+            .get(0);
+    // 4.86 + 0.30 + 0.20
+    assertEquals(5.36, piece.cut(), EXACT);
+  }
+
+  @Test
+  void the_feed_line_is_cut_with_its_slack_and_its_ends() {
+    SheetModel.FeedLine line = model.feedLine();
+    // (9, 8.2, 8.5) to (9.6, 8.3, 4.0): √(0.36 + 0.01 + 20.25) = 4.5409
+    // to (11, 8, 1.2): √(1.96 + 0.09 + 7.84) = 3.1448
+    assertEquals(7.6857, line.run(), 1e-4);
+    assertEquals(11.0 - 7.6857, line.slack(), 1e-4);
+    assertEquals(11.20, line.cut(), EXACT);
+    // 25 mm wide: four times that is 0.10
+    assertEquals(0.10, line.standOffReach(), EXACT);
+    // all 7.69 m run within half a metre of the house: one at the entry and eight
+    assertEquals(9, line.standOffs());
+  }
+
+  @Test
+  void a_lift_is_long_enough_to_bring_its_end_down_to_the_ground() {
+    // tail 1.80 + fall 4.50 = 6.30, but twice 7.5 m is 15: 15 + 0.5 + 0.5 + 1.0 = 17.0
+    SheetModel.Rope r1 = model.ropes().get(0);
+    assertEquals("R1", r1.mark());
+    assertEquals(6.30, r1.run(), EXACT);
+    assertEquals(15.0, r1.lowering(), EXACT);
+    assertEquals(17.0, r1.cut(), EXACT);
+    assertEquals("weight, 7.3 kg", r1.to());
+    // halyard 7.00, twice 8.5 is 17: 17 + 0.5 + 1.5 + 1.0 = 20.0
+    assertEquals(20.0, model.ropes().get(1).cut(), EXACT);
+    // tail 1.60 + halyard 5.80 = 7.40, twice 7 is 14: 14 + 3 = 17
+    assertEquals(17.0, model.ropes().get(2).cut(), EXACT);
+  }
+
+  @Test
+  void guys_are_measured_from_head_to_peg_and_rounded_up_to_half_a_metre() {
+    // √(2.5² + 7²) = 7.4330; + 2 × 0.75 = 8.933, up to 9.0
+    for (String mark : List.of("G1", "G2", "G3")) {
+      SheetModel.Rope guy =
+          model.ropes().stream().filter(r -> r.mark().equals(mark)).findFirst().orElseThrow();
+      assertEquals(7.433, guy.run(), 0.003);
+      assertEquals(9.0, guy.cut(), EXACT);
+      assertNull(guy.lowering());
+    }
+    assertEquals(6, model.ropes().size());
+  }
+
+  @Test
+  void nothing_is_ever_cut_short() {
+    for (double metres = 0.01; metres < 40; metres += 0.137) {
+      assertTrue(Figures.upToCentimetre(metres) >= metres - 1e-7);
+      assertTrue(Figures.upToCentimetre(metres) < metres + 0.01);
+      assertTrue(Figures.upToHalfMetre(metres) >= metres - 1e-7);
+      assertTrue(Figures.upToHalfMetre(metres) < metres + 0.5);
+    }
+    assertEquals(9.65, Figures.upToCentimetre(9.20 + 0.30 + 0.15), EXACT);
+  }
+
+  @Test
+  void hardware_counts_follow_from_the_list() {
+    assertEquals(2, count("end insulators, 100 mm"));
+    assertEquals(1, count("centre piece with strain relief"));
+    assertEquals(3, count("pulleys to suit the rope"));
+    // a cleat for each lift that goes to no weight
+    assertEquals(2, count("cleats"));
+    assertEquals(3, count("guy pegs, 0.75 m"));
+    assertEquals(9, count("line stand-offs"));
+    assertEquals(1, count("weight, Old ash"));
+    SheetModel.Item rope = item("polyester, 5 mm");
+    // 17 + 20 + 17 + 3 × 9
+    assertEquals(81.0, rope.length(), EXACT);
+    // 16.94 + 14.48
+    assertEquals(31.42, item("covered copper, 1.6 mm").length(), EXACT);
+  }
+
+  private int count(String what) {
+    return item(what).count();
+  }
+
+  private SheetModel.Item item(String what) {
+    return model.hardware().stream().filter(i -> i.what().equals(what)).findFirst().orElseThrow();
+  }
+
+  @Test
+  void sag_to_sight_is_the_drop_at_mid_span() {
+    SheetModel.Sag first = model.sags().get(0);
+    assertEquals("1–2", first.span());
+    // (6, 26) to (9, 8.2): √(9 + 316.84) = 18.0510
+    assertEquals(18.0510, first.level(), 1e-4);
+    assertEquals(0.30, first.middle(), 1e-6);
+    // (7.5 + 8.5) / 2 − 0.30
+    assertEquals(7.70, first.heightMiddle(), 1e-6);
+    // atan2(3, −17.8) = 170.43°, plan north 10°: 180.43°; 2° west variation adds
+    assertEquals(180.43, first.bearing(), 0.01);
+    assertEquals(182.43, first.magnetic(), 0.01);
+  }
+
+  @Test
+  void the_middle_of_a_run_lies_half_way_along_its_chord_however_it_is_pointed() {
+    Place middle =
+        HangingList.middle(
+            List.of(
+                new Place(0, 0, 5), new Place(1, 0, 4), new Place(7, 0, 4), new Place(10, 0, 6)));
+    assertEquals(5, middle.x(), EXACT);
+    assertEquals(4, middle.z(), EXACT);
+  }
+}
