@@ -67,7 +67,7 @@ export function textBox(draft, box) {
   const id = `brief-${box.key}`;
   return html('div', { class: 'field' },
     html('label', { for: id, class: box.hideLabel ? 'visually-hidden' : null }, box.label),
-    html('span', { class: 'box' },
+    html('span', { class: 'typing' },
       html('input', {
         type: 'text', id, value, 'data-key': box.key, inputmode: box.mode ?? null, autocomplete: 'off', spellcheck: 'false',
         placeholder: box.placeholder ?? null, disabled: box.disabled ?? false,
@@ -95,7 +95,7 @@ export function textBox(draft, box) {
  * @returns {HTMLElement}
  */
 export function sentence(id, words) {
-  return html('p', { class: 'fault', id }, stateMark('foul', 'Fault'), ` ${words}`);
+  return html('p', { class: 'brief-fault', id }, stateMark('foul', 'Fault'), ` ${words}`);
 }
 
 /**

@@ -25,7 +25,7 @@ export function rulesSection(state, store, draft, shown) {
   const fixed = kinds.filter((/** @type {any} */ rule) => !mayChange.includes(rule));
   const differing = Object.keys(overrides).length;
   return html('section', { class: 'brief-rules' },
-    html('div', { class: 'line section-head' }, html('h3', {}, 'Rules'),
+    html('div', { class: 'line part-head' }, html('h3', {}, 'Rules'),
       html('span', { class: 'soft' }, differing ? `${differing} differ${differing === 1 ? 's' : ''} from the default` : 'all at their default')),
     html('div', { class: 'fields two' },
       numberBox(draft, { key: 'wind', label: 'Design gust', unit: 'm/s', value: rules.wind ?? 25, least: 0, most: 90, take: (wind) => setRules(`Design gust ${wind} m/s`, { wind }) }),

@@ -29,7 +29,7 @@ export function targetsSection(state, store, draft, chosen) {
     draft.ask();
   };
   return html('section', { class: 'brief-targets' },
-    html('div', { class: 'line section-head' }, html('h3', {}, 'Targets'), html('span', { class: 'soft' }, 'drag one to turn it; rings in thousands of km')),
+    html('div', { class: 'line part-head' }, html('h3', {}, 'Targets'), html('span', { class: 'soft' }, 'drag one to turn it; rings in thousands of km')),
     compassNode(targets, store),
     html('ol', { class: 'targets' }, ...targets.map((/** @type {any} */ target, /** @type {number} */ index) => html('li', {},
       targetRow(target, index, targets, open === index, toggle),

@@ -18,7 +18,7 @@ export function pullsTable(plan, placement) {
   const most = Math.max(1, ...placement.attachments.flatMap((/** @type {any} */ hold) => [hold.pullInWind, hold.pullLimit ?? 0]));
   const wind = plan.brief?.rules?.wind ?? 25;
   return html('section', { class: 'pulls' },
-    html('div', { class: 'line section-head' }, html('h3', {}, 'Pulls, newtons'), html('span', { class: 'soft' }, `filled calm, open in a ${number(wind, 0)} m/s gust`)),
+    html('div', { class: 'line part-head' }, html('h3', {}, 'Pulls, newtons'), html('span', { class: 'soft' }, `filled calm, open in a ${number(wind, 0)} m/s gust`)),
     html('table', {},
       html('thead', {}, html('tr', {},
         html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'holding point')), html('th', { scope: 'col', class: 'n' }, 'calm'), html('th', { scope: 'col', class: 'n' }, 'gust'),

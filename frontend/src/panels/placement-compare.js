@@ -36,7 +36,7 @@ export function comparison(state, placement, store) {
     ['to build', toBuild(placement).replace(/^new: /, ''), toBuild(pinned).replace(/^new: /, ''), ''],
   ];
   return html('section', { class: 'comparison' },
-    html('div', { class: 'line section-head' }, html('h3', {}, 'Beside the pinned one'),
+    html('div', { class: 'line part-head' }, html('h3', {}, 'Beside the pinned one'),
       html('button', { type: 'button', class: 'link', 'data-key': 'swap', onclick: () => store.set({ chosen: pinned.id, pinned: placement.id }) }, 'Change places')),
     html('table', {},
       html('thead', {}, html('tr', {}, html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'figure')),

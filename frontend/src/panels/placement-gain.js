@@ -38,7 +38,7 @@ export function gainTable(placement, shown, choose) {
     }));
   });
   return html('section', { class: 'gains' },
-    html('div', { class: 'line section-head' }, html('h3', {}, 'Delivered gain, after all losses'), html('span', { class: 'soft' }, 'dB')),
+    html('div', { class: 'line part-head' }, html('h3', {}, 'Delivered gain, after all losses'), html('span', { class: 'soft' }, 'dB')),
     html('table', {},
       html('thead', {}, html('tr', {},
         html('th', { scope: 'col' }, 'band'), html('th', { scope: 'col' }, 'target'), html('th', { scope: 'col', class: 'n' }, 'window'),
