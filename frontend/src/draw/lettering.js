@@ -21,6 +21,8 @@ export function createLettering(view) {
   let labels = [];
   /** @type {number[][]} */
   let symbols = [];
+  /** @type {number[][][]} */
+  let lines = [];
   /** @type {number|undefined} */
   let waiting;
 
@@ -40,18 +42,21 @@ export function createLettering(view) {
       const [x, y] = local(p);
       return { left: x - 6, top: y - 6, width: 12, height: 12 };
     });
+    // The north point, the scale bar and the buttons have their corners to themselves.
+    taken.push({ left: 0, top: 0, width: 104, height: 46 });
     taken.push({ left: frame.width - 84, top: 6, width: 80, height: 112 });
     taken.push({ left: frame.width - 220, top: frame.height - 36, width: 216, height: 34 });
+    const soft = lines.flatMap(([a, b]) => along(local(a), local(b), frame));
     const whole = { left: 2, top: 2, width: frame.width - 4, height: frame.height - 4 };
     const first = wanted.filter((w) => !isInstead(w.id));
     const boxes = (/** @type {typeof wanted} */ list) =>
       list.map((w) => ({ id: w.id, weight: w.weight, places: w.spots.map((s) => s.box) }));
-    let placed = placeLabels(boxes(first), taken, whole);
+    let placed = placeLabels(boxes(first), taken, whole, soft);
     // A short form stands in for a label that found no room.
     const second = labels.filter((l) => l.insteadOf && !placed.has(l.insteadOf)).map((l) => l.id);
     if (second.length) {
       const chosen = wanted.filter((w) => !isInstead(w.id) || second.includes(w.id));
-      placed = placeLabels(boxes(chosen.filter((w) => !dropped(w.id, placed, second))), taken, whole);
+      placed = placeLabels(boxes(chosen.filter((w) => !dropped(w.id, placed, second))), taken, whole, soft);
     }
     const px = 1 / sight.ppm;
     layer.replaceChildren(
@@ -71,10 +76,11 @@ export function createLettering(view) {
     !placed.has(id) && labels.some((l) => l.insteadOf === id && second.includes(l.id));
 
   return {
-    /** @param {Label[]} all @param {number[][]} points of symbols */
-    show(all, points) {
+    /** @param {Label[]} all @param {number[][]} points of symbols @param {number[][][]} segments better not covered */
+    show(all, points, segments) {
       labels = all;
       symbols = points;
+      lines = segments;
       place();
     },
     /** The view moved at the same scale: lettering moves with the plan, and is placed anew when it rests. */
@@ -83,6 +89,18 @@ export function createLettering(view) {
       waiting = setTimeout(place, 120);
     },
   };
+}
+
+/** Small boxes along a line, those in sight. @param {number[]} a @param {number[]} b @param {{width: number, height: number}} frame */
+function along(a, b, frame) {
+  const count = Math.min(400, Math.ceil(Math.hypot(b[0] - a[0], b[1] - a[1]) / 8));
+  const boxes = [];
+  for (let i = 0; i <= count; i++) {
+    const x = a[0] + ((b[0] - a[0]) * i) / Math.max(1, count);
+    const y = a[1] + ((b[1] - a[1]) * i) / Math.max(1, count);
+    if (x > 0 && y > 0 && x < frame.width && y < frame.height) boxes.push({ left: x - 2, top: y - 2, width: 4, height: 4 });
+  }
+  return boxes;
 }
 
 /**

@@ -43,7 +43,7 @@ const LAYERS = [
  * @returns {PlanView}
  */
 export function createPlanView(box, store, extent) {
-  const root = /** @type {SVGSVGElement} */ (svg('svg', { class: 'plan', role: 'group', 'aria-label': 'Plan of the plot' }));
+  const root = /** @type {SVGSVGElement} */ (svg('svg', { class: 'plan', role: 'group', tabindex: -1, 'aria-label': 'Plan of the plot' }));
   const upright = svg('g', { transform: 'matrix(1 0 0 -1 0 0)' });
   root.append(svg('defs'), upright);
   box.append(root);

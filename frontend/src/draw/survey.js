@@ -3,7 +3,7 @@
  * The plot itself: every thing of the plan in its layer, kept by ref and drawn anew only when it,
  * the scale or the units change. Each thing is a button a keyboard and a screen reader can reach.
  */
-import { pointsOf, things } from '../state/kinds.js';
+import { KINDS, pointsOf, things } from '../state/kinds.js';
 import { DRAWERS } from './kinds/index.js';
 import { createLettering } from './lettering.js';
 import { set, svg } from './svg.js';
@@ -29,8 +29,8 @@ export function mountSurvey(view, store) {
   const lettering = createLettering(view);
   addPatterns(view);
   let pending = 0;
-  /** @type {{labels: import('./kinds/env.js').Label[], symbols: number[][]}} */
-  let own = { labels: [], symbols: [] };
+  /** @type {{labels: import('./kinds/env.js').Label[], symbols: number[][], lines: number[][][]}} */
+  let own = { labels: [], symbols: [], lines: [] };
 
   /** @param {string} ref @returns {SVGGElement} */
   const group = (ref) => /** @type {SVGGElement} */ (svg('g', { 'data-ref': ref, class: 'thing' }));
@@ -83,7 +83,7 @@ export function mountSurvey(view, store) {
       if (one) one.plan = plan;
       labels.push(...(one?.labels ?? []));
     }
-    own = { labels, symbols: symbolsOf(all) };
+    own = { labels, symbols: symbolsOf(all), lines: linesOf(all) };
     letter();
   }
 
@@ -94,6 +94,7 @@ export function mountSurvey(view, store) {
     lettering.show(
       [...labels, ...others.flatMap((other) => other.labels)],
       [...own.symbols, ...others.flatMap((other) => other.symbols)],
+      own.lines,
     );
   }
 
@@ -127,6 +128,15 @@ const symbolsOf = (all) =>
   all.flatMap(({ kind, thing }) =>
     ['supports', 'datums', 'entry', 'noise'].includes(kind) ? pointsOf(kind, thing) : [],
   );
+
+/** Lines that lettering had better not lie on. @param {ReturnType<typeof things>} all @returns {number[][][]} */
+const linesOf = (all) =>
+  all.flatMap(({ kind, thing }) => {
+    const { shape } = KINDS[kind];
+    if (shape === 'point' || kind === 'people') return [];
+    const points = pointsOf(kind, thing);
+    return points.slice(shape === 'ring' ? 0 : 1).map((p, i) => [points[shape === 'ring' ? (i || points.length) - 1 : i], p]);
+  });
 
 /** @param {import('./planview.js').PlanView} view */
 function addPatterns(view) {

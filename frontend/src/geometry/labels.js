@@ -23,20 +23,24 @@ export function overlap(a, b) {
  * @param {Wanted[]} wanted
  * @param {Box[]} taken what lettering must not cover (symbols, the north point)
  * @param {Box} frame labels lie wholly inside it
+ * @param {Box[]} [soft] what lettering had better not cover (lines), where it has the choice
  * @returns {Map<string, number>} id to the index of its place; no entry: left out
  */
-export function placeLabels(wanted, taken, frame) {
+export function placeLabels(wanted, taken, frame, soft = []) {
   const held = [...taken];
   const placed = new Map();
   const order = [...wanted].sort((a, b) => b.weight - a.weight);
   for (const label of order) {
     let best = -1;
-    for (let i = 0; i < label.places.length; i++) {
+    let least = Infinity;
+    for (let i = 0; i < label.places.length ; i++) {
       const box = label.places[i];
-      if (!inside(box, frame)) continue;
-      if (held.every((other) => overlap(box, other) === 0)) {
+      if (!inside(box, frame) || held.some((other) => overlap(box, other) > 0)) continue;
+      // Each place further down the list must spare a little more to be worth it.
+      const cost = soft.reduce((sum, other) => sum + overlap(box, other), 0) + i * 4;
+      if (cost < least) {
+        least = cost;
         best = i;
-        break;
       }
     }
     if (best < 0 && label.weight === Infinity && label.places.length) best = 0;

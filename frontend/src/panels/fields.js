@@ -5,7 +5,7 @@
  */
 import { degreesInBox, formatDirection, parseDegrees, parseDirection } from '../units/angle.js';
 import { MINUS, parseNumber } from '../units/figures.js';
-import { lengthInBox, parseLength } from '../units/length.js';
+import { formatLength, lengthInBox, parseLength } from '../units/length.js';
 import { el } from './el.js';
 
 /** @typedef {'m'|'ft'} Units */
@@ -72,8 +72,8 @@ export const unitOf = (type, units) =>
  * @returns {Box}
  */
 export function box(config) {
-  const error = el('span', { class: 'box-error', id: `${config.id}-error`, role: 'alert' });
-  const unit = el('span', { class: 'box-unit', 'aria-hidden': 'true' });
+  const error = el('span', { class: 'slot-error', id: `${config.id}-error`, role: 'alert' });
+  const unit = el('span', { class: 'slot-unit', 'aria-hidden': 'true' });
   const notes = config.type === 'notes';
   const input = el(notes ? 'textarea' : 'input', {
     id: config.id,
@@ -119,13 +119,13 @@ export function box(config) {
       event.stopPropagation();
     }
   });
-  const field = el('span', { class: 'box-field' }, [input, unit]);
+  const field = el('span', { class: 'slot-field' }, [input, unit]);
   const root = config.bare
-    ? el('span', { class: 'box bare' }, [field, error])
-    : el('div', { class: `box box-${config.type}` }, [
+    ? el('span', { class: 'slot bare' }, [field, error])
+    : el('div', { class: `slot slot-${config.type}` }, [
         el('label', { for: config.id, text: config.label }),
         field,
-        config.hint ? el('span', { class: 'box-hint', id: `${config.id}-hint`, text: config.hint }) : null,
+        config.hint ? el('span', { class: 'slot-hint', id: `${config.id}-hint`, text: config.hint }) : null,
         error,
       ]);
   return {
@@ -133,7 +133,9 @@ export function box(config) {
     input,
     show(value, units) {
       unit.textContent = config.bare ? '' : unitOf(config.type, units);
-      const text = toText(config.type, value, units);
+      const exact = toText(config.type, value, units);
+      // In a table decimals stand under one another; a value with more of them is only shown short.
+      const text = config.bare && config.type === 'length' && value !== null ? formatLength(value, units, 2) : exact;
       if (text === shown && input.value === text) return;
       if (document.activeElement === input && input.value !== shown) return;
       shown = text;
@@ -153,8 +155,8 @@ export function choice(config) {
     config.options.map((o) => el('option', { value: o.value, text: o.label })));
   input.addEventListener('change', () => config.onchange(input.value));
   const root = config.bare
-    ? el('span', { class: 'box bare' }, [input])
-    : el('div', { class: 'box' }, [el('label', { for: config.id, text: config.label }), input]);
+    ? el('span', { class: 'slot bare' }, [input])
+    : el('div', { class: 'slot' }, [el('label', { for: config.id, text: config.label }), input]);
   return {
     root,
     input,
@@ -195,7 +197,7 @@ export function pick(config) {
 export function flag(config) {
   const input = el('input', { type: 'checkbox', id: config.id, onchange: () => config.onchange(input.checked) });
   return {
-    root: el('div', { class: 'box box-flag' }, [input, el('label', { for: config.id, text: config.label })]),
+    root: el('div', { class: 'slot slot-flag' }, [input, el('label', { for: config.id, text: config.label })]),
     input,
     show(value) {
       input.checked = Boolean(value);

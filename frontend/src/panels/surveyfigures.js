@@ -78,6 +78,7 @@ export function figures(store, shell, ref) {
       const name = nameOf(kind, thing, index);
       const what = KINDS[kind].one;
       head.textContent = what.charAt(0).toUpperCase() + what.slice(1);
+      head.hidden = head.textContent === name;
       title.textContent = name;
       const points = pointsOf(kind, thing);
       said.textContent = KINDS[kind].shape === 'ring'

@@ -23,6 +23,7 @@ export function mount(root, store, shell) {
   /** @type {Map<string, {input: HTMLInputElement, label: HTMLElement}>} */
   let boxes = new Map();
   let made = '';
+  let count = 0;
 
   /** @param {any} draft @param {'m'|'ft'} units */
   function build(draft, units) {
@@ -53,7 +54,7 @@ export function mount(root, store, shell) {
 
   /** @param {KeyboardEvent} event @param {HTMLInputElement} input */
   function key(event, input) {
-    const empty = input.value === '' || (input.selectionStart === 0 && input.selectionEnd === input.value.length && event.key === 'c' && input.value === '');
+    const empty = input.value === '';
     const told = event.key === 'Enter' || event.key === 'Escape' || (empty && ['Backspace', 'c', 'C'].includes(event.key));
     if (event.ctrlKey && ['z', 'y'].includes(event.key.toLowerCase())) return;
     event.stopPropagation();
@@ -86,9 +87,11 @@ export function mount(root, store, shell) {
       input.parentElement?.classList.toggle('on', draft.focus === name);
     }
     reason.textContent = draft.reason || '\u00a0';
+    const fresh = draft.points.length !== count;
+    count = draft.points.length;
     if (draft.focus && boxes.has(draft.focus)) {
       const { input } = /** @type {any} */ (boxes.get(draft.focus));
-      if (document.activeElement !== input && !panel.contains(document.activeElement)) {
+      if (document.activeElement !== input && (fresh || !panel.contains(document.activeElement))) {
         input.focus();
         input.setSelectionRange(input.value.length, input.value.length);
       }

@@ -31,7 +31,7 @@ export function wallTable(store, ref) {
   const rows = walls(points, closed).slice(0, MOST_ROWS).map((side) => makeRow(side.from));
   const last = heights && !closed ? [heightRow(points.length - 1)] : [];
   const corner = cornerLine();
-  const fourth = heights ? 'Height' : own ? 'Over it' : 'Turn';
+  const fourth = heights ? 'Height' : own ? 'Over it' : 'Corner';
   const table = el('table', { class: 'walls' }, [
     el('thead', {}, [el('tr', {}, [closed ? (own ? 'Side' : 'Wall') : 'Run', 'Length', 'Direction', fourth].map((text) => el('th', { scope: 'col', text })))]),
     el('tbody', {}, [...rows, ...last].map((r) => r.root)),
@@ -181,7 +181,7 @@ export function draftTable(draft, units) {
   const points = draft.at ? [...draft.points, draft.at] : draft.points;
   const list = points.length > 1 ? walls(points, false) : [];
   return el('table', { class: 'walls' }, [
-    el('thead', {}, [el('tr', {}, [draft.shape === 'ring' ? 'Wall' : 'Run', 'Length', 'Direction', 'Turn'].map((text) => el('th', { scope: 'col', text })))]),
+    el('thead', {}, [el('tr', {}, [draft.shape === 'ring' ? 'Wall' : 'Run', 'Length', 'Direction', 'Corner'].map((text) => el('th', { scope: 'col', text })))]),
     el('tbody', {}, list.map((side, i) => el('tr', { class: i === list.length - 1 && draft.at ? 'live' : null }, [
       el('th', { scope: 'row', text: `${i + 1}–${i + 2}` }),
       el('td', { class: 'figure', text: formatLength(side.length, units, 2) }),

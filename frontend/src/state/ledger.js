@@ -29,7 +29,7 @@ export function ledger(plan, faults, length) {
   const bad = {};
   for (const fault of faults) {
     const kind = refOfPath(plan, fault.path)?.ref.split('/')[0];
-    if (kind) bad[kind] = (bad[kind] ?? 0) + 1;
+    if (kind && listOf(plan, kind).length) bad[kind] = (bad[kind] ?? 0) + 1;
   }
   /** @param {string} what @param {string} held @param {boolean} enough @param {boolean} needed @param {string} tool @param {string[]} kinds @returns {Row} */
   const row = (what, held, enough, needed, tool, kinds) => {

@@ -139,7 +139,8 @@ export function drawing(config) {
     type(bench, field, text) {
       const draft = /** @type {Draft|null} */ (bench.store.get().draft);
       if (!draft) return;
-      bench.store.set({ draft: typedAt(bench, { ...draft, typed: { ...draft.typed, [field]: text }, focus: field }) });
+      const next = typedAt(bench, { ...draft, typed: { ...draft.typed, [field]: text }, focus: field });
+      bench.store.set({ draft: next, cursor: next.at ? { point: next.at, reason: next.reason } : null });
     },
   };
 }

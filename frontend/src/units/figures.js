@@ -13,7 +13,7 @@ export function number(value, digits) {
   if (!Number.isFinite(value)) return '–';
   const text = Math.abs(value).toFixed(digits);
   const [whole, part] = text.split('.');
-  const grouped = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, THIN) : whole;
+  const grouped = whole.length > 3 ? whole.replace(/\B(?=(\d{3})+$)/g, THIN) : whole;
   const negative = value < 0 && Number(text) !== 0;
   return `${negative ? MINUS : ''}${grouped}${part ? `.${part}` : ''}`;
 }

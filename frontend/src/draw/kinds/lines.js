@@ -128,7 +128,7 @@ export function labelOverheadLine(line, env, index) {
       weight: 90,
       at: [(a[0] + b[0]) / 2, (a[1] + b[1]) / 2],
       lines: [{ text: `kept distance ${formatLength(kept, env.units, 2)}` }],
-      look: 'foul',
+      look: 'kept',
       sit: 'middle',
       turn: readingTurn(a, b),
     }, a, b, kept - 9 * env.px));

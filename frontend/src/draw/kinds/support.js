@@ -81,7 +81,7 @@ export function labelSupport(support, env, index) {
         { text: `${word}${span(support.lowest ?? 0, support.highest ?? 0, env.units)}` },
       ],
       sit: 'around',
-      gap: 10,
+      gap: env.selected ? 16 : 10,
     },
     {
       id: `supports-short:${support.id}`,
@@ -89,7 +89,7 @@ export function labelSupport(support, env, index) {
       at: support.at,
       lines: [{ text: nameOf('supports', support, index), bold: true }],
       sit: 'around',
-      gap: 10,
+      gap: env.selected ? 16 : 10,
       insteadOf: `supports:${support.id}`,
     },
   ];
