@@ -162,6 +162,6 @@ export function mount(root, store, shell) {
  * @returns {string} "corner-lot-p01.pdf"
  */
 export function fileName(plan, placement, type) {
-  const title = (plan.title ?? '').normalize('NFKD').toLowerCase().replace(/[^a-z0-9]+/g, '-').replace(/^-|-$/g, '').slice(0, 32).replace(/-$/, '') || 'plot';
+  const title = (plan.title ?? '').normalize('NFKD').replace(/[\u0300-\u036f]/g, '').toLowerCase().replace(/[^a-z0-9]+/g, '-').replace(/^-|-$/g, '').slice(0, 32).replace(/-$/, '') || 'plot';
   return `${title}-${placement.id}.${type}`;
 }
