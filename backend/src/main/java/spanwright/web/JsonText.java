@@ -64,7 +64,9 @@ public final class JsonText {
   /** Reads one document. */
   public static JsonNode read(String text) throws BadJson {
     JsonLocation reached = null;
-    try (JsonParser parser = MAPPER.createParser(text)) {
+    // Some editors put a byte order mark in front.
+    String json = text.startsWith("\uFEFF") ? text.substring(1) : text;
+    try (JsonParser parser = MAPPER.createParser(json)) {
       try {
         JsonNode tree = MAPPER.readTree(parser);
         if (tree == null || tree.isMissingNode()) {
