@@ -10,10 +10,12 @@ import java.util.List;
  * @param name shown to people
  * @param footprint corners in order, not closed
  * @param eaves metres above the local ground at that spot
- * @param ridge metres above the local ground at that spot; equal to the eaves for a flat roof
+ * @param ridge metres above the local ground at that spot; a flat roof given one above its eaves
+ *     counts as a block up to the ridge
  * @param metalRoof warned about, not modelled
  * @param roof its form
- * @param ridgeLine two points, or empty where the form needs none
+ * @param ridgeLine two points, or empty where the form needs none: flat roofs, hips that come to a
+ *     point, and gables and lean-tos that do not rise; for a lean-to its high edge
  */
 public record Building(
     String id,

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeSet;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.GeometryFactory;
@@ -85,6 +86,68 @@ public final class GroundSurface {
   /** A path given above the ground under each of its points, with z above the plan's zero. */
   public List<Place> raise(List<Place> aboveGround) {
     return aboveGround.stream().map(this::raise).toList();
+  }
+
+  /**
+   * The ground under a straight line on the plan: its ends and every place where the ground bends
+   * beneath it, in order. Between two neighbours the ground is straight, so that the least height
+   * of a straight wire above the ground is at one of them.
+   */
+  public List<Place> profile(Point from, Point to) {
+    double dx = to.x() - from.x();
+    double dy = to.y() - from.y();
+    TreeSet<Double> shares = new TreeSet<>(List.of(0.0, 1.0));
+    if (triangles.length > 0) {
+      for (double[] t : triangles) {
+        for (int c = 0; c < 9; c += 3) {
+          int d = (c + 3) % 9;
+          cut(from, dx, dy, t[c], t[c + 1], t[d] - t[c], t[d + 1] - t[c + 1], shares);
+        }
+      }
+      // outside, the nearest point changes from side to corner over the perpendicular at a corner
+      for (double[] e : hull) {
+        double ex = e[3] - e[0];
+        double ey = e[4] - e[1];
+        double along = dx * ex + dy * ey;
+        if (along != 0) {
+          addInside(((e[0] - from.x()) * ex + (e[1] - from.y()) * ey) / along, shares);
+          addInside(((e[3] - from.x()) * ex + (e[4] - from.y()) * ey) / along, shares);
+        }
+      }
+    }
+    return shares.stream()
+        .map(
+            share -> {
+              double x = share == 1 ? to.x() : from.x() + share * dx;
+              double y = share == 1 ? to.y() : from.y() + share * dy;
+              return new Place(x, y, heightAt(x, y));
+            })
+        .toList();
+  }
+
+  /** Adds where the line meets a side (ax, ay) + s·(ux, uy), 0 ≤ s ≤ 1. */
+  private static void cut(
+      Point from,
+      double dx,
+      double dy,
+      double ax,
+      double ay,
+      double ux,
+      double uy,
+      TreeSet<Double> shares) {
+    double slant = cross(dx, dy, ux, uy);
+    if (slant != 0) {
+      double onSide = cross(ax - from.x(), ay - from.y(), dx, dy) / slant;
+      if (onSide >= -ROUNDING && onSide <= 1 + ROUNDING) {
+        addInside(cross(ax - from.x(), ay - from.y(), ux, uy) / slant, shares);
+      }
+    }
+  }
+
+  private static void addInside(double share, TreeSet<Double> shares) {
+    if (share > 0 && share < 1) {
+      shares.add(share);
+    }
   }
 
   private static GroundSurface joined(List<Place> spots) {

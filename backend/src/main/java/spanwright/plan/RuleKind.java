@@ -8,7 +8,7 @@ import com.fasterxml.jackson.annotation.JsonProperty;
  * @param id unique among rules
  * @param name in words
  * @param defaultValue in the unit
- * @param unit of the value: "m", "degrees", "times"
+ * @param unit of the value: "m", "degrees", "×" for a share, or empty
  * @param least the lowest value a brief may set, or null when it may not be changed
  * @param most the highest value a brief may set, or null when it may not be changed
  * @param source where the default comes from

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import org.locationtech.jts.geom.Polygon;
+import org.locationtech.jts.triangulate.quadedge.LocateFailureException;
 
 /** Whether the surveyed things make sense, each alone and together. */
 final class SurveyChecks {
@@ -123,8 +124,17 @@ final class SurveyChecks {
         return;
       }
     }
-    if (inLine(spots)) {
+    if (inLine(spots) || !makesGround(spots)) {
       say(terrain.at("spots"), Wording.SPOTS_IN_LINE);
+    }
+  }
+
+  /** Spots so near to one line that the triangulation finds no triangle among them. */
+  private static boolean makesGround(List<Place> spots) {
+    try {
+      return !GroundSurface.of(new Terrain(spots)).isLevel();
+    } catch (IllegalArgumentException | LocateFailureException e) {
+      return false;
     }
   }
 

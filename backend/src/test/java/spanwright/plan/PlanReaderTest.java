@@ -14,6 +14,8 @@ import com.networknt.schema.SpecificationVersion;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.time.Duration;
 import java.util.List;
 import java.util.Random;
@@ -70,6 +72,15 @@ class PlanReaderTest {
     assertEquals(Building.Roof.FLAT, plan.buildings().get(0).roof());
     assertEquals(0, plan.mastZones().get(0).base());
     assertEquals(0, plan.mastZones().get(0).guyRadius());
+  }
+
+  @Test
+  void the_least_plan_of_the_documentation_reads() throws IOException {
+    Path page = Path.of("..", "docs", "reference", "plan.md");
+    String text = Files.readString(page, StandardCharsets.UTF_8);
+    int from = text.indexOf("```json") + 7;
+    PlanReader.Outcome outcome = PlanReader.read(text.substring(from, text.indexOf("```", from)));
+    assertEquals(List.of(), outcome.faults());
   }
 
   @Test
