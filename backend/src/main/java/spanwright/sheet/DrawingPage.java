@@ -174,7 +174,7 @@ final class DrawingPage {
     survey.draw();
     new RiggingInk(model, frame, labels, inside).draw();
     labels.settle(inside);
-    lettering.addAll(labels.taken());
+    lettering.addAll(labels.placed());
     window(pen, frame, inside);
     pen.rect(frame.left(), frame.top(), frame.width(), frame.height(), 0.5, 1, Ink.NONE);
     rulers(pen, frame, survey.gridStep());
@@ -214,7 +214,7 @@ final class DrawingPage {
         Labels.box(left + width / 2, top + height - SIDE_FOOT / 2, width, SIDE_FOOT - 1.4, 0));
     new SideInk(model, frame, legs, labels, inside).draw();
     labels.settle(inside);
-    lettering.addAll(labels.taken());
+    lettering.addAll(labels.placed());
     pen.text(
         left,
         top - 2.2,

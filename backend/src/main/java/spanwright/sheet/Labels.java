@@ -41,6 +41,7 @@ final class Labels {
 
   private final Frame frame;
   private final List<Polygon> taken = new ArrayList<>();
+  private final List<Polygon> placed = new ArrayList<>();
   private final List<Avoided> avoided = new ArrayList<>();
   private final List<Asked> asked = new ArrayList<>();
 
@@ -48,9 +49,9 @@ final class Labels {
     this.frame = frame;
   }
 
-  /** Boxes of everything placed, for whoever wants to check that none overlap. */
-  List<Polygon> taken() {
-    return List.copyOf(taken);
+  /** Boxes of all that found room, for whoever wants to check that none overlap. */
+  List<Polygon> placed() {
+    return List.copyOf(placed);
   }
 
   /** Lettering had better not cover this line. */
@@ -98,6 +99,7 @@ final class Labels {
       }
       if (best != null) {
         taken.add(best.box());
+        placed.add(best.box());
         best.lines().forEach(line -> avoided.add(new Avoided(line, STRUCK)));
         best.paint().accept(pen);
       }

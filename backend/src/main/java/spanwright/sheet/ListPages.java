@@ -412,7 +412,14 @@ final class ListPages {
     }
     List<String> notes = new ArrayList<>();
     notes.add(known(s.a()) + "; " + known(s.b()) + (third ? "; " + known(s.c()) : "") + ".");
-    s.points().stream().map(this::better).filter(t -> !t.isEmpty()).forEach(notes::add);
+    String better =
+        s.points().stream()
+            .filter(m -> m.flat() || m.blocked() != null)
+            .map(this::better)
+            .collect(Collectors.joining(" "));
+    if (!better.isEmpty()) {
+      notes.add(better);
+    }
     notes.addAll(
         List.of(
             String.join(" ", s.notes())
@@ -429,21 +436,15 @@ final class ListPages {
   }
 
   private String better(SheetModel.Mark m) {
-    if (!m.flat() && m.blocked() == null) {
-      return "";
-    }
-    String why =
-        m.blocked() != null
-            ? m.blocked()
-            : "the tapes cross " + Figures.degrees(m.crossing()) + ", too flat";
+    String why = m.blocked() != null ? m.blocked() : "tapes cross flat";
     SheetModel.Pair p = m.better();
     return "Point "
         + m.number()
-        + ": "
+        + ", "
         + why
         + (p == null
             ? "."
-            : "; better "
+            : ": better "
                 + figures.length(p.fromTape())
                 + " from "
                 + p.from()
@@ -451,7 +452,7 @@ final class ListPages {
                 + figures.length(p.withTape())
                 + " from "
                 + p.with()
-                + ", crossing at "
+                + ", at "
                 + Figures.degrees(p.crossing())
                 + ".");
   }

@@ -248,8 +248,8 @@ final class SideInk {
     Double keep =
         model.overhead().lines().stream()
             .filter(l -> l.id().equals(line.id()))
-            .map(SheetModel.Line::keep)
             .findFirst()
+            .map(SheetModel.Line::keep)
             .orElse(null);
     for (int i = 1; i < line.path().size(); i++) {
       Place p = ground.raise(line.path().get(i - 1));
