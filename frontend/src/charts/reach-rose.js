@@ -11,6 +11,7 @@ import { sample, within } from './scale.js';
 
 export const PIXELS_PER_DECIBEL = 7;
 const STROKE_EVERY_DEGREES = 2;
+const SMALL_RING = 110;
 /** Nulls are drawn no farther in than this share of the ring, outward no farther than this many decibels. */
 const INNERMOST = 0.12;
 const OUTERMOST_DECIBELS = 14;
@@ -37,13 +38,15 @@ export function roseGeometry(rose, ring, planNorth) {
   const better = [];
   /** @type {number[][][]} */
   const worse = [];
-  for (let azimuth = 0; azimuth < 360; azimuth += STROKE_EVERY_DEGREES) {
+  // On a small ring strokes this near would run together into a solid.
+  const every = ring < SMALL_RING ? 2 : 1;
+  for (let azimuth = 0, index = 0; azimuth < 360; azimuth += STROKE_EVERY_DEGREES, index++) {
     const over = sample([...rose.dbi, rose.dbi[0]], rose.step, azimuth) - rose.referenceDbi;
     const radius = within(ring + over * PIXELS_PER_DECIBEL, ring * INNERMOST, ring + OUTERMOST_DECIBELS * PIXELS_PER_DECIBEL);
     const [dx, dy] = screenDirection(azimuth, planNorth);
     const tip = [dx * radius, dy * radius];
     outline.push(tip);
-    (over >= 0 ? better : worse).push([[dx * ring, dy * ring], tip]);
+    if (index % every === 0) (over >= 0 ? better : worse).push([[dx * ring, dy * ring], tip]);
   }
   return { outline, better, worse };
 }

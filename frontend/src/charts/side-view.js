@@ -14,6 +14,8 @@ import { ticks } from './scale.js';
 
 const MARGIN = { left: 34, right: 12, top: 18, foot: 36 };
 const LETTER = 5.3;
+/** A narrower view is described under it instead. */
+export const ROOM_FOR_TITLE = 520;
 
 /**
  * @param {Along} along
@@ -94,7 +96,7 @@ export function sideView(along, options) {
     svg('path', { class: 'side-feed-line', d: pathOf(along.feedLine.map(at)) }),
     ...along.wires.map((/** @type {number[][]} */ wire) => svg('path', { class: 'side-wire', d: pathOf(wire.map(at)) })),
     ...along.lines.flatMap((line) => overhead(line, frame)),
-    ...along.drops.flatMap((drop) => dropMark(drop, frame, options)),
+    ...apart(along.drops, frame).flatMap((drop) => dropMark(drop, frame, options)),
     feedMark(at(along.feed)),
     ...holdLabels(along.holds, frame, options),
     ...footLabels(along.holds, frame, options, height),
@@ -152,6 +154,17 @@ function overhead(line, { x, y }) {
     svg('path', { class: 'side-overhead', d: `M${px - 13} ${py}h8l3 -5 4 10 3 -5h8` }),
     svg('text', { class: 'drawn bold halo middle', x: px, y: py - 9 }, [line.name]),
   ];
+}
+
+/**
+ * Of two heights so near that their figures would touch, the lesser is shown.
+ * @param {Along['drops']} drops
+ * @param {ReturnType<typeof sideScale>} frame
+ * @returns {Along['drops']}
+ */
+function apart(drops, { x }) {
+  const least = [...drops].sort((a, b) => a.top - a.bottom - (b.top - b.bottom));
+  return least.filter((drop, index) => !least.slice(0, index).some((kept) => Math.abs(x(kept.s) - x(drop.s)) < 56));
 }
 
 /**
@@ -228,6 +241,7 @@ function footLabels(holds, { x }, options, height) {
  * @param {number} width
  */
 function titleBlock(options, frame, width) {
+  if (width < ROOM_FOR_TITLE) return [];
   const scale = frame.same ? 'same scale as the plan' : 'heights and lengths at one scale';
   return [
     svg('text', { class: 'side-title end halo', x: width - MARGIN.right, y: 16 }, [options.title]),

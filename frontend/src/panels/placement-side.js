@@ -19,15 +19,24 @@ import { placementOf, planOf } from './placement-facts.js';
 export function sideViewNode(state, placement, size) {
   const plan = planOf(state);
   const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 1);
+  return sideView(alongWire(plan, placement), {
+    ...size, length, title: 'Along the wire', notes: sagWords(state, placement), stateOf: (to) => stateUnder(plan, placement, to),
+  });
+}
+
+/**
+ * @param {State} state
+ * @param {any} placement
+ * @returns {string[]}
+ */
+export function sagWords(state, placement) {
   const out = Math.max(0, ...placement.spans.map((/** @type {any} */ span) => span.blowOut));
   const sag = Math.max(0, ...placement.spans.map((/** @type {any} */ span) => span.sagInWind));
   const calm = Math.max(0, ...placement.spans.map((/** @type {any} */ span) => span.sag));
-  return sideView(alongWire(plan, placement), {
-    ...size, length, title: 'Along the wire',
-    notes: [`${state.units === 'm' ? 'metres; ' : ''}sag ${formatLength(calm, state.units, 2)}`,
-      `in the gust: out ${formatLength(out, state.units, 2)}, sag ${formatLength(sag, state.units, 2)}`],
-    stateOf: (to) => stateUnder(plan, placement, to),
-  });
+  return [
+    `${state.units === 'm' ? 'metres; ' : ''}sag ${formatLength(calm, state.units, 2)}`,
+    `in the gust: out ${formatLength(out, state.units, 2)}, sag ${formatLength(sag, state.units, 2)}`,
+  ];
 }
 
 /**

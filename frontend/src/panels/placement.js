@@ -11,7 +11,7 @@ import {
 } from './placement-facts.js';
 import { feedFacts, gainTable, remarks, scoreTable } from './placement-gain.js';
 import { headLine } from './placement-head.js';
-import { mountSideView, sideViewNode } from './placement-side.js';
+import { mountSideView, sagWords, sideViewNode } from './placement-side.js';
 
 /**
  * Placements, right: the figures of the chosen placement; and the side view under the plan.
@@ -64,7 +64,8 @@ export function mount(root, store, shell) {
     return [
       headLine(state, placement, rank, store),
       head(state, plan, placement),
-      ...(narrow.matches ? [html('div', { class: 'inline-side' }, sideViewNode(state, placement, { width: Math.max(300, root.clientWidth), height: 190, ppm: 0 }))] : []),
+      ...(narrow.matches ? [html('div', { class: 'inline-side' }, sideViewNode(state, placement, { width: Math.max(300, root.clientWidth), height: 180, ppm: 0 }),
+        html('p', { class: 'soft' }, `Along the wire, ${sagWords(state, placement).join('; ')}`))] : []),
       ...(state.pinned !== null && state.pinned !== placement.id ? [comparison(state, placement, store)] : []),
       profile(state, plan, placement, band),
       gainTable(placement, band, (name) => store.set({ chosenBand: name })),

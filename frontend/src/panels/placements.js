@@ -33,6 +33,10 @@ export function mount(root, store, shell) {
   /** @type {{effort: 'quick'|'normal'|'thorough', view: typeof VIEWS[number], again: boolean}} */
   const choice = { effort: 'normal', view: 'overall', again: false };
   const ask = redrawer(root, () => render(store.get()));
+  // Where list and figures share a column: the list while there is nothing to look at, then the best placement.
+  store.subscribe((state) => state.search.state, (now) => {
+    document.body.dataset.column = now === 'done' || now === 'cancelled' ? 'figures' : 'list';
+  });
   store.subscribe((state) => [state.search, state.chosen, state.chosenBand, state.units, state.faults.length, state.plan, state.pinned], ask);
 
   /** @param {State} state */

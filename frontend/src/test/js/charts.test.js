@@ -32,7 +32,7 @@ test('bearings are spoken with three figures and wrap', () => {
 
 test('impedances have a true minus and megahertz no idle digits', () => {
   equal(impedance([51.7, -410.2]), '52 − j410');
-  equal(impedance([1234, 5]), '1230 + j5');
+  equal(impedance([1234, 5]), '1\u2009230 + j5');
   equal([megahertz(14.1750001), megahertz(7.1)], ['14.175', '7.1']);
 });
 
@@ -46,9 +46,9 @@ test('a state not known is never drawn as clear', () => {
 
 test('a rose stroke is seven pixels a decibel outward where better, inward where worse', () => {
   const dbi = Array.from({ length: 180 }, (_, index) => (index === 45 ? 3 : 0));
-  const { outline, better, worse } = roseGeometry({ elevation: 10, step: 2, dbi, referenceDbi: 1, betterShare: 0 }, 100, 0);
-  near(outline[45][0], 100 + 2 * PIXELS_PER_DECIBEL, 1e-9);
-  near(Math.hypot(...outline[0]), 100 - PIXELS_PER_DECIBEL, 1e-9);
+  const { outline, better, worse } = roseGeometry({ elevation: 10, step: 2, dbi, referenceDbi: 1, betterShare: 0 }, 200, 0);
+  near(outline[45][0], 200 + 2 * PIXELS_PER_DECIBEL, 1e-9);
+  near(Math.hypot(...outline[0]), 200 - PIXELS_PER_DECIBEL, 1e-9);
   equal([better.length, worse.length], [1, 179]);
 });
 
