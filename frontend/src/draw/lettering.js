@@ -43,7 +43,7 @@ export function createLettering(view) {
       return { left: x - 6, top: y - 6, width: 12, height: 12 };
     });
     // The north point, the scale bar and the buttons have their corners to themselves.
-    taken.push({ left: 0, top: 0, width: 104, height: 46 });
+    taken.push({ left: 0, top: 0, width: frame.left ? 104 : 142, height: frame.left ? 46 : 50 });
     taken.push({ left: frame.width - 84, top: 6, width: 80, height: 112 });
     taken.push({ left: frame.width - 220, top: frame.height - 36, width: 216, height: 34 });
     const soft = lines.flatMap(([a, b]) => along(local(a), local(b), frame));

@@ -26,7 +26,7 @@ export function signed(value, digits) {
 
 /** @param {string} text @returns {string} decimal comma, true minus and stray spaces as a computer reads them */
 export const plain = (text) =>
-  text.trim().replace(/[\u2212\u2013]/g, '-').replace(/[\u2009\u202f\u00a0]/g, ' ').replace(/(\d),(\d)/g, '$1.$2');
+  text.trim().replace(/[¼½¾]/g, (part) => ({ '¼': ' 1/4', '½': ' 1/2', '¾': ' 3/4' })[part] ?? part).replace(/[\u2212\u2013]/g, '-').replace(/[\u2009\u202f\u00a0]/g, ' ').replace(/(\d),(\d)/g, '$1.$2');
 
 /** @param {string} text @returns {number|null} null when it is not a number */
 export function parseNumber(text) {

@@ -1,5 +1,8 @@
 // @ts-check
-/** A harness of a few lines: test files call `test` as they load, the page calls `run` last. */
+/**
+ * A harness of a few lines: test files call `test` as they load, whoever opened them calls `run`
+ * last, which answers with, and leaves in `globalThis.results`, `[{name, ok, error}]`.
+ */
 
 /** @type {{name: string, body: () => void|Promise<void>}[]} */
 const tests = [];
@@ -14,18 +17,23 @@ export function assert(truth, message = 'it does not hold') {
   if (!truth) throw new Error(message);
 }
 
-/** @param {unknown} found @param {unknown} expected compared as JSON */
-export function equal(found, expected) {
+/** @param {unknown} found @param {unknown} expected compared as JSON @param {string} [words] */
+export function equal(found, expected, words = '') {
   const [a, b] = [JSON.stringify(found), JSON.stringify(expected)];
-  if (a !== b) throw new Error(`found ${a}, expected ${b}`);
+  if (a !== b) throw new Error(`${words} found ${a}, expected ${b}`);
 }
 
-/** @param {number} found @param {number} expected @param {number} tolerance */
-export function near(found, expected, tolerance) {
-  if (!(Math.abs(found - expected) <= tolerance)) throw new Error(`found ${found}, expected ${expected} ± ${tolerance}`);
+/** @param {number|null|undefined} found @param {number} expected @param {number} [tolerance] @param {string} [words] */
+export function near(found, expected, tolerance = 1e-6, words = '') {
+  if (!(Math.abs(/** @type {number} */ (found) - expected) <= tolerance)) {
+    throw new Error(`${words} found ${found}, expected ${expected} ± ${tolerance}`);
+  }
 }
 
-/** Runs every test in turn and leaves the outcome for the one who opened the page. */
+assert.same = equal;
+assert.near = near;
+
+/** Runs every test in turn. @returns {Promise<{name: string, ok: boolean, error: string}[]>} */
 export async function run() {
   const results = [];
   for (const { name, body } of tests) {
@@ -36,5 +44,6 @@ export async function run() {
       results.push({ name, ok: false, error: error instanceof Error ? `${error.message}\n${error.stack}` : String(error) });
     }
   }
-  Reflect.set(window, 'results', results);
+  Reflect.set(globalThis, 'results', results);
+  return results;
 }
