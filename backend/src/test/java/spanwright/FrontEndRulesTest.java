@@ -36,8 +36,7 @@ class FrontEndRulesTest {
           entry("panels", Set.of("geometry", "state", "units", "api", "draw", "charts")));
 
   private static final Pattern IMPORT =
-      Pattern.compile(
-          "(?m)^(?:import|export)\\s[^;'\"]*?from\\s*'([^']+)'|^import\\s*'([^']+)'");
+      Pattern.compile("(?m)^(?:import|export)\\s[^;'\"]*?from\\s*'([^']+)'|^import\\s*'([^']+)'");
   private static final Pattern COLOUR =
       Pattern.compile("#[0-9A-Fa-f]{3,8}\\b(?![\\w-])|\\b(?:rgb|hsl|oklch|lab)a?\\(");
 
