@@ -2,6 +2,7 @@
 import { html, redrawer } from '../charts/html.js';
 import { count } from '../charts/figures.js';
 import { stateMark } from '../charts/marks.js';
+import { laidAlong } from '../draw/placement/holding.js';
 import { planOf, nameOf, ownOf, shapeTitle } from './placement-facts.js';
 
 /**
@@ -94,7 +95,7 @@ function reasonWithoutNames(refusal) {
 }
 
 /**
- * What `assess` reads: the refused layout with its attachments moved. The wire's own points move with the ends.
+ * What `assess` reads: the refused wire laid along the cured attachments.
  * @param {any} plan
  * @param {any} catalogue
  * @param {any} refusal
@@ -102,12 +103,11 @@ function reasonWithoutNames(refusal) {
 export function curedLayout(plan, catalogue, refusal) {
   const wire = plan.brief?.wire ?? catalogue?.wires?.find((/** @type {any} */ one) => one.default)?.id;
   const line = plan.brief?.line ?? catalogue?.lines?.find((/** @type {any} */ one) => one.default)?.id;
-  return {
-    shape: refusal.shape,
-    attachments: refusal.cured,
-    conductors: refusal.wire.map((/** @type {number[][]} */ points) => ({ points, wire })),
-    feed: { conductor: 0, fraction: refusal.fraction ?? 0.5, line },
-  };
+  const [drawn] = refusal.wire;
+  const length = (drawn ?? []).slice(1).reduce((/** @type {number} */ sum, /** @type {number[]} */ point, /** @type {number} */ index) =>
+    sum + Math.hypot(...[0, 1, 2].map((k) => point[k] - drawn[index][k])), 0);
+  const { points, fraction } = laidAlong(refusal.cured.map((/** @type {any} */ hold) => hold.at), length || Infinity);
+  return { shape: refusal.shape, attachments: refusal.cured, conductors: [{ points, wire }], feed: { conductor: 0, fraction, line } };
 }
 
 /**

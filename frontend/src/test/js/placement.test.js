@@ -1,6 +1,6 @@
 // @ts-check
 import { dimension, toDimension } from '/src/draw/placement/dimensions.js';
-import { carried, holdings, movedLayout } from '/src/draw/placement/holding.js';
+import { carried, holdings, laidAlong, movedLayout, shareAlong } from '/src/draw/placement/holding.js';
 import { toMetres, toPixels } from '/src/draw/placement/labels.js';
 import { toFrame } from '/src/draw/placement/rose.js';
 import { windEnvelope } from '/src/draw/placement/wire.js';
@@ -74,7 +74,20 @@ test('a moved layout holds what assess reads and nothing that is stale', () => {
   const layout = movedLayout(placement, 1, { on: 'bed', at: [15, 2], z: 6 });
   equal(Object.keys(layout), ['shape', 'attachments', 'conductors', 'feed']);
   equal(layout.attachments[1], { on: 'bed', at: [15, 2, 6] });
-  equal(layout.feed, { conductor: 0, fraction: 0.5, line: 'l' });
+  equal([layout.feed.conductor, layout.feed.line], [0, 'l']);
+  near(layout.feed.fraction, 0.5, 1e-9);
+});
+
+test('a feed at a held corner stays at the corner when one leg grows', () => {
+  near(shareAlong([[0, 0, 0], [3, 0, 0], [3, 9, 0]], [3, 0, 0]), 0.25, 1e-9);
+});
+
+test('a wire laid along its holding points keeps its length, its corner, and rope at both ends', () => {
+  const { points, fraction } = laidAlong([[0, 0, 8], [10, 0, 8], [10, 10, 8]], 16);
+  equal(points, [[2, 0, 8], [10, 0, 8], [10, 8, 8]]);
+  near(fraction, 0.5, 1e-9);
+  const tight = laidAlong([[0, 0, 8], [10, 0, 8]], 30).points;
+  equal(tight, [[0.5, 0, 8], [9.5, 0, 8]]);
 });
 
 test('names are those the user gave, else the id in plain words', () => {
