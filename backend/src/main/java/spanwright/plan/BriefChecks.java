@@ -85,9 +85,9 @@ final class BriefChecks {
   }
 
   private void target(Thing target, Set<String> bands) {
-    boolean bearing = isGiven(target, "bearing");
-    boolean distance = isGiven(target, "distanceKm");
-    if (isGiven(target, "nearVerticalKm")) {
+    boolean bearing = !target.lacks("bearing");
+    boolean distance = !target.lacks("distanceKm");
+    if (!target.lacks("nearVerticalKm")) {
       if (bearing || distance) {
         say(target.path(), Wording.BOTH_TARGET_KINDS, target.label());
       }
@@ -109,10 +109,6 @@ final class BriefChecks {
             list(bands));
       }
     }
-  }
-
-  private static boolean isGiven(Thing thing, String field) {
-    return !thing.json().path(field).isMissingNode() && !thing.json().path(field).isNull();
   }
 
   private static String list(Collection<String> names) {
@@ -181,7 +177,7 @@ final class BriefChecks {
     String network = unit.text("network");
     if ("L".equals(network) || "T".equals(network)) {
       for (String field : PlanDefaults.UNIT_FIELDS) {
-        if (!isGiven(unit, field)) {
+        if (unit.lacks(field)) {
           boolean range = field.endsWith("ance");
           String what = range ? "[least, most], two numbers" : "a number";
           say(unit.at(field), Wording.MISSING, "The matching unit", field, "it", what);

@@ -98,7 +98,7 @@ final class SurveyChecks {
     if (latitude != (site.number("longitude") != null)) {
       String given = latitude ? "latitude" : "longitude";
       String lacking = latitude ? "longitude" : "latitude";
-      if (site.json().path(lacking).isMissingNode() || site.json().path(lacking).isNull()) {
+      if (site.lacks(lacking)) {
         say(site.at(lacking), Wording.HALF_POSITION, given, lacking);
       }
     }
@@ -166,7 +166,7 @@ final class SurveyChecks {
     List<Point> line = building.points("ridgeLine");
     String roof = building.text("roof");
     boolean needed = "gable".equals(roof) || "lean-to".equals(roof);
-    boolean absent = line == null ? !building.json().has("ridgeLine") : line.isEmpty();
+    boolean absent = line == null ? building.lacks("ridgeLine") : line.isEmpty();
     boolean rises = eaves != null && ridge != null && ridge > eaves + ROUNDING;
     if (absent) {
       if (needed && rises) {
@@ -300,8 +300,7 @@ final class SurveyChecks {
 
   private void zone(Thing zone) {
     OutlineChecks.outline(zone, "area", "the area", faults);
-    boolean lacks =
-        zone.json().path("height").isMissingNode() || zone.json().path("height").isNull();
+    boolean lacks = zone.lacks("height");
     if ("headroom".equals(zone.text("rule")) && lacks) {
       say(zone.at("height"), Wording.NO_HEADROOM, zone.label());
     }

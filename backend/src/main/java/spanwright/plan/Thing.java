@@ -36,6 +36,11 @@ record Thing(String path, String label, JsonNode json) {
     return Paths.field(path, field);
   }
 
+  /** Whether a field is absent; null counts as absent. */
+  boolean lacks(String field) {
+    return json.path(field).isMissingNode() || json.path(field).isNull();
+  }
+
   Double number(String field) {
     JsonNode value = json.path(field);
     return value.isNumber() && Double.isFinite(value.asDouble()) ? value.asDouble() : null;

@@ -785,6 +785,41 @@ class FaultsTest {
     }
   }
 
+  /** Every value of the plan in turn is replaced by every kind of nonsense. */
+  @Test
+  void nonsense_in_any_place_is_a_fault_or_a_plan_never_a_crash() throws JsonProcessingException {
+    JsonNode sound = Json.mapper().readTree(SOUND);
+    List<String> places = new ArrayList<>();
+    places(sound, "", places);
+    assertTrue(places.size() > 150);
+    for (String place : places) {
+      for (String value :
+          List.of("null", "true", "\"x\"", "-1", "1e9", "0.5", "[]", "{}", "[[1]]", "[null]")) {
+        JsonNode plan = sound.deepCopy();
+        put(plan, place, Json.mapper().readTree(value));
+        PlanReader.Outcome outcome = PlanReader.read(plan.toString());
+        assertTrue((outcome.plan() == null) != outcome.faults().isEmpty(), place + " = " + value);
+        PlanReader.readDraft(plan.toString());
+        if (outcome.plan() != null) {
+          String written = Json.mapper().writeValueAsString(outcome.plan());
+          assertEquals(outcome.plan(), PlanReader.read(written).plan(), place + " = " + value);
+        }
+      }
+    }
+  }
+
+  private static void places(JsonNode node, String path, List<String> places) {
+    if (!path.isEmpty()) {
+      places.add(path);
+    }
+    for (int i = 0; i < node.size() && node.isArray(); i++) {
+      places(node.get(i), path + "[" + i + "]", places);
+    }
+    node.properties()
+        .forEach(
+            f -> places(f.getValue(), (path.isEmpty() ? "" : path + ".") + f.getKey(), places));
+  }
+
   @Test
   void every_sentence_has_its_case() throws JsonProcessingException {
     List<String> said = new ArrayList<>();

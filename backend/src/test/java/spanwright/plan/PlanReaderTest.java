@@ -22,6 +22,11 @@ import java.util.Random;
 import org.junit.jupiter.api.Test;
 
 class PlanReaderTest {
+  static {
+    // the schema library warns of our own annotations, which it rightly ignores
+    System.setProperty("org.slf4j.simpleLogger.log.com.networknt.schema", "error");
+  }
+
   private static final String LEAST =
       """
       {"boundary": [[0,0],[20,0],[20,30],[0,30]], "entry": {"at": [10,5], "height": 1.5},
