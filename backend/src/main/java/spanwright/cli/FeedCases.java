@@ -58,11 +58,11 @@ final class FeedCases {
     if (load.length == 2 && load[0] < 0) {
       form.note("load[0]", "the resistance must be 0 ohm or more: a feedpoint takes power.");
     }
-    double frequencyMHz = form.number("frequency", 0.1, 1000, "MHz");
+    double frequencyMHz = form.number("frequency", 0.1, 300, "MHz");
     Line line = line(form, catalogue);
     double length = form.number("length", 0, 10_000, "m");
     MatchingNetwork unit = form.has("matching") ? unit(form, catalogue) : null;
-    double power = form.number("power", 1e-6, 1e7, "W", USUAL_POWER);
+    double power = form.number("power", 1e-6, 1e5, "W", USUAL_POWER);
     form.finish();
     Complex z = load.length == 2 ? new Complex(load[0], load[1]) : Complex.ZERO;
     return new Read(z, frequencyMHz, line, length, unit, power, faults);
@@ -81,7 +81,7 @@ final class FeedCases {
     Form given = form.form("line");
     double impedance = given.number("impedance", 1, 5000, "ohm");
     double velocityFactor = given.number("velocityFactor", 0.05, 1, "");
-    double loss = given.number("lossDbPer100m", 0, 1e4, "dB per 100 m");
+    double loss = given.number("lossDbPer100m", 0, 1000, "dB per 100 m");
     given.finish();
     // A stand-in keeps reading going where the figures are noted as faults already.
     return Line.ofLoss(impedance, velocityFactor, loss);
@@ -139,7 +139,8 @@ final class FeedCases {
     double[] capacitance = range(form, "capacitance", balun, "F");
     double coilQ = quality(form, "coilQ", balun);
     double capacitorQ = quality(form, "capacitorQ", balun);
-    double peakVolts = form.number("peakVolts", 1, 1e7, "V");
+    double peakVolts =
+        balun ? form.number("peakVolts", 1, 1e7, "V", 0.0) : form.number("peakVolts", 1, 1e7, "V");
     form.finish();
     return balun || kind == null
         ? MatchingNetwork.balun(peakVolts)

@@ -31,7 +31,7 @@ final class HangCases {
             to,
             wire,
             load,
-            form.number("pull", SMALLEST, 1e7, "N"),
+            form.number("pull", SMALLEST, 1e6, "N"),
             form.word(
                 "held", Map.of("weight", HangCase.Held.WEIGHT, "tied", HangCase.Held.TIED), null),
             form.number("wind", 0, 150, "m/s", null),
@@ -44,7 +44,7 @@ final class HangCases {
   private static HangCase.Wire wire(Form form) {
     HangCase.Wire wire =
         new HangCase.Wire(
-            form.number("weight", 0, 100, "kg/m"),
+            form.number("weight", SMALLEST, 100, "kg/m"),
             form.number("diameter", 0, 1, "m"),
             form.number("stiffness", SMALLEST, 1e12, "N", null));
     form.finish();
@@ -53,7 +53,7 @@ final class HangCases {
 
   private static HangCase.Load load(Form form) {
     HangCase.Load load =
-        new HangCase.Load(form.number("fraction", 0, 1, ""), form.number("weight", 0, 1e4, "kg"));
+        new HangCase.Load(form.number("fraction", 0, 1, ""), form.number("weight", 0, 1000, "kg"));
     form.finish();
     return load;
   }

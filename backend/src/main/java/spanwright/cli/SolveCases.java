@@ -22,10 +22,11 @@ import spanwright.web.Form;
 
 /** Reads the case of {@code solve} and writes its answer. Angles in the file are degrees. */
 final class SolveCases {
-  private static final int MOST_WIRES = 2000;
-  private static final int MOST_POINTS = 20_000;
-  private static final int MOST_FREQUENCIES = 1000;
-  private static final int MOST_DIRECTIONS = 100_000;
+  private static final int MOST_WIRES = 200;
+  private static final int MOST_POINTS = 500;
+  private static final int MOST_FREQUENCIES = 200;
+  private static final int MOST_DIRECTIONS = 20_000;
+  private static final double SMALLEST = 1e-6;
   private static final double USUAL_POWER = 100;
 
   /** Round figures at 20 °C: the usual ones of handbooks, common practice, no source. */
@@ -74,12 +75,12 @@ final class SolveCases {
     int feedWire = feed.index("wire", Math.max(0, wires.size() - 1));
     double fraction = feed.number("fraction", 0, 1, "");
     feed.finish();
-    double[] frequencies = form.numbers("frequencies", 1, MOST_FREQUENCIES, 0.1, 1000, "MHz");
+    double[] frequencies = form.numbers("frequencies", 1, MOST_FREQUENCIES, 0.1, 300, "MHz");
     List<Direction> directions =
         form.forms("directions", 0, MOST_DIRECTIONS, SolveCases::direction);
     List<Vertex> points =
         form.places("fieldPoints", 0, MOST_DIRECTIONS).stream().map(SolveCases::vertex).toList();
-    double power = form.number("power", 1e-9, 1e9, "W", USUAL_POWER);
+    double power = form.number("power", 0, 1e5, "W", USUAL_POWER);
     form.finish();
     return new Read(
         AntennaModel.of(wires, feedWire, fraction),
@@ -94,7 +95,7 @@ final class SolveCases {
   private static WireSpec wire(Form form) {
     List<Vertex> points =
         form.places("points", 2, MOST_POINTS).stream().map(SolveCases::vertex).toList();
-    double radius = form.number("radius", 1e-6, 1, "m");
+    double radius = form.number("radius", SMALLEST, 0.5, "m");
     double conductivity = material(form);
     Sheath sheath = form.has("insulation") ? sheath(form.form("insulation"), radius) : null;
     form.finish();
@@ -107,13 +108,13 @@ final class SolveCases {
       return known == null ? WireSpec.COPPER : known;
     }
     Form given = form.form("material");
-    double conductivity = given.number("conductivity", 1, 1e12, "S/m");
+    double conductivity = given.number("conductivity", SMALLEST, 1e9, "S/m");
     given.finish();
     return conductivity;
   }
 
   private static Sheath sheath(Form form, double wireRadius) {
-    double radius = form.number("radius", 1e-6, 1, "m");
+    double radius = form.number("radius", SMALLEST, 0.5, "m");
     if (radius < wireRadius) {
       form.note("radius", "this is the outer radius and must be more than the wire's.");
     }
@@ -148,7 +149,7 @@ final class SolveCases {
   }
 
   private static Direction direction(Form form) {
-    double azimuth = form.number("azimuth", -720, 720, "degrees");
+    double azimuth = form.number("azimuth", -360, 360, "degrees");
     double elevation = form.number("elevation", -90, 90, "degrees");
     form.finish();
     return new Direction(Math.toRadians(azimuth), Math.toRadians(elevation));

@@ -26,8 +26,9 @@ import spanwright.rigging.Layout;
  * through, since a result may come from a newer version.
  */
 public final class PlacementReader {
-  private static final int MOST_HOLDS = 50;
-  private static final int MOST_POINTS = 5000;
+  private static final int MOST_HOLDS = 20;
+  private static final int MOST_CONDUCTORS = 10;
+  private static final int MOST_POINTS = 500;
   private static final double LONGEST_LINE = 1000;
 
   private static final ObjectReader WHOLE =
@@ -37,11 +38,13 @@ public final class PlacementReader {
           .with(DeserializationFeature.FAIL_ON_NULL_FOR_PRIMITIVES);
 
   private final Set<String> holders = new HashSet<>();
+  private final String usualWire;
   private final Map<String, String> wires = new HashMap<>();
   private final Map<String, String> lines = new HashMap<>();
 
   /** For placements on one plan. */
   public PlacementReader(Plan plan, Catalogue catalogue) {
+    usualWire = catalogue.wire(plan.brief().wire()).id();
     plan.supports().forEach(each -> holders.add(each.id()));
     plan.bracketLines().forEach(each -> holders.add(each.id()));
     plan.mastZones().forEach(each -> holders.add(each.id()));
@@ -59,7 +62,7 @@ public final class PlacementReader {
     Form form = Form.at(path, node, faults);
     Shape shape = form.word("shape", shapes(), null);
     List<Layout.Hold> holds = form.forms("attachments", 2, MOST_HOLDS, this::hold);
-    List<Layout.Run> runs = form.forms("conductors", 1, MOST_HOLDS, this::run);
+    List<Layout.Run> runs = form.forms("conductors", 1, MOST_CONDUCTORS, this::run);
     Layout.FeedChoice feed = feed(form.form("feed"), runs.size());
     return new Layout(shape == null ? "" : word(shape), holds, runs, feed);
   }
@@ -88,7 +91,7 @@ public final class PlacementReader {
 
   private Layout.Run run(Form form) {
     List<Place> points = form.places("points", 2, MOST_POINTS);
-    return new Layout.Run(points, form.word("wire", wires, null));
+    return new Layout.Run(points, form.word("wire", wires, usualWire));
   }
 
   private Layout.FeedChoice feed(Form form, int conductors) {
