@@ -239,7 +239,7 @@ class PlanReaderTest {
 
   @Test
   void the_other_schemas_take_the_examples_of_the_documentation() throws IOException {
-    for (String name : List.of("solve-case", "feed-case", "hang-case", "placement")) {
+    for (String name : List.of("solve-case", "feed-case", "hang-case", "placement", "result")) {
       try (InputStream in =
           getClass().getResourceAsStream("/spanwright/examples/" + name + ".json")) {
         String example = new String(in.readAllBytes(), StandardCharsets.UTF_8);
