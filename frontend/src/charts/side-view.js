@@ -8,8 +8,9 @@ import { ticks } from './scale.js';
  *
  * @typedef {ReturnType<typeof import('./along.js').alongWire>} Along
  * @typedef {{width: number, height: number, ppm: number, length: (metres: number) => string, title: string,
- *   notes: string[], stateOf: (to: string) => string|null}} SideOptions
- *   `ppm`: pixels per metre of the plan, taken when the view fits; `length` writes a length without its unit
+ *   notes: string[], unit: number, stateOf: (to: string) => string|null}} SideOptions
+ *   `ppm`: pixels per metre of the plan, taken when the view fits; `length` writes a length without its unit;
+ *   `unit`: metres between whole figures of the height axis
  */
 
 const MARGIN = { left: 34, right: 12, top: 18, foot: 36 };
@@ -110,9 +111,9 @@ export function sideView(along, options) {
  * @param {SideOptions} options
  */
 function heightLines(frame, width, options) {
-  return ticks(frame.low, frame.high, 4).flatMap((z) => [
+  return ticks(frame.low / options.unit, frame.high / options.unit, 4).map((height) => height * options.unit).flatMap((z) => [
     svg('path', { class: 'side-grid', d: `M${MARGIN.left} ${frame.y(z)}H${width - MARGIN.right}` }),
-    svg('text', { class: 'axis end', x: MARGIN.left - 6, y: frame.y(z) + 4 }, [options.length(z).replace(/[.,]0+$/, '')]),
+    svg('text', { class: 'axis end', x: MARGIN.left - 6, y: frame.y(z) + 4 }, [options.length(z).replace(/\.0+$/, '')]),
   ]);
 }
 

@@ -46,7 +46,7 @@ function held(hold) {
  * @returns {HTMLElement}
  */
 export function clearancesTable(plan, placement, catalogue, length) {
-  const rows = placement.clearances.map((/** @type {any} */ one) => html('tr', { class: one.state },
+  const rows = placement.clearances.map((/** @type {any} */ one) => html('tr', {},
     html('td', { class: 'mark-cell' }, stateMark(one.state, one.state)),
     html('th', { scope: 'row' }, nameOf(plan, one.to), html('span', { class: 'soft' }, ` ${part(one, catalogue)}`)),
     html('td', { class: 'n' }, html('b', {}, length(one.distance))),

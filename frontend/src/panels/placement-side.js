@@ -1,7 +1,7 @@
 // @ts-check
 import { alongWire } from '../charts/along.js';
 import { html } from '../charts/html.js';
-import { formatLength } from '../units/length.js';
+import { FOOT, formatLength } from '../units/length.js';
 import { sideView } from '../charts/side-view.js';
 import { placementOf, planOf } from './placement-facts.js';
 
@@ -20,7 +20,7 @@ export function sideViewNode(state, placement, size) {
   const plan = planOf(state);
   const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 1);
   return sideView(alongWire(plan, placement), {
-    ...size, length, title: 'Along the wire', notes: sagWords(state, placement), stateOf: (to) => stateUnder(plan, placement, to),
+    ...size, length, unit: state.units === 'm' ? 1 : FOOT, title: 'Along the wire', notes: sagWords(state, placement), stateOf: (to) => stateUnder(plan, placement, to),
   });
 }
 

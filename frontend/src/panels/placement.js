@@ -81,8 +81,9 @@ export function mount(root, store, shell) {
   function unchosen(state) {
     const words = state.search.state === 'none' ? 'The figures of a placement stand here once a search has found one.'
       : state.search.state === 'running' ? 'Choose one of the list while the search runs, or wait: the best is chosen when it ends.'
-        : ownOf(state).length + listOf(state).length ? 'Choose a placement in the list.'
-          : 'No placement to show. The refusals say what stands in the way.';
+        : state.search.state === 'failed' ? 'The search stopped; what went wrong stands beside the plan.'
+          : ownOf(state).length + listOf(state).length ? 'Choose a placement in the list.'
+            : 'No placement to show. The refusals say what stands in the way.';
     return html('p', { class: 'placement-none soft' }, words);
   }
 

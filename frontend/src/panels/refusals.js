@@ -36,7 +36,11 @@ export function mount(root, store, shell) {
       html('div', { class: 'line part-head' },
         html('h3', {}, `${count(counts.refused)} refused`),
         refusals.length > SHOWN_AT_FIRST ? html('button', {
-          type: 'button', class: 'link', 'data-key': 'all', 'aria-expanded': String(open.all), onclick: () => { open.all = !open.all; ask(); },
+          type: 'button', class: 'link', 'data-key': 'all', 'aria-expanded': String(open.all), onclick: () => {
+            open.all = !open.all;
+            store.set({ search: { ...store.get().search, ghosts: open.all } });
+            ask();
+          },
         }, open.all ? 'only the nearest' : `the nearest ${refusals.length}, and their ghosts`) : null),
       html('ul', {}, ...shown.map((/** @type {any} */ refusal, /** @type {number} */ index) => item(state, refusal, index))),
     ];

@@ -23,6 +23,13 @@
  * @property {any|null} result the result document
  * @property {string|null} error a sentence
  * @property {Plan|null} planAtSearch the plan that was searched
+ * @property {any[]} [own] placements moved by hand or cured, the newest first
+ * @property {any[]} [faults] of the plan, when the search could not start for them
+ * @property {string} [effort]
+ * @property {number} [considered] layouts so far
+ * @property {number} [refused] of them
+ * @property {boolean} [broken] the stream of news is broken and listened to again
+ * @property {boolean} [ghosts] whether every refusal is drawn on the plan
  *
  * @typedef {object} State
  * @property {Plan} plan

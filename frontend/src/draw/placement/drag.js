@@ -18,8 +18,9 @@ const BIG_STEP = 1;
  * @returns {(placement: any, plan: any, view: any) => SVGElement[]} makes the handles
  */
 export function handles(planView, store, shell) {
-  /** @type {AbortController|null} */
-  let inFlight = null;
+  /** What waits while the server works on one move; only the latest is kept. @type {(() => void)|null} */
+  let waiting = null;
+  let working = false;
   /** Where the hand is, while it drags. @type {{index: number, point: [number, number]}|null} */
   let held = null;
   /** The placement a drag or a row of key presses began from. @type {any} */
@@ -40,19 +41,30 @@ export function handles(planView, store, shell) {
     const ground = now.at[2] - now.aboveGround;
     const above = Math.min(spot.highest, Math.max(spot.lowest, height));
     const layout = movedLayout(placement, index, { on: spot.on, at: spot.at, z: ground + above });
-    inFlight?.abort();
-    const mine = new AbortController();
-    inFlight = mine;
+    if (working) {
+      waiting = () => void assess(plan, layout, placement);
+      return;
+    }
+    await assess(plan, layout, placement);
+  }
+
+  /**
+   * @param {any} plan
+   * @param {any} layout
+   * @param {any} placement
+   */
+  async function assess(plan, layout, placement) {
+    working = true;
     try {
-      const answer = await shell.api.assess(plan, layout, mine.signal);
-      if (inFlight !== mine) return;
-      inFlight = null;
+      const answer = await shell.api.assess(plan, layout);
       keep({ ...answer, id: 'moved', rank: 0, madeFrom: movedName(origin ?? placement) });
     } catch (problem) {
-      if (mine.signal.aborted) return;
-      inFlight = null;
       shell.say(`That could not be worked out. ${/** @type {Error} */ (problem).message}`);
     }
+    working = false;
+    const next = waiting;
+    waiting = null;
+    next?.();
   }
 
   /** @param {any} from */

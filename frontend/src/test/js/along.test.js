@@ -100,7 +100,7 @@ test('the side view keeps the plan’s scale when it fits and one scale in both 
 
 test('the side view is drawn with no figure that is not a number', () => {
   const drawn = sideView(alongWire(PLAN, PLACEMENT), {
-    width: 640, height: 190, ppm: 12, length: (metres) => metres.toFixed(1), title: 'Along the wire', notes: [], stateOf: () => 'tight',
+    width: 640, height: 190, ppm: 12, length: (metres) => metres.toFixed(1), title: 'Along the wire', notes: [], unit: 1, stateOf: () => 'tight',
   });
   const markup = new XMLSerializer().serializeToString(drawn);
   assert(!markup.includes('NaN') && !markup.includes('undefined'));
