@@ -22,7 +22,7 @@ export function mount(root, store, shell) {
     el('div', { class: 'plan-buttons', role: 'group', 'aria-label': 'View of the plan' }, [
       button('+', () => shell.zoom(1 / 1.4), { 'aria-label': 'Nearer', title: 'Nearer (+)' }),
       button('−', () => shell.zoom(1.4), { 'aria-label': 'Farther', title: 'Farther (−)' }),
-      button('All', () => shell.planView.fit(), { 'aria-label': 'Show the whole plot', title: 'All of it (0)' }),
+      button('All', () => shell.planView.fit(), { 'aria-label': 'All of the plot', title: 'All of it (0)' }),
     ]),
     hint, notice, empty,
   );

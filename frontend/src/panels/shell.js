@@ -18,7 +18,7 @@ const sign = () => svg('svg', { class: 'sign', viewBox: '0 0 32 20', width: 30, 
 
 /** @param {{brand: HTMLElement, places: HTMLElement, state: HTMLElement}} roots @param {Store} store @param {any} shell */
 export function mountHead(roots, store, shell) {
-  roots.brand.append(sign(), el('span', { class: 'brand-name', text: 'Spanwright' }));
+  roots.brand.append(sign(), el('h1', { class: 'brand-name', text: 'Spanwright' }));
   const links = PLACES.map((place, i) =>
     el('a', { href: `#${place}`, class: 'place', 'data-place': place }, [
       el('span', { class: 'place-number', text: String(i + 1) }), el('span', { class: 'place-name', text: place.charAt(0).toUpperCase() + place.slice(1) }),
