@@ -2,6 +2,7 @@
 /** What is being drawn: walls so far, the one that follows the pointer, live dimensions, guides. */
 import { direction, distance, left, same, unit } from '../geometry/vector.js';
 import { signedArea } from '../geometry/polygon.js';
+import { around } from '../geometry/view.js';
 import { formatLength } from '../units/length.js';
 import { formatDirection } from '../units/angle.js';
 import { dimension, readingTurn } from './dimension.js';
@@ -32,6 +33,13 @@ export function mountDraft(view, store) {
     if (!pending) pending = requestAnimationFrame(draw);
   };
   store.subscribe((s) => [s.draft, s.units, s.place], soon);
+  // A corner typed beyond the frame draws the view out to show it.
+  store.subscribe((s) => s.draft?.points, (points) => {
+    const last = points?.[points.length - 1];
+    const { ppm: _ppm, ...sight } = view.sight();
+    const shown = !last || (last[0] > sight.x && last[0] < sight.x + sight.width && last[1] > sight.y && last[1] < sight.y + sight.height);
+    if (!shown) view.setView(around([...points, [sight.x, sight.y], [sight.x + sight.width, sight.y + sight.height]], 0.05, sight.width / sight.height));
+  });
   let scale = 0;
   view.onView((sight) => {
     if (sight.ppm !== scale) soon();

@@ -50,7 +50,7 @@ export function createLettering(view) {
     const whole = { left: 2, top: 2, width: frame.width - 4, height: frame.height - 4 };
     const first = wanted.filter((w) => !isInstead(w.id));
     const boxes = (/** @type {typeof wanted} */ list) =>
-      list.map((w) => ({ id: w.id, weight: w.weight, places: w.spots.map((s) => s.box) }));
+      list.map((w) => ({ id: w.id, weight: w.weight, places: w.spots.map((s) => s.boxes) }));
     let placed = placeLabels(boxes(first), taken, whole, soft);
     // A short form stands in for a label that found no room.
     const second = labels.filter((l) => l.insteadOf && !placed.has(l.insteadOf)).map((l) => l.id);
@@ -104,7 +104,7 @@ function along(a, b, frame) {
 }
 
 /**
- * @typedef {{x: number, y: number, anchor: 'start'|'middle'|'end', box: import('../geometry/labels.js').Box}} Spot
+ * @typedef {{x: number, y: number, anchor: 'start'|'middle'|'end', boxes: import('../geometry/labels.js').Box[]}} Spot
  *   x, y: pixels in the frame; y is the middle of the lettering
  */
 
@@ -145,16 +145,21 @@ function spotsOf(label, local, measure) {
   function spot(u, v, anchor) {
     const left = anchor === 'start' ? u : anchor === 'end' ? u - width : u - width / 2;
     const box = { left, top: v - height / 2, width, height };
-    return { x: u, y: v, anchor, box: label.turn ? around(u, v, width, height, label.turn) : box };
+    return { x: u, y: v, anchor, boxes: label.turn ? turnedBoxes(u, v, width, height, label.turn) : [box] };
   }
 }
 
-/** The upright box round a turned one. @param {number} u @param {number} v @param {number} w @param {number} h @param {number} turn */
-function around(u, v, w, h, turn) {
+/** Small upright boxes along turned lettering: one about the whole would hold far too much. @param {number} u @param {number} v @param {number} w @param {number} h @param {number} turn */
+function turnedBoxes(u, v, w, h, turn) {
   const a = (turn * Math.PI) / 180;
-  const width = Math.abs(w * Math.cos(a)) + Math.abs(h * Math.sin(a));
-  const height = Math.abs(w * Math.sin(a)) + Math.abs(h * Math.cos(a));
-  return { left: u - width / 2, top: v - height / 2, width, height };
+  const count = Math.max(1, Math.ceil(w / h));
+  const part = w / count;
+  const width = Math.abs(part * Math.cos(a)) + Math.abs(h * Math.sin(a));
+  const height = Math.abs(part * Math.sin(a)) + Math.abs(h * Math.cos(a));
+  return Array.from({ length: count }, (_, i) => {
+    const t = (i + 0.5) * part - w / 2;
+    return { left: u + t * Math.cos(a) - width / 2, top: v + t * Math.sin(a) - height / 2, width, height };
+  });
 }
 
 /**

@@ -9,7 +9,7 @@
  * @typedef {object} Wanted
  * @property {string} id
  * @property {number} weight the greater goes first; Infinity must be shown wherever it falls
- * @property {Box[]} places in order of liking
+ * @property {Box[][]} places in order of liking, each as the boxes it fills
  */
 
 /** @param {Box} a @param {Box} b @returns {number} area of their overlap, square pixels */
@@ -34,10 +34,10 @@ export function placeLabels(wanted, taken, frame, soft = []) {
     let best = -1;
     let least = Infinity;
     for (let i = 0; i < label.places.length ; i++) {
-      const box = label.places[i];
-      if (!inside(box, frame) || held.some((other) => overlap(box, other) > 0)) continue;
+      const boxes = label.places[i];
+      if (!boxes.every((box) => inside(box, frame) && held.every((other) => overlap(box, other) === 0))) continue;
       // Each place further down the list must spare a little more to be worth it.
-      const cost = soft.reduce((sum, other) => sum + overlap(box, other), 0) + i * 4;
+      const cost = boxes.reduce((sum, box) => sum + covered(box, soft), 0) + i * 4;
       if (cost < least) {
         least = cost;
         best = i;
@@ -46,10 +46,13 @@ export function placeLabels(wanted, taken, frame, soft = []) {
     if (best < 0 && label.weight === Infinity && label.places.length) best = 0;
     if (best < 0) continue;
     placed.set(label.id, best);
-    held.push(label.places[best]);
+    held.push(...label.places[best]);
   }
   return placed;
 }
+
+/** @param {Box} box @param {Box[]} others */
+const covered = (box, others) => others.reduce((sum, other) => sum + overlap(box, other), 0);
 
 /** @param {Box} box @param {Box} frame */
 const inside = (box, frame) =>

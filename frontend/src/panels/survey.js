@@ -48,7 +48,7 @@ export function mount(root, store, shell) {
     const found = selection && find(plan, selection.ref);
     const drawing = draft && draft.shape !== 'drag' ? draft : null;
     if (drawing) {
-      const key = `draft ${tool} ${JSON.stringify([drawing.points, drawing.at, drawing.variant, units])}`;
+      const key = `draft ${tool} ${JSON.stringify([drawing.points, drawing.at, drawing.variant, drawing.tapes, units])}`;
       if (key !== shown.key) {
         shown = { key, show() {} };
         top.replaceChildren(...drawingPart(drawing, store));

@@ -62,7 +62,7 @@ export function figures(store, shell, ref) {
     }),
     link('Done', () => store.set({ selection: null })),
   ]);
-  const root = el('section', { class: 'figures', 'aria-label': 'Figures of the selected thing' }, [
+  const root = el('section', { class: 'thing-figures', 'aria-label': 'Figures of the selected thing' }, [
     head, title, said,
     el('div', { class: 'figure-grid' }, [...rows.map((r) => r.control.root), place?.root]),
     turn, consents?.root, table?.root, actions,

@@ -15,10 +15,10 @@ import { button, el } from './el.js';
  * @param {any} shell
  */
 export function mount(root, store, shell) {
-  const reason = el('p', { class: 'typing-reason' });
-  const fields = el('div', { class: 'typing-fields' });
-  const hand = el('div', { class: 'typing-hand' });
-  const panel = el('div', { class: 'typing', role: 'group', 'aria-label': 'Length and direction of what is being drawn', hidden: true }, [fields, reason, hand]);
+  const reason = el('p', { class: 'cursor-box-reason' });
+  const fields = el('div', { class: 'cursor-box-fields' });
+  const hand = el('div', { class: 'cursor-box-hand' });
+  const panel = el('div', { class: 'cursor-box', role: 'group', 'aria-label': 'Length and direction of what is being drawn', hidden: true }, [fields, reason, hand]);
   root.append(panel);
   /** @type {Map<string, {input: HTMLInputElement, label: HTMLElement}>} */
   let boxes = new Map();
@@ -38,7 +38,7 @@ export function mount(root, store, shell) {
       input.addEventListener('focus', () => input.select());
       input.addEventListener('keydown', (/** @type {KeyboardEvent} */ event) => key(event, input));
       boxes.set(field.name, { input, label });
-      return el('div', { class: 'typing-field' }, [label, input]);
+      return el('div', { class: 'cursor-box-field' }, [label, input]);
     }));
     hand.replaceChildren(...(draft.shape === 'tapes'
       ? [handButton('Set', 'Enter')]

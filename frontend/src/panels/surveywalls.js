@@ -178,11 +178,13 @@ export function wallTable(store, ref) {
 
 /** The walls of what is being drawn, only to read. @param {any} draft @param {'m'|'ft'} units @returns {HTMLElement} */
 export function draftTable(draft, units) {
-  const points = draft.at ? [...draft.points, draft.at] : draft.points;
+  const last = draft.points[draft.points.length - 1];
+  const live = draft.at && !(last && distance(last, draft.at) < 1e-3);
+  const points = live ? [...draft.points, draft.at] : draft.points;
   const list = points.length > 1 ? walls(points, false) : [];
   return el('table', { class: 'walls' }, [
     el('thead', {}, [el('tr', {}, [draft.shape === 'ring' ? 'Wall' : 'Run', 'Length', 'Direction', 'Corner'].map((text) => el('th', { scope: 'col', text })))]),
-    el('tbody', {}, list.map((side, i) => el('tr', { class: i === list.length - 1 && draft.at ? 'live' : null }, [
+    el('tbody', {}, list.map((side, i) => el('tr', { class: i === list.length - 1 && live ? 'live' : null }, [
       el('th', { scope: 'row', text: `${i + 1}–${i + 2}` }),
       el('td', { class: 'figure', text: formatLength(side.length, units, 2) }),
       el('td', { class: 'figure', text: formatDirection(side.direction) }),

@@ -124,7 +124,14 @@ export function createKeeper(store, api, keep, say) {
   }
 
   store.subscribe((s) => s.plan, (plan) => {
-    if (opened < 0 || plan === onServer || store.get().opened !== opened) return;
+    if (opened < 0 || store.get().opened !== opened) return;
+    if (plan === onServer) {
+      // Undone back to what is saved.
+      clearTimeout(timer);
+      if (store.get().saved.state === 'unsaved') mark('saved');
+      remember();
+      return;
+    }
     if (store.get().saved.state !== 'offline') mark('unsaved');
     store.set({ notice: null });
     remember();

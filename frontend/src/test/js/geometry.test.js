@@ -145,8 +145,8 @@ test('lettering never covers lettering, and the lesser gives way', () => {
   const frame = { left: 0, top: 0, width: 100, height: 100 };
   const box = (/** @type {number} */ left) => ({ left, top: 10, width: 30, height: 10 });
   const placed = placeLabels([
-    { id: 'less', weight: 1, places: [box(20)] },
-    { id: 'more', weight: 9, places: [box(10), box(60)] },
+    { id: 'less', weight: 1, places: [[box(20)]] },
+    { id: 'more', weight: 9, places: [[box(10)], [box(60)]] },
   ], [], frame);
   assert.same(placed.get('more'), 0);
   assert.same(placed.has('less'), false);
@@ -155,7 +155,7 @@ test('lettering never covers lettering, and the lesser gives way', () => {
 
 test('lettering keeps off lines where it has the choice', () => {
   const frame = { left: 0, top: 0, width: 100, height: 100 };
-  const places = [{ left: 10, top: 10, width: 30, height: 10 }, { left: 10, top: 50, width: 30, height: 10 }];
+  const places = [[{ left: 10, top: 10, width: 30, height: 10 }], [{ left: 10, top: 50, width: 30, height: 10 }]];
   const soft = [{ left: 15, top: 12, width: 10, height: 4 }];
   assert.same(placeLabels([{ id: 'a', weight: 1, places }], [], frame, soft).get('a'), 1);
 });
