@@ -220,22 +220,32 @@ final class SchemaWalk {
       say(path, Wording.MUST_BE, label, title, pointKind(form), pointFound(value));
       return;
     }
-    JsonNode most = form.path("items").path("maximum");
     for (JsonNode number : value) {
-      double size = Math.abs(number.asDouble());
-      if (!Double.isFinite(size)) {
-        say(path, Wording.NOT_FINITE, label, title);
-        return;
-      }
-      if (most.isNumber() && size > most.asDouble()) {
-        say(path, Wording.FAR_AWAY, label, title, number.asDouble());
-        return;
-      }
-      if (!draft && number.asDouble() < form.path("items").path("minimum").asDouble()) {
-        say(path, Wording.MUST_BE, label, title, "at least 0", number.asDouble());
+      if (!ordinate(number.asDouble(), form, path, label, title)) {
         return;
       }
     }
+  }
+
+  /** One number of a point, or an end of a range; false when a fault was said. */
+  private boolean ordinate(double value, JsonNode form, String path, String label, String title) {
+    JsonNode items = form.path("items");
+    double least = items.path("minimum").asDouble();
+    double most = items.path("maximum").asDouble();
+    if (!Double.isFinite(value)) {
+      say(path, Wording.NOT_FINITE, label, title);
+    } else if (value >= least && value <= most) {
+      return true;
+    } else if (items.has("x-unit")) {
+      say(path, Wording.FAR_AWAY, label, title, value);
+    } else if (draft) {
+      return true;
+    } else {
+      String range =
+          range(items.path("exclusiveMinimum"), items.path("minimum"), items.path("maximum"));
+      say(path, Wording.MUST_BE, label, title, range, value);
+    }
+    return false;
   }
 
   private static String pointKind(JsonNode form) {

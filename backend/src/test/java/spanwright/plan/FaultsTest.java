@@ -189,9 +189,13 @@ class FaultsTest {
             "brief.lineLengths[1]",
             "The brief: a line length must be between 0.5 and 500 m; found 900 m."),
         set(
+            "brief.matching.capacitance",
+            "[10, 500]",
+            "The brief: the capacitance in farads must be between 0 and 1; found 10."),
+        set(
             "brief.matching.inductance",
             "[-1, 1]",
-            "The brief: the inductance must be at least 0; found -1."),
+            "The brief: the inductance in henries must be between 0 and 1; found -1."),
         set(
             "buildings[0].roof",
             "\"mansard\"",
@@ -220,7 +224,8 @@ class FaultsTest {
         set(
             "brief.matching.inductance",
             "3e-5",
-            "The brief: the inductance must be [least, most], two numbers; found the number 3e-5."),
+            "The brief: the inductance in henries must be [least, most], two numbers; found the"
+                + " number 3e-5."),
         set(
             "boundary[1]",
             "[20000000, 0]",
