@@ -110,6 +110,9 @@ public final class PlacementReader {
    */
   public Placement whole(JsonNode node, String path, List<Fault> faults) {
     layout(node, path, faults);
+    if (faults.isEmpty()) {
+      WholeRecord.checkNames(Placement.class, node, path, faults);
+    }
     if (!faults.isEmpty()) {
       return null;
     }

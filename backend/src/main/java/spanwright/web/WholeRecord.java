@@ -1,5 +1,6 @@
 package spanwright.web;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import java.lang.reflect.RecordComponent;
 import java.util.List;
 import java.util.Set;
@@ -20,16 +21,32 @@ final class WholeRecord {
           "Matching.capacitance",
           "TargetResult.bearing");
 
+  private static final String MISSING = "This is missing. A result of rank or assess has it.";
+
   private WholeRecord() {}
+
+  /** Before a record is made, whose lists must be there: which of its own fields are not. */
+  static void checkNames(
+      Class<? extends Record> kind, JsonNode node, String path, List<Fault> faults) {
+    for (RecordComponent part : kind.getRecordComponents()) {
+      if (!node.hasNonNull(part.getName())) {
+        faults.add(new Fault(at(path, part), MISSING));
+      }
+    }
+  }
+
+  private static String at(String path, RecordComponent part) {
+    return path.isEmpty() ? part.getName() : path + "." + part.getName();
+  }
 
   static void check(Record value, String path, List<Fault> faults) {
     for (RecordComponent part : value.getClass().getRecordComponents()) {
       String name = value.getClass().getSimpleName() + "." + part.getName();
-      String at = path.isEmpty() ? part.getName() : path + "." + part.getName();
+      String at = at(path, part);
       Object held = held(value, part);
       if (held == null) {
         if (!MAY_BE_ABSENT.contains(name)) {
-          faults.add(new Fault(at, "This is missing. A result of rank or assess has it."));
+          faults.add(new Fault(at, MISSING));
         }
       } else {
         checkHeld(held, at, faults);
@@ -46,7 +63,7 @@ final class WholeRecord {
       for (int i = 0; i < list.size(); i++) {
         String each = at + "[" + i + "]";
         if (list.get(i) == null) {
-          faults.add(new Fault(each, "This is missing. A result of rank or assess has it."));
+          faults.add(new Fault(each, MISSING));
         } else {
           checkHeld(list.get(i), each, faults);
         }

@@ -26,10 +26,6 @@ class PlacementReaderTest {
 
   private static ObjectNode element() {
     ObjectNode node = Json.mapper().valueToTree(SomePlacements.level(1));
-    String wire = Catalogues.standard().wires().get(0).id();
-    String line = Catalogues.standard().lines().get(0).id();
-    ((ObjectNode) node.at("/conductors/0")).put("wire", wire);
-    ((ObjectNode) node.get("feed")).put("line", line);
     return node;
   }
 

@@ -4,6 +4,7 @@ import java.util.List;
 import spanwright.assess.Placement;
 import spanwright.clearance.Clearance;
 import spanwright.clearance.State;
+import spanwright.plan.Catalogues;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
 import spanwright.search.Result;
@@ -24,11 +25,11 @@ final class SomePlacements {
             1.5,
             List.of(new Placement.ScorePart("mean", 1.5)),
             "level",
-            List.of(new Placement.Conductor(wire, "copper-1.6", 14)),
+            List.of(new Placement.Conductor(wire, Catalogues.standard().wire(null).id(), 14)),
             List.of(hold("west", west), hold("east", east)),
             new Placement.Feed(
                 new Place(12, 12, 8.7),
-                "window-450",
+                Catalogues.standard().line(null).id(),
                 15,
                 0,
                 0.5,
