@@ -28,7 +28,6 @@ final class CautionList {
     list.addPulls();
     list.addPermissions();
     list.addStanding();
-    job.placement.notes().forEach(list::say);
     return list.cautions;
   }
 

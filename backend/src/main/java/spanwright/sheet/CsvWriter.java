@@ -36,6 +36,8 @@ final class CsvWriter {
     section("Cautions", "Text");
     model.cautions().forEach(c -> row(c.text()));
     row(model.decides());
+    section("Notes", "Text");
+    model.notes().forEach(this::row);
     section("Sweep", "Band", "Frequency (MHz)", "Resistance (ohm)", "Reactance (ohm)", "Line SWR");
     for (SheetModel.Expected e : model.sweep()) {
       row(
@@ -166,7 +168,6 @@ final class CsvWriter {
         "To",
         "Made off",
         "Run" + unit,
-        "To lower" + unit,
         "Knots and tail" + unit,
         "Cut" + unit);
     for (SheetModel.Rope r : model.ropes()) {
@@ -178,7 +179,6 @@ final class CsvWriter {
           r.to(),
           r.madeOff(),
           length(r.run()),
-          r.lowering() == null ? "" : length(r.lowering()),
           length(r.allowance()),
           metric() ? plain(r.cut(), 1) : figures.ropeCut(r.cut()));
     }

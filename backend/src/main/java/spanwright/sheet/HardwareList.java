@@ -77,10 +77,11 @@ final class HardwareList {
   }
 
   private void addRopeWork(List<SheetModel.Rope> ropes) {
-    int lifts = (int) ropes.stream().filter(r -> r.over() != null).count();
+    int lifts =
+        (int) ropes.stream().map(SheetModel.Rope::over).filter(o -> o != null).distinct().count();
     int guys = (int) ropes.stream().filter(r -> r.mark().startsWith("G")).count();
     add("pulleys to suit the rope", lifts, lifts == 0 ? 0 : 1, null);
-    add("thimbles", ropes.size() - guys + 2 * guys, 1, null);
+    add("thimbles", ropes.size() + guys, 1, null);
     add("shackles", lifts + guys, 1, null);
     int weights = 0;
     for (Placement.Attachment held : job.placement.attachments()) {

@@ -37,7 +37,7 @@ final class Labels {
   private static final double STRUCK = 7;
 
   /** A label that asks for room. */
-  private record Asked(int rank, List<Spot> spots) {}
+  private record Asked(int rank, double limit, List<Spot> spots) {}
 
   private final Frame frame;
   private final List<Polygon> taken = new ArrayList<>();
@@ -79,7 +79,12 @@ final class Labels {
 
   /** Asks for room; lower ranks choose first. */
   void ask(int rank, List<Spot> spots) {
-    asked.add(new Asked(rank, spots));
+    asked.add(new Asked(rank, Double.POSITIVE_INFINITY, spots));
+  }
+
+  /** Asks for room, but rather gives way than take a spot that costs more than a limit. */
+  void ask(int rank, double limit, List<Spot> spots) {
+    asked.add(new Asked(rank, limit, spots));
   }
 
   /** Gives room to all who asked and draws them. */
@@ -89,7 +94,7 @@ final class Labels {
     asked.clear();
     for (Asked label : order) {
       Spot best = null;
-      double least = Double.POSITIVE_INFINITY;
+      double least = label.limit();
       for (Spot spot : label.spots()) {
         double cost = cost(spot, least);
         if (cost < least) {
@@ -167,6 +172,27 @@ final class Labels {
     Ink.Lettering lettering =
         new Ink.Lettering(footX, footY, text, points, Ink.Anchor.MIDDLE, bold, true, turn, 0.45, 1);
     return new Spot(box(x, y, width + 0.6, size * 0.95, turn), cost, pen -> pen.add(lettering));
+  }
+
+  /** Lines of narrow lettering, one under another, about a middle. */
+  static Spot lines(
+      double x, double y, List<String> lines, double points, double turn, double cost) {
+    double step = points * Letters.POINT * 1.12;
+    double down = Math.toRadians(turn);
+    List<Spot> each = new ArrayList<>();
+    double width = 0;
+    for (int i = 0; i < lines.size(); i++) {
+      double off = (i - (lines.size() - 1) / 2.0) * step;
+      double lx = x - Math.sin(down) * off;
+      double ly = y + Math.cos(down) * off;
+      each.add(text(lx, ly, lines.get(i), points, false, turn, 0));
+      String printed = Letters.printable(lines.get(i));
+      width = Math.max(width, Letters.width(printed, points, false, true));
+    }
+    return new Spot(
+        box(x, y, width + 0.6, step * lines.size(), turn),
+        cost,
+        pen -> each.forEach(spot -> spot.paint().accept(pen)));
   }
 
   /** Spots for a line of lettering round a point. */

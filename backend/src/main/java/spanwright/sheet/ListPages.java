@@ -53,7 +53,11 @@ final class ListPages {
         List.of(
             checks("Checks before", model.before()),
             checks("Checks after", model.after()),
-            sweep())) {
+            sweep(),
+            notes())) {
+      if (block.strips().isEmpty()) {
+        continue;
+      }
       (height(left) < height(right) ? left : right).add(block);
     }
     flow.pair(left, right, GUTTER, GAP);
@@ -154,9 +158,9 @@ final class ListPages {
               Setting.Cell.of(line.kind()),
               Setting.Cell.of(heights(line)),
               Setting.Cell.bold(line.keep() == null ? "?" : figures.required(line.keep())),
-              reach(line.nearest(), true, true),
-              reach(line.wireLetGo(), OverheadList.countsWhenThingsFall(line), false),
-              reach(line.mastFalls(), OverheadList.countsWhenThingsFall(line), false)));
+              nearest(line.nearest()),
+              falls(line, line.wireLetGo()),
+              falls(line, line.mastFalls())));
     }
     List<String> notes = new ArrayList<>();
     for (SheetModel.Line line : model.overhead().lines()) {
@@ -187,15 +191,22 @@ final class ListPages {
     return low.equals(high) ? low : low + "–" + high;
   }
 
-  private Setting.Cell reach(SheetModel.Reach reach, boolean counts, boolean bare) {
-    if (reach == null) {
-      return bare
-          ? Setting.Cell.state("not computed", State.FOUL)
-          : Setting.Cell.of(counts ? "does not arise" : "not required");
+  private Setting.Cell nearest(SheetModel.Reach reach) {
+    return reach == null
+        ? Setting.Cell.state("no figure", State.FOUL)
+        : Setting.Cell.state(figures.found(reach.distance()), reach.state());
+  }
+
+  private Setting.Cell falls(SheetModel.Line line, SheetModel.Reach reach) {
+    if (!OverheadList.countsWhenThingsFall(line)) {
+      return Setting.Cell.of("not required");
     }
-    String text = figures.found(reach.distance());
+    if (reach == null) {
+      return Setting.Cell.of(line.nearest() == null ? "no figure" : "does not arise");
+    }
     return Setting.Cell.state(
-        bare ? text : text + " of " + figures.required(reach.required()), reach.state());
+        figures.found(reach.distance()) + " of " + figures.required(reach.required()),
+        reach.state());
   }
 
   private Flow.Block wire() {
@@ -226,8 +237,8 @@ final class ListPages {
                 .collect(Collectors.joining(", "))
             + ". Line: "
             + line.kind()
-            + ". Lengths are those of the wire as it hangs, its insulation reckoned: do not"
-            + " shorten it again.");
+            + ". Lengths are those of the wire as it hangs"
+            + (insulated() ? ", its insulation reckoned: do not shorten it again." : "."));
     notes.add(
         "The line's run is " + figures.say(line.run()) + ". " + String.join(" ", line.notes()));
     return Setting.table(
@@ -241,6 +252,12 @@ final class ListPages {
         rows,
         notes,
         half);
+  }
+
+  private boolean insulated() {
+    return model.source().catalogue().wires().stream()
+        .filter(kind -> kind.insulation() != null)
+        .anyMatch(kind -> model.wires().stream().anyMatch(w -> w.wire().equals(kind.id())));
   }
 
   private Flow.Block rope() {
@@ -273,11 +290,9 @@ final class ListPages {
     if (!kinds.isEmpty()) {
       notes.add("Rope: " + kinds + ".");
     }
-    if (model.ropes().stream().anyMatch(r -> r.lowering() != null && r.lowering() > r.run())) {
-      notes.add(
-          "Lifts are cut to bring their end down to the ground: twice the height, if that is more"
-              + " than the run.");
-    }
+    notes.add(
+        "Do not leave ropes longer: what lets go would reach farther. Halyards are endless, both"
+            + " parts made off.");
     return Setting.table(
         "Rope",
         List.of(
@@ -476,6 +491,12 @@ final class ListPages {
     model.cautions().forEach(c -> items.add(new Setting.Item("", false, c.pressing(), c.text())));
     items.add(new Setting.Item("", false, false, model.decides()));
     return Setting.list("Cautions for this site", items, half);
+  }
+
+  private Flow.Block notes() {
+    List<Setting.Item> items =
+        model.notes().stream().map(n -> new Setting.Item("", false, false, n)).toList();
+    return Setting.list("Notes", items, half);
   }
 
   private Flow.Block hardware() {

@@ -72,15 +72,13 @@ final class OverheadList {
     return line.kind().name().toLowerCase(Locale.ROOT).replace('_', '-');
   }
 
-  /** Rule and wording of a clearance tell how it comes about. */
+  /** The rule of a clearance tells how it comes about. */
   static Regime regime(Clearance clearance) {
-    String rule = clearance.rule().toLowerCase(Locale.ROOT);
-    String what = clearance.what() == null ? "" : clearance.what().toLowerCase(Locale.ROOT);
-    boolean falls = what.contains("fall") || what.contains("let go") || what.contains("lets go");
-    if (rule.contains("fall") || rule.contains("mast") || (falls && what.contains("mast"))) {
-      return Regime.MAST_FALLS;
-    }
-    return rule.contains("let-go") || falls ? Regime.WIRE_LETS_GO : Regime.AS_IT_HANGS;
+    return switch (clearance.rule()) {
+      case "wire-let-go" -> Regime.WIRE_LETS_GO;
+      case "mast-let-go" -> Regime.MAST_FALLS;
+      default -> Regime.AS_IT_HANGS;
+    };
   }
 
   private static SheetModel.Reach worst(Job job, String line, Regime regime) {

@@ -109,7 +109,7 @@ final class RiggingInk {
     double[] a = frame.at(model.setOut().a().at());
     double[] b = frame.at(model.setOut().b().at());
     double base = model.setOut().a().at().onPlan().distance(model.setOut().b().at().onPlan());
-    labels.ask(45, Dimensions.beside(a, b, figures.length(base), -4, 4, -7, 7));
+    labels.ask(45, 8, Dimensions.beside(a, b, figures.length(base), -4, 4, -7, 7));
   }
 
   private void entry() {

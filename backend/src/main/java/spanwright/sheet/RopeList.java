@@ -6,14 +6,19 @@ import spanwright.assess.Placement;
 import spanwright.plan.RopeKind;
 
 /**
- * Ropes and guys. Rope between wire and pulley and what runs on from the pulley is one rope, and it
- * is cut long enough to bring its end down to the ground again.
+ * Ropes and guys, as the rigging has reckoned with them when something lets go: a rope to a weight
+ * runs over its pulley and is cut no longer than its run and its knots; a halyard is endless, and
+ * the tail that is tied to it cannot run through. What it takes beyond that to bring an end down to
+ * the ground is a line kept aside.
  */
 final class RopeList {
   private final Job job;
   private final List<WireList.Piece> pieces;
   private final List<SheetModel.Rope> ropes = new ArrayList<>();
   private int lifts;
+  private double lowering;
+  private SheetModel.Rope lowered;
+  private String loweredAt;
   private int guys;
 
   private RopeList(Job job) {
@@ -24,8 +29,9 @@ final class RopeList {
   static List<SheetModel.Rope> of(Job job) {
     RopeList list = new RopeList(job);
     for (int i = 0; i < job.placement.attachments().size(); i++) {
-      list.addLifts(i);
+      list.addRopes(i);
     }
+    list.addLoweringLine();
     job.placement.masts().forEach(list::addGuys);
     return list.ropes;
   }
@@ -36,65 +42,101 @@ final class RopeList {
         .toList();
   }
 
-  private void addLifts(int attachment) {
-    List<Placement.RopeRun> tails = runs(attachment, "tail");
-    List<Placement.RopeRun> falls = runs(attachment, "halyard", "fall");
-    int joined = Math.min(tails.size(), falls.size());
-    for (int i = 0; i < joined; i++) {
-      addLift(attachment, tails.get(i), falls.get(i));
+  private void addRopes(int attachment) {
+    List<Placement.RopeRun> tails = new ArrayList<>(runs(attachment, "tail"));
+    for (Placement.RopeRun fall : runs(attachment, "fall")) {
+      addWeightRope(attachment, tails.isEmpty() ? null : tails.remove(0), fall);
     }
-    for (int i = joined; i < falls.size(); i++) {
-      addLift(attachment, null, falls.get(i));
-    }
-    for (int i = joined; i < tails.size(); i++) {
-      addTie(attachment, tails.get(i));
-    }
+    List<Placement.RopeRun> halyards = runs(attachment, "halyard");
+    tails.forEach(tail -> addTail(attachment, tail, !halyards.isEmpty()));
+    halyards.forEach(halyard -> addHalyard(attachment, halyard));
   }
 
-  private void addLift(int attachment, Placement.RopeRun tail, Placement.RopeRun fall) {
+  /** From the wire's end over a pulley to a weight: one rope, no longer than it must be. */
+  private void addWeightRope(int attachment, Placement.RopeRun tail, Placement.RopeRun fall) {
     Placement.Attachment held = job.placement.attachments().get(attachment);
-    boolean weight = "weight".equals(held.held()) || "fall".equals(fall.what());
     double run = (tail == null ? 0 : tail.length()) + fall.length();
-    double lowering = 2 * held.aboveGround();
-    double allowance =
-        Allowances.KNOT
-            + (weight ? Allowances.KNOT : Allowances.CLEAT)
-            + (lowering > run ? Allowances.HAND : 0);
-    RopeKind kind = job.rope(fall.rope());
-    ropes.add(
-        new SheetModel.Rope(
-            "R" + ++lifts,
-            kind.id(),
-            kind.name(),
-            end(attachment),
-            (job.isTree(held.on()) ? "pulley or limb, " : "pulley, ") + job.holder(held),
-            weight ? weightWords(held) : "cleat at the foot",
-            weight
-                ? "tied to the weight, surplus coiled there to lower the end by"
-                : "cleat, surplus coiled",
-            run,
-            lowering,
-            allowance,
-            Figures.upToHalfMetre(Math.max(run, lowering) + allowance)));
+    add(
+        fall.rope(),
+        end(attachment),
+        pulley(held),
+        weightWords(held),
+        "tied to the weight",
+        run,
+        2 * Allowances.KNOT);
+    double more = 2 * held.aboveGround() - run;
+    if (more > lowering) {
+      lowering = more;
+      lowered = ropes.get(ropes.size() - 1);
+      loweredAt = pulley(held);
+    }
   }
 
-  private void addTie(int attachment, Placement.RopeRun tail) {
+  private void addTail(int attachment, Placement.RopeRun tail, boolean toHalyard) {
     Placement.Attachment held = job.placement.attachments().get(attachment);
-    RopeKind kind = job.rope(tail.rope());
-    double allowance = 2 * Allowances.KNOT;
+    add(
+        tail.rope(),
+        end(attachment),
+        null,
+        toHalyard ? "the halyard at " + job.holder(held) : job.holder(held),
+        toHalyard ? "tied to the halyard, so that it cannot run through" : "tied",
+        tail.length(),
+        2 * Allowances.KNOT);
+  }
+
+  /** Endless: up one side and down the other, both parts on the cleat. */
+  private void addHalyard(int attachment, Placement.RopeRun halyard) {
+    Placement.Attachment held = job.placement.attachments().get(attachment);
+    add(
+        halyard.rope(),
+        "cleat at the foot",
+        pulley(held),
+        "the same cleat",
+        "endless: both parts made off",
+        halyard.length(),
+        Allowances.KNOT + Allowances.CLEAT);
+  }
+
+  /** A line kept aside: bent on to a weight's rope, it lets the end down to the ground. */
+  private void addLoweringLine() {
+    if (lowered == null) {
+      return;
+    }
+    add(
+        lowered.rope(),
+        "kept aside: bent on at the weight end of " + lowered.mark() + " to lower it",
+        loweredAt,
+        "the hand",
+        "never left up",
+        lowering,
+        Allowances.KNOT + Allowances.HAND);
+  }
+
+  private void add(
+      String rope,
+      String from,
+      String over,
+      String to,
+      String madeOff,
+      double run,
+      double allowance) {
+    RopeKind kind = job.rope(rope);
     ropes.add(
         new SheetModel.Rope(
             "R" + ++lifts,
             kind.id(),
             kind.name(),
-            end(attachment),
-            null,
-            job.holder(held),
-            "tied at the attachment",
-            tail.length(),
-            null,
+            from,
+            over,
+            to,
+            madeOff,
+            run,
             allowance,
-            Figures.upToHalfMetre(tail.length() + allowance)));
+            Figures.upToHalfMetre(run + allowance)));
+  }
+
+  private String pulley(Placement.Attachment held) {
+    return (job.isTree(held.on()) ? "pulley or limb, " : "pulley, ") + job.holder(held);
   }
 
   private static String weightWords(Placement.Attachment held) {
@@ -140,7 +182,6 @@ final class RopeList {
               "peg, " + Job.wind(job.bearing(mast.foot().onPlan(), foot.onPlan())),
               "hitched at the peg",
               run,
-              null,
               allowance,
               Figures.upToHalfMetre(run + allowance)));
     }

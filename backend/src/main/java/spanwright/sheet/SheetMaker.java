@@ -47,6 +47,7 @@ final class SheetMaker {
         work.before(),
         work.after(),
         CautionList.of(job, overhead),
+        placement.notes(),
         Allowances.list(),
         DECIDES,
         new SheetModel.Source(plan, catalogue, placement));

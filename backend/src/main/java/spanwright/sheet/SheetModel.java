@@ -28,6 +28,7 @@ import spanwright.plan.Plan;
  * @param before checks before anything is raised
  * @param after checks when all hangs
  * @param cautions for this site
+ * @param notes what else was found worth saying about the placement, as sentences
  * @param allowances what the cut lengths have been given
  * @param decides who has the last word
  * @param source what it was made from; left out of JSON
@@ -49,6 +50,7 @@ public record SheetModel(
     List<String> before,
     List<String> after,
     List<Caution> cautions,
+    List<String> notes,
     List<Allowance> allowances,
     String decides,
     @JsonIgnore Source source) {
@@ -64,6 +66,7 @@ public record SheetModel(
     before = List.copyOf(before);
     after = List.copyOf(after);
     cautions = List.copyOf(cautions);
+    notes = List.copyOf(notes);
     allowances = List.copyOf(allowances);
   }
 
@@ -232,8 +235,7 @@ public record SheetModel(
    * @param to where it goes
    * @param madeOff how it is made off there
    * @param run without allowances [m]
-   * @param lowering what it takes to bring the end down to the ground [m], or null when it cannot
-   * @param allowance added to the longer of the two [m]
+   * @param allowance for knots, cleat and hand [m]
    * @param cut length, rounded up to 0.5 m [m]
    */
   public record Rope(
@@ -245,7 +247,6 @@ public record SheetModel(
       String to,
       String madeOff,
       double run,
-      Double lowering,
       double allowance,
       double cut) {}
 

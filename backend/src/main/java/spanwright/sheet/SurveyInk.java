@@ -299,15 +299,26 @@ final class SurveyInk {
     }
     var in = seen.getInteriorPoint().getCoordinate();
     var box = seen.getEnvelopeInternal();
+    List<String> split = List.of(text.split(", "));
     List<Labels.Spot> spots = new ArrayList<>();
     for (double dy : new double[] {0, -4, 4, -8, 8, -12, 12}) {
-      for (double dx : new double[] {0, -8, 8, -16, 16}) {
-        double out = in.y + dy < box.getMinY() || in.y + dy > box.getMaxY() ? 3 : 0;
-        spots.add(
-            Labels.text(in.x + dx, in.y + dy, text, SMALL, false, 0, Math.hypot(dx, dy) / 8 + out));
+      for (double dx : new double[] {0, -4, 4, -8, 8, -16, 16}) {
+        double far = Math.hypot(dx, dy) / 8;
+        double x = in.x + dx;
+        double y = in.y + dy;
+        spots.add(inside(seen, Labels.lines(x, y, List.of(text), SMALL, 0, far)));
+        spots.add(inside(seen, Labels.lines(x, y, split, SMALL, 0, far + 0.3)));
+        spots.add(inside(seen, Labels.lines(x, y, split, SMALL, -90, far + 0.6)));
       }
     }
     labels.ask(rank, spots);
+  }
+
+  /** A spot that reaches out of its area costs more. */
+  private static Labels.Spot inside(Geometry area, Labels.Spot spot) {
+    return area.covers(spot.box())
+        ? spot
+        : new Labels.Spot(spot.box(), spot.cost() + 6, spot.lines(), spot.paint());
   }
 
   private void building(Building building) {

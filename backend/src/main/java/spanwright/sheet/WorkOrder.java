@@ -105,7 +105,9 @@ final class WorkOrder {
 
   private void ropeSteps() {
     for (SheetModel.Rope rope : ropes) {
-      if (rope.mark().startsWith("G")) {
+      boolean aside = rope.from().startsWith("kept aside");
+      boolean onHalyard = rope.to().startsWith("the halyard");
+      if (rope.mark().startsWith("G") || aside || onHalyard) {
         continue;
       }
       if (rope.over() == null) {

@@ -65,18 +65,37 @@ class CutListTest {
   }
 
   @Test
-  void a_lift_is_long_enough_to_bring_its_end_down_to_the_ground() {
-    // tail 1.80 + fall 4.50 = 6.30, but twice 7.5 m is 15: 15 + 0.5 + 0.5 + 1.0 = 17.0
-    SheetModel.Rope r1 = model.ropes().get(0);
-    assertEquals("R1", r1.mark());
+  void a_rope_to_a_weight_is_one_rope_and_no_longer_than_its_run_and_knots() {
+    // tail 1.80 + fall 4.50 = 6.30; two knots of 0.5: 7.30, up to 7.5
+    SheetModel.Rope r1 = rope("R1");
     assertEquals(6.30, r1.run(), EXACT);
-    assertEquals(15.0, r1.lowering(), EXACT);
-    assertEquals(17.0, r1.cut(), EXACT);
+    assertEquals(7.5, r1.cut(), EXACT);
     assertEquals("weight, 7.3 kg", r1.to());
-    // halyard 7.00, twice 8.5 is 17: 17 + 0.5 + 1.5 + 1.0 = 20.0
-    assertEquals(20.0, model.ropes().get(1).cut(), EXACT);
-    // tail 1.60 + halyard 5.80 = 7.40, twice 7 is 14: 14 + 3 = 17
-    assertEquals(17.0, model.ropes().get(2).cut(), EXACT);
+  }
+
+  @Test
+  void halyards_are_endless_and_the_tail_is_a_rope_of_its_own() {
+    // up and down 7.00: 14.00 + 0.5 + 1.5
+    assertEquals(16.0, rope("R2").cut(), EXACT);
+    // tail 1.60 + 2 × 0.5 = 2.60, up to 3.0
+    SheetModel.Rope tail = rope("R3");
+    assertEquals(3.0, tail.cut(), EXACT);
+    assertNull(tail.over());
+    // up and down 5.80: 11.60 + 2.0 = 13.6, up to 14.0
+    assertEquals(14.0, rope("R4").cut(), EXACT);
+  }
+
+  @Test
+  void a_line_kept_aside_brings_the_weighted_end_down_to_the_ground() {
+    // twice 7.5 m less the 6.30 there is: 8.70 + 0.5 + 1.0 = 10.2, up to 10.5
+    SheetModel.Rope line = rope("R5");
+    assertEquals(8.70, line.run(), EXACT);
+    assertEquals(10.5, line.cut(), EXACT);
+    assertTrue(line.from().contains("R1"));
+  }
+
+  private SheetModel.Rope rope(String mark) {
+    return model.ropes().stream().filter(r -> r.mark().equals(mark)).findFirst().orElseThrow();
   }
 
   @Test
@@ -87,9 +106,8 @@ class CutListTest {
           model.ropes().stream().filter(r -> r.mark().equals(mark)).findFirst().orElseThrow();
       assertEquals(7.433, guy.run(), 0.003);
       assertEquals(9.0, guy.cut(), EXACT);
-      assertNull(guy.lowering());
     }
-    assertEquals(6, model.ropes().size());
+    assertEquals(8, model.ropes().size());
   }
 
   @Test
@@ -114,8 +132,8 @@ class CutListTest {
     assertEquals(9, count("line stand-offs"));
     assertEquals(1, count("weight, Old ash"));
     SheetModel.Item rope = item("polyester, 5 mm");
-    // 17 + 20 + 17 + 3 × 9
-    assertEquals(81.0, rope.length(), EXACT);
+    // 7.5 + 16 + 3 + 14 + 10.5 + 3 × 9
+    assertEquals(78.0, rope.length(), EXACT);
     // 16.94 + 14.48
     assertEquals(31.42, item("covered copper, 1.6 mm").length(), EXACT);
   }

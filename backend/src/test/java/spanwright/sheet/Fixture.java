@@ -256,9 +256,9 @@ final class Fixture {
             List.of(
                 rope("tail", 0, List.of(wire.get(0), ASH), 1.80),
                 rope("fall", 0, List.of(ASH, new Place(6, 26, 3.0)), 4.50),
-                rope("halyard", 1, List.of(POLE, new Place(9, 8.2, 1.5)), 7.00),
+                rope("halyard", 1, List.of(POLE, new Place(9, 8.2, 1.5)), 14.00),
                 rope("tail", 2, List.of(wire.get(wire.size() - 1), MAST), 1.60),
-                rope("halyard", 2, List.of(MAST, new Place(19, 20, 1.2)), 5.80)));
+                rope("halyard", 2, List.of(MAST, new Place(19, 20, 1.2)), 11.60)));
     guyFeet.forEach(g -> ropes.add(rope("guy", 2, List.of(MAST, g), MAST.distance(g))));
     return new Placement(
         "p01",
@@ -294,7 +294,7 @@ final class Fixture {
   static List<Clearance> clearances() {
     return List.of(
         new Clearance(
-            "overhead-mast-let-go",
+            "mast-let-go",
             "drop",
             "mast let go at Back bed",
             new Place(19, 20, 0),
@@ -303,7 +303,7 @@ final class Fixture {
             10.05,
             State.TIGHT),
         new Clearance(
-            "overhead-let-go",
+            "wire-let-go",
             "drop",
             "wire let go at Old ash",
             new Place(15, 11, 4),
@@ -312,7 +312,7 @@ final class Fixture {
             3.05,
             State.CLEAR),
         new Clearance(
-            "overhead-kept",
+            "overhead-low-voltage",
             "drop",
             "guy",
             new Place(21.5, 20, 0),
@@ -321,7 +321,7 @@ final class Fixture {
             3.05,
             State.CLEAR),
         new Clearance(
-            "overhead-kept",
+            "overhead-telephone",
             "phone",
             "feed line",
             new Place(9, 8.2, 5),

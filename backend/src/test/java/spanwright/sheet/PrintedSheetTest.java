@@ -104,7 +104,7 @@ class PrintedSheetTest {
     List<Clearance> foul = new ArrayList<>(Fixture.clearances());
     foul.add(
         new Clearance(
-            "overhead-kept",
+            "overhead-low-voltage",
             "drop",
             "wire",
             new Place(15, 12, 7),
