@@ -132,7 +132,7 @@ final class Mesh {
    * gap's width it would also have to charge that length of wire, which no centre piece has, and
    * whose few tenths of a picofarad move only impedances of thousands of ohms.
    */
-  private double[] excite(AntennaModel model) {
+  double[] excite(AntennaModel model) {
     double[] out = new double[unknowns];
     double feed = model.feedFraction() * model.wires().get(model.feedWire()).length();
     for (int e = 0; e < elements; e++) {

@@ -190,9 +190,8 @@ final class NearZone {
       double azByPhi = -across * spread;
       double azX = azByRho * cos - azByPhi * sin;
       double azY = azByRho * sin + azByPhi * cos;
-      double axZ = tx * ga[4 + part] + tz * cos * f[4 + part];
-      double ayZ = ty * ga[4 + part] + tz * sin * f[4 + part];
-      // the part along rho has no curl about z
+      double axZ = tx * ga[4 + part];
+      double ayZ = ty * ga[4 + part];
       double ayX = ty * ga[2 + part] * cos;
       double axY = tx * ga[2 + part] * sin;
       double hx = azY - ayZ;

@@ -29,6 +29,9 @@ final class Outline {
   /** A place on a wire that must become a node. */
   private record Stop(double arc, Vertex at, int node) {}
 
+  /** Drawing pieces together may shorten the wire by this part. */
+  private static final double SHORTENING = 6e-4;
+
   final List<Piece> pieces = new ArrayList<>();
 
   /** Pieces that meet at each node. */
@@ -160,19 +163,23 @@ final class Outline {
     }
   }
 
-  /** Marks the points between two kept ones that must stay (Douglas and Peucker 1973). */
+  /**
+   * Marks the points between two kept ones that must stay (Douglas and Peucker 1973), also where
+   * leaving out would shorten the wire.
+   */
   private void thin(List<Stop> path, int from, int to, boolean[] keep) {
-    int farthest = -1;
-    double most = tolerance;
-    for (int i = from + 1; i < to; i++) {
-      double off = distance(path.get(i).at, path.get(from).at, path.get(to).at);
-      if (off > most) {
-        most = off;
-        farthest = i;
-      }
+    int farthest = farthest(path, from, to);
+    Vertex a = path.get(from).at;
+    Vertex b = path.get(to).at;
+    if (farthest >= 0 && distance(path.get(farthest).at, a, b) <= tolerance) {
+      farthest = -1;
+    }
+    double arc = path.get(to).arc - path.get(from).arc;
+    if (farthest < 0 && arc - a.distanceTo(b) > SHORTENING * arc) {
+      farthest = farthest(path, from, to);
     }
     // a closed wire between its one node and itself: keep something to span it
-    if (farthest < 0 && path.get(from).at.distanceTo(path.get(to).at) < 1e-9 && to - from > 1) {
+    if (farthest < 0 && a.distanceTo(b) < 1e-9 && to - from > 1) {
       farthest = (from + to) / 2;
     }
     if (farthest >= 0) {
@@ -180,6 +187,19 @@ final class Outline {
       thin(path, from, farthest, keep);
       thin(path, farthest, to, keep);
     }
+  }
+
+  private static int farthest(List<Stop> path, int from, int to) {
+    int farthest = -1;
+    double most = -1;
+    for (int i = from + 1; i < to; i++) {
+      double off = distance(path.get(i).at, path.get(from).at, path.get(to).at);
+      if (off > most) {
+        most = off;
+        farthest = i;
+      }
+    }
+    return farthest;
   }
 
   private static double distance(Vertex p, Vertex a, Vertex b) {
