@@ -48,7 +48,9 @@ function table(heads, rows, caption) {
   return html('div', { class: 'scroll', tabindex: 0, role: 'group', 'aria-label': caption ?? 'table' }, html('table', {},
     caption ? html('caption', { class: 'visually-hidden' }, caption) : null,
     html('thead', {}, html('tr', {}, ...heads.map((head, index) => html('th', { scope: 'col', class: right[index] ? 'n' : null }, head.replace(/^>/, '') || html('span', { class: 'visually-hidden' }, 'mark'))))),
-    html('tbody', {}, ...rows.map((row) => html('tr', {}, ...row.map((cell, index) => html(index === 0 ? 'th' : 'td', { scope: index === 0 ? 'row' : null, class: right[index] ? 'n' : null }, cell)))))));
+    html('tbody', {}, ...rows.map((row) => html('tr', {}, ...row.map((cell, index) => html(index === 0 ? 'th' : 'td', {
+      scope: index === 0 ? 'row' : null, class: right[index] ? 'n' : null, 'data-label': heads[index].replace(/^>/, '') || null,
+    }, cell)))))));
 }
 
 /** @param {string} text */
