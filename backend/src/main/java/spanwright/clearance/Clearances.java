@@ -1,17 +1,95 @@
 package spanwright.clearance;
 
+import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
+import org.locationtech.jts.geom.Envelope;
+import org.locationtech.jts.index.strtree.STRtree;
+import spanwright.plan.Building;
 import spanwright.plan.Catalogue;
+import spanwright.plan.GroundSurface;
+import spanwright.plan.Metalwork;
+import spanwright.plan.PeopleVolume;
+import spanwright.plan.Place;
 import spanwright.plan.Plan;
+import spanwright.plan.Support;
+import spanwright.plan.Tree;
+import spanwright.plan.Zone;
+import spanwright.rigging.Holder;
 import spanwright.rigging.Layout;
 import spanwright.rigging.Rigged;
+import spanwright.rigging.Rigging;
+import spanwright.rigging.Roof;
+import spanwright.rigging.RuleBook;
 
 /**
  * What stands in the way on a plan. Prepared once for a plan; immutable and safe for any number of
  * threads.
  */
 public final class Clearances {
-  private Clearances(Plan plan, Catalogue catalogue) {}
+  /** Things farther away than this beyond what is required are not worth a line [m]. */
+  private static final double RANGE = 5;
+
+  private final GroundSurface ground;
+  private final RuleBook rules;
+  private final double margin;
+  private final Rigging rigging;
+  private final Overhead overhead;
+  private final Boundary boundary;
+  private final STRtree index = new STRtree();
+  private final List<Zone> noMast = new ArrayList<>();
+  private final double headroom;
+  private final Screen screen;
+
+  private Clearances(Plan plan, Catalogue catalogue) {
+    ground = GroundSurface.of(plan);
+    rules = RuleBook.of(plan, catalogue);
+    margin = rules.value("tight-margin");
+    headroom = rules.value("headroom");
+    rigging = Rigging.of(plan, catalogue);
+    overhead = new Overhead(plan, ground, rules);
+    boundary = new Boundary(plan, rules, RANGE);
+    List<Obstacle> obstacles = obstacles(plan);
+    for (Obstacle each : obstacles) {
+      double[] box = each.box();
+      index.insert(new Envelope(box[0], box[3], box[1], box[4]), each);
+    }
+    index.build();
+    screen = new Screen(plan, ground, rules, overhead, boundary, rigging);
+  }
+
+  private List<Obstacle> obstacles(Plan plan) {
+    List<Obstacle> all = new ArrayList<>();
+    for (Building each : plan.buildings()) {
+      all.add(new Solid(Roof.of(each, ground), rules, RANGE));
+    }
+    for (Support each : plan.supports()) {
+      if (each.canopy() != null) {
+        double level = ground.heightAt(each.at());
+        all.add(new Crown(each.id(), each.at(), each.canopy(), level, rules, RANGE));
+      }
+    }
+    for (Tree each : plan.trees()) {
+      if (each.canopy() != null) {
+        double level = ground.heightAt(each.at());
+        all.add(new Crown(each.id(), each.at(), each.canopy(), level, rules, RANGE));
+      }
+    }
+    for (PeopleVolume each : plan.people()) {
+      all.add(new Volumes.People(each, ground, rules, RANGE));
+    }
+    for (Zone each : plan.zones()) {
+      switch (each.rule()) {
+        case NO_WIRE -> all.add(new Volumes.NoWire(each, rules, RANGE));
+        case HEADROOM -> all.add(new Volumes.Headroom(each, ground, rules));
+        case NO_MAST -> noMast.add(each);
+      }
+    }
+    for (Metalwork each : plan.metalwork()) {
+      all.add(new Metal(each, ground, rules, RANGE));
+    }
+    return all;
+  }
 
   /** Prepares a plan: solids, crowns, zones, lines, boundary. */
   public static Clearances of(Plan plan, Catalogue catalogue) {
@@ -20,10 +98,84 @@ public final class Clearances {
 
   /**
    * Every distance of a hung layout held against its rule, tightest first: foul, then tight, then
-   * clear. Each overhead line has one at least, however far.
+   * clear. Each overhead line has one at least, however far; other things are left out where they
+   * are more than a few metres beyond what is required.
    */
   public List<Clearance> check(Rigged rigged) {
-    throw new UnsupportedOperationException("in work");
+    List<Strand> strands = Strand.of(rigged);
+    List<Holder> holders = holders(rigged);
+    List<Place> at = rigged.attachments().stream().map(Rigged.Attachment::at).toList();
+    Obstacle.Scene scene = new Obstacle.Scene(holders, at, rigging.entry());
+    Tally tally = new Tally(margin);
+    for (Strand strand : strands) {
+      height(strand, tally);
+      boundary.check(strand, scene, tally);
+      for (Obstacle each : near(strand)) {
+        each.check(strand, scene, tally);
+      }
+    }
+    masts(rigged, tally);
+    List<Clearance> all = new ArrayList<>(tally.clearances());
+    overhead.check(rigged, strands, holders, ground, all);
+    all.sort(
+        Comparator.comparing(Clearance::state)
+            .reversed()
+            .thenComparingDouble(each -> each.distance() - each.required()));
+    return List.copyOf(all);
+  }
+
+  @SuppressWarnings("unchecked")
+  private List<Obstacle> near(Strand strand) {
+    double[] box = strand.box;
+    Envelope where = new Envelope(box[0], box[3], box[1], box[4]);
+    where.expandBy(RANGE);
+    return index.query(where);
+  }
+
+  private List<Holder> holders(Rigged rigged) {
+    List<Holder> holders = new ArrayList<>();
+    for (Rigged.Attachment each : rigged.attachments()) {
+      holders.add(rigging.holderOf(each.on()));
+    }
+    return holders;
+  }
+
+  private void height(Strand strand, Tally tally) {
+    if (strand.part != Strand.Part.WIRE) {
+      return;
+    }
+    Tally.Worst worst = tally.of("headroom", "ground");
+    for (int s = 0; s < strand.states.length; s++) {
+      double[] state = strand.states[s];
+      for (int i = 0; i + 3 < state.length; i += 3) {
+        double allowance = strand.slack(s, i);
+        Volumes.lowest(state, i, 0, 1, ground, allowance, headroom, "wire", worst);
+      }
+    }
+  }
+
+  private void masts(Rigged rigged, Tally tally) {
+    for (Rigged.Mast mast : rigged.masts()) {
+      for (Zone each : noMast) {
+        Area area = new Area(each.area());
+        double away = area.signed(mast.foot().x(), mast.foot().y());
+        if (away < RANGE) {
+          double[] edge =
+              area.footOnEdge(
+                  area.nearestEdge(mast.foot().x(), mast.foot().y()),
+                  mast.foot().x(),
+                  mast.foot().y());
+          tally
+              .of("zone-no-mast", each.id())
+              .offer(
+                  away,
+                  rules.value("zone-no-mast"),
+                  "mast",
+                  mast.foot(),
+                  new Place(edge[0], edge[1], mast.foot().z()));
+        }
+      }
+    }
   }
 
   /**
@@ -31,7 +183,7 @@ public final class Clearances {
    * sag, wind or small shift would change it; true promises nothing.
    */
   public boolean screen(Layout layout) {
-    throw new UnsupportedOperationException("in work");
+    return screen.passes(layout);
   }
 
   /**
@@ -39,6 +191,6 @@ public final class Clearances {
    * change that cures it, found by calculation and checked again. Empty when nothing is foul.
    */
   public List<Refusal> refuse(Layout layout, Rigged rigged, List<Clearance> clearances) {
-    throw new UnsupportedOperationException("in work");
+    return new Cures(this, rigging, layout, rigged, clearances).refusals();
   }
 }

@@ -112,13 +112,17 @@ record Course(
       double[] held = new double[count];
       double[] rope = new double[count];
       int feedHeld = -1;
-      for (int i = 0; i < count; i++) {
-        place(i, held, rope);
-        if (rope[i] == 0 && Math.abs(held[i] - feedAt) < 0.5 && i > 0 && i < count - 1) {
+      for (int i = 1; i + 1 < count; i++) {
+        middle(i, held);
+        if (Math.abs(held[i] - feedAt) < 0.5) {
           held[i] = feedAt;
           feedHeld = i;
         }
       }
+      // A leg that comes back past an end's attachment is not held by it: look no farther than
+      // the next attachment, or the middle of the wire where there is none.
+      end(0, 0, count > 2 ? held[1] : total / 2, held, rope);
+      end(count - 1, count > 2 ? held[count - 2] : total / 2, total, held, rope);
       return assemble(held, rope, feedAt, feedHeld);
     }
 
@@ -151,26 +155,27 @@ record Course(
           feedSpan);
     }
 
-    /** Where an attachment holds the wire, and with how much rope. */
-    private void place(int i, double[] held, double[] rope) {
+    /** Where an end attachment holds the wire, and with how much rope. */
+    private void end(int i, double from, double to, double[] held, double[] rope) {
       Place at = layout.attachments().get(i).at();
-      boolean first = i == 0;
-      boolean last = i == layout.attachments().size() - 1;
-      double nearest = nearest(at);
+      double nearest = nearest(at, from, to);
       double away = at.distance(pointAt(nearest));
-      if (first || last) {
-        double end = first ? 0 : total;
-        double toEnd = at.distance(pointAt(end));
-        double beyond = Math.abs(nearest - end);
-        // A long way of wire past a point that all but touches the attachment hangs free.
-        if (beyond > 0.5 && away < Practice.HELD_WITHIN && away + 0.5 < toEnd) {
-          held[i] = nearest;
-        } else {
-          held[i] = end;
-          rope[i] = toEnd;
-        }
-        return;
+      double end = i == 0 ? 0 : total;
+      double toEnd = at.distance(pointAt(end));
+      // A long way of wire past a point that all but touches the attachment hangs free.
+      if (Math.abs(nearest - end) > 0.5 && away < Practice.HELD_WITHIN && away + 0.5 < toEnd) {
+        held[i] = nearest;
+      } else {
+        held[i] = end;
+        rope[i] = toEnd;
       }
+    }
+
+    /** Where a middle attachment holds the wire. */
+    private void middle(int i, double[] held) {
+      Place at = layout.attachments().get(i).at();
+      double nearest = nearest(at, 0, total);
+      double away = at.distance(pointAt(nearest));
       if (away > Practice.HELD_WITHIN) {
         throw new IllegalArgumentException(
             String.format(
@@ -183,7 +188,7 @@ record Course(
       held[i] = nearest;
     }
 
-    private double nearest(Place at) {
+    private double nearest(Place at, double from, double to) {
       double least = Double.POSITIVE_INFINITY;
       double where = 0;
       for (int i = 0; i + 1 < points.size(); i++) {
@@ -195,7 +200,7 @@ record Course(
                 + (at.y() - a.y()) * (b.y() - a.y())
                 + (at.z() - a.z()) * (b.z() - a.z());
         double share = length == 0 ? 0 : Math.max(0, Math.min(1, dot / (length * length)));
-        double position = arc[i] + share * length;
+        double position = Math.max(from, Math.min(to, arc[i] + share * length));
         double away = at.distance(pointAt(position));
         if (away < least - 1e-9) {
           least = away;

@@ -103,6 +103,15 @@ public final class Rigging {
     return beside ? canopy.radius() + clear + 0.1 : least;
   }
 
+  /**
+   * What an attachment is on.
+   *
+   * @throws IllegalArgumentException with a sentence when the plan has no such thing
+   */
+  public Holder holderOf(String id) {
+    return holder(id);
+  }
+
   Holder holder(String id) {
     Holder holder = id == null ? null : holders.get(id);
     if (holder == null) {

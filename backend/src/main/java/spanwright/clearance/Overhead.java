@@ -1,0 +1,314 @@
+package spanwright.clearance;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import spanwright.plan.GroundSurface;
+import spanwright.plan.OverheadLine;
+import spanwright.plan.Place;
+import spanwright.plan.Plan;
+import spanwright.rigging.Holder;
+import spanwright.rigging.Rigged;
+import spanwright.rigging.RuleBook;
+
+/**
+ * The three rules for overhead lines: kept distance, wire let go, mast let go. They refuse; they
+ * are never weighed against anything. Telephone lines know the first only.
+ */
+final class Overhead {
+  /** Rope and wire stretch: the reach is taken longer by this share. */
+  private static final double STRETCH = 1.003;
+
+  /** Farther than this beyond what is kept, three states of the sweep tell enough [m]. */
+  private static final double FAR = 4;
+
+  /**
+   * A line as it hangs over this plan.
+   *
+   * @param source in the plan
+   * @param rule id of its kept distance
+   * @param kept metres
+   * @param path x, y, z above the plan's zero, in turn
+   * @param box about the path
+   */
+  record Line(OverheadLine source, String rule, double kept, double[] path, double[] box) {
+    boolean isTelephone() {
+      return source.kind() == OverheadLine.Kind.TELEPHONE;
+    }
+
+    int segments() {
+      return path.length / 3 - 1;
+    }
+  }
+
+  private final List<Line> lines;
+  private final double half;
+  private final double fallShare;
+  private final double margin;
+
+  Overhead(Plan plan, GroundSurface ground, RuleBook rules) {
+    List<Line> all = new ArrayList<>();
+    for (OverheadLine each : plan.overheadLines()) {
+      double[] path = Strand.flat(ground.raise(each.path()));
+      String rule = rule(each.kind());
+      all.add(
+          new Line(
+              each,
+              rule,
+              kept(each, rules.value(rule)),
+              path,
+              Space.box(path, 0, path.length / 3 - 1)));
+    }
+    lines = List.copyOf(all);
+    half = Math.toRadians(rules.value("wire-let-go"));
+    fallShare = rules.value("mast-let-go");
+    margin = rules.value("tight-margin");
+  }
+
+  List<Line> lines() {
+    return lines;
+  }
+
+  double half() {
+    return half;
+  }
+
+  double fallShare() {
+    return fallShare;
+  }
+
+  private static String rule(OverheadLine.Kind kind) {
+    OverheadLine.Kind known = kind == null ? OverheadLine.Kind.UNKNOWN : kind;
+    return "overhead-" + known.name().toLowerCase(Locale.ROOT).replace('_', '-');
+  }
+
+  /** What must be kept: a figure below the default counts only when someone authorised it. */
+  private static double kept(OverheadLine line, double usual) {
+    if (line.clearance() == null) {
+      return usual;
+    }
+    boolean authorised = line.authorisedBy() != null && line.authorisedOn() != null;
+    return authorised ? line.clearance() : Math.max(usual, line.clearance());
+  }
+
+  /** Every clearance to every line: one of the first rule at least, however far. */
+  void check(
+      Rigged rigged,
+      List<Strand> strands,
+      List<Holder> holders,
+      GroundSurface ground,
+      List<Clearance> into) {
+    for (Line line : lines) {
+      into.add(keptDistance(line, strands));
+      if (!line.isTelephone()) {
+        letGo(line, rigged, holders, into);
+        mastLetGo(line, rigged, holders, ground, into);
+      }
+    }
+  }
+
+  // --- kept distance
+
+  private Clearance keptDistance(Line line, List<Strand> strands) {
+    Space.Near near = new Space.Near();
+    Strand nearest = strands.get(0);
+    double least = Double.POSITIVE_INFINITY;
+    for (Strand strand : strands) {
+      if (Space.boxes(strand.box, line.box) - strand.mostSlack() >= least) {
+        continue;
+      }
+      Space.Near here = new Space.Near();
+      double distance = toLine(strand, line, least, here);
+      if (distance < least) {
+        least = distance;
+        nearest = strand;
+        near = here;
+      }
+    }
+    return clearance(line.rule(), line, nearest.part.word, near, least, line.kept());
+  }
+
+  private Clearance clearance(
+      String rule, Line line, String what, Space.Near near, double distance, double required) {
+    return new Clearance(
+        rule,
+        line.source().id(),
+        what,
+        new Place(near.ax, near.ay, near.az),
+        new Place(near.bx, near.by, near.bz),
+        distance,
+        required,
+        Judge.state(distance, required, margin));
+  }
+
+  /**
+   * A distance no greater than that from a strand, wherever the weather puts it, to a line [m];
+   * exact below {@code enough} but for the slack of the sweep, never less than nothing.
+   */
+  static double toLine(Strand strand, Line line, double enough, Space.Near near) {
+    boolean far = Space.boxes(strand.box, line.box()) > line.kept() + FAR;
+    double least = enough;
+    for (int i = 0; i + 3 < 3 * strand.points(); i += 3) {
+      for (int state = 0; state < strand.states.length; state++) {
+        boolean main = strand.isStill(state) || state == 0 || state == strand.sweep - 1;
+        double slack = strand.slack(state, i);
+        if ((main || !far) && gap(strand, state, i, line) - slack < least) {
+          Space.Near here = new Space.Near();
+          piece(strand.states[state], i, line, here);
+          if (!far && state + 1 < strand.sweep) {
+            between(strand.states[state], strand.states[state + 1], i, line, here);
+            slack = Math.max(slack, strand.slack(state + 1, i));
+          }
+          double distance = Math.max(0, here.distance() - slack);
+          if (distance < least) {
+            least = distance;
+            near.square = Double.POSITIVE_INFINITY;
+            near.offer(here.ax, here.ay, here.az, here.bx, here.by, here.bz);
+          }
+        }
+      }
+    }
+    return least;
+  }
+
+  /** How far a piece is at least, on its way to the next state too. */
+  private static double gap(Strand strand, int state, int i, Line line) {
+    double here = Obstacle.gap(strand.states[state], i, line.box());
+    if (state + 1 >= strand.sweep) {
+      return here;
+    }
+    double[] one = strand.states[state];
+    double[] next = strand.states[state + 1];
+    return here - Math.max(apart(one, i, next, i), apart(one, i + 3, next, i + 3));
+  }
+
+  private static void piece(double[] ours, int i, Line line, Space.Near near) {
+    double[] path = line.path();
+    for (int k = 0; k + 3 < path.length; k += 3) {
+      Space.segments(ours, i, i + 3, path, k, k + 3, near);
+    }
+  }
+
+  /** The surface between two states of a piece, as two triangles. */
+  private static void between(double[] one, double[] other, int i, Line line, Space.Near near) {
+    double[] path = line.path();
+    double[] triangle = new double[9];
+    double across =
+        Math.max(
+            Math.max(apart(one, i, one, i + 3), apart(one, i, other, i)),
+            apart(one, i, other, i + 3));
+    for (int k = 0; k + 3 < path.length; k += 3) {
+      Space.Near corner = new Space.Near();
+      Space.pointSegment(one[i], one[i + 1], one[i + 2], path, k, k + 3, true, corner);
+      if (corner.distance() - across < near.distance()) {
+        put(triangle, one, i, one, i + 3, other, i);
+        Space.segmentTriangle(path, k, k + 3, triangle, false, near);
+        put(triangle, one, i + 3, other, i + 3, other, i);
+        Space.segmentTriangle(path, k, k + 3, triangle, false, near);
+      }
+    }
+  }
+
+  private static double apart(double[] p, int i, double[] q, int j) {
+    double dx = p[i] - q[j];
+    double dy = p[i + 1] - q[j + 1];
+    double dz = p[i + 2] - q[j + 2];
+    return Math.sqrt(dx * dx + dy * dy + dz * dz);
+  }
+
+  private static void put(double[] into, double[] a, int i, double[] b, int j, double[] c, int k) {
+    System.arraycopy(a, i, into, 0, 3);
+    System.arraycopy(b, j, into, 3, 3);
+    System.arraycopy(c, k, into, 6, 3);
+  }
+
+  // --- wire let go
+
+  private void letGo(Line line, Rigged rigged, List<Holder> holders, List<Clearance> into) {
+    double least = Double.POSITIVE_INFINITY;
+    Space.Near nearest = new Space.Near();
+    String what = "";
+    for (Rigged.Span span : rigged.spans()) {
+      double[] shape = Strand.flat(span.shapes().calm());
+      for (int end = 0; end < 2; end++) {
+        boolean fromFirst = end == 0;
+        double[] seen = fromFirst ? shape : backwards(shape);
+        double reach = span.reach(fromFirst) * STRETCH;
+        // What lies farther than the reach from the point that holds cannot be touched.
+        Space.Near direct = new Space.Near();
+        for (int k = 0; k < line.segments(); k++) {
+          Space.pointSegment(
+              seen[0], seen[1], seen[2], line.path(), 3 * k, 3 * k + 3, true, direct);
+        }
+        double bound = direct.distance() - reach;
+        if (bound >= least) {
+          continue;
+        }
+        Space.Near near = new Space.Near();
+        double found = Double.POSITIVE_INFINITY;
+        if (bound > line.kept() + FAR) {
+          found = bound;
+          near = direct;
+        } else {
+          LetGo region = new LetGo(seen, reach, half);
+          for (int k = 0; k < line.segments(); k++) {
+            found =
+                Math.min(found, region.toSegment(line.path(), 3 * k, 3 * k + 3, line.kept(), near));
+          }
+        }
+        if (found < least) {
+          least = found;
+          nearest = near;
+          Holder lost = holders.get(fromFirst ? span.to() : span.from());
+          what = "wire let go at " + lost.name();
+        }
+      }
+    }
+    into.add(clearance("wire-let-go", line, what, nearest, least, line.kept()));
+  }
+
+  private static double[] backwards(double[] shape) {
+    double[] other = new double[shape.length];
+    for (int i = 0; i < shape.length; i += 3) {
+      System.arraycopy(shape, i, other, shape.length - 3 - i, 3);
+    }
+    return other;
+  }
+
+  // --- mast let go
+
+  private void mastLetGo(
+      Line line, Rigged rigged, List<Holder> holders, GroundSurface ground, List<Clearance> into) {
+    Clearance worst = null;
+    for (Rigged.Mast mast : rigged.masts()) {
+      Holder zone = holders.get(mast.attachments().get(0));
+      worst = worse(worst, fall(line, mast.foot(), mast.height(), "mast let go in " + zone.name()));
+    }
+    for (Holder each : holders) {
+      if (each.isStandingMast()) {
+        double x = each.support().at().x();
+        double y = each.support().at().y();
+        Place foot = new Place(x, y, ground.heightAt(x, y));
+        worst = worse(worst, fall(line, foot, each.highest(), each.name() + " let go"));
+      }
+    }
+    if (worst != null) {
+      into.add(worst);
+    }
+  }
+
+  private static Clearance worse(Clearance one, Clearance other) {
+    boolean first =
+        one != null && one.distance() - one.required() <= other.distance() - other.required();
+    return first ? one : other;
+  }
+
+  private Clearance fall(Line line, Place foot, double height, String what) {
+    Space.Near near = new Space.Near();
+    for (int k = 0; k < line.segments(); k++) {
+      Space.pointSegment(foot.x(), foot.y(), foot.z(), line.path(), 3 * k, 3 * k + 3, true, near);
+    }
+    double required = fallShare * height + line.kept();
+    return clearance("mast-let-go", line, what, near, near.distance(), required);
+  }
+}

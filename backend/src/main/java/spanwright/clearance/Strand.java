@@ -1,0 +1,327 @@
+package spanwright.clearance;
+
+import java.util.ArrayList;
+import java.util.List;
+import spanwright.plan.Place;
+import spanwright.rigging.Rigged;
+
+/**
+ * One thing of ours in every position the weather gives it.
+ *
+ * <p>States are polylines of the same number of points, x, y, z in turn; those of the sweep follow
+ * one another from blown left over calm to blown right, in steps small enough that the surface
+ * between neighbours holds everything in between but for {@link #slack}. The steps between calm and
+ * gust turn each point about the chord of its span, its distance from the chord growing evenly.
+ */
+final class Strand {
+  /** What it is. */
+  enum Part {
+    WIRE("wire"),
+    ROPE("rope"),
+    GUY("guy"),
+    HALYARD("halyard"),
+    FALL("counterweight rope"),
+    FEED_LINE("feed line"),
+    MAST("mast");
+
+    final String word;
+
+    Part(String word) {
+      this.word = word;
+    }
+  }
+
+  /** Steps from calm to the gust. */
+  static final int STEPS = 4;
+
+  /** Another model of the same gust may put a wire this share of its shift farther out. */
+  private static final double MODEL = 0.03;
+
+  final Part part;
+  final int from;
+  final int to;
+  final double[][] states;
+  final int calm;
+  final int sweep;
+  private final double[] slack;
+  final double[] box;
+
+  /** Whether the first and last point are the ends of a conductor. */
+  final boolean startIsEnd;
+
+  final boolean endIsEnd;
+
+  private Strand(
+      Part part,
+      int from,
+      int to,
+      double[][] states,
+      int calm,
+      int sweep,
+      double[] slack,
+      boolean startIsEnd,
+      boolean endIsEnd) {
+    this.part = part;
+    this.from = from;
+    this.to = to;
+    this.states = states;
+    this.calm = calm;
+    this.sweep = sweep;
+    this.slack = slack;
+    this.startIsEnd = startIsEnd;
+    this.endIsEnd = endIsEnd;
+    box = Space.emptyBox();
+    for (double[] state : states) {
+      Space.grow(box, Space.box(state, 0, state.length / 3 - 1));
+    }
+  }
+
+  /** Something that does not move. */
+  static Strand still(Part part, int attachment, List<Place> points) {
+    return new Strand(
+        part,
+        attachment,
+        attachment,
+        new double[][] {flat(points)},
+        0,
+        1,
+        new double[points.size()],
+        false,
+        false);
+  }
+
+  /** Every strand of a hung layout. */
+  static List<Strand> of(Rigged rigged) {
+    List<Strand> strands = new ArrayList<>();
+    List<double[][]> sweeps = new ArrayList<>();
+    int last = rigged.spans().size() - 1;
+    for (Rigged.Span span : rigged.spans()) {
+      double[] slack = new double[span.shapes().calm().size()];
+      double[][] states = sweep(span.shapes(), null, slack);
+      sweeps.add(states);
+      boolean headFree = hasTail(rigged, span.from());
+      boolean endFree = hasTail(rigged, span.to());
+      int points = span.shapes().calm().size();
+      add(strands, Part.ROPE, span, states, 0, span.wireFrom(), slack, false, false);
+      add(
+          strands,
+          Part.WIRE,
+          span,
+          states,
+          span.wireFrom(),
+          span.wireTo(),
+          slack,
+          span.from() == 0 && !headFree,
+          span.to() == last + 1 && !endFree);
+      add(strands, Part.ROPE, span, states, span.wireTo(), points - 1, slack, false, false);
+    }
+    for (Rigged.Tail tail : rigged.tails()) {
+      double[] slack = new double[tail.shapes().calm().size()];
+      double[][] states = sweep(tail.shapes(), null, slack);
+      strands.add(
+          strand(Part.WIRE, tail.attachment(), tail.attachment(), states, slack, false, true));
+    }
+    for (Rigged.Rope rope : rigged.ropes()) {
+      switch (rope.what()) {
+        case "guy" -> strands.add(still(Part.GUY, rope.attachment(), rope.shapes().calm()));
+        case "halyard" -> strands.add(still(Part.HALYARD, rope.attachment(), rope.shapes().calm()));
+        case "fall" -> strands.add(still(Part.FALL, rope.attachment(), rope.shapes().calm()));
+        default -> {
+          // tails are the ropes of the spans, taken above
+        }
+      }
+    }
+    for (Rigged.Mast mast : rigged.masts()) {
+      strands.add(still(Part.MAST, mast.attachments().get(0), List.of(mast.foot(), mast.top())));
+    }
+    strands.add(feedLine(rigged, sweeps));
+    return strands;
+  }
+
+  private static boolean hasTail(Rigged rigged, int attachment) {
+    return rigged.tails().stream().anyMatch(each -> each.attachment() == attachment);
+  }
+
+  private static void add(
+      List<Strand> strands,
+      Part part,
+      Rigged.Span span,
+      double[][] states,
+      int from,
+      int to,
+      double[] slack,
+      boolean startIsEnd,
+      boolean endIsEnd) {
+    if (to <= from) {
+      return;
+    }
+    double[][] cut = new double[states.length][];
+    for (int i = 0; i < states.length; i++) {
+      cut[i] = java.util.Arrays.copyOfRange(states[i], 3 * from, 3 * to + 3);
+    }
+    double[] here = java.util.Arrays.copyOfRange(slack, from, to + 1);
+    strands.add(strand(part, span.from(), span.to(), cut, here, startIsEnd, endIsEnd));
+  }
+
+  private static Strand strand(
+      Part part, int from, int to, double[][] states, double[] slack, boolean start, boolean end) {
+    int sweep = Math.min(states.length, 2 * STEPS + 1);
+    boolean moves = states.length > 2;
+    return new Strand(
+        part, from, to, states, moves ? STEPS : 0, moves ? sweep : 1, slack, start, end);
+  }
+
+  private static Strand feedLine(Rigged rigged, List<double[][]> sweeps) {
+    Rigged.FeedLine line = rigged.feedLine();
+    double[][] firsts = null;
+    for (int i = 0; i < sweeps.size() && firsts == null; i++) {
+      int index = rigged.spans().get(i).shapes().calm().indexOf(line.feedpoint());
+      if (index >= 0 && sweeps.get(i).length > 2) {
+        firsts = new double[sweeps.get(i).length][];
+        for (int s = 0; s < firsts.length; s++) {
+          firsts[s] = java.util.Arrays.copyOfRange(sweeps.get(i)[s], 3 * index, 3 * index + 3);
+        }
+      }
+    }
+    double[] slack = new double[line.shapes().calm().size()];
+    double[][] states = sweep(line.shapes(), firsts, slack);
+    int at = line.held() >= 0 ? line.held() : -1;
+    return strand(Part.FEED_LINE, at, at, states, slack, false, false);
+  }
+
+  /** The states of one thing: left to right in steps, then iced. */
+  private static double[][] sweep(Rigged.Shapes shapes, double[][] firsts, double[] slack) {
+    double[] calm = flat(shapes.calm());
+    if (shapes.left().equals(shapes.calm()) && shapes.right().equals(shapes.calm())) {
+      return shapes.iced().isEmpty() || shapes.iced().equals(shapes.calm())
+          ? new double[][] {calm}
+          : threeOf(calm, flat(shapes.iced()));
+    }
+    double[] left = flat(shapes.left());
+    double[] right = flat(shapes.right());
+    int iced = shapes.iced().isEmpty() ? 0 : 1;
+    double[][] states = new double[2 * STEPS + 1 + iced][];
+    states[0] = left;
+    states[STEPS] = calm;
+    states[2 * STEPS] = right;
+    for (int k = 1; k < STEPS; k++) {
+      double share = (double) k / STEPS;
+      states[STEPS - k] =
+          between(calm, left, share, firsts == null ? null : firsts[STEPS - k], slack);
+      states[STEPS + k] =
+          between(calm, right, share, firsts == null ? null : firsts[STEPS + k], slack);
+    }
+    if (iced > 0) {
+      states[2 * STEPS + 1] = flat(shapes.iced());
+    }
+    return states;
+  }
+
+  private static double[][] threeOf(double[] calm, double[] iced) {
+    double[][] states = new double[2 * STEPS + 2][];
+    java.util.Arrays.fill(states, calm);
+    states[2 * STEPS + 1] = iced;
+    return states;
+  }
+
+  /** A state between calm and blown. */
+  private static double[] between(
+      double[] calm, double[] blown, double share, double[] first, double[] slack) {
+    int end = calm.length - 3;
+    double[] state = new double[calm.length];
+    double[] e0 = axis(calm, end);
+    double[] e1 = axis(blown, end);
+    double[] o0 = new double[3];
+    double[] o1 = new double[3];
+    double[] start = new double[3];
+    double[] finish = new double[3];
+    for (int k = 0; k < 3; k++) {
+      start[k] = first == null ? mix(calm[k], blown[k], share) : first[k];
+      finish[k] = mix(calm[end + k], blown[end + k], share);
+    }
+    for (int i = 0; i <= end; i += 3) {
+      double a0 = offset(calm, i, e0, o0);
+      double a1 = offset(blown, i, e1, o1);
+      double along = mix(a0, a1, share);
+      double r0 = size(o0);
+      double r1 = size(o1);
+      double cos =
+          r0 * r1 < 1e-12 ? 1 : (o0[0] * o1[0] + o0[1] * o1[1] + o0[2] * o1[2]) / (r0 * r1);
+      double angle = Math.acos(Math.max(-1, Math.min(1, cos)));
+      double radius = mix(r0, r1, share);
+      boolean turns = angle > 1e-3 && angle < 3.1;
+      double f0 = turns ? radius / r0 * Math.sin((1 - share) * angle) / Math.sin(angle) : 1 - share;
+      double f1 = turns ? radius / r1 * Math.sin(share * angle) / Math.sin(angle) : share;
+      for (int k = 0; k < 3; k++) {
+        state[i + k] = start[k] + along * (finish[k] - start[k]) + f0 * o0[k] + f1 * o1[k];
+      }
+      double greater = Math.max(r0, r1);
+      double facet = greater * (1 - Math.cos(angle / STEPS / 2));
+      double rest = MODEL * greater + 4 * greater / (end / 3.0 * end / 3.0);
+      slack[i / 3] = Math.max(slack[i / 3], facet + rest);
+    }
+    return state;
+  }
+
+  /** The chord as a vector, with its length squared last. */
+  private static double[] axis(double[] points, int end) {
+    double x = points[end] - points[0];
+    double y = points[end + 1] - points[1];
+    double z = points[end + 2] - points[2];
+    return new double[] {x, y, z, x * x + y * y + z * z};
+  }
+
+  /** Splits a point into its share along the chord (returned) and its offset from the chord. */
+  private static double offset(double[] points, int i, double[] axis, double[] into) {
+    double x = points[i] - points[0];
+    double y = points[i + 1] - points[1];
+    double z = points[i + 2] - points[2];
+    double share = axis[3] < 1e-12 ? 0 : (x * axis[0] + y * axis[1] + z * axis[2]) / axis[3];
+    into[0] = x - share * axis[0];
+    into[1] = y - share * axis[1];
+    into[2] = z - share * axis[2];
+    return share;
+  }
+
+  private static double size(double[] v) {
+    return Math.sqrt(v[0] * v[0] + v[1] * v[1] + v[2] * v[2]);
+  }
+
+  private static double mix(double a, double b, double share) {
+    return a + share * (b - a);
+  }
+
+  static double[] flat(List<Place> points) {
+    double[] flat = new double[3 * points.size()];
+    for (int i = 0; i < points.size(); i++) {
+      flat[3 * i] = points.get(i).x();
+      flat[3 * i + 1] = points.get(i).y();
+      flat[3 * i + 2] = points.get(i).z();
+    }
+    return flat;
+  }
+
+  /** Whether a state is calm, or iced in calm air. */
+  boolean isStill(int state) {
+    return state == calm || state >= sweep;
+  }
+
+  /** How much farther than a state's piece from offset i things may be [m]; 0 on a calm day. */
+  double slack(int state, int i) {
+    return state == calm || sweep == 1 ? 0 : Math.max(slack[i / 3], slack[i / 3 + 1]);
+  }
+
+  /** The most that {@link #slack(int, int)} can be [m]. */
+  double mostSlack() {
+    double most = 0;
+    for (double each : slack) {
+      most = Math.max(most, each);
+    }
+    return most;
+  }
+
+  /** Number of points. */
+  int points() {
+    return states[0].length / 3;
+  }
+}
