@@ -125,7 +125,7 @@ export function mount(root, store, shell) {
     const targets = (shown?.targets ?? []);
     const lead = leadTarget(plan, targets);
     const profiles = (shown?.profiles ?? []).filter((/** @type {any} */ one) => one.name !== 'peak' || !targets.some((/** @type {any} */ target) => target.bearing !== undefined));
-    const width = Math.max(300, root.clientWidth - 32);
+    const width = Math.min(560, Math.max(300, root.clientWidth - 32));
     return html('section', { class: 'profile' },
       html('div', { class: 'line part-head' }, html('h3', {}, 'Launch profile'), html('span', { class: 'soft' }, 'dBi, before line loss')),
       html('div', { class: 'tabs band-tabs', role: 'group', 'aria-label': 'Band shown' }, ...bands.map((one) => html('button', {
