@@ -4,12 +4,14 @@ import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonLocation;
 import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.core.StreamReadConstraints;
 import com.fasterxml.jackson.core.StreamReadFeature;
 import com.fasterxml.jackson.core.exc.StreamConstraintsException;
 import com.fasterxml.jackson.core.io.JsonEOFException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.json.JsonMapper;
+import com.fasterxml.jackson.databind.node.MissingNode;
 import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
@@ -30,22 +32,14 @@ public final class JsonText {
   private static final int LONGEST_NUMBER = 100;
   private static final int LONGEST_NAME = 200;
   private static final int LONGEST_TEXT = 1_100_000;
+
+  /** A tree of so many values and names takes about 100 MB. */
   private static final long MOST_TOKENS = 2_000_000;
 
-  private static final JsonMapper MAPPER =
-      JsonMapper.builder(
-              JsonFactory.builder()
-                  .streamReadConstraints(
-                      StreamReadConstraints.builder()
-                          .maxNestingDepth(DEEPEST)
-                          .maxNumberLength(LONGEST_NUMBER)
-                          .maxNameLength(LONGEST_NAME)
-                          .maxStringLength(LONGEST_TEXT)
-                          .maxTokenCount(MOST_TOKENS)
-                          .build())
-                  .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
-                  .build())
-          .build();
+  private static final JsonMapper MAPPER = new JsonMapper(factory(MOST_TOKENS));
+
+  /** For looking through a text without building anything of it. */
+  private static final JsonFactory SCANNER = factory(Long.MAX_VALUE);
 
   private static final Pattern CHARACTER = Pattern.compile("character \\((.*) \\(code");
   private static final Pattern QUOTED = Pattern.compile("(?:'([^']*)'|\"([^\"]*)\")");
@@ -63,20 +57,55 @@ public final class JsonText {
 
   /** Reads one document. */
   public static JsonNode read(String text) throws BadJson {
+    return parse(MAPPER.getFactory(), text, MAPPER::readTree);
+  }
+
+  /** Whether one document stands there and nothing else, without keeping it. */
+  public static void scan(String text) throws BadJson {
+    parse(
+        SCANNER,
+        text,
+        parser -> {
+          JsonToken first = parser.nextToken();
+          parser.skipChildren();
+          return first;
+        });
+  }
+
+  private static JsonFactory factory(long mostTokens) {
+    return JsonFactory.builder()
+        .streamReadConstraints(
+            StreamReadConstraints.builder()
+                .maxNestingDepth(DEEPEST)
+                .maxNumberLength(LONGEST_NUMBER)
+                .maxNameLength(LONGEST_NAME)
+                .maxStringLength(LONGEST_TEXT)
+                .maxTokenCount(mostTokens)
+                .build())
+        .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
+        .build();
+  }
+
+  /** One way of taking a document in. */
+  private interface Taking<T> {
+    T from(JsonParser parser) throws IOException;
+  }
+
+  private static <T> T parse(JsonFactory factory, String text, Taking<T> taking) throws BadJson {
     JsonLocation reached = null;
     // Some editors put a byte order mark in front.
     String json = text.startsWith("\uFEFF") ? text.substring(1) : text;
-    try (JsonParser parser = MAPPER.createParser(json)) {
+    try (JsonParser parser = factory.createParser(json)) {
       try {
-        JsonNode tree = MAPPER.readTree(parser);
-        if (tree == null || tree.isMissingNode()) {
+        T taken = taking.from(parser);
+        if (taken == null || taken instanceof MissingNode) {
           throw new BadJson(new Fault("", "There is no JSON in it: the text is empty."));
         }
         if (parser.nextToken() != null) {
           String more = "Something follows after the end of the document. Remove it.";
           throw new BadJson(new Fault(where(parser.currentTokenLocation()), more));
         }
-        return tree;
+        return taken;
       } finally {
         reached = parser.currentLocation();
       }

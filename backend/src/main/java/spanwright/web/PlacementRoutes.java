@@ -53,7 +53,7 @@ final class PlacementRoutes {
 
   private static Asked asked(Context ctx) {
     List<Fault> faults = new ArrayList<>();
-    JsonNode tree = Requests.json(ctx).tree();
+    JsonNode tree = Requests.tree(ctx);
     Form form = Form.of(tree, faults);
     form.form("plan");
     form.form("placement");

@@ -76,20 +76,20 @@ final class PlanRoutes {
   }
 
   private static void check(Context ctx) {
-    Requests.Body body = Requests.json(ctx);
-    ctx.json(Map.of("faults", PlanReader.read(body.text()).faults()));
+    String text = Requests.text(ctx);
+    ctx.json(Map.of("faults", PlanReader.read(text).faults()));
   }
 
   /** The body as sent, if it is a plan, or with {@code ?draft=true} the beginning of one. */
   private static String admitted(Context ctx) {
     boolean draft = Requests.isOn(ctx, "draft");
-    Requests.Body body = Requests.json(ctx);
+    String text = Requests.text(ctx);
     List<Fault> faults =
-        draft ? PlanReader.readDraft(body.text()).faults() : PlanReader.read(body.text()).faults();
+        draft ? PlanReader.readDraft(text).faults() : PlanReader.read(text).faults();
     if (!faults.isEmpty()) {
       throw new ProblemException(Problem.faulty("The plan", faults));
     }
-    return body.text();
+    return text;
   }
 
   static SavedPlan existing(PlanStore store, String id) {

@@ -20,20 +20,29 @@ final class Requests {
 
   private Requests() {}
 
-  /** A body and what it says. */
-  record Body(String text, JsonNode tree) {}
-
-  /** The body, which must be JSON and say so. */
-  static Body json(Context ctx) {
+  /** The body as text, which must be JSON and say so. */
+  static String text(Context ctx) {
     requireJson(ctx);
-    return json(bytes(ctx));
+    byte[] bytes = bytes(ctx);
+    try {
+      String text = JsonText.decode(bytes);
+      JsonText.scan(text);
+      return text;
+    } catch (BadJson e) {
+      throw new ProblemException(Problem.badJson(e.fault()));
+    }
+  }
+
+  /** The body as a tree, which must be JSON and say so. */
+  static JsonNode tree(Context ctx) {
+    requireJson(ctx);
+    return tree(bytes(ctx));
   }
 
   /** A body that was read already. */
-  static Body json(byte[] bytes) {
+  static JsonNode tree(byte[] bytes) {
     try {
-      String text = JsonText.decode(bytes);
-      return new Body(text, JsonText.read(text));
+      return JsonText.read(JsonText.decode(bytes));
     } catch (BadJson e) {
       throw new ProblemException(Problem.badJson(e.fault()));
     }

@@ -58,7 +58,7 @@ final class SearchRoutes {
     }
     Requests.requireJson(ctx);
     List<Fault> faults = new ArrayList<>();
-    Form form = Form.of(Requests.json(bytes).tree(), faults);
+    Form form = Form.of(Requests.tree(bytes), faults);
     Effort effort =
         form.word(
             "effort",
