@@ -9,6 +9,8 @@ import { set, svg } from './svg.js';
 const LINE = 13;
 const SIZE = 11.5;
 const MARK = 15;
+/** How far outside the frame a thing may lie whose label could still reach in, pixels. */
+const BEYOND = 240;
 
 /**
  * @param {import('./planview.js').PlanView} view
@@ -33,11 +35,14 @@ export function createLettering(view) {
       const [left, top] = view.toScreen(p);
       return [left - frame.left, top - frame.top];
     };
-    const wanted = labels.map((label) => ({
-      id: label.id,
-      weight: label.weight,
-      spots: spotsOf(label, local, measure),
-    }));
+    const near = labels.filter((label) => {
+      const [x, y] = local(label.at);
+      return x > -BEYOND && y > -BEYOND && x < frame.width + BEYOND && y < frame.height + BEYOND;
+    });
+    const wanted = near.map((label) => {
+      const spots = spotsOf(label, local, measure);
+      return { label, spots, id: label.id, weight: label.weight, insteadOf: label.insteadOf, places: spots.map((s) => s.boxes) };
+    });
     const taken = symbols.map((p) => {
       const [x, y] = local(p);
       return { left: x - 6, top: y - 6, width: 12, height: 12 };
@@ -48,32 +53,15 @@ export function createLettering(view) {
     taken.push({ left: frame.width - 220, top: frame.height - 36, width: 216, height: 34 });
     const soft = lines.flatMap(([a, b]) => along(local(a), local(b), frame));
     const whole = { left: 2, top: 2, width: frame.width - 4, height: frame.height - 4 };
-    const first = wanted.filter((w) => !isInstead(w.id));
-    const boxes = (/** @type {typeof wanted} */ list) =>
-      list.map((w) => ({ id: w.id, weight: w.weight, places: w.spots.map((s) => s.boxes) }));
-    let placed = placeLabels(boxes(first), taken, whole, soft);
-    // A short form stands in for a label that found no room.
-    const second = labels.filter((l) => l.insteadOf && !placed.has(l.insteadOf)).map((l) => l.id);
-    if (second.length) {
-      const chosen = wanted.filter((w) => !isInstead(w.id) || second.includes(w.id));
-      placed = placeLabels(boxes(chosen.filter((w) => !dropped(w.id, placed, second))), taken, whole, soft);
-    }
+    const placed = placeLabels(wanted, taken, whole, soft);
     const px = 1 / sight.ppm;
     layer.replaceChildren(
-      ...labels.flatMap((label) => {
-        const index = placed.get(label.id);
-        if (index === undefined) return [];
-        const spot = wanted.find((w) => w.id === label.id)?.spots[index];
+      ...wanted.flatMap(({ label, spots }) => {
+        const spot = spots[placed.get(label.id) ?? -1];
         return spot ? [letter(label, spot, sight, px, measure)] : [];
       }),
     );
   }
-
-  /** @param {string} id */
-  const isInstead = (id) => labels.some((l) => l.id === id && l.insteadOf);
-  /** A long form whose short form is to be tried. @param {string} id @param {Map<string, number>} placed @param {string[]} second */
-  const dropped = (id, placed, second) =>
-    !placed.has(id) && labels.some((l) => l.insteadOf === id && second.includes(l.id));
 
   return {
     /** @param {Label[]} all @param {number[][]} points of symbols @param {number[][][]} segments better not covered */

@@ -155,7 +155,7 @@ function northPoint(frame, site) {
       : null,
     svg('text', { x: nx, y: ny + 4, 'text-anchor': 'middle', class: 'north-letter' }, ['N']),
     small ? null : svg('text', { y: length + 14, 'text-anchor': 'middle', class: 'frame-figure' }, [
-      (site.planNorth ?? 0) === 0 ? 'true north up' : `plan turned ${Math.round((site.planNorth ?? 0) * 10) / 10}°`.replace('-', MINUS),
+      (site.planNorth ?? 0) === 0 ? 'true north up' : `up points to ${Math.round((site.planNorth ?? 0) * 10) / 10}°`.replace('-', MINUS),
     ]),
     small || !magnetic ? null : svg('text', { y: length + 27, 'text-anchor': 'middle', class: 'frame-figure' }, [`magnetic ${formatVariation(variation)}`]),
   ]);

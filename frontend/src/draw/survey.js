@@ -9,6 +9,9 @@ import { createLettering } from './lettering.js';
 import { set, svg } from './svg.js';
 import { spoken } from './words.js';
 
+/** More things than this are not drawn anew at every step of a zoom. */
+const MANY = 120;
+
 /**
  * @typedef {object} Kept
  * @property {any} thing
@@ -29,6 +32,8 @@ export function mountSurvey(view, store) {
   const lettering = createLettering(view);
   addPatterns(view);
   let pending = 0;
+  /** @type {number|undefined} */
+  let resting;
   /** @type {{labels: import('./kinds/env.js').Label[], symbols: number[][], lines: number[][][]}} */
   let own = { labels: [], symbols: [], lines: [] };
 
@@ -98,6 +103,11 @@ export function mountSurvey(view, store) {
     );
   }
 
+  function atRest() {
+    clearTimeout(resting);
+    resting = setTimeout(soon, 90);
+  }
+
   function soon() {
     if (!pending) pending = requestAnimationFrame(draw);
   }
@@ -109,7 +119,9 @@ export function mountSurvey(view, store) {
     if (sight.ppm !== scale) {
       scale = sight.ppm;
       setPatterns(view, 1 / sight.ppm);
-      soon();
+      // A large plot is drawn anew when the zooming rests; until then symbols grow with the plan.
+      if (kept.size > MANY) atRest();
+      else soon();
     } else {
       lettering.moved();
     }

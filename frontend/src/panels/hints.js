@@ -1,6 +1,7 @@
 // @ts-check
 /** Three short hints on a first visit, the notice about the plot, and the buttons on the plan. */
 import { mark } from '../draw/mark.js';
+import { things } from '../state/kinds.js';
 import { button, el, link } from './el.js';
 
 const HINTS = [
@@ -46,9 +47,9 @@ export function mount(root, store, shell) {
       clash ? link('Open the other one', () => shell.keeper.open(clash)) : '',
       link('Put away', () => store.set({ notice: null, clash: null })));
   });
-  store.subscribe((s) => [s.plan.boundary, s.draft, s.place], () => {
+  store.subscribe((s) => [s.plan, s.draft, s.place], () => {
     const { plan, draft, place } = store.get();
-    const bare = (plan.boundary?.length ?? 0) < 3 && !draft && place === 'survey';
+    const bare = store.get().opened > 0 && things(plan).length === 0 && !draft && place === 'survey';
     empty.hidden = !bare;
     empty.replaceChildren('Begin with the boundary: ', link('take its tool', () => shell.desk.take('boundary')),
       ', click the first corner, type the length of the first side and press Enter.');

@@ -2,7 +2,6 @@
 /** New things with figures that are a fair start, and new plots that can be finished. */
 import { defaultRidge } from '../geometry/roof.js';
 import { add, freshId, freshName, nextDatumName } from './edits.js';
-import { listOf } from './kinds.js';
 
 /** @typedef {import('./types.js').Plan} Plan */
 /** @typedef {number[]} Point */
@@ -68,7 +67,7 @@ export function make(plan, kind, points, variant) {
   const name = kind === 'supports' ? SUPPORT_NAMES[variant ?? 'mast'] : maker.name;
   const thing = {
     id: freshId(plan, kind === 'supports' ? (variant ?? 'mast') : maker.stem),
-    name: freshName(plan, kind, listOf(plan, kind).length ? `${name} ${listOf(plan, kind).length + 1}` : name),
+    name: freshName(plan, kind, name),
     ...maker.rest(points, variant),
   };
   return add(plan, kind, thing);
