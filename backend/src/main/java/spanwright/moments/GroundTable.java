@@ -28,7 +28,13 @@ final class GroundTable implements Reflection {
   private static final int ACROSS = 32;
   private static final int MOST_SPLITS = 64;
 
-  /** Allowed size of the last coefficients, against an image of size one. */
+  /** Greatest horizontal distance [m]. */
+  private static final double FARTHEST = 10_000;
+
+  /**
+   * Allowed size of the last coefficients, against an image of size one; more in proportion beyond
+   * 32 m, where little is left of it.
+   */
   private static final double TOLERANCE = 5e-5;
 
   private static final double[] NODES = new double[SIDE];
@@ -117,9 +123,12 @@ final class GroundTable implements Reflection {
   private Block block(double rho, double zeta) {
     int e = band(zeta);
     int k = rho < Math.scalb(1.0, e) ? 0 : Math.getExponent(rho) - e + 1;
-    if (k >= ACROSS) {
+    if (rho > FARTHEST) {
       throw new ModelFault(
-          "Two wires are " + rho + " m apart, too far to solve together: leave one out.");
+          "Two wires, or a wire and a field point, are "
+              + Math.round(rho)
+              + " m apart, more than the 10 km over which the ground is worked out: leave out"
+              + " what is so far away.");
     }
     int index = (e - LOW) * ACROSS + k;
     Block found = blocks.get(index);
@@ -223,7 +232,8 @@ final class GroundTable implements Reflection {
         cells[start + i * ALL + m] = p[i];
       }
     }
-    return (lastRho > TOLERANCE ? 1 : 0) | (lastZeta > TOLERANCE ? 2 : 0);
+    double allowed = TOLERANCE * Math.max(1, rho0 / 32);
+    return (lastRho > allowed ? 1 : 0) | (lastZeta > allowed ? 2 : 0);
   }
 
   /** M x Mᵀ. */

@@ -15,7 +15,9 @@ public final class GroundTables {
   private final long limit;
   private final Map<Key, GroundTable> tables = new LinkedHashMap<>(16, 0.75f, true);
 
-  /** Tables that together stay under 128 MiB; one plot's table of one frequency is about 0.1 MB. */
+  /**
+   * Tables that together stay under 128 MiB; one plot's table of one frequency is 0.05 to 0.4 MB.
+   */
   public GroundTables() {
     this(128L << 20);
   }
@@ -69,11 +71,7 @@ public final class GroundTables {
             table(ground, frequenciesMHz[i]).fill(reach, 2 * low, 2 * high);
           }
         };
-    Thread[] helpers =
-        new Thread
-            [Math.min(threads, frequenciesMHz.length) - 1 < 0
-                ? 0
-                : Math.min(threads, frequenciesMHz.length) - 1];
+    Thread[] helpers = new Thread[Math.max(0, Math.min(threads, frequenciesMHz.length) - 1)];
     for (int i = 0; i < helpers.length; i++) {
       helpers[i] = new Thread(work, "ground-table-" + i);
       helpers[i].setDaemon(true);

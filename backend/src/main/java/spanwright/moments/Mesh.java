@@ -154,7 +154,7 @@ final class Mesh {
 
   /** Places the nodes. */
   private static final class Mesher {
-    private static final int MOST_ELEMENTS = 1500;
+    private static final int MOST_ELEMENTS = 600;
     private static final int STEPS = 48;
 
     private final AntennaModel model;
@@ -196,7 +196,6 @@ final class Mesh {
             cut = feed;
           }
         }
-        double radius = model.wires().get(piece.wire()).radius();
         if (Double.isNaN(cut)) {
           stretch(p, piece, piece.arcA(), piece.arcB(), piece.nodeA(), piece.nodeB(), anchors);
         } else {
@@ -204,7 +203,7 @@ final class Mesh {
           stretch(p, piece, piece.arcA(), cut, piece.nodeA(), middle, anchors);
           stretch(p, piece, cut, piece.arcB(), middle, piece.nodeB(), anchors);
         }
-        if (rows.size() > MOST_ELEMENTS || !(radius > 0)) {
+        if (rows.size() > MOST_ELEMENTS) {
           throw new ModelFault(
               "The wires are too long in wavelengths to solve: "
                   + ModelCheck.name(piece.wire())

@@ -73,15 +73,20 @@ public final class Solver {
     return inOrder;
   }
 
-  /** As {@link #solve}, solved again on a finer mesh to say how far refinement moves it. */
+  /**
+   * As {@link #solve}, solved again on a finer mesh to say how far refinement moves it.
+   *
+   * @throws ModelFault when the model cannot be solved as given
+   */
   public Solution solveAndRefine(
       AntennaModel model, Ground ground, double frequencyMHz, MeshAim aim) {
     Solution solution = solve(model, ground, frequencyMHz, aim);
-    MeshAim next = aim == MeshAim.COARSE ? MeshAim.FULL : MeshAim.FINE;
-    Solution finer = solve(model, ground, frequencyMHz, next);
+    // the finest has nothing beyond it: its distance from the next coarser one is more than its own
+    MeshAim next = aim == MeshAim.FULL ? MeshAim.FINE : MeshAim.FULL;
+    Solution other = solve(model, ground, frequencyMHz, next);
     double change =
         reflectionCoefficient(solution.impedance())
-            .subtract(reflectionCoefficient(finer.impedance()))
+            .subtract(reflectionCoefficient(other.impedance()))
             .abs();
     double allowed = aim == MeshAim.COARSE ? 0.05 : 0.01;
     List<String> more =

@@ -42,6 +42,6 @@ final class SourcePoints {
 
   /** Gauss points of an element of this order. */
   static int points(int order) {
-    return order + 2;
+    return order + 1;
   }
 }
