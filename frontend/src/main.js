@@ -115,7 +115,7 @@ document.addEventListener('keydown', (event) => {
   const key = { key: event.key, shift: event.shiftKey, ctrl: event.ctrlKey || event.metaKey, alt: event.altKey };
   const thing = target?.closest('.plan [data-ref]');
   if (typing && !(key.ctrl && ['z', 'y'].includes(event.key.toLowerCase()) && !target?.matches('input[type=text], textarea'))) return;
-  if (thing && (event.key === 'Enter' || event.key === ' ') && store.get().tool === 'select') {
+  if (thing && (event.key === 'Enter' || event.key === ' ') && store.get().tool === 'select' && store.get().place === 'survey') {
     store.set({ selection: { ref: thing.getAttribute('data-ref') ?? '', vertex: null } });
     event.preventDefault();
     return;

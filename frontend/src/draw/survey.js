@@ -37,6 +37,9 @@ export function mountSurvey(view, store) {
   /** @type {{labels: import('./kinds/env.js').Label[], symbols: number[][], lines: number[][][]}} */
   let own = { labels: [], symbols: [], lines: [] };
 
+  /** Things can be taken hold of in Survey; elsewhere the Tab key passes them by. */
+  const reachable = () => (store.get().place === 'survey' ? 0 : -1);
+
   /** @param {string} ref @returns {SVGGElement} */
   const group = (ref) => /** @type {SVGGElement} */ (svg('g', { 'data-ref': ref, class: 'thing' }));
 
@@ -65,7 +68,7 @@ export function mountSurvey(view, store) {
       if (stale) {
         if (!one) {
           one = { thing, stamp, main: group(ref), under: [], labels: [], plan };
-          set(one.main, { tabindex: 0, role: 'button' });
+          set(one.main, { tabindex: reachable(), role: 'button' });
           kept.set(ref, one);
         }
         const env = { px, units, plan, selected };
@@ -125,6 +128,9 @@ export function mountSurvey(view, store) {
     } else {
       lettering.moved();
     }
+  });
+  store.subscribe((s) => s.place, () => {
+    for (const { main } of kept.values()) set(main, { tabindex: reachable() });
   });
   store.subscribe((s) => s.hovered, (ref, before) => {
     if (before) kept.get(before)?.main.classList.remove('hovered');

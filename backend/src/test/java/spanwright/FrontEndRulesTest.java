@@ -9,6 +9,7 @@ import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -185,5 +186,72 @@ class FrontEndRulesTest {
             && !page.contains("<style")
             && !page.matches("(?s).*\\son\\w+=.*"));
     assertTrue(!page.matches("(?s).*<script(?![^>]*src=)[^>]*>.*"));
+  }
+
+  /** Text must stand at 4.5 : 1, lines that carry meaning at 3 : 1 (WCAG 2.2, 1.4.3 and 1.4.11). */
+  @Test
+  void every_colour_can_be_told_from_its_ground_light_and_dark() {
+    String css = text(FRONT_END.resolve("styles/tokens.css"));
+    int dark = css.indexOf("prefers-color-scheme: dark");
+    Map<String, String> light = colours(css.substring(0, dark));
+    Map<String, String> darkSet = new HashMap<>(light);
+    darkSet.putAll(colours(css.substring(dark, css.indexOf("prefers-reduced-motion"))));
+    List<String> faint = new ArrayList<>();
+    for (Map<String, String> set : List.of(light, darkSet)) {
+      String name = set == light ? "light" : "dark";
+      for (String ground : List.of("paper", "field", "ground-wash")) {
+        for (String text :
+            List.of("ink", "ink2", "ink3", "copper", "rope", "clear", "tight", "foul")) {
+          need(faint, name, set, text, ground, 4.5);
+        }
+        need(faint, name, set, "leaf", ground, 3);
+      }
+      need(faint, name, set, "copper", "copper-wash", 4.5);
+      need(faint, name, set, "rope", "rope-wash", 4.5);
+      need(faint, name, set, "foul", "foul-wash", 4.5);
+      for (String wash : List.of("copper-wash", "rope-wash", "leaf-wash", "foul-wash")) {
+        need(faint, name, set, "ink3", wash, 4.5);
+      }
+    }
+    assertEquals(List.of(), faint);
+  }
+
+  private static Map<String, String> colours(String css) {
+    Map<String, String> found = new HashMap<>();
+    Pattern.compile("--([a-z0-9-]+):\\s*(#[0-9A-Fa-f]{6})")
+        .matcher(css)
+        .results()
+        .forEach(m -> found.put(m.group(1), m.group(2)));
+    return found;
+  }
+
+  private static void need(
+      List<String> faint,
+      String set,
+      Map<String, String> of,
+      String on,
+      String ground,
+      double least) {
+    double found = contrast(of.get(on), of.get(ground));
+    if (found < least) {
+      faint.add(String.format("%s: %s on %s is %.2f, needs %.1f", set, on, ground, found, least));
+    }
+  }
+
+  /** Contrast ratio of two sRGB colours, WCAG 2.2, "contrast ratio" and "relative luminance". */
+  private static double contrast(String a, String b) {
+    double one = luminance(a);
+    double two = luminance(b);
+    return (Math.max(one, two) + 0.05) / (Math.min(one, two) + 0.05);
+  }
+
+  private static double luminance(String hex) {
+    double[] weight = {0.2126, 0.7152, 0.0722};
+    double sum = 0;
+    for (int i = 0; i < 3; i++) {
+      double c = Integer.parseInt(hex.substring(1 + 2 * i, 3 + 2 * i), 16) / 255.0;
+      sum += weight[i] * (c <= 0.04045 ? c / 12.92 : Math.pow((c + 0.055) / 1.055, 2.4));
+    }
+    return sum;
   }
 }
