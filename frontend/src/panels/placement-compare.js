@@ -3,7 +3,7 @@ import { html } from '../charts/html.js';
 import { number, signed } from '../units/figures.js';
 import { formatLength } from '../units/length.js';
 import { stateMark } from '../charts/marks.js';
-import { bandSummaries, concerns, placementOf, placementTitle, planOf, shapeTitle, toBuild, wireLength } from './placement-facts.js';
+import { bandSummaries, concerns, distanceFigure, placementOf, placementTitle, planOf, shapeTitle, toBuild, wireLength } from './placement-facts.js';
 
 /** The pinned placement beside the chosen one, difference by difference. */
 
@@ -20,7 +20,7 @@ export function comparison(state, placement, store) {
   const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
   const bandsHere = bandSummaries(plan, placement);
   const bandsThere = bandSummaries(plan, pinned);
-  const worstOf = (/** @type {any} */ one) => concerns(plan, one, length)[0];
+  const worstOf = (/** @type {any} */ one) => concerns(plan, one, (metres) => distanceFigure(metres, state.units))[0];
   const gust = (/** @type {any} */ one) => Math.max(...one.attachments.map((/** @type {any} */ hold) => hold.pullInWind));
   /** @type {[string, string|Node, string|Node, string][]} */
   const rows = [

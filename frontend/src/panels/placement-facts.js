@@ -1,5 +1,7 @@
 // @ts-check
 import { worst } from '../charts/marks.js';
+import { number, signed } from '../units/figures.js';
+import { formatLength } from '../units/length.js';
 
 /**
  * What the panels say of a placement, read from its result element and the plan it was found on. Pure.
@@ -180,6 +182,24 @@ export function clearanceConcern(plan, clearance, length) {
     state: clearance.state, distance: clearance.distance, rule: clearance.rule,
     words: `${length(clearance.distance)} to ${nameOf(plan, clearance.to)}${part}; must keep ${length(clearance.required)}`,
   };
+}
+
+/**
+ * @param {number} score decibels over the reference
+ * @returns {string} the headline
+ */
+export function scoreWords(score) {
+  return score < 0 ? `${number(-score, 1)} dB below the reference` : `${signed(score, 1)} dB over the reference`;
+}
+
+/**
+ * A distance held against a rule: small ones to the millimetre, so that 0.075 is not read as 0.07.
+ * @param {number} metres
+ * @param {'m'|'ft'} units
+ * @returns {string} without the unit in metres
+ */
+export function distanceFigure(metres, units) {
+  return formatLength(metres, units, metres > 0 && metres < 0.1 ? 3 : 2);
 }
 
 /**

@@ -1,10 +1,8 @@
 // @ts-check
 import { html } from '../charts/html.js';
 import { svg } from '../draw/svg.js';
-import { signed } from '../units/figures.js';
-import { formatLength } from '../units/length.js';
 import { stateMark } from '../charts/marks.js';
-import { concerns, listOf, planOf, shapeTitle } from './placement-facts.js';
+import { concerns, distanceFigure, listOf, planOf, scoreWords, shapeTitle } from './placement-facts.js';
 
 /** On a narrow screen: the headline with previous and next, and the way to the list. Hidden by the style sheet on a wide one. */
 
@@ -17,7 +15,7 @@ import { concerns, listOf, planOf, shapeTitle } from './placement-facts.js';
  */
 export function headLine(state, placement, index, store) {
   const list = listOf(state);
-  const concern = concerns(planOf(state), placement, (metres) => formatLength(metres, state.units, 2))[0];
+  const concern = concerns(planOf(state), placement, (metres) => distanceFigure(metres, state.units))[0];
   const step = (/** @type {number} */ way) => {
     const next = list[index + way];
     if (next) store.set({ chosen: next.id });
@@ -28,7 +26,7 @@ export function headLine(state, placement, index, store) {
   return html('div', { class: 'headline' },
     arrow(-1, 'Previous placement'),
     html('div', { class: 'headline-words' },
-      html('h2', {}, `${signed(placement.score, 1)} dB ${placement.score < 0 ? 'against' : 'over'} the reference`),
+      html('h2', {}, scoreWords(placement.score)),
       html('p', {},
         html('button', { type: 'button', class: 'link', 'data-key': 'to-list', onclick: () => { document.body.dataset.column = 'list'; } },
           index < 0 ? 'to the list' : `${index + 1} of ${list.length}`),

@@ -1,13 +1,13 @@
 // @ts-check
 import { html, redrawer } from '../charts/html.js';
-import { number, signed } from '../units/figures.js';
+import { number } from '../units/figures.js';
 import { launchProfile } from '../charts/launch-profile.js';
-import { formatLength, lengthWithUnit } from '../units/length.js';
+import { lengthWithUnit } from '../units/length.js';
 import { stateMark } from '../charts/marks.js';
 import { clearancesTable, pullsTable } from './placement-checks.js';
 import { comparison } from './placement-compare.js';
 import {
-  bandsOf, concerns, hangsOn, isStale, listOf, ownOf, placementOf, placementTitle, planOf, wireLength,
+  bandsOf, concerns, distanceFigure, hangsOn, isStale, listOf, ownOf, placementOf, placementTitle, planOf, scoreWords, wireLength,
 } from './placement-facts.js';
 import { feedFacts, gainTable, remarks, scoreTable } from './placement-gain.js';
 import { headLine } from './placement-head.js';
@@ -59,7 +59,7 @@ export function mount(root, store, shell) {
     if (!placement) return [unchosen(state)];
     const plan = planOf(state);
     const band = shownBand(state, placement);
-    const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
+    const length = (/** @type {number} */ metres) => distanceFigure(metres, state.units);
     const rank = listOf(state).indexOf(placement);
     return [
       headLine(state, placement, rank, store),
@@ -93,13 +93,13 @@ export function mount(root, store, shell) {
    * @param {any} placement
    */
   function head(state, plan, placement) {
-    const list = concerns(plan, placement, (metres) => formatLength(metres, state.units, 2));
+    const list = concerns(plan, placement, (metres) => distanceFigure(metres, state.units));
     const pinned = state.pinned === placement.id;
     return html('section', { class: 'placement-head' },
       html('p', { class: 'soft line' },
         html('span', {}, `${placementTitle(state, placement)}, ${placement.shape}, ${lengthWithUnit(wireLength(placement), state.units, 1)} of wire`),
         isStale(state) ? html('span', { class: 'tight' }, stateMark('tight'), ' plan changed since') : null),
-      html('h2', {}, `${signed(placement.score, 1)} dB ${placement.score < 0 ? 'against' : 'over'} the reference`),
+      html('h2', {}, scoreWords(placement.score)),
       html('ul', { class: 'concerns' }, ...list.slice(0, 4).map((one) => html('li', {},
         stateMark(one.state), ' ', html('b', { class: one.state }, one.state), ` ${one.words}`))),
       list.length > 4 ? html('p', { class: 'soft' }, `and ${list.length - 4} more under Pulls and Clearances`) : null,

@@ -3,11 +3,10 @@ import { html, redrawer } from '../charts/html.js';
 import { rowBars } from '../charts/bars.js';
 import { count } from '../charts/figures.js';
 import { number, signed } from '../units/figures.js';
-import { formatLength } from '../units/length.js';
 import { stateMark } from '../charts/marks.js';
 import { thumbnail } from '../charts/thumbnail.js';
 import {
-  bandSummaries, concerns, hangsOn, isStale, listOf, ownOf, planOf, shapeTitle, toBuild,
+  bandSummaries, concerns, distanceFigure, hangsOn, isStale, listOf, ownOf, planOf, shapeTitle, toBuild,
 } from './placement-facts.js';
 import { cancelSearch, startSearch } from './placements-search.js';
 
@@ -173,7 +172,7 @@ export function mount(root, store, shell) {
   function row(state, placement, rank) {
     const plan = planOf(state);
     const bars = bandSummaries(plan, placement);
-    const [concern] = concerns(plan, placement, (metres) => formatLength(metres, state.units, 2));
+    const [concern] = concerns(plan, placement, (metres) => distanceFigure(metres, state.units));
     const names = hangsOn(plan, placement).join(', ');
     return html('li', {}, html('button', {
       type: 'button', class: 'row', 'data-key': `row-${placement.id}`, 'aria-current': placement.id === state.chosen ? 'true' : null,

@@ -80,6 +80,7 @@ export function mount(planView, store, shell) {
     const plan = state.search.planAtSearch ?? state.plan;
     const planNorth = plan.site?.planNorth ?? 0;
     const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
+    const distance = (/** @type {number} */ metres) => formatLength(metres, state.units, metres > 0 && metres < 0.1 ? 3 : 2);
     const clearances = toDimension(chosen.clearances);
     const band = bandShown(state, chosen);
     const frame = roseFrame(chosen, view);
@@ -95,8 +96,8 @@ export function mount(planView, store, shell) {
     planView.letter('placement', {
       labels: [
         ...clearances.map((one, index) => dimensionLabel(one, index, {
-          figure: length(one.distance),
-          words: [`to ${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`, `must keep ${length(one.required)}`],
+          figure: distance(one.distance),
+          words: [`to ${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`, `must keep ${distance(one.required)}`],
         })),
         ...aims.labels,
         ...(band?.rose ? [roseLegend(band, view)] : []),
