@@ -108,8 +108,22 @@ export function mount(root, store, shell) {
         html('p', { class: 'consent' }, stateMark('tight', 'Consent'), ` The new ${lengthWithUnit(mast.height, state.units, 1)} mast needs ${mast.consent}.`)),
       html('p', { class: 'actions' },
         html('button', { type: 'button', class: 'link', 'data-key': 'pin', 'aria-pressed': String(pinned), onclick: () => store.set({ pinned: pinned ? null : placement.id }) }, pinned ? 'Unpin' : 'Pin to compare'),
+        placement.madeFrom ? html('button', { type: 'button', class: 'link', 'data-key': 'back', onclick: () => putBack(placement) }, placement.from ? 'Put it back' : 'Drop it') : null,
         html('button', { type: 'button', class: 'link', 'data-key': 'sheet', onclick: () => shell.go('sheet') }, 'Open its sheet'),
         html('span', { class: 'soft' }, 'drag any end on the plan')));
+  }
+
+  /**
+   * Forgets a placement made by hand and shows the one it came from.
+   * @param {any} placement
+   */
+  function putBack(placement) {
+    const state = store.get();
+    const own = ownOf(state).filter((one) => one.id !== placement.id);
+    store.set({
+      search: { ...state.search, own }, chosen: placement.from ?? listOf(state)[0]?.id ?? null,
+      pinned: state.pinned === placement.id ? null : state.pinned,
+    });
   }
 
   /**

@@ -30,11 +30,12 @@ export function sheetList(model, units) {
     head.verdict ? html('p', { class: 'verdict' }, stateMark('foul', 'Not allowed'), html('b', {}, ` ${head.verdict}`)) : null,
     overheadBox(model.overhead, length),
     html('div', { class: 'pair' }, wires(model, length), ropes(model, length)),
-    html('div', { class: 'pair' }, html('div', { class: 'stack' }, holdings(model, length), sags(model, length)), hardware(model)),
+    html('div', { class: 'pair' }, html('div', { class: 'stack' }, holdings(model, length), sags(model, length)), hardware(model, length)),
     setOut(model.setOut, length),
     html('div', { class: 'pair' }, order(model), cautions(model)),
     html('div', { class: 'pair' }, checks('Before', model.before), checks('After', model.after)),
     sweep(model),
+    model.notes?.length ? html('section', {}, html('h3', {}, 'Worth knowing'), html('ul', { class: 'notes' }, ...model.notes.map((/** @type {string} */ note) => html('li', {}, note)))) : null,
     html('footer', {}, html('p', {}, [...head.weather, model.decides].join(' ')), html('p', {}, 'RF exposure not computed.')));
 }
 
@@ -124,12 +125,16 @@ function holdings({ attachments }, length) {
 /** @param {number} point */
 const square = (point) => html('span', { class: 'point' }, String(point));
 
-/** @param {any} model */
-function hardware({ hardware: items }) {
+/**
+ * @param {any} model
+ * @param {Length} length
+ */
+function hardware({ hardware: items }, length) {
+  const remark = (/** @type {any} */ item) => [item.length ? `${length(item.length)}` : '', item.note ?? ''].filter((text) => text).join(' ');
   return html('section', {},
     html('h3', {}, 'Hardware'),
     table(['>', 'What', '>Spare'], items.map((/** @type {any} */ item) => [
-      bold(String(item.count)), html('span', {}, item.what, item.note ? html('span', { class: 'small' }, `, ${item.note}`) : null), item.spares ? `+${item.spares}` : '',
+      bold(String(item.count)), html('span', {}, item.what, remark(item) ? html('span', { class: 'small' }, `, ${remark(item)}`) : null), item.spares ? `+${item.spares}` : '',
     ]), 'Hardware'));
 }
 

@@ -57,7 +57,7 @@ export function handles(planView, store, shell) {
     working = true;
     try {
       const answer = await shell.api.assess(plan, layout);
-      keep({ ...answer, id: 'moved', rank: 0, madeFrom: movedName(origin ?? placement) });
+      keep({ ...answer, id: 'moved', rank: 0, madeFrom: movedName(origin ?? placement), from: (origin ?? placement).from ?? (origin ?? placement).id });
     } catch (problem) {
       shell.say(`That could not be worked out. ${/** @type {Error} */ (problem).message}`);
     }
