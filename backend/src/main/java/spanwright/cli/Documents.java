@@ -122,7 +122,7 @@ final class Documents {
         Files.write(whole, bytes);
         return;
       }
-      beside = Files.createTempFile(whole.getParent(), ".spanwright-", ".tmp");
+      beside = whole.resolveSibling("." + whole.getFileName() + ".tmp");
       Files.write(beside, bytes);
       Files.move(beside, whole, StandardCopyOption.REPLACE_EXISTING);
     } catch (IOException e) {
