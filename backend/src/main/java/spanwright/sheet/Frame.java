@@ -2,6 +2,8 @@ package spanwright.sheet;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.locationtech.jts.geom.Envelope;
+import org.locationtech.jts.geom.Polygon;
 import spanwright.plan.Place;
 import spanwright.plan.Point;
 
@@ -62,5 +64,13 @@ record Frame(
         && mm[0] <= left + width - margin
         && mm[1] >= top + margin
         && mm[1] <= top + height - margin;
+  }
+
+  /** The window as an area on paper, widened by a margin. */
+  Polygon window(double margin) {
+    return (Polygon)
+        Sight.SHAPES.toGeometry(
+            new Envelope(
+                left - margin, left + width + margin, top - margin, top + height + margin));
   }
 }

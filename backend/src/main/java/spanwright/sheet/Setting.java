@@ -21,7 +21,15 @@ final class Setting {
    * @param width in millimetres; 0 takes what is left
    * @param right whether figures end at its right edge
    */
-  record Column(String heading, double width, boolean right) {}
+  record Column(String heading, double width, boolean right) {
+    static Column left(String heading, double width) {
+      return new Column(heading, width, false);
+    }
+
+    static Column right(String heading, double width) {
+      return new Column(heading, width, true);
+    }
+  }
 
   /**
    * A cell.

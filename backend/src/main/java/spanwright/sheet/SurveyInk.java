@@ -2,17 +2,11 @@ package spanwright.sheet;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.locationtech.jts.geom.Coordinate;
-import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.geom.Geometry;
-import org.locationtech.jts.geom.LineString;
-import org.locationtech.jts.geom.Polygon;
 import spanwright.plan.Building;
 import spanwright.plan.Canopy;
 import spanwright.plan.Metalwork;
-import spanwright.plan.OverheadLine;
 import spanwright.plan.PeopleVolume;
-import spanwright.plan.Place;
 import spanwright.plan.Plan;
 import spanwright.plan.Point;
 import spanwright.plan.Support;
@@ -42,7 +36,8 @@ final class SurveyInk {
 
   void draw() {
     grid();
-    plan.overheadLines().forEach(this::corridor);
+    OverheadInk overhead = new OverheadInk(model, frame, labels, pen);
+    plan.overheadLines().forEach(overhead::corridor);
     plan.trees().forEach(this::crown);
     plan.supports().stream().filter(s -> s.canopy() != null).forEach(this::crown);
     plan.zones().forEach(this::zone);
@@ -50,7 +45,7 @@ final class SurveyInk {
     plan.buildings().forEach(this::building);
     boundary();
     plan.metalwork().forEach(this::metal);
-    plan.overheadLines().forEach(this::overhead);
+    plan.overheadLines().forEach(overhead::line);
     plan.supports().forEach(this::support);
   }
 
@@ -79,80 +74,6 @@ final class SurveyInk {
     return frame.left() + frame.width();
   }
 
-  private Polygon window(double margin) {
-    return (Polygon)
-        Sight.SHAPES.toGeometry(
-            new Envelope(
-                frame.left() - margin,
-                right() + margin,
-                frame.top() - margin,
-                frame.top() + frame.height() + margin));
-  }
-
-  /** The pieces of a path on paper that show in the window. */
-  private List<List<double[]>> shown(List<double[]> path, double margin) {
-    List<List<double[]>> pieces = new ArrayList<>();
-    if (path.size() < 2) {
-      return pieces;
-    }
-    Geometry cut = window(margin).intersection(line(path));
-    for (int i = 0; i < cut.getNumGeometries(); i++) {
-      if (cut.getGeometryN(i) instanceof LineString piece && piece.getLength() > 0.2) {
-        List<double[]> points = new ArrayList<>();
-        for (var c : piece.getCoordinates()) {
-          points.add(new double[] {c.x, c.y});
-        }
-        pieces.add(points);
-      }
-    }
-    return pieces;
-  }
-
-  private static LineString line(List<double[]> path) {
-    return Sight.SHAPES.createLineString(
-        path.stream().map(p -> new Coordinate(p[0], p[1])).toArray(Coordinate[]::new));
-  }
-
-  private SheetModel.Line row(OverheadLine line) {
-    return model.overhead().lines().stream()
-        .filter(l -> l.id().equals(line.id()))
-        .findFirst()
-        .orElseThrow();
-  }
-
-  private void corridor(OverheadLine line) {
-    Double keep = row(line).keep();
-    List<double[]> path = frame.places(line.path());
-    if (keep == null || path.size() < 2) {
-      return;
-    }
-    Geometry area = line(path).buffer(Math.max(0.1, frame.mm(keep)));
-    Geometry seen = area.intersection(window(2));
-    if (seen.isEmpty()) {
-      return;
-    }
-    Hatching.draw(pen, seen, 1.9, false, 0.1, 0.4);
-    for (int i = 0; i < area.getNumGeometries(); i++) {
-      if (area.getGeometryN(i) instanceof Polygon part) {
-        pen.area(Hatching.outline(part), 0.2, 0.85, Ink.NONE, 2, 0.9);
-      }
-    }
-    String text = "keep " + figures.required(keep);
-    List<Labels.Spot> spots = new ArrayList<>();
-    for (List<double[]> piece : shown(path, 0)) {
-      for (double share : new double[] {0.5, 0.3, 0.7, 0.15, 0.85}) {
-        double[] at = along(piece, share);
-        double turn = Labels.along(at[2], at[3]);
-        for (double side : new double[] {-1, 1}) {
-          double off = side * (frame.mm(keep) + 1.9);
-          spots.add(
-              Labels.text(at[0] - at[3] * off, at[1] + at[2] * off, text, SMALL, true, turn, 1));
-        }
-      }
-    }
-    labels.ask(30, spots);
-  }
-
   /** A point at a share of a path and the direction there: x, y, ux, uy. */
   static double[] along(List<double[]> path, double share) {
     double whole = 0;
@@ -176,43 +97,6 @@ final class SurveyInk {
       want -= piece;
     }
     return new double[] {path.get(0)[0], path.get(0)[1], 1, 0};
-  }
-
-  private void overhead(OverheadLine line) {
-    boolean telephone = line.kind() == OverheadLine.Kind.TELEPHONE;
-    SheetModel.Line row = row(line);
-    String words = row.name() + ", " + row.kind();
-    List<Labels.Spot> spots = new ArrayList<>();
-    for (List<double[]> piece : shown(frame.places(line.path()), 15)) {
-      List<double[]> drawn = Symbols.zigZag(piece);
-      pen.path(drawn, telephone ? 1.1 : 1.5, 0);
-      pen.path(drawn, telephone ? 0.25 : 0.5, 1);
-      labels.avoid(piece, 6);
-    }
-    for (List<double[]> piece : shown(frame.places(line.path()), -2)) {
-      for (double share : new double[] {0.5, 0.35, 0.65, 0.2, 0.8}) {
-        double[] at = along(piece, share);
-        for (double off : new double[] {-3, 3, -5, 5}) {
-          spots.add(
-              Labels.text(
-                  at[0] - at[3] * off,
-                  at[1] + at[2] * off,
-                  words,
-                  BODY,
-                  true,
-                  Labels.along(at[2], at[3]),
-                  Math.abs(share - 0.5) + Math.abs(off) / 10));
-        }
-      }
-    }
-    labels.ask(10, spots);
-    for (Place p : line.path()) {
-      double[] at = frame.at(p);
-      if (frame.holds(at, 0)) {
-        pen.circle(at[0], at[1], 0.75, 0.2, 1, 1);
-        labels.ask(12, Labels.around(at[0], at[1], figures.height(p.z()), BODY, true, 1.6));
-      }
-    }
   }
 
   private void crown(Tree tree) {
@@ -293,7 +177,7 @@ final class SurveyInk {
     if (outline.size() < 3) {
       return;
     }
-    Geometry seen = Hatching.area(frame.points(outline)).buffer(0).intersection(window(0));
+    Geometry seen = Hatching.area(frame.points(outline)).buffer(0).intersection(frame.window(0));
     if (seen.isEmpty()) {
       return;
     }
@@ -330,11 +214,11 @@ final class SurveyInk {
     Geometry area = Hatching.area(outline).buffer(0);
     List<double[]> ridge = frame.points(building.ridgeLine());
     if (ridge.size() == 2 && building.roof() != Building.Roof.LEAN_TO) {
-      area = area.difference(line(ridge).buffer(0.7));
+      area = area.difference(Labels.line(ridge).buffer(0.7));
     }
-    Hatching.draw(pen, area.intersection(window(2)), 1.8, true, 0.13, 0.55);
+    Hatching.draw(pen, area.intersection(frame.window(2)), 1.8, true, 0.13, 0.55);
     if (building.metalRoof()) {
-      Hatching.draw(pen, area.intersection(window(2)), 1.8, false, 0.13, 0.55);
+      Hatching.draw(pen, area.intersection(frame.window(2)), 1.8, false, 0.13, 0.55);
     }
     pen.area(outline, 0.45, 1, Ink.NONE);
     labels.avoid(area, 2);

@@ -2,7 +2,9 @@ package spanwright.sheet;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import spanwright.assess.Placement;
@@ -104,23 +106,25 @@ final class WorkOrder {
   }
 
   private void ropeSteps() {
+    Map<String, List<String>> same = new LinkedHashMap<>();
     for (SheetModel.Rope rope : ropes) {
       boolean aside = rope.from().startsWith("kept aside");
       boolean onHalyard = rope.to().startsWith("the halyard");
-      if (rope.mark().startsWith("G") || aside || onHalyard) {
-        continue;
-      }
-      if (rope.over() == null) {
-        steps.add(rope.mark() + ": tie to " + rope.to() + " by ladder; one foots, one works.");
-      } else if (rope.over().contains("limb")) {
-        steps.add(
-            rope.mark()
-                + ": by throw line over the limb, or draw the pulley up to it;"
-                + " from the ground, nobody climbs.");
-      } else {
-        steps.add(rope.mark() + ": reeve through the " + rope.over() + ", both parts in hand.");
+      if (!rope.mark().startsWith("G") && !aside && !onHalyard) {
+        same.computeIfAbsent(how(rope), how -> new ArrayList<>()).add(rope.mark());
       }
     }
+    same.forEach((how, marks) -> steps.add(String.join(", ", marks) + ": " + how));
+  }
+
+  private static String how(SheetModel.Rope rope) {
+    if (rope.over() == null) {
+      return "tie to " + rope.to() + " by ladder; one foots, one works.";
+    }
+    return rope.over().contains("limb")
+        ? "by throw line over the limb, or draw the pulley up to it; from the ground, nobody"
+            + " climbs."
+        : "reeve through the pulley at its attachment, both parts in hand.";
   }
 
   private void hoist() {
