@@ -9,6 +9,7 @@ import spanwright.plan.OverheadLine;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
 import spanwright.plan.Point;
+import spanwright.rigging.Roof;
 
 /** Draws what stands in the plane of a span: crowns, buildings, overhead lines that cross it. */
 final class SideObstacles {
@@ -72,13 +73,13 @@ final class SideObstacles {
     if (building.footprint().size() < 3) {
       return;
     }
-    Roof roof = new Roof(building);
+    Roof roof = Roof.of(building, ground);
     List<double[]> run = new ArrayList<>();
     double step = Math.max(0.05, (to - from) / 1500);
     for (double s = from; s <= to + step / 2; s += step) {
       Point at = leg.at(s);
-      if (roof.covers(at)) {
-        run.add(new double[] {s, ground.heightAt(at) + roof.heightAt(at)});
+      if (roof.covers(at.x(), at.y())) {
+        run.add(new double[] {s, roof.heightAt(at.x(), at.y())});
       } else if (!run.isEmpty()) {
         section(leg, building, run);
         run.clear();

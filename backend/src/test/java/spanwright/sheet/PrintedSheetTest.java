@@ -30,6 +30,14 @@ class PrintedSheetTest {
     }
   }
 
+  private static final byte[] METRIC = Sheets.toPdf(metric());
+
+  private static String metricText() throws IOException {
+    try (PDDocument document = Loader.loadPDF(METRIC)) {
+      return new PDFTextStripper().getText(document);
+    }
+  }
+
   private static SheetModel metric() {
     return Fixture.model(SheetOptions.Paper.A4, SheetOptions.Units.METRES);
   }
@@ -40,13 +48,13 @@ class PrintedSheetTest {
 
   @Test
   void signs_print_and_their_font_is_embedded() throws IOException {
-    String text = text(metric());
+    String text = metricText();
     for (String sign : List.of("Ω", "≤", "°", "−", "–", "×", "·")) {
       assertTrue(text.contains(sign), sign);
     }
     assertFalse(text.contains("#"));
     assertFalse(text.contains(String.valueOf(Letters.MISSING)));
-    try (PDDocument document = Loader.loadPDF(Sheets.toPdf(metric()))) {
+    try (PDDocument document = Loader.loadPDF(METRIC)) {
       for (PDPage page : document.getPages()) {
         for (COSName name : page.getResources().getFontNames()) {
           PDFont font = page.getResources().getFont(name);
@@ -72,7 +80,7 @@ class PrintedSheetTest {
 
   @Test
   void overhead_lines_come_first_with_their_states_in_words() throws IOException {
-    String text = text(metric());
+    String text = metricText();
     int box = text.indexOf("Overhead lines first");
     assertTrue(box > 0 && box < text.indexOf("Piece"));
     assertTrue(text.contains("Treat every line as live"));
