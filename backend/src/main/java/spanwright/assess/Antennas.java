@@ -2,6 +2,7 @@ package spanwright.assess;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.regex.Pattern;
 import spanwright.moments.AntennaModel;
 import spanwright.moments.Sheath;
 import spanwright.moments.Vertex;
@@ -17,6 +18,8 @@ import spanwright.rigging.Rigged;
  * of the ground under it.
  */
 final class Antennas {
+  private static final Pattern WIRE = Pattern.compile("wires\\[(\\d+)]");
+
   private final Catalogue catalogue;
   private final GroundSurface surface;
   private final Metal metal;
@@ -53,6 +56,19 @@ final class Antennas {
     }
     var feed = rigged.layout().feed();
     return AntennaModel.of(wires, feed.conductor(), feed.fraction());
+  }
+
+  /**
+   * A sentence of the field solver, its numbered wires called by the names they have on the plan.
+   */
+  String named(String sentence, Rigged rigged) {
+    return WIRE.matcher(sentence)
+        .replaceAll(
+            match -> {
+              int index = Integer.parseInt(match.group(1)) - rigged.conductors().size();
+              String name = index < 0 ? "The wire" : metal.names().get(index);
+              return java.util.regex.Matcher.quoteReplacement(name);
+            });
   }
 
   /** Mean height of the ground under the wire above the plan's zero [m]. */

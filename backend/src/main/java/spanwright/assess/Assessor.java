@@ -192,7 +192,9 @@ public final class Assessor {
       try {
         return rowsOf(hung, rows, antennas.of(hung.rigged(), true), MeshAim.FULL, true);
       } catch (ModelFault fault) {
-        doubts.add("The metalwork is not in these figures. " + fault.getMessage());
+        doubts.add(
+            "The metalwork is not in these figures. "
+                + antennas.named(fault.getMessage(), hung.rigged()));
       }
     }
     return rowsOf(hung, rows, antennas.of(hung.rigged(), false), MeshAim.FULL, true);
@@ -212,8 +214,9 @@ public final class Assessor {
       FeedResult feed = station.run(line, length, row.frequencyMHz(), solution.impedance());
       results.add(radio.row(row, solution, feed, full));
       for (String warning : solution.warnings()) {
-        if (full && !warnings.contains(warning)) {
-          warnings.add(warning);
+        String named = antennas.named(warning, hung.rigged());
+        if (full && !warnings.contains(named)) {
+          warnings.add(named);
         }
       }
     }

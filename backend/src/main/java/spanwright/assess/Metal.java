@@ -25,7 +25,7 @@ final class Metal {
 
   private static final double SAME = 1e-6;
 
-  private record Piece(List<Place> path, double radius) {}
+  private record Piece(String name, List<Place> path, double radius) {}
 
   private final List<Piece> pieces;
 
@@ -38,7 +38,8 @@ final class Metal {
     for (Metalwork metal : plan.metalwork()) {
       List<Place> path = withoutRepeats(surface.raise(metal.path()));
       if (path.size() > 1) {
-        raised.add(new Piece(path, metal.radius()));
+        String name = metal.name() == null ? metal.id() : metal.name();
+        raised.add(new Piece(name, path, metal.radius()));
       }
     }
     return new Metal(parted(raised));
@@ -46,6 +47,11 @@ final class Metal {
 
   boolean isEmpty() {
     return pieces.isEmpty();
+  }
+
+  /** Names of the pieces, in the order of the conductors. */
+  List<String> names() {
+    return pieces.stream().map(Piece::name).toList();
   }
 
   /** Highest point above the plan's zero [m]. */
@@ -98,7 +104,7 @@ final class Metal {
     List<Piece> parts = new ArrayList<>();
     for (int i = 0; i < paths.size(); i++) {
       for (List<Place> part : split(paths.get(i), cuts.get(i))) {
-        parts.add(new Piece(part, raised.get(i).radius));
+        parts.add(new Piece(raised.get(i).name, part, raised.get(i).radius));
       }
     }
     return parts;

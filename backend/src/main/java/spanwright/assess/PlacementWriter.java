@@ -2,6 +2,7 @@ package spanwright.assess;
 
 import java.util.ArrayList;
 import java.util.List;
+import spanwright.clearance.Clearance;
 import spanwright.clearance.State;
 import spanwright.plan.GroundSurface;
 import spanwright.plan.Place;
@@ -46,7 +47,7 @@ final class PlacementWriter {
         rigged.conductors().stream().map(PlacementWriter::conductor).toList(),
         attachments,
         feed(rigged, lineLength),
-        hung.clearances(),
+        hung.clearances().stream().map(PlacementWriter::rounded).toList(),
         rows,
         rigged.spans().stream().map(PlacementWriter::span).toList(),
         rigged.ropes().stream().map(PlacementWriter::rope).toList(),
@@ -133,6 +134,18 @@ final class PlacementWriter {
               mast.consent()));
     }
     return masts;
+  }
+
+  private static Clearance rounded(Clearance c) {
+    return new Clearance(
+        c.rule(),
+        c.to(),
+        c.what(),
+        rounded(c.at()),
+        rounded(c.toAt()),
+        Rounded.thousandth(c.distance()),
+        Rounded.thousandth(c.required()),
+        c.state());
   }
 
   private static List<Place> rounded(List<Place> places) {

@@ -8,9 +8,9 @@ import java.util.Optional;
  * any machine and with any number of threads.
  */
 public enum Effort {
-  QUICK(6, 1, 2, 4_000, 700, 90, 16),
-  NORMAL(14, 2, 3, 16_000, 4_000, 500, 90),
-  THOROUGH(30, 3, 5, 60_000, 12_000, 2_400, 1_000);
+  QUICK(6, 1, 2, 4_000, 1_600, 100, 16),
+  NORMAL(14, 2, 3, 16_000, 8_000, 800, 120),
+  THOROUGH(30, 3, 5, 60_000, 24_000, 3_000, 1_000);
 
   /** Places tried in each mast zone, and along each bracket line a third of that. */
   final int mastPlaces;

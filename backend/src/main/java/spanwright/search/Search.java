@@ -116,6 +116,7 @@ public final class Search {
     considered = candidates.size();
     List<Candidate> fitting = screen(workers, candidates);
     List<Free> free = hang(workers, byPromise(fitting, effort.hung));
+    say(0.30, free.size() + " hang free");
     prepareTables(free);
     List<Free> coarse = coarse(workers, freeByPromise(free, effort.coarse));
     List<Placement> full = new ArrayList<>(full(workers, freeByScore(coarse, effort.full)));
@@ -199,20 +200,29 @@ public final class Search {
     return fitting;
   }
 
+  /** Hangs batch after batch, best promise first, until enough hang free or the budget is spent. */
   private List<Free> hang(Workers workers, List<Candidate> candidates) {
     Stage stage = new Stage(0.08, 0.30, candidates.size(), "hanging and measuring distances");
-    List<Optional<Hung>> hung = workers.map(candidates, this::hangOne, stage::tick);
+    int batch = Math.max(50, options.effort().hung / 8);
+    int enough = 2 * options.effort().coarse;
     List<Free> free = new ArrayList<>();
-    for (int i = 0; i < candidates.size(); i++) {
-      if (hung.get(i).isPresent() && hung.get(i).get().allowed()) {
-        free.add(new Free(candidates.get(i), hung.get(i).get(), 0));
-      } else {
-        refusals++;
-        Candidate candidate = candidates.get(i);
-        hung.get(i).ifPresent(h -> refused.offer(candidate, h));
+    for (int from = 0; from < candidates.size() && free.size() < enough; from += batch) {
+      List<Candidate> part = candidates.subList(from, Math.min(candidates.size(), from + batch));
+      List<Optional<Hung>> hung = workers.map(part, this::hangOne, stage::tick);
+      for (int i = 0; i < part.size(); i++) {
+        sort(part.get(i), hung.get(i), free);
       }
     }
     return free;
+  }
+
+  private void sort(Candidate candidate, Optional<Hung> hung, List<Free> free) {
+    if (hung.isPresent() && hung.get().allowed()) {
+      free.add(new Free(candidate, hung.get(), 0));
+    } else {
+      refusals++;
+      hung.ifPresent(h -> refused.offer(candidate, h));
+    }
   }
 
   /** Empty when the layout cannot be hung at all, so that there is nothing to measure. */
