@@ -34,6 +34,7 @@ export class Offline extends Error {
  * @returns {Promise<Response>}
  */
 async function call(method, path, options = {}) {
+  /** @type {Record<string, string>} */
   const headers = { Accept: 'application/json', ...options.headers };
   /** @type {RequestInit} */
   const init = { method, headers, signal: options.signal };

@@ -96,6 +96,7 @@ export function createPlanView(box, store, extent) {
       width: Math.max(8, rect.width - inset.l - inset.r),
       height: Math.max(8, rect.height - inset.t - inset.b),
     };
+    box.classList.toggle('no-margin', inset.l === 0);
     root.style.left = `${frame.left}px`;
     root.style.top = `${frame.top}px`;
     root.style.width = `${frame.width}px`;

@@ -105,6 +105,7 @@ function coordinates(sight, frame, unit) {
   const k = sight.ppm * unit;
   const figures = Math.max(5, roundStep(k, 46));
   const ticks = figures === 5 && k >= 5 ? 1 : figures / 5;
+  /** @type {SVGElement[]} */
   const nodes = [];
   let d = '';
   const bottom = frame.top + frame.height;

@@ -30,7 +30,7 @@ export function mountHead(roots, store, shell) {
   const redo = button('Redo', () => store.redo(), { class: 'plain', 'aria-keyshortcuts': 'Control+Shift+Z' });
   const units = el('fieldset', { class: 'units' }, [
     el('legend', { class: 'visually-hidden', text: 'Units' }),
-    ...['m', 'ft'].map((value) => el('label', {}, [
+    ...(/** @type {const} */ (['m', 'ft'])).map((value) => el('label', {}, [
       el('input', { type: 'radio', name: 'units', value, onchange: () => store.set({ units: value }) }), el('span', { text: value })])),
   ]);
   roots.state.append(title, el('span', { class: 'spread' }), saved, undo, redo, units);

@@ -123,8 +123,10 @@ export function withFollowing(thing, kind, path, value) {
   }
   if (kind === 'supports' && path === 'kind') {
     const fresh = thing.canopy || value !== 'tree' ? {} : { canopy: SUPPORTS.tree.canopy };
-    const { canopy, ...bare } = thing;
-    return value === 'tree' ? { ...thing, kind: value, ...fresh } : { ...bare, kind: value };
+    const own = Object.values(SUPPORT_NAMES).find((name) => new RegExp(`^${name}( \\d+)?$`).test(thing.name ?? ''));
+    const name = own ? { name: thing.name.replace(own, SUPPORT_NAMES[value]) } : {};
+    const { canopy: _crown, ...bare } = thing;
+    return value === 'tree' ? { ...thing, ...name, kind: value, ...fresh } : { ...bare, ...name, kind: value };
   }
   if (kind === 'supports' && path === 'canopy') {
     const { canopy: _gone, ...bare } = thing;
@@ -139,15 +141,21 @@ export function withFollowing(thing, kind, path, value) {
 
 /** A ridge turned to run the other way of its building. @param {any} building @returns {any} */
 export function ridgeTurned(building) {
+  const { footprint, roof } = building;
   const [a, b] = building.ridgeLine ?? [];
-  if (!a || !b) return { ...building, ridgeLine: defaultRidge(building.footprint, building.roof) ?? [] };
-  const i = building.footprint.reduce((/** @type {number} */ best, /** @type {Point} */ p, /** @type {number} */ k) => {
-    const q = building.footprint[(k + 1) % building.footprint.length];
-    const across = Math.abs((q[0] - p[0]) * (b[0] - a[0]) + (q[1] - p[1]) * (b[1] - a[1]));
+  if (!a || !b) return { ...building, ridgeLine: defaultRidge(footprint, roof) ?? [] };
+  // The longest wall that runs rather across the ridge than along it.
+  let beside = -1;
+  let longest = 0;
+  footprint.forEach((/** @type {Point} */ p, /** @type {number} */ i) => {
+    const q = footprint[(i + 1) % footprint.length];
     const length = Math.hypot(q[0] - p[0], q[1] - p[1]);
-    return length > best.length + 1e-6 && across < 0.5 * length * Math.hypot(b[0] - a[0], b[1] - a[1]) ? { k, length } : best;
-  }, /** @type {any} */ ({ k: -1, length: 0 }));
-  if (i.k < 0) return building;
-  // The ring begun at that wall, alone made longest, gives the other ridge.
-  return { ...building, ridgeLine: defaultRidge(building.footprint, building.roof, i.k) ?? building.ridgeLine };
+    const along = Math.abs((q[0] - p[0]) * (b[0] - a[0]) + (q[1] - p[1]) * (b[1] - a[1]));
+    if (length > longest + 1e-6 && along < 0.5 * length * Math.hypot(b[0] - a[0], b[1] - a[1])) {
+      beside = i;
+      longest = length;
+    }
+  });
+  if (beside < 0) return building;
+  return { ...building, ridgeLine: defaultRidge(footprint, roof, beside) ?? building.ridgeLine };
 }

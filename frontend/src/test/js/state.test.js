@@ -3,7 +3,7 @@ import { curesFor, placeOf } from '../../state/cures.js';
 import { changeThing, duplicate, insertVertex, moveThing, moveVertex, remove, removeVertex, setBoundaryRule, setField } from '../../state/edits.js';
 import { extentOf, find, nameOf, refOfPath, things } from '../../state/kinds.js';
 import { ledger, nextStep } from '../../state/ledger.js';
-import { make, newPlan, withFollowing } from '../../state/made.js';
+import { make, newPlan, ridgeTurned, withFollowing } from '../../state/made.js';
 import { createStore } from '../../state/store.js';
 import { assert, test } from './harness.js';
 
@@ -183,4 +183,18 @@ test('every thing has a name and is found again by its ref', () => {
     assert(nameOf(kind, thing, index).length > 0);
   }
   assert(extentOf(plan).length > 8);
+});
+
+test('a ridge can be turned to run the other way, and back', () => {
+  const house = garden().buildings[0];
+  const once = ridgeTurned(house);
+  assert.same(once.ridgeLine, [[5, 2], [5, 6]]);
+  assert.same([...ridgeTurned(once).ridgeLine].sort(), [...house.ridgeLine].sort());
+});
+
+test('a support that is given another kind takes the name of its kind, unless it has its own', () => {
+  const mast = garden().supports[0];
+  const tree = withFollowing(mast, 'supports', 'kind', 'tree');
+  assert.same([tree.name, tree.kind, tree.canopy.radius], ['Tree', 'tree', 3]);
+  assert.same(withFollowing({ ...mast, name: 'Old mast' }, 'supports', 'kind', 'pole').name, 'Old mast');
 });

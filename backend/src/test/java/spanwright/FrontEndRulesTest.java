@@ -195,7 +195,7 @@ class FrontEndRulesTest {
     int dark = css.indexOf("prefers-color-scheme: dark");
     Map<String, String> light = colours(css.substring(0, dark));
     Map<String, String> darkSet = new HashMap<>(light);
-    darkSet.putAll(colours(css.substring(dark, css.indexOf("prefers-reduced-motion"))));
+    darkSet.putAll(colours(css.substring(dark, css.indexOf("forced-colors"))));
     List<String> faint = new ArrayList<>();
     for (Map<String, String> set : List.of(light, darkSet)) {
       String name = set == light ? "light" : "dark";
