@@ -75,7 +75,7 @@ final class SolveCases {
     int feedWire = feed.index("wire", Math.max(0, wires.size() - 1));
     double fraction = feed.number("fraction", 0, 1, "");
     feed.finish();
-    double[] frequencies = form.numbers("frequencies", 1, MOST_FREQUENCIES, 0.1, 300, "MHz");
+    double[] frequencies = form.numbers("frequencies", 1, MOST_FREQUENCIES, 0.1, 60, "MHz");
     List<Direction> directions =
         form.forms("directions", 0, MOST_DIRECTIONS, SolveCases::direction);
     List<Vertex> points =
