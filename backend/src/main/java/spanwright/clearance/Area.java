@@ -50,7 +50,7 @@ final class Area {
     double square = dx * dx + dy * dy;
     double t = square == 0 ? 0 : ((px - x[i]) * dx + (py - y[i]) * dy) / square;
     t = Math.max(0, Math.min(1, t));
-    return Math.hypot(px - x[i] - t * dx, py - y[i] - t * dy);
+    return Space.hypot(px - x[i] - t * dx, py - y[i] - t * dy);
   }
 
   /** The point of an edge nearest to a point. */

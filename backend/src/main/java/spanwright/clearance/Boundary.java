@@ -64,11 +64,18 @@ final class Boundary {
       double[] p = strand.states[s];
       for (int i = 0; i + 3 < p.length; i += 3) {
         double allowance = strand.slack(s, i);
-        if (!(rope && !still && nearOwn(strand, scene, p, i))) {
+        boolean own = rope && !still && nearOwn(strand, scene, p, i);
+        if (!own && !isDeepInside(p, i, allowance + Math.min(range, worst.spare() + required))) {
           piece(p, i, rope, allowance, strand.part.word, worst);
         }
       }
     }
+  }
+
+  /** Whether a piece is inside and farther from every edge than this. */
+  private boolean isDeepInside(double[] p, int i, double than) {
+    double length = Math.hypot(p[i + 3] - p[i], p[i + 4] - p[i + 1]);
+    return area.toOutline(p[i], p[i + 1]) > than + length && area.contains(p[i], p[i + 1]);
   }
 
   private static boolean nearOwn(Strand strand, Obstacle.Scene scene, double[] p, int i) {

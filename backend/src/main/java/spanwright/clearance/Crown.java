@@ -76,6 +76,9 @@ final class Crown implements Obstacle {
 
   private void walk(Strand strand, int index, double required, Tally.Worst worst) {
     double[] state = strand.states[index];
+    if (strand.isFarther(index, box, Math.min(range, worst.spare() + required))) {
+      return;
+    }
     for (int i = 0; i + 3 < state.length; i += 3) {
       double allowance = strand.slack(index, i);
       if (Obstacle.gap(state, i, box) - allowance > Math.min(range, worst.spare() + required)) {
@@ -119,16 +122,16 @@ final class Crown implements Obstacle {
 
   /** Distance to the cylinder; inside, less than nothing by the way to its surface. Convex. */
   double signed(double px, double py, double pz) {
-    double side = Math.hypot(px - x, py - y) - radius;
+    double side = Space.hypot(px - x, py - y) - radius;
     double end = Math.max(low - pz, pz - high);
     if (side <= 0 || end <= 0) {
       return Math.max(side, end);
     }
-    return Math.hypot(side, end);
+    return Space.hypot(side, end);
   }
 
   private Place nearest(Place at) {
-    double away = Math.hypot(at.x() - x, at.y() - y);
+    double away = Space.hypot(at.x() - x, at.y() - y);
     double share = away <= radius || away == 0 ? 1 : radius / away;
     return new Place(
         x + share * (at.x() - x), y + share * (at.y() - y), Math.max(low, Math.min(high, at.z())));

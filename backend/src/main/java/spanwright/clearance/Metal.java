@@ -34,6 +34,9 @@ final class Metal implements Obstacle {
     Tally.Worst worst = tally.of("metalwork-wire", source.id());
     for (int s = 0; s < strand.states.length; s++) {
       double[] state = strand.states[s];
+      if (strand.isFarther(s, box, Math.min(range, worst.spare() + required) + source.radius())) {
+        continue;
+      }
       for (int i = 0; i + 3 < state.length; i += 3) {
         double allowance = strand.slack(s, i) + source.radius();
         double most = Math.min(range, worst.spare() + required) + allowance;

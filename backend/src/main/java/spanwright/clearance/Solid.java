@@ -15,6 +15,7 @@ final class Solid implements Obstacle {
 
   private final Roof roof;
   private final List<double[]> faces;
+  private final List<double[]> faceBoxes;
   private final double[] box;
   private final double wire;
   private final double rope;
@@ -35,6 +36,7 @@ final class Solid implements Obstacle {
     outline[5] = roof.top();
     box = outline;
     faces = roof.faces(outline[2]);
+    faceBoxes = faces.stream().map(each -> Space.box(each, 0, 2)).toList();
     wire = rules.value("building-wire");
     rope = rules.value("building-rope");
     line = rules.value("building-feed-line");
@@ -64,6 +66,9 @@ final class Solid implements Obstacle {
     boolean calmOnly = strand.part == Strand.Part.FEED_LINE;
     for (int s = 0; s < strand.states.length; s++) {
       double[] state = strand.states[s];
+      if (strand.isFarther(s, box, Math.min(range, worst.spare() + required))) {
+        continue;
+      }
       for (int i = 0; i + 3 < state.length && (s == strand.calm || !calmOnly); i += 3) {
         double most = Math.min(range, worst.spare() + required);
         if (Obstacle.gap(state, i, box) - strand.slack(s, i) > most) {
@@ -88,8 +93,14 @@ final class Solid implements Obstacle {
       }
     }
     Space.Near near = new Space.Near();
-    for (double[] face : faces) {
-      Space.segmentTriangle(piece, 0, 3, face, true, near);
+    double enough = Math.min(range, worst.spare() + required) + slack;
+    for (int i = 0; i < faces.size(); i++) {
+      if (Obstacle.gap(piece, 0, faceBoxes.get(i)) < Math.min(enough, near.distance())) {
+        Space.segmentTriangle(piece, 0, 3, faces.get(i), true, near);
+      }
+    }
+    if (near.distance() >= enough) {
+      return;
     }
     double distance = Math.max(0, near.distance() - slack);
     // A piece that pierces a face is inside, if only by a hand.

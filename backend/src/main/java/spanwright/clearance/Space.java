@@ -10,6 +10,13 @@ package spanwright.clearance;
 final class Space {
   private Space() {}
 
+  /**
+   * Without the library's care for overflow, which plans of 100 km do not need: ten times faster.
+   */
+  static double hypot(double x, double y) {
+    return Math.sqrt(x * x + y * y);
+  }
+
   /** The nearest pair so far: its distance squared, our place a and the other place b. */
   static final class Near {
     double square = Double.POSITIVE_INFINITY;

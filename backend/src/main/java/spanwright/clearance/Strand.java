@@ -44,7 +44,9 @@ final class Strand {
   final int calm;
   final int sweep;
   private final double[] slack;
+  private final double mostSlack;
   final double[] box;
+  private final double[][] boxes;
 
   /** Whether the first and last point are the ends of a conductor. */
   final boolean startIsEnd;
@@ -68,11 +70,14 @@ final class Strand {
     this.calm = calm;
     this.sweep = sweep;
     this.slack = slack;
+    mostSlack = java.util.Arrays.stream(slack).max().orElse(0);
     this.startIsEnd = startIsEnd;
     this.endIsEnd = endIsEnd;
     box = Space.emptyBox();
-    for (double[] state : states) {
-      Space.grow(box, Space.box(state, 0, state.length / 3 - 1));
+    boxes = new double[states.length][];
+    for (int i = 0; i < states.length; i++) {
+      boxes[i] = Space.box(states[i], 0, states[i].length / 3 - 1);
+      Space.grow(box, boxes[i]);
     }
   }
 
@@ -301,6 +306,12 @@ final class Strand {
     return flat;
   }
 
+  /** Whether a state keeps farther from a box than this, slack taken off. */
+  boolean isFarther(int state, double[] from, double than) {
+    double taken = state == calm || sweep == 1 ? 0 : mostSlack;
+    return Space.boxes(boxes[state], from) - taken > than;
+  }
+
   /** Whether a state is calm, or iced in calm air. */
   boolean isStill(int state) {
     return state == calm || state >= sweep;
@@ -313,11 +324,7 @@ final class Strand {
 
   /** The most that {@link #slack(int, int)} can be [m]. */
   double mostSlack() {
-    double most = 0;
-    for (double each : slack) {
-      most = Math.max(most, each);
-    }
-    return most;
+    return mostSlack;
   }
 
   /** Number of points. */

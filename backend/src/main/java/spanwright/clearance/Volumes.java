@@ -64,6 +64,9 @@ final class Volumes {
       Narrowing narrowing = new Narrowing(this::signed, ground.isLevel() ? 1 : 1.5);
       for (int s = 0; s < strand.states.length; s++) {
         double[] state = strand.states[s];
+        if (strand.isFarther(s, box, Math.min(range, worst.spare() + required))) {
+          continue;
+        }
         for (int i = 0; i + 3 < state.length; i += 3) {
           double allowance = strand.slack(s, i);
           double most = Math.min(range, worst.spare() + required);
@@ -135,6 +138,9 @@ final class Volumes {
       Narrowing narrowing = new Narrowing((x, y, z) -> area.signed(x, y), 1);
       for (int s = 0; s < strand.states.length; s++) {
         double[] state = strand.states[s];
+        if (strand.isFarther(s, box, Math.min(range, worst.spare() + required))) {
+          continue;
+        }
         for (int i = 0; i + 3 < state.length; i += 3) {
           double allowance = strand.slack(s, i);
           double most = Math.min(range, worst.spare() + required);
@@ -182,6 +188,9 @@ final class Volumes {
       Tally.Worst worst = tally.of("zone-headroom", source.id());
       for (int s = 0; s < strand.states.length; s++) {
         double[] state = strand.states[s];
+        if (strand.isFarther(s, box, 0)) {
+          continue;
+        }
         for (int i = 0; i + 3 < state.length; i += 3) {
           double allowance = strand.slack(s, i);
           if (Obstacle.gap(state, i, box) == 0) {

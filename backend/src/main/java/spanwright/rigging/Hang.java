@@ -89,7 +89,7 @@ final class Hang {
   private void estimateLine() {
     Place near = feedEstimate();
     List<Place> feet = rigging.lineRun.foot(near);
-    double length = LineRun.hangingLength(List.of(near), feet.get(0));
+    double length = LineRun.hangingLength(near, feet.get(0));
     double weight = LineRun.weight(line, materials, false);
     LineRun.Hung hung = LineRun.hang(near, feet, length, weight, 0, 0);
     double share = Math.max(0, -hung.pull().z()) / weight;

@@ -7,6 +7,7 @@ import spanwright.plan.LineKind;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
 import spanwright.plan.Point;
+import spanwright.plan.Zone;
 
 /**
  * How the feed line runs: a slack curve from the feedpoint to the entry, or, where the station's
@@ -18,12 +19,16 @@ final class LineRun {
   private final Place entry;
   private final Point outward;
   private final List<Roof> roofs;
+  private final GroundSurface ground;
+  private final List<Zone> headrooms;
 
   LineRun(Plan plan, GroundSurface ground, List<Roof> roofs) {
     Point at = plan.entry().at();
     entry = new Place(at.x(), at.y(), ground.heightAt(at) + plan.entry().height());
     outward = outward(at, roofs);
     this.roofs = roofs;
+    this.ground = ground;
+    headrooms = plan.zones().stream().filter(each -> each.rule() == Zone.Rule.HEADROOM).toList();
   }
 
   Place entry() {
@@ -57,57 +62,78 @@ final class LineRun {
 
   /** From where the line hangs down to: the entry, or stand-offs on the way to it, entry last. */
   List<Place> foot(Place feedpoint) {
-    if (outward == null || passes(feedpoint, entry, true)) {
+    if (passes(feedpoint, entry, true)) {
       return List.of(entry);
     }
-    double x = entry.x() + Practice.STAND_OFF * outward.x();
-    double y = entry.y() + Practice.STAND_OFF * outward.y();
-    double highest = entry.z();
-    for (Roof roof : roofs) {
-      highest = Math.max(highest, roof.top() + 1);
-    }
-    for (double z = entry.z(); z <= highest; z += 0.5) {
-      Place standOff = new Place(x, y, z);
-      if (passes(feedpoint, standOff, false)) {
-        return z - entry.z() < 0.01
-            ? List.of(standOff, entry)
-            : List.of(standOff, new Place(x, y, entry.z()), entry);
+    if (outward != null) {
+      double x = entry.x() + Practice.STAND_OFF * outward.x();
+      double y = entry.y() + Practice.STAND_OFF * outward.y();
+      double highest = entry.z();
+      for (Roof roof : roofs) {
+        highest = Math.max(highest, roof.top() + 2);
+      }
+      for (double z = entry.z(); z <= highest; z += 0.5) {
+        Place standOff = new Place(x, y, z);
+        if (passes(feedpoint, standOff, false)) {
+          return z - entry.z() < 0.01
+              ? List.of(standOff, entry)
+              : List.of(standOff, new Place(x, y, entry.z()), entry);
+        }
       }
     }
     return List.of(entry);
   }
 
-  /** Whether a slack line between two places stays out of every building. */
+  /** Whether a slack line between two places keeps off buildings, ground and zones' headroom. */
   private boolean passes(Place from, Place to, boolean endsAtWall) {
     double length = from.distance(to);
     double slack = Practice.LINE_SLACK * length + Practice.LINE_SPARE;
-    double belly = Math.sqrt(3.0 / 8 * length * slack);
     double dx = to.x() - from.x();
     double dy = to.y() - from.y();
-    belly *= Math.hypot(dx, dy) / Math.max(1e-9, length);
+    double belly =
+        Math.sqrt(3.0 / 8 * length * slack) * Math.hypot(dx, dy) / Math.max(1e-9, length);
     int steps = 30;
-    for (Roof roof : roofs) {
-      for (int i = 1; i < steps; i++) {
-        double t = (double) i / steps;
-        double x = from.x() + t * dx;
-        double y = from.y() + t * dy;
-        double z = from.z() + t * (to.z() - from.z()) - 4 * belly * t * (1 - t);
-        boolean atWall = endsAtWall && (1 - t) * length < 0.3;
-        if (!atWall && roof.covers(x, y) && z < roof.heightAt(x, y) + 0.1) {
-          return false;
-        }
+    for (int i = 1; i < steps; i++) {
+      double t = (double) i / steps;
+      double x = from.x() + t * dx;
+      double y = from.y() + t * dy;
+      // A steep slack line has its belly low; the parabola of a level one is taken lower for it.
+      double z = from.z() + t * (to.z() - from.z()) - 4.4 * belly * t * (1 - t);
+      boolean atWall = endsAtWall && (1 - t) * length < 0.5;
+      if (!atWall && blocked(x, y, z)) {
+        return false;
       }
     }
     return true;
   }
 
-  /** The least length of line that hangs slack from all these feedpoints to a foot [m]. */
-  static double hangingLength(List<Place> feedpoints, Place foot) {
-    double most = 0;
-    for (Place each : feedpoints) {
-      most = Math.max(most, each.distance(foot));
+  private boolean blocked(double x, double y, double z) {
+    for (Roof roof : roofs) {
+      if (z < roof.top() + 0.15) {
+        boolean over = roof.covers(x, y);
+        if (over && z < roof.heightAt(x, y) + 0.15) {
+          return true;
+        }
+        Point at = new Point(x, y);
+        if (!over
+            && z < roof.lowest()
+            && PlanShapes.toPath(roof.building().footprint(), at, true) < 0.1) {
+          return true;
+        }
+      }
     }
-    return most * (1 + Practice.LINE_SLACK) + Practice.LINE_SPARE;
+    double level = ground.heightAt(x, y);
+    for (Zone each : headrooms) {
+      if (z < level + each.height() + 0.1 && PlanShapes.contains(each.area(), x, y)) {
+        return true;
+      }
+    }
+    return z < level + 0.3;
+  }
+
+  /** The length of line that hangs slack from a feedpoint to a foot [m]. */
+  static double hangingLength(Place feedpoint, Place foot) {
+    return feedpoint.distance(foot) * (1 + Practice.LINE_SLACK) + Practice.LINE_SPARE;
   }
 
   /** Length along the stand-offs after the hanging part [m]. */
@@ -139,7 +165,9 @@ final class LineRun {
     List<Place> points = new ArrayList<>(PARTS + 1 + feet.size());
     Force pull = Force.NONE;
     if (dx * dx + dy * dy + dz * dz > 1e-6) {
-      new Tightening(chain, dx, dy, dz).asLong(length - feedpoint.distance(foot));
+      // Drawn as if the line never held a blown feedpoint back: longer where it would be taut.
+      chain.length[0] = Math.max(length, 1.001 * feedpoint.distance(foot));
+      new Tightening(chain, dx, dy, dz).asLong(chain.length[0] - feedpoint.distance(foot));
       double[] xyz = new double[3 * (PARTS + 1)];
       chain.sample(new int[] {PARTS}, xyz);
       for (int i = 0; i < PARTS; i++) {

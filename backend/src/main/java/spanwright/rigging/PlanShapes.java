@@ -41,6 +41,8 @@ public final class PlanShapes {
     double square = dx * dx + dy * dy;
     double along = square == 0 ? 0 : ((x - ax) * dx + (y - ay) * dy) / square;
     double share = Math.max(0, Math.min(1, along));
-    return Math.hypot(x - ax - share * dx, y - ay - share * dy);
+    double ex = x - ax - share * dx;
+    double ey = y - ay - share * dy;
+    return Math.sqrt(ex * ex + ey * ey);
   }
 }

@@ -12,7 +12,7 @@ final class Practice {
   static final double CENTRE_WEIGHT = 0.2;
 
   /** Calm tension is kept under this share of the wire's breaking strength. */
-  static final double CALM_SHARE = 0.12;
+  static final double CALM_SHARE = 0.15;
 
   /** A span is drawn no tighter than to this sag, as a share of its chord. */
   static final double LEAST_SAG = 0.01;
@@ -36,10 +36,10 @@ final class Practice {
   static final double WEIGHT_HEIGHT = 2.0;
 
   /** A feed line hangs with this share more than its straight run, and with {@link #LINE_SPARE}. */
-  static final double LINE_SLACK = 0.03;
+  static final double LINE_SLACK = 0.02;
 
   /** See {@link #LINE_SLACK} [m]. */
-  static final double LINE_SPARE = 0.2;
+  static final double LINE_SPARE = 0.1;
 
   /** A feed line stands off the wall by this much where it comes down to its entry [m]. */
   static final double STAND_OFF = 0.3;

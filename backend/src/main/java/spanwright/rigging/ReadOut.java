@@ -282,17 +282,12 @@ final class ReadOut {
   private Rigged.FeedLine feedLine(List<Rigged.Span> spans, List<Rigged.Tail> loose) {
     Rigged.Shapes at = feedpoint(spans, loose);
     List<Place> feet = rigging.lineRun.foot(at.calm().get(0));
-    List<Place> corners = new ArrayList<>();
-    at.all().forEach(corners::addAll);
+    Place foot = feet.get(0);
     double led = LineRun.ledLength(feet);
-    double wanted = LineRun.hangingLength(corners, feet.get(0));
-    double straight = 0;
-    for (Place each : corners) {
-      straight = Math.max(straight, each.distance(feet.get(0)));
-    }
+    double wanted = LineRun.hangingLength(at.calm().get(0), foot);
     Double given = layout.feed().lineLength();
     double hanging = given == null ? wanted : Math.min(wanted, given - led);
-    hanging = Math.max(hanging, straight * 1.002);
+    hanging = Math.max(hanging, at.calm().get(0).distance(foot) * 1.002);
     double run = hanging + led;
     double length = given == null ? Math.ceil(run * 10 - 1e-6) / 10 : given;
     int side = Math.min(Math.max(0, Math.max(course.feedSpan(), course.feedHeld())), count - 1);

@@ -19,7 +19,7 @@ import spanwright.plan.WireKind;
  * Hangs layouts on a plan. Prepared once for a plan; immutable and safe for any number of threads.
  *
  * <p>The wire keeps its finished length, read from the layout's points; the ropes take up the rest
- * of the way. The rule for the pull: each span is drawn until the wire carries 12 % of its breaking
+ * of the way. The rule for the pull: each span is drawn until the wire carries 15 % of its breaking
  * strength or hangs with a sag of 1 %, whichever pulls less (common practice, no source), and let
  * out again until every support, the wire and the rope hold in the gust. A span that ends at a tree
  * ends there over a pulley at a counterweight, so that the tree may sway; every other end is tied.

@@ -147,6 +147,11 @@ public final class Roof {
     return way <= 0 || whole <= 1e-9 ? 0 : Math.min(1, way / whole);
   }
 
+  /** The lowest point of the roof above the plan's zero [m]. */
+  public double lowest() {
+    return left + right == 0 ? top() : Math.min(eaves, ridge);
+  }
+
   /** The highest point of the roof above the plan's zero [m]. */
   public double top() {
     return Math.max(eaves, ridge);
