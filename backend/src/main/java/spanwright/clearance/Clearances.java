@@ -2,7 +2,9 @@ package spanwright.clearance;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.index.strtree.STRtree;
 import spanwright.plan.Building;
@@ -40,6 +42,7 @@ public final class Clearances {
   private final List<Zone> noMast = new ArrayList<>();
   private final double headroom;
   private final Screen screen;
+  private final Map<String, String> names = new HashMap<>();
 
   private Clearances(Plan plan, Catalogue catalogue) {
     ground = GroundSurface.of(plan);
@@ -55,6 +58,7 @@ public final class Clearances {
       index.insert(new Envelope(box[0], box[3], box[1], box[4]), each);
     }
     index.build();
+    name(plan);
     screen = new Screen(plan, ground, rules, overhead, boundary, rigging);
   }
 
@@ -89,6 +93,26 @@ public final class Clearances {
       all.add(new Metal(each, ground, rules, RANGE));
     }
     return all;
+  }
+
+  private void name(Plan plan) {
+    names.put("ground", "the ground");
+    names.put("boundary", "the boundary");
+    plan.buildings().forEach(each -> names.put(each.id(), each.name()));
+    plan.supports().forEach(each -> names.put(each.id(), each.name()));
+    plan.trees().forEach(each -> names.put(each.id(), each.name()));
+    plan.bracketLines().forEach(each -> names.put(each.id(), each.name()));
+    plan.mastZones().forEach(each -> names.put(each.id(), each.name()));
+    plan.overheadLines().forEach(each -> names.put(each.id(), each.name()));
+    plan.zones().forEach(each -> names.put(each.id(), each.name()));
+    plan.people().forEach(each -> names.put(each.id(), each.name()));
+    plan.metalwork().forEach(each -> names.put(each.id(), each.name()));
+  }
+
+  /** What people call a thing of the plan. */
+  String name(String id) {
+    String name = names.get(id);
+    return name == null || name.isBlank() ? id : name;
   }
 
   /** Prepares a plan: solids, crowns, zones, lines, boundary. */
@@ -191,6 +215,6 @@ public final class Clearances {
    * change that cures it, found by calculation and checked again. Empty when nothing is foul.
    */
   public List<Refusal> refuse(Layout layout, Rigged rigged, List<Clearance> clearances) {
-    return new Cures(this, rigging, layout, rigged, clearances).refusals();
+    return new Cures(this, rigging, ground, layout, rigged, clearances).refusals();
   }
 }

@@ -1,0 +1,260 @@
+package spanwright.clearance;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import spanwright.plan.BracketLine;
+import spanwright.plan.GroundSurface;
+import spanwright.plan.Place;
+import spanwright.plan.Point;
+import spanwright.rigging.Holder;
+import spanwright.rigging.Layout;
+import spanwright.rigging.PlanShapes;
+import spanwright.rigging.Rigged;
+
+/**
+ * One way to change a layout, by so much.
+ *
+ * @param kind what is changed
+ * @param attachment index of the attachment that moves, or -1 for all or none
+ * @param direction of a move on plan [rad from east], or +1 and -1 along a bracket line; for a
+ *     shorter wire -1 at its first end, +1 at its last, 0 at both
+ * @param amount metres
+ * @param wire catalogue id of another wire, or null
+ */
+record Change(Kind kind, int attachment, double direction, double amount, String wire) {
+  /** What can be changed. */
+  enum Kind {
+    RAISE,
+    LOWER,
+    MOVE,
+    SLIDE,
+    SHORTEN,
+    LIGHTEN
+  }
+
+  private static final double[] STEPS = {0.25, 0.5, 1, 1.5, 2, 3, 4, 6};
+
+  /** Everything worth trying on a layout, smallest first. */
+  static List<Change> all(List<Holder> holders, boolean pulls, List<String> lighter) {
+    List<Change> all = new ArrayList<>();
+    for (double step : STEPS) {
+      for (int a = 0; a < holders.size(); a++) {
+        all.add(new Change(Kind.RAISE, a, 0, step, null));
+        all.add(new Change(Kind.LOWER, a, 0, step, null));
+        if (holders.get(a).zone() != null) {
+          for (int k = 0; k < 8; k++) {
+            all.add(new Change(Kind.MOVE, a, k * Math.PI / 4, step, null));
+          }
+        }
+        if (holders.get(a).bracket() != null) {
+          all.add(new Change(Kind.SLIDE, a, 1, step, null));
+          all.add(new Change(Kind.SLIDE, a, -1, step, null));
+        }
+      }
+      all.add(new Change(Kind.RAISE, -1, 0, step, null));
+      all.add(new Change(Kind.SHORTEN, -1, 0, 2 * step, null));
+      all.add(new Change(Kind.SHORTEN, -1, -1, step, null));
+      all.add(new Change(Kind.SHORTEN, -1, 1, step, null));
+    }
+    if (pulls) {
+      lighter.forEach(each -> all.add(new Change(Kind.LIGHTEN, -1, 0, 1, each)));
+    }
+    return all;
+  }
+
+  Change by(double other) {
+    return new Change(kind, attachment, direction, other, wire);
+  }
+
+  boolean isOneOf(Change other) {
+    return kind == other.kind && attachment == other.attachment && direction == other.direction;
+  }
+
+  /** The attachments after the change, or null where what holds them does not allow it. */
+  List<Layout.Hold> holds(List<Layout.Hold> holds, List<Holder> holders, GroundSurface ground) {
+    List<Layout.Hold> changed = new ArrayList<>(holds);
+    boolean moved = kind == Kind.SHORTEN || kind == Kind.LIGHTEN;
+    for (int a = 0; a < holds.size() && !(kind == Kind.SHORTEN || kind == Kind.LIGHTEN); a++) {
+      if (attachment >= 0 && attachment != a) {
+        continue;
+      }
+      Place to = moved(holds.get(a).at(), holders.get(a), ground);
+      if (to != null) {
+        changed.set(a, new Layout.Hold(holds.get(a).on(), to));
+        moved = true;
+      }
+    }
+    return moved ? changed : null;
+  }
+
+  private Place moved(Place at, Holder holder, GroundSurface ground) {
+    double above = at.z() - ground.heightAt(at.x(), at.y());
+    switch (kind) {
+      case RAISE, LOWER -> {
+        double wanted = above + (kind == Kind.RAISE ? amount : -amount);
+        boolean fits = wanted <= holder.highest() + 1e-9 && wanted >= holder.lowest() - 1e-9;
+        return fits ? new Place(at.x(), at.y(), at.z() + wanted - above) : null;
+      }
+      case MOVE -> {
+        Point to =
+            new Point(at.x() + amount * Math.cos(direction), at.y() + amount * Math.sin(direction));
+        return PlanShapes.contains(holder.zone().area(), to.x(), to.y())
+            ? raised(to, above, ground)
+            : null;
+      }
+      case SLIDE -> {
+        Point to = slid(holder.bracket(), at.onPlan());
+        return to == null ? null : raised(to, above, ground);
+      }
+      default -> {
+        return null;
+      }
+    }
+  }
+
+  private static Place raised(Point to, double above, GroundSurface ground) {
+    return new Place(to.x(), to.y(), ground.heightAt(to) + above);
+  }
+
+  /** The point so far on along the bracket line's first or only straight part. */
+  private Point slid(BracketLine line, Point at) {
+    for (int i = 0; i + 1 < line.path().size(); i++) {
+      Point a = line.path().get(i);
+      Point b = line.path().get(i + 1);
+      double away = PlanShapes.toSegment(a.x(), a.y(), b.x(), b.y(), at.x(), at.y());
+      double length = a.distance(b);
+      if (away < 0.5 && length > 0) {
+        double ux = (b.x() - a.x()) / length;
+        double uy = (b.y() - a.y()) / length;
+        double along = (at.x() - a.x()) * ux + (at.y() - a.y()) * uy + direction * amount;
+        if (along >= 0 && along <= length) {
+          return new Point(a.x() + along * ux, a.y() + along * uy);
+        }
+      }
+    }
+    return null;
+  }
+
+  /** The change as an order. */
+  String sentence(List<Layout.Hold> to, List<Holder> holders, GroundSurface ground) {
+    String metres = String.format(Locale.ROOT, "%.2f m", amount);
+    switch (kind) {
+      case RAISE, LOWER -> {
+        String verb = kind == Kind.RAISE ? "Raise" : "Lower";
+        if (attachment < 0) {
+          return verb + " every attachment that allows it by " + metres + ".";
+        }
+        Place at = to.get(attachment).at();
+        return String.format(
+            Locale.ROOT,
+            "%s the attachment at %s by %s, to %.2f m above the ground.",
+            verb,
+            holders.get(attachment).name(),
+            metres,
+            at.z() - ground.heightAt(at.x(), at.y()));
+      }
+      case MOVE, SLIDE -> {
+        Place at = to.get(attachment).at();
+        return String.format(
+            Locale.ROOT,
+            "Move the %s at %s by %s, to x %.2f, y %.2f on the plan.",
+            kind == Kind.MOVE ? "mast" : "bracket",
+            holders.get(attachment).name(),
+            metres,
+            at.x(),
+            at.y());
+      }
+      case SHORTEN -> {
+        String where =
+            direction == 0
+                ? "half of it at each end"
+                : "at " + holders.get(direction < 0 ? 0 : holders.size() - 1).name();
+        return "Shorten the wire by " + metres + ", " + where + ", with rope in its place.";
+      }
+      default -> {
+        return "Take a lighter wire: " + wire + ".";
+      }
+    }
+  }
+
+  /**
+   * The layout after the change: straight lines again, each leg of the wire as long as it hung and
+   * the ropes taking up the rest; where the way became too short, the wire is.
+   */
+  Layout layout(Rigged rigged, List<Layout.Hold> holds, double[] leastTails) {
+    int last = rigged.spans().size() - 1;
+    double trimFirst = kind != Kind.SHORTEN || direction > 0 ? 0 : direction == 0 ? 0.5 : 1;
+    double trimLast = kind != Kind.SHORTEN || direction < 0 ? 0 : direction == 0 ? 0.5 : 1;
+    List<Place> points = new ArrayList<>();
+    double total = 0;
+    double beforeFeed = -1;
+    boolean headFree = isFree(rigged, 0);
+    boolean endFree = isFree(rigged, last + 1);
+    for (int i = 0; i <= last; i++) {
+      Rigged.Span span = rigged.spans().get(i);
+      Place a = holds.get(i).at();
+      Place b = holds.get(i + 1).at();
+      double chord = a.distance(b);
+      boolean outerFrom = i == 0 && !headFree;
+      boolean outerTo = i == last && !endFree;
+      double wire =
+          span.wireLength()
+              - (i == 0 ? trimFirst * amount : 0)
+              - (i == last ? trimLast * amount : 0);
+      double ropeFrom = outerFrom ? span.ropeFrom() + trimFirst * amount : 0;
+      double least = outerTo ? Math.min(leastTails[1], span.ropeTo()) : 0;
+      if (outerFrom && !outerTo) {
+        ropeFrom = Math.max(chord - wire, Math.min(leastTails[0], span.ropeFrom()));
+      }
+      double most = chord - ropeFrom - least;
+      wire = outerFrom || outerTo ? Math.min(wire, most) : chord;
+      if (wire < 1) {
+        return null;
+      }
+      if (i == 0) {
+        tailPoint(rigged, 0, a, points, true);
+        points.add(along(a, b, ropeFrom));
+      }
+      points.add(i == last && outerTo ? along(a, b, ropeFrom + wire) : b);
+      beforeFeed = rigged.feedLine().held() == i ? total : beforeFeed;
+      total += wire;
+    }
+    tailPoint(rigged, last + 1, holds.get(last + 1).at(), points, false);
+    Layout old = rigged.layout();
+    double fraction = beforeFeed > 0 ? beforeFeed / total : forwards(rigged);
+    return new Layout(
+        old.shape(),
+        holds,
+        List.of(new Layout.Run(points, wire != null ? wire : old.conductors().get(0).wire())),
+        new Layout.FeedChoice(0, fraction, old.feed().line(), old.feed().lineLength()));
+  }
+
+  private static double forwards(Rigged rigged) {
+    double fraction = rigged.layout().feed().fraction();
+    Place first = rigged.conductors().get(0).shapes().calm().get(0);
+    Rigged.Span last = rigged.spans().get(rigged.spans().size() - 1);
+    boolean reversed = first.equals(last.shapes().calm().get(last.wireTo()));
+    return reversed ? 1 - fraction : fraction;
+  }
+
+  private static boolean isFree(Rigged rigged, int attachment) {
+    return rigged.tails().stream().anyMatch(each -> each.attachment() == attachment);
+  }
+
+  private static void tailPoint(
+      Rigged rigged, int attachment, Place at, List<Place> points, boolean first) {
+    for (Rigged.Tail each : rigged.tails()) {
+      if (each.attachment() == attachment) {
+        Place low = new Place(at.x(), at.y(), at.z() - each.length());
+        points.add(first ? 0 : points.size(), low);
+      }
+    }
+  }
+
+  private static Place along(Place a, Place b, double way) {
+    double t = way / a.distance(b);
+    return new Place(
+        a.x() + t * (b.x() - a.x()), a.y() + t * (b.y() - a.y()), a.z() + t * (b.z() - a.z()));
+  }
+}
