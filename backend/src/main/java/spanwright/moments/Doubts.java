@@ -8,18 +8,28 @@ import org.apache.commons.math3.complex.Complex;
 /** What a solution should be doubted for, in words. */
 final class Doubts {
   private static final double LOW_WIRE = 0.3;
-  private static final double SHORT_ELEMENT = 3;
+  private static final double SHORT_PIECE = 6;
   private static final double CLOSE_WIRES = 6;
 
   private Doubts() {}
 
-  static List<String> about(AntennaModel model, Ground ground, Mesh mesh, StaticPairs statics) {
+  static List<String> about(
+      AntennaModel model, Ground ground, Outline outline, Mesh mesh, StaticPairs statics) {
     List<String> out = new ArrayList<>();
+    thickness(model, outline, out);
+    if (ground.kind() == Ground.Kind.REAL) {
+      lowWires(model, mesh, out);
+    }
+    neighbours(mesh, statics, out);
+    return out;
+  }
+
+  private static void thickness(AntennaModel model, Outline outline, List<String> out) {
     boolean[] told = new boolean[model.wires().size()];
-    boolean[] low = new boolean[model.wires().size()];
-    for (int e = 0; e < mesh.elements; e++) {
-      int w = mesh.wire[e];
-      if (!told[w] && mesh.length[e] < SHORT_ELEMENT * mesh.radius[e]) {
+    for (Outline.Piece piece : outline.pieces) {
+      int w = piece.wire();
+      double radius = model.wires().get(w).radius();
+      if (!told[w] && piece.length() < SHORT_PIECE * radius) {
         told[w] = true;
         out.add(
             String.format(
@@ -27,23 +37,30 @@ final class Doubts {
                 "%s has a straight piece of %.3f m that is short for its radius of %.4f m: the"
                     + " thin-wire equation is doubtful there.",
                 ModelCheck.name(w),
-                mesh.length[e],
-                mesh.radius[e]));
+                piece.length(),
+                radius));
       }
-      double lowest = Math.min(mesh.z[e], mesh.z[e] + mesh.length[e] * mesh.tz[e]);
-      if (ground.kind() == Ground.Kind.REAL && !low[w] && lowest < LOW_WIRE) {
-        low[w] = true;
+    }
+  }
+
+  private static void lowWires(AntennaModel model, Mesh mesh, List<String> out) {
+    double[] lowest = new double[model.wires().size()];
+    java.util.Arrays.fill(lowest, Double.POSITIVE_INFINITY);
+    for (int e = 0; e < mesh.elements; e++) {
+      double low = Math.min(mesh.z[e], mesh.z[e] + mesh.length[e] * mesh.tz[e]);
+      lowest[mesh.wire[e]] = Math.min(lowest[mesh.wire[e]], low);
+    }
+    for (int w = 0; w < lowest.length; w++) {
+      if (lowest[w] < LOW_WIRE) {
         out.add(
             String.format(
                 Locale.ROOT,
                 "%s comes within %.2f m of the ground: below 0.3 m the soil's surface, grass and"
                     + " wet matter as much as what is computed.",
                 ModelCheck.name(w),
-                lowest));
+                lowest[w]));
       }
     }
-    neighbours(mesh, statics, out);
-    return out;
   }
 
   private static void neighbours(Mesh mesh, StaticPairs statics, List<String> out) {

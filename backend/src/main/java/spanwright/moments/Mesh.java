@@ -157,6 +157,9 @@ final class Mesh {
     private static final int MOST_ELEMENTS = 600;
     private static final int STEPS = 48;
 
+    /** Elements are at least so many radii long. */
+    private static final double LEAST_RADII = 3;
+
     private final AntennaModel model;
     private final Outline outline;
     private final MeshRule rule;
@@ -238,7 +241,9 @@ final class Mesh {
     /** Length of the element beside a node. */
     private double pace(Outline.Piece piece, int index, int node) {
       if (outline.degree[node] == 1) {
-        return rule.end() / k;
+        // the charge at an open end crowds into a few radii: thick wires need shorter ends
+        double thickness = k * model.wires().get(piece.wire()).radius();
+        return rule.end() / k / (1 + thickness / 0.004);
       }
       if (outline.degree[node] > 2) {
         return rule.bend() / k;
@@ -278,7 +283,9 @@ final class Mesh {
         double at = from + (to - from) * (i + 0.5) / STEPS;
         sum[i + 1] = sum[i] + (to - from) / STEPS / size(piece, at, anchors);
       }
-      int count = Math.max(1, (int) Math.ceil(sum[STEPS] - 0.05));
+      double least = LEAST_RADII * model.wires().get(piece.wire()).radius();
+      int count = (int) Math.min(Math.ceil(sum[STEPS] - 0.05), Math.floor((to - from) / least));
+      count = Math.max(1, count);
       int node = nodeFrom;
       double arc = from;
       int step = 0;
@@ -305,7 +312,7 @@ final class Mesh {
       for (double[] anchor : anchors) {
         size = Math.min(size, anchor[1] + rule.growth() * Math.abs(at - anchor[0]));
       }
-      return Math.max(size, 4 * model.wires().get(piece.wire()).radius());
+      return Math.max(size, LEAST_RADII * model.wires().get(piece.wire()).radius());
     }
 
     private void element(

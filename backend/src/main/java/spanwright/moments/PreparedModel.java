@@ -38,7 +38,7 @@ final class PreparedModel {
     mesh = Mesh.of(model, outline, rule, k);
     statics = new StaticPairs(mesh);
     points = new SourcePoints(mesh);
-    warnings = Doubts.about(model, ground, mesh, statics);
+    warnings = Doubts.about(model, ground, outline, mesh, statics);
   }
 
   Solution solve(double frequencyMHz, Reflection reflection) {
