@@ -364,4 +364,24 @@ class SolverInvariantsTest {
           decibels);
     }
   }
+
+  @Test
+  void the_peak_is_not_below_any_sampled_gain() {
+    for (Ground ground : List.of(SOIL, Ground.none())) {
+      for (double f : new double[] {3.65, 14.2, 28.5, 50.2}) {
+        Solution found = solver.solve(awkward(p -> p, 5.8e7), ground, f, MeshAim.COARSE);
+        double low = ground.kind() == Ground.Kind.NONE ? -0.5 * Math.PI : 0;
+        double most = 0;
+        for (int i = 0; i < 180; i++) {
+          for (double gain :
+              found.powerGains(Directions.profile(i * Math.PI / 90, low, 0.5 * Math.PI, 120))) {
+            most = Math.max(most, gain);
+          }
+        }
+        Peak peak = found.peak();
+        assertTrue(peak.dbi() > Gain.dbi(most) - 0.005, "at " + f + " MHz");
+        assertEquals(peak.dbi(), found.gain(peak.azimuth(), peak.elevation()).totalDbi(), 1e-6);
+      }
+    }
+  }
 }

@@ -35,6 +35,7 @@ public class ThinWireTablesTest extends PublishedChecks {
     impedances(checks);
     resonances(checks);
     circles(checks);
+    folded(checks);
     return checks;
   }
 
@@ -182,5 +183,48 @@ public class ThinWireTablesTest extends PublishedChecks {
               "Fourier-series loop theory (Storer 1956; King and Smith), calculated for this check;"
                   + " published as curves"));
     }
+  }
+
+  /** Two wires of one radius, joined at both ends, one fed in its middle. */
+  private void folded(List<Check> checks) {
+    double apart = 0.05;
+    double low = 0.46 * WAVELENGTH;
+    double high = 0.49 * WAVELENGTH;
+    for (int i = 0; i < 16; i++) {
+      double middle = 0.5 * (low + high);
+      if (foldedImpedance(middle, apart).getImaginary() > 0) {
+        high = middle;
+      } else {
+        low = middle;
+      }
+    }
+    checks.add(
+        Check.within(
+            "Folded dipole at resonance, 1 mm wires 50 mm apart, 20 m wavelength",
+            292,
+            foldedImpedance(low, apart).getReal(),
+            0.03 * 292,
+            0,
+            "ohm",
+            "four times 73 ohm: university course notes on dipole matching (seen); 3 %"));
+  }
+
+  private Complex foldedImpedance(double length, double apart) {
+    double half = 0.5 * length;
+    List<Vertex> points =
+        List.of(
+            new Vertex(-half, 0, 0),
+            new Vertex(half, 0, 0),
+            new Vertex(half, apart, 0),
+            new Vertex(-half, apart, 0),
+            new Vertex(-half, 0, 0));
+    return solver
+        .solve(
+            AntennaModel.of(
+                List.of(WireSpec.perfect(points, 0.001)), 0, half / (2 * (length + apart))),
+            Ground.none(),
+            MHZ,
+            MeshAim.FULL)
+        .impedance();
   }
 }
