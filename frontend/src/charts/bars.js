@@ -1,5 +1,7 @@
 // @ts-check
 import { svg } from '../draw/svg.js';
+import { signed } from '../units/figures.js';
+import { markAt } from './marks.js';
 import { linear, within } from './scale.js';
 
 /** Small bars against the reference: filled above it, open below. Pure apart from making the nodes. */
@@ -31,17 +33,23 @@ export function rowBarsGeometry(bands, { width, height }) {
   };
 }
 
+const NAME_ROW = 16;
+const MARK_ROW = 11;
+
 /**
- * Bars for a list row, band names under them.
- * @param {{name: string, over: number}[]} bands
+ * Bars for a list row, band names under them, and a mark under the name of a band that does not match with room to
+ * spare.
+ * @param {{name: string, over: number, state?: string}[]} bands
  * @param {{width: number, height: number}} size without the names
  * @returns {SVGElement}
  */
 export function rowBars(bands, size) {
   const { base, bars } = rowBarsGeometry(bands, size);
-  const words = bands.map((band) => `${band.name} ${band.over >= 0 ? '+' : '−'}${Math.abs(band.over).toFixed(1)}`).join(', ');
+  const bad = bands.map((band) => (band.state && band.state !== 'clear' ? band.state : null));
+  const words = bands.map((band, index) => `${band.name} ${signed(band.over, 1)}${bad[index] ? ` (matching ${bad[index]})` : ''}`).join(', ');
+  const height = size.height + NAME_ROW + (bad.some((state) => state) ? MARK_ROW : 0);
   return svg('svg', {
-    class: 'chart row-bars', viewBox: `0 0 ${size.width} ${size.height + 16}`, width: size.width, height: size.height + 16,
+    class: 'chart row-bars', viewBox: `0 0 ${size.width} ${height}`, width: size.width, height,
     role: 'img', 'aria-label': `Over the reference, dB: ${words}`,
   }, [
     ...bars.map((bar) => svg('rect', {
@@ -49,6 +57,7 @@ export function rowBars(bands, size) {
     })),
     svg('path', { class: 'bar-base', d: `M0 ${base}H${size.width}` }),
     ...bars.map((bar) => svg('text', { class: 'axis middle', x: bar.middle, y: size.height + 14 }, [shortBand(bar.name)])),
+    ...bars.map((bar, index) => (bad[index] ? svg('g', { transform: `translate(${bar.middle} ${size.height + 21}) scale(0.75)` }, [markAt(bad[index], 0, 0)]) : null)),
   ]);
 }
 

@@ -84,7 +84,7 @@ const isMastZone = (plan, id) => (plan.mastZones ?? []).some((/** @type {any} */
  */
 export function hangsOn(plan, placement) {
   return placement.attachments.map((/** @type {any} */ hold) =>
-    (isMastZone(plan, hold.on) ? `new mast, ${nameOf(plan, hold.on)}` : nameOf(plan, hold.on)));
+    (isMastZone(plan, hold.on) ? `new mast (${nameOf(plan, hold.on)})` : nameOf(plan, hold.on)));
 }
 
 /** @param {any} placement @returns {number} metres */
@@ -144,6 +144,36 @@ export function bandSummaries(plan, placement) {
   });
 }
 
+/** @type {Record<string, number>} */
+const RANK = { foul: 0, tight: 1, clear: 2 };
+
+/**
+ * The worst distance or pull, for where there is room for one.
+ * @param {any} plan
+ * @param {any} placement
+ * @param {(metres: number) => string} length
+ * @returns {Concern|undefined}
+ */
+export function nearestConcern(plan, placement, length) {
+  return hangingConcerns(plan, placement, length)[0];
+}
+
+/**
+ * Distances and pulls, worst first.
+ * @param {any} plan
+ * @param {any} placement
+ * @param {(metres: number) => string} length
+ * @returns {Concern[]}
+ */
+function hangingConcerns(plan, placement, length) {
+  const clearances = placement.clearances.map((/** @type {any} */ one) => clearanceConcern(plan, one, length));
+  const pulls = placement.attachments.filter((/** @type {any} */ hold) => hold.state !== 'clear').map((/** @type {any} */ hold) => ({
+    state: hold.state, distance: null, rule: 'pull',
+    words: `pull of ${Math.round(hold.pullInWind)} N at ${nameOf(plan, hold.on)} in the gust; it may take ${Math.round(hold.pullLimit)} N`,
+  }));
+  return [...clearances, ...pulls].sort((a, b) => RANK[a.state] - RANK[b.state]);
+}
+
 /**
  * Everything checked that is tight or foul, worst first; when all is clear, the nearest clearance alone.
  * @param {any} plan
@@ -152,22 +182,15 @@ export function bandSummaries(plan, placement) {
  * @returns {Concern[]}
  */
 export function concerns(plan, placement, length) {
-  /** @type {Record<string, number>} */
-  const rank = { foul: 0, tight: 1, clear: 2 };
-  const clearances = placement.clearances.map((/** @type {any} */ one) => clearanceConcern(plan, one, length));
-  const pulls = placement.attachments.filter((/** @type {any} */ hold) => hold.state !== 'clear').map((/** @type {any} */ hold) => ({
-    state: hold.state, distance: null, rule: 'pull',
-    words: `pull of ${Math.round(hold.pullInWind)} N at ${nameOf(plan, hold.on)} in the gust; it may take ${Math.round(hold.pullLimit)} N`,
-  }));
-  const matching = bandsOf(placement).map(({ name, rows }) => {
+  const hanging = hangingConcerns(plan, placement, length);
+  const matching = bandsOf(placement).flatMap(({ name, rows }) => {
     const bad = rows.find((row) => row.matching.state === 'foul') ?? rows.find((row) => row.matching.state === 'tight');
-    return bad ? {
+    return bad ? [{
       state: bad.matching.state, distance: null, rule: 'matching', words: `matching on ${name}: ${bad.matching.why}`,
-    } : null;
-  }).filter((/** @type {any} */ one) => one !== null);
-  const all = [...clearances, ...pulls, ...matching].sort((a, b) => rank[a.state] - rank[b.state]);
-  const bad = all.filter((one) => one.state !== 'clear');
-  return bad.length ? bad : clearances.slice(0, 1);
+    }] : [];
+  });
+  const bad = [...hanging, ...matching].filter((one) => one.state !== 'clear').sort((a, b) => RANK[a.state] - RANK[b.state]);
+  return bad.length ? bad : hanging.slice(0, 1);
 }
 
 /**

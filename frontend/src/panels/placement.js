@@ -104,8 +104,7 @@ export function mount(root, store, shell) {
         stateMark(one.state), ' ', html('b', { class: one.state }, one.state), ` ${one.words}`))),
       list.length > 4 ? html('p', { class: 'soft' }, `and ${list.length - 4} more under Pulls and Clearances`) : null,
       html('p', { class: 'soft hangs' }, hangsOn(plan, placement).join(' – ')),
-      ...placement.masts.filter((/** @type {any} */ mast) => mast.consent && mast.consent !== 'none').map((/** @type {any} */ mast) =>
-        html('p', { class: 'consent' }, stateMark('tight', 'Consent'), ` The new ${lengthWithUnit(mast.height, state.units, 1)} mast needs ${mast.consent}.`)),
+      ...consents(state, placement).map((words) => html('p', { class: 'consent' }, stateMark('tight', 'Consent'), ` ${words}`)),
       html('p', { class: 'actions' },
         html('button', { type: 'button', class: 'link', 'data-key': 'pin', 'aria-pressed': String(pinned), onclick: () => store.set({ pinned: pinned ? null : placement.id }) }, pinned ? 'Unpin' : 'Pin to compare'),
         placement.madeFrom ? html('button', { type: 'button', class: 'link', 'data-key': 'back', onclick: () => putBack(placement) }, placement.from ? 'Put it back' : 'Drop it') : null,
@@ -152,6 +151,23 @@ export function mount(root, store, shell) {
         reference, lead: lead ?? profiles[0].name,
       }, { width, height: PROFILE_HEIGHT + 12 * targets.length }) : html('p', { class: 'soft' }, 'The launch profile comes with the full result.'));
   }
+}
+
+/**
+ * What the new masts need, a sentence for each kind of consent.
+ * @param {State} state
+ * @param {any} placement
+ * @returns {string[]}
+ */
+function consents(state, placement) {
+  /** @type {Map<string, string[]>} */
+  const byNeed = new Map();
+  for (const mast of placement.masts) {
+    if (!mast.consent || mast.consent === 'none') continue;
+    byNeed.set(mast.consent, [...(byNeed.get(mast.consent) ?? []), lengthWithUnit(mast.height, state.units, 1)]);
+  }
+  return [...byNeed].map(([need, heights]) => (heights.length === 1 ? `The new ${heights[0]} mast needs: ${need}.`
+    : `The new masts of ${heights.join(' and ')} each need: ${need}.`));
 }
 
 /**

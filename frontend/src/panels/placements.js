@@ -6,7 +6,7 @@ import { number, signed } from '../units/figures.js';
 import { stateMark } from '../charts/marks.js';
 import { thumbnail } from '../charts/thumbnail.js';
 import {
-  bandSummaries, concerns, distanceFigure, hangsOn, isStale, listOf, ownOf, planOf, shapeTitle, toBuild,
+  bandSummaries, distanceFigure, hangsOn, isStale, listOf, nearestConcern, ownOf, planOf, shapeTitle, toBuild,
 } from './placement-facts.js';
 import { cancelSearch, startSearch } from './placements-search.js';
 
@@ -172,7 +172,7 @@ export function mount(root, store, shell) {
   function row(state, placement, rank) {
     const plan = planOf(state);
     const bars = bandSummaries(plan, placement);
-    const [concern] = concerns(plan, placement, (metres) => distanceFigure(metres, state.units));
+    const concern = nearestConcern(plan, placement, (metres) => distanceFigure(metres, state.units));
     const names = hangsOn(plan, placement).join(', ');
     return html('li', {}, html('button', {
       type: 'button', class: 'row', 'data-key': `row-${placement.id}`, 'aria-current': placement.id === state.chosen ? 'true' : null,
@@ -197,10 +197,10 @@ export function mount(root, store, shell) {
 
 /**
  * @param {string} words
- * @returns {string} without what the rule asks; the row has no room for it
+ * @returns {string} without what the rule asks and which part of ours is near; the row has no room for them
  */
 function short(words) {
-  return words.replace(/; (must keep|it may take).*$/, '').replace(/^(matching on [^:]*):.*$/, '$1').replace(/ in the gust$/, '');
+  return words.replace(/; (must keep|it may take).*$/, '').replace(/ in the gust$/, '').replace(/,[^,]*$/, '');
 }
 
 /**
