@@ -125,6 +125,9 @@ document.addEventListener('keydown', (event) => {
   const button = target?.closest('button, a, summary, [role=slider]');
   if (button && (event.key === 'Enter' || event.key === ' ' || event.key.startsWith('Arrow'))) return;
   const onPlan = !target || target === document.body || Boolean(target.closest('#plan-box'));
+  // Letters and figures are short cuts only where no panel is being used (WCAG 2.2, 2.1.4).
+  const elsewhere = target?.closest('#right, #top, #sheet, #placements, #refusals, .cursor-box, .hint, .notice');
+  if (elsewhere && !key.ctrl && event.key.length === 1) return;
   if (desk.key(key) || viewKey(planView, key, onPlan && store.get().place !== 'sheet' && !store.get().selection)) event.preventDefault();
 });
 planView.root.addEventListener('focusin', (event) => {
@@ -132,7 +135,7 @@ planView.root.addEventListener('focusin', (event) => {
   store.set({ hovered: ref ?? null });
 });
 addEventListener('online', () => keeper.retry());
-addEventListener('pagehide', () => store.endGroup());
+addEventListener('pagehide', () => store.get().opened && keeper.remember());
 
 store.subscribe((s) => s.hint, (hint, before) => {
   if (before && hint === 0) keep.rememberHints();

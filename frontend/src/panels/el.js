@@ -31,3 +31,16 @@ export const button = (text, onclick, options = {}) => el('button', { type: 'but
 
 /** @param {string} text @param {() => void} onclick @param {Record<string, any>} [options] @returns {HTMLButtonElement} looks like a link in a sentence */
 export const link = (text, onclick, options = {}) => button(text, onclick, { class: 'link', ...options });
+
+/**
+ * Makes the inside of an element anew and gives the focus back to what has the same `data-key`.
+ * @param {HTMLElement} root
+ * @param {(Node|string)[]} children
+ */
+export function renew(root, children) {
+  const active = document.activeElement;
+  const key = active && root.contains(active) ? active.getAttribute('data-key') : null;
+  root.replaceChildren(...children);
+  if (key === null) return;
+  /** @type {HTMLElement|null} */ (root.querySelector(`[data-key="${CSS.escape(key)}"]`))?.focus({ preventScroll: true });
+}

@@ -24,7 +24,7 @@ export function mountHead(roots, store, shell) {
       el('span', { class: 'place-number', text: String(i + 1) }), el('span', { class: 'place-name', text: place.charAt(0).toUpperCase() + place.slice(1) }),
     ]));
   roots.places.append(...links);
-  const title = button('', () => shell.plots(), { class: 'plot-name', 'aria-haspopup': 'dialog', title: 'Plots: open, new, copy, import' });
+  const title = button('', () => store.get().opened > 0 && shell.plots(), { class: 'plot-name', 'aria-haspopup': 'dialog', title: 'Plots: open, new, copy, import' });
   const saved = el('span', { class: 'saved', role: 'status' });
   const undo = button('Undo', () => store.undo(), { class: 'plain', 'aria-keyshortcuts': 'Control+Z' });
   const redo = button('Redo', () => store.redo(), { class: 'plain', 'aria-keyshortcuts': 'Control+Shift+Z' });
@@ -81,6 +81,9 @@ export function mountFoot(root, store, shell) {
   const scale = el('span', { class: 'foot-scale' });
   const snap = el('span', { class: 'foot-snap' });
   root.append(doing, el('span', { class: 'spread' }), snap, at, scale);
+  store.subscribe((s) => s.place, (place) => {
+    scale.hidden = place === 'sheet';
+  });
   store.subscribe((s) => [s.draft, s.tool, s.selection, s.place], () => {
     const { draft, tool, selection, place } = store.get();
     doing.replaceChildren(...(place === 'survey' ? doingWords(draft, tool, selection, shell) : []));

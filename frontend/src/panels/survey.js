@@ -10,7 +10,7 @@ import { ledger, nextStep, plotArea } from '../state/ledger.js';
 import { mark } from '../draw/mark.js';
 import { shortFigures } from '../draw/words.js';
 import { area as areaText, lengthWithUnit } from '../units/length.js';
-import { el, link } from './el.js';
+import { el, link, renew } from './el.js';
 import { pick } from './fields.js';
 import { figures } from './surveyfigures.js';
 import { site } from './surveysite.js';
@@ -30,7 +30,9 @@ export function mount(root, store, shell) {
   const rowsPart = el('div');
   const areaPart = el('span', { class: 'ledger-area' });
   const next = el('p', { class: 'next-step' });
-  const list = el('details', { class: 'listing' });
+  const listHead = el('summary');
+  const listRows = el('ul', { class: 'listing-rows' });
+  const list = el('details', { class: 'listing', ontoggle: () => showListing() }, [listHead, listRows]);
   const plot = site(store);
   root.append(
     top, faultPart,
@@ -83,36 +85,38 @@ export function mount(root, store, shell) {
   function showLedger() {
     const { plan, faults, units } = store.get();
     areaPart.textContent = plotArea(plan) ? areaText(plotArea(plan), units) : '';
-    rowsPart.replaceChildren(el('table', { class: 'ledger-table' }, [el('tbody', {}, ledger(plan, faults, (m) => lengthWithUnit(m, units)).map((row) =>
+    renew(rowsPart, [el('table', { class: 'ledger-table' }, [el('tbody', {}, ledger(plan, faults, (m) => lengthWithUnit(m, units)).map((row) =>
       el('tr', { class: `ledger-${row.state}` }, [
         el('th', { scope: 'row' }, [
           row.tool === 'site'
-            ? link(row.what, openSite)
-            : link(row.what, () => shell.desk.take(row.tool), { title: `Take the tool` }),
+            ? link(row.what, openSite, { 'data-key': row.what })
+            : link(row.what, () => shell.desk.take(row.tool), { title: 'Take the tool', 'data-key': row.what }),
         ]),
         el('td', { text: row.held }),
         el('td', { class: 'ledger-mark' }, stateMark(row)),
-      ])))]));
+      ])))])]);
     const step = nextStep(plan, faults);
     next.replaceChildren(step ?? '', ...(step ? [] : [
       el('span', { text: 'This plot can be searched. ' }), link('Say what the station must do', () => shell.go('brief'))]));
     next.classList.toggle('ready', !step);
-    const all = things(plan);
-    const open = list.open;
-    list.replaceChildren(
-      el('summary', { text: `Everything drawn, ${all.length}` }),
-      ...(all.length ? [el('ul', { class: 'listing-rows' }, all.map(({ ref, kind, thing, index }) =>
-        el('li', {}, [el('button', {
-          type: 'button', class: 'listing-row', 'aria-pressed': String(store.get().selection?.ref === ref),
-          onclick: () => {
-            if (store.get().tool !== 'select') shell.desk.take('select');
-            store.set({ selection: { ref, vertex: null } });
-          },
-          onmouseenter: () => store.set({ hovered: ref }), onmouseleave: () => store.set({ hovered: null }),
-        }, [el('span', { text: nameOf(kind, thing, index) }), el('span', { class: 'listing-figures', text: shortFigures(kind, thing, units) })])]),
-      ))] : []));
-    list.open = open;
+    showListing();
     plot.show();
+  }
+
+  /** The list is made only while it is open: a plot can hold hundreds. */
+  function showListing() {
+    const { plan, units, selection } = store.get();
+    const all = things(plan);
+    listHead.textContent = `Everything drawn, ${all.length}`;
+    renew(listRows, (list.open ? all : []).map(({ ref, kind, thing, index }) =>
+      el('li', {}, [el('button', {
+        type: 'button', class: 'listing-row', 'data-key': ref, 'aria-pressed': String(selection?.ref === ref),
+        onclick: () => {
+          if (store.get().tool !== 'select') shell.desk.take('select');
+          store.set({ selection: { ref, vertex: null } });
+        },
+        onmouseenter: () => store.set({ hovered: ref }), onmouseleave: () => store.set({ hovered: null }),
+      }, [el('span', { text: nameOf(kind, thing, index) }), el('span', { class: 'listing-figures', text: shortFigures(kind, thing, units) })])])));
   }
 
   function openSite() {
@@ -125,7 +129,15 @@ export function mount(root, store, shell) {
     if (store.get().place === 'survey') showTop();
   });
   store.subscribe((s) => [s.faults, s.plan], showFaults);
-  store.subscribe((s) => [s.plan, s.faults, s.units, s.selection?.ref], showLedger);
+  let pending = 0;
+  store.subscribe((s) => [s.plan, s.faults, s.units, s.selection?.ref], () => {
+    if (!pending) {
+      pending = requestAnimationFrame(() => {
+        pending = 0;
+        showLedger();
+      });
+    }
+  });
 }
 
 /** A fault that only says that something is still to be drawn: the ledger says it better. @param {any} fault @param {any} plan */

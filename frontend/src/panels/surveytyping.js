@@ -33,7 +33,7 @@ export function mount(root, store, shell) {
     boxes = new Map();
     fields.replaceChildren(...draft.fields.map((/** @type {any} */ field) => {
       const label = el('label', { for: `typing-${field.name}`, text: `${field.label}${field.unit === 'direction' ? (store.get().plan.site?.planNorth ? ', plan' : '') : units === 'm' ? ', m' : ', ft'}` });
-      const input = el('input', { id: `typing-${field.name}`, type: 'text', inputmode: field.unit === 'direction' ? 'text' : 'decimal', autocomplete: 'off', spellcheck: 'false' });
+      const input = el('input', { id: `typing-${field.name}`, type: 'text', inputmode: field.unit === 'direction' || units === 'ft' ? 'text' : 'decimal', autocomplete: 'off', spellcheck: 'false' });
       input.addEventListener('input', () => shell.desk.type(field.name, input.value));
       input.addEventListener('focus', () => input.select());
       input.addEventListener('keydown', (/** @type {KeyboardEvent} */ event) => key(event, input));

@@ -31,13 +31,14 @@ export function wallTable(store, ref) {
   const rows = walls(points, closed).slice(0, MOST_ROWS).map((side) => makeRow(side.from));
   const last = heights && !closed ? [heightRow(points.length - 1)] : [];
   const corner = cornerLine();
+  const agreed = own ? agreedPart(store) : null;
   const fourth = heights ? 'Height' : own ? 'Over it' : 'Corner';
   const table = el('table', { class: 'walls' }, [
     el('thead', {}, [el('tr', {}, [closed ? (own ? 'Side' : 'Wall') : 'Run', 'Length', 'Direction', fourth].map((text) => el('th', { scope: 'col', text })))]),
     el('tbody', {}, [...rows, ...last].map((r) => r.root)),
   ]);
   return {
-    root: el('div', { class: 'walls-part' }, [table, corner.root]),
+    root: el('div', { class: 'walls-part' }, [table, agreed?.root, corner.root]),
     show() {
       const { plan, units } = store.get();
       const now = find(plan, ref);
@@ -45,9 +46,15 @@ export function wallTable(store, ref) {
       const list = walls(pointsOf(kind, now.thing), closed);
       rows.forEach((row, i) => list[i] && row.show(list[i], pointsOf(kind, now.thing), units));
       last.forEach((row) => row.show(null, pointsOf(kind, now.thing), units));
+      agreed?.show();
       corner.show();
     },
   };
+
+  /** @param {number} i @returns {any} the rule of a side of the boundary */
+  function ruleOf(i) {
+    return (store.get().plan.boundaryRules ?? []).find((/** @type {any} */ r) => r.edge === i);
+  }
 
   /** @param {number} i */
   function makeRow(i) {
@@ -68,7 +75,7 @@ export function wallTable(store, ref) {
     const over = own ? choice({
       id: `${key}-over`, label: `What may hang over side ${i + 1}`, bare: true,
       options: [{ value: 'none', label: 'nothing' }, { value: 'ropes', label: 'ropes' }, { value: 'wires', label: 'wires' }],
-      onchange: (overhang) => store.edit(`Say what may hang over side ${i + 1}`, (plan) => setBoundaryRule(plan, i, { overhang, agreedBy: 'the owner next door' })),
+      onchange: (overhang) => store.edit(`Say what may hang over side ${i + 1}`, (plan) => setBoundaryRule(plan, i, { ...ruleOf(i), overhang })),
     }) : null;
     const turn = el('td', { class: 'figure' });
     const row = el('tr', { onfocusin: () => pickVertex(i) }, [
@@ -85,7 +92,7 @@ export function wallTable(store, ref) {
         wayBox.show(side.direction, units);
         heightBox?.show(now[i][2] ?? 0, units);
         turn.textContent = side.turn === null ? '–' : formatDirection(side.turn).replace(/^0+(?=\d)/, '');
-        if (over) over.show((store.get().plan.boundaryRules ?? []).find((/** @type {any} */ r) => r.edge === i)?.overhang ?? 'none', units);
+        if (over) over.show(ruleOf(i)?.overhang ?? 'none', units);
       },
     };
   }
@@ -174,6 +181,33 @@ export function wallTable(store, ref) {
       },
     };
   }
+}
+
+/** Who agreed to what may hang over a side. @param {Store} store */
+function agreedPart(store) {
+  const root = el('div', { class: 'agreed' });
+  let drawn = '';
+  return {
+    root,
+    show() {
+      const rules = store.get().plan.boundaryRules ?? [];
+      const stamp = JSON.stringify(rules);
+      if (stamp === drawn) return;
+      drawn = stamp;
+      root.replaceChildren(...rules.map((/** @type {any} */ rule) => {
+        const by = box({
+          id: `agreed-${rule.edge}`, label: `${rule.overhang} over side ${rule.edge + 1}: agreed by`, type: 'text', optional: true,
+          getUnits: () => store.get().units,
+          onchange: (value) => store.edit('Say who agreed', (plan) => {
+            const { agreedBy: _old, ...bare } = rule;
+            return setBoundaryRule(plan, rule.edge, value === null ? bare : { ...bare, agreedBy: value });
+          }),
+        });
+        by.show(rule.agreedBy, store.get().units);
+        return by.root;
+      }));
+    },
+  };
 }
 
 /** The walls of what is being drawn, only to read. @param {any} draft @param {'m'|'ft'} units @returns {HTMLElement} */

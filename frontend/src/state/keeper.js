@@ -22,6 +22,8 @@ export function createKeeper(store, api, keep, say) {
   let onServer = null;
   /** @type {number|undefined} */
   let timer;
+  /** @type {number|undefined} */
+  let noting;
   /** @type {Promise<void>|null} */
   let saving = null;
   let opened = -1;
@@ -133,8 +135,9 @@ export function createKeeper(store, api, keep, say) {
       return;
     }
     if (store.get().saved.state !== 'offline') mark('unsaved');
-    store.set({ notice: null });
-    remember();
+    if (store.get().notice) store.set({ notice: null });
+    clearTimeout(noting);
+    noting = setTimeout(remember, 150);
     later(store.get().saved.state === 'offline' ? RETRY : REST);
   });
 

@@ -59,7 +59,8 @@ const SUPPORT_NAMES = { tree: 'Tree', mast: 'Mast', pole: 'Pole', chimney: 'Chim
  * @returns {{plan: Plan, ref: string}}
  */
 export function make(plan, kind, points, variant) {
-  if (kind === 'boundary') return add(plan, kind, points);
+  // Rules of the old sides do not fit the new ones.
+  if (kind === 'boundary') return add({ ...plan, boundaryRules: [] }, kind, points);
   if (kind === 'entry') return add(plan, kind, { at: points[0], height: plan.entry?.height ?? 1.2 });
   if (kind === 'datums') return add(plan, kind, { name: nextDatumName(plan), at: points[0] });
   if (kind === 'spots') return add(plan, kind, [points[0][0], points[0][1], points[0][2] ?? 0]);
