@@ -174,7 +174,7 @@ export function choice(config) {
  */
 export function pick(config) {
   const inputs = config.options.map((o) =>
-    el('input', { type: 'radio', name: config.id, value: o.value, id: `${config.id}-${o.value}`, onchange: () => config.onchange(o.value) }),
+    el('input', { type: 'radio', name: config.id, value: o.value, 'data-key': `${config.id}-${o.value}`, id: `${config.id}-${o.value}`, onchange: () => config.onchange(o.value) }),
   );
   const root = el('fieldset', { class: 'pick' }, [
     el('legend', { text: config.label }),

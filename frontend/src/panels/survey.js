@@ -53,13 +53,13 @@ export function mount(root, store, shell) {
       const key = `draft ${tool} ${JSON.stringify([drawing.points, drawing.at, drawing.variant, drawing.tapes, units])}`;
       if (key !== shown.key) {
         shown = { key, show() {} };
-        top.replaceChildren(...drawingPart(drawing, store));
+        renew(top, drawingPart(drawing, store));
       }
       return;
     }
     if (found && selection) {
       const points = pointsOf(found.kind, found.thing).length;
-      const key = `figures ${selection.ref} ${points} ${found.thing.kind ?? ''}`;
+      const key = `figures ${selection.ref} ${points}`;
       if (key !== shown.key) {
         const part = figures(store, shell, selection.ref);
         shown = { key, show: part.show };
@@ -165,7 +165,7 @@ function faultRow(fault, store) {
   ]);
 }
 
-/** The head of the panel while a tool is in hand. @param {any} draft @param {Store} store @returns {Node[]} */
+/** The head of the panel while a tool is in hand. @param {any} draft @param {Store} store @returns {(Node|string)[]} */
 function drawingPart(draft, store) {
   const { units } = store.get();
   const kind = draft.kind ? KINDS[draft.kind].one : draft.shape === 'tapes' ? 'point by two tapes' : 'tape';
