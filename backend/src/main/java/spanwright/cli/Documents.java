@@ -7,6 +7,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.util.List;
@@ -63,7 +64,7 @@ final class Documents {
       return JsonText.decode(Files.readAllBytes(file));
     } catch (BadJson e) {
       throw Failure.badInput(file, List.of(e.fault()));
-    } catch (java.nio.file.NoSuchFileException e) {
+    } catch (NoSuchFileException e) {
       throw Failure.badInput(file + ": there is no such file. Check the path.");
     } catch (AccessDeniedException e) {
       throw Failure.badInput(file + ": the file may not be read. Check its permissions.");

@@ -1,5 +1,6 @@
 package spanwright.cli;
 
+import java.io.PrintWriter;
 import java.util.UUID;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -48,8 +49,8 @@ final class Program {
     line.addSubcommand(new SheetCommand(console));
     line.addSubcommand(new CatalogueCommand(console));
     line.addSubcommand(new VersionCommand(console));
-    line.setOut(new java.io.PrintWriter(console.out(), true));
-    line.setErr(new java.io.PrintWriter(console.err(), true));
+    line.setOut(new PrintWriter(console.out(), true));
+    line.setErr(new PrintWriter(console.err(), true));
     line.setCaseInsensitiveEnumValuesAllowed(true);
     line.setParameterExceptionHandler((e, given) -> badUsage(console, e));
     line.setExecutionExceptionHandler((e, failed, given) -> failed(console, e));
@@ -63,6 +64,8 @@ final class Program {
                   + " -Xmx.");
     } catch (StackOverflowError e) {
       console.err().println("The document is nested too deeply to be read. Simplify it.");
+    } catch (Error e) {
+      unforeseen(console, e);
     }
     return Exit.COULD_NOT;
   }
@@ -94,6 +97,10 @@ final class Program {
       console.err().println(e.getMessage());
       return Exit.COULD_NOT;
     }
+    return unforeseen(console, e);
+  }
+
+  private static int unforeseen(Console console, Throwable e) {
     String reference = UUID.randomUUID().toString().substring(0, 8);
     console
         .err()

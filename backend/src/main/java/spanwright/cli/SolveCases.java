@@ -5,6 +5,7 @@ import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.JsonNodeFactory;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
 import spanwright.moments.AntennaModel;
@@ -85,7 +86,7 @@ final class SolveCases {
     return new Read(
         AntennaModel.of(wires, feedWire, fraction),
         ground,
-        java.util.Arrays.stream(frequencies).boxed().toList(),
+        Arrays.stream(frequencies).boxed().toList(),
         directions,
         points,
         power,

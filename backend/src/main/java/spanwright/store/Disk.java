@@ -16,6 +16,7 @@ import java.nio.file.StandardOpenOption;
 import java.nio.file.attribute.FileTime;
 import java.nio.file.attribute.PosixFilePermissions;
 import java.time.Instant;
+import java.util.Locale;
 
 /** The few file operations that everything rests on: forced writes and atomic renames. */
 final class Disk {
@@ -90,7 +91,7 @@ final class Disk {
       return "a file is in the way";
     }
     if (e instanceof FileSystemException failed && failed.getReason() != null) {
-      return failed.getReason().toLowerCase(java.util.Locale.ROOT);
+      return failed.getReason().toLowerCase(Locale.ROOT);
     }
     String text = e.getMessage();
     return text == null || text.contains("java.") ? "the disk refused" : text;

@@ -4,6 +4,7 @@ import com.fasterxml.jackson.core.JsonProcessingException;
 import io.javalin.config.JavalinConfig;
 import io.javalin.http.Context;
 import io.javalin.http.HttpResponseException;
+import java.io.IOException;
 import java.util.UUID;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
@@ -30,7 +31,7 @@ final class Errors {
           response.setContentType("application/problem+json");
           try {
             response.getOutputStream().write(bytes);
-          } catch (java.io.IOException e) {
+          } catch (IOException e) {
             LOG.debug("the client left", e);
           }
         });

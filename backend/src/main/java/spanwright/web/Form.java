@@ -1,6 +1,7 @@
 package spanwright.web;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.JsonNodeFactory;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.HashSet;
@@ -156,10 +157,7 @@ public final class Form {
   public Form form(String name) {
     if (!has(name)) {
       note(name, "this is missing. Give an object in braces.");
-      return new Form(
-          com.fasterxml.jackson.databind.node.JsonNodeFactory.instance.objectNode(),
-          at(name),
-          new ArrayList<>());
+      return new Form(JsonNodeFactory.instance.objectNode(), at(name), new ArrayList<>());
     }
     return new Form(node.get(name), at(name), faults);
   }
@@ -215,7 +213,7 @@ public final class Form {
   }
 
   private JsonNode list(String name, int fewest, int longest) {
-    JsonNode none = com.fasterxml.jackson.databind.node.JsonNodeFactory.instance.arrayNode();
+    JsonNode none = JsonNodeFactory.instance.arrayNode();
     if (!has(name)) {
       if (fewest > 0) {
         note(name, "this is missing. Give a list in brackets.");

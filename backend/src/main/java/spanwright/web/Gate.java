@@ -2,6 +2,7 @@ package spanwright.web;
 
 import io.javalin.http.Context;
 import io.javalin.http.HandlerType;
+import io.javalin.http.HttpStatus;
 import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
 import java.security.SecureRandom;
@@ -103,7 +104,7 @@ final class Gate {
           .addHeader(
               "Set-Cookie", cookieName + "=" + token + "; Path=/; HttpOnly; SameSite=Strict");
       if (ctx.method() == HandlerType.GET && !ctx.path().startsWith("/api")) {
-        ctx.redirect(ctx.path(), io.javalin.http.HttpStatus.SEE_OTHER);
+        ctx.redirect(ctx.path(), HttpStatus.SEE_OTHER);
         ctx.skipRemainingHandlers();
       }
       return;

@@ -5,6 +5,7 @@ import com.fasterxml.jackson.databind.DeserializationFeature;
 import com.fasterxml.jackson.databind.JsonMappingException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectReader;
+import java.io.IOException;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -124,7 +125,7 @@ public final class PlacementReader {
     } catch (JsonProcessingException e) {
       faults.add(new Fault(at(path, e), "This is missing or is not what a result holds here."));
       return null;
-    } catch (java.io.IOException e) {
+    } catch (IOException e) {
       throw new IllegalStateException("a tree is read without any input", e);
     }
   }

@@ -5,6 +5,7 @@ import io.javalin.http.Context;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.InputStream;
+import java.util.Arrays;
 import java.util.Locale;
 import java.util.Set;
 import java.util.function.Predicate;
@@ -112,8 +113,7 @@ final class Requests {
   }
 
   private static Predicate<String> matches(String header) {
-    Set<String> tags =
-        Set.copyOf(java.util.Arrays.stream(header.split(",")).map(String::strip).toList());
+    Set<String> tags = Set.copyOf(Arrays.stream(header.split(",")).map(String::strip).toList());
     return version -> tags.contains("*") || tags.contains(etag(version)) || tags.contains(version);
   }
 

@@ -339,6 +339,20 @@ class CommandsTest {
   }
 
   @Test
+  void a_plan_on_which_nothing_is_allowed_ends_with_4_and_the_result_is_written()
+      throws IOException {
+    String line =
+        "\"overheadLines\": [ { \"id\": \"grid\", \"path\": [[-5,12,8],[30,12,8]],"
+            + " \"kind\": \"medium-voltage\" } ], \"entry\"";
+    String plan = file("plan.json", BrokenPlans.SOUND.replace("\"entry\"", line));
+    Ran ran = run("rank", plan, "--effort", "quick", "--threads", "1");
+    assertSays(ran, 4, "no placement is allowed", "refusals");
+    JsonNode result = ran.json();
+    assertEquals(0, result.get("placements").size());
+    assertTrue(result.get("refusals").isArray());
+  }
+
+  @Test
   void a_folder_another_server_has_in_use_is_said_in_a_sentence() {
     Path data = temp.resolve("data");
     try (var store = spanwright.store.PlanStore.open(data)) {

@@ -24,7 +24,7 @@ import org.junit.jupiter.api.Timeout;
 import org.junit.jupiter.api.io.TempDir;
 
 /** The program as a process of its own: start, answer, stop. */
-@Timeout(60)
+@Timeout(240)
 class ServeTest {
   @TempDir Path temp;
 
@@ -57,7 +57,7 @@ class ServeTest {
 
   private static void stop(Process process) throws InterruptedException {
     process.destroy();
-    assertTrue(process.waitFor(10, TimeUnit.SECONDS), "did not stop");
+    assertTrue(process.waitFor(60, TimeUnit.SECONDS), "did not stop");
   }
 
   @Test
@@ -69,12 +69,12 @@ class ServeTest {
       assertTrue(address.startsWith("http://127.0.0.1:"), address);
       assertEquals(200, status(address + "api/health"));
       Process second = start("serve", "--port", "0", "--data", data);
-      assertTrue(second.waitFor(20, TimeUnit.SECONDS));
+      assertTrue(second.waitFor(60, TimeUnit.SECONDS));
       assertEquals(1, second.exitValue());
       assertTrue(Files.readString(temp.resolve("err")).contains("is in use by another running"));
       String port = address.replaceAll(".*:(\\d+)/", "$1");
       Process third = start("serve", "--port", port, "--data", temp.resolve("other").toString());
-      assertTrue(third.waitFor(20, TimeUnit.SECONDS));
+      assertTrue(third.waitFor(60, TimeUnit.SECONDS));
       assertEquals(1, third.exitValue());
       assertTrue(Files.readString(temp.resolve("err")).contains("Port " + port + " is taken"));
     } finally {
