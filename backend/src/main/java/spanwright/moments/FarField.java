@@ -165,36 +165,54 @@ final class FarField {
     out[at + 1] = (ai * br - ar * bi) / d;
   }
 
-  /** Power radiated to the sky (over all directions without a ground) [W]. */
-  double radiated() {
-    double reach = reach();
+  /**
+   * Intensity over all directions (over the sky, with a ground), on a Gauss rule in elevation and
+   * even steps in azimuth, fine enough for the wires' extent.
+   *
+   * @param azimuths radians
+   * @param elevations radians
+   * @param intensity both polarisations [W/sr]
+   * @param weights solid angles [sr]
+   */
+  record Sky(double[] azimuths, double[] elevations, double[] intensity, double[] weights) {
+    /** Power radiated [W]. */
+    double power() {
+      double sum = 0;
+      for (int i = 0; i < intensity.length; i++) {
+        sum += weights[i] * intensity[i];
+      }
+      return sum;
+    }
+  }
+
+  /** Samples the whole pattern. */
+  Sky sky() {
+    double reach = k * reach();
     boolean grounded = ground.kind() != Ground.Kind.NONE;
-    int across = 12 + 2 * (int) Math.ceil(k * reach);
-    int up = Math.min(60, 14 + (int) Math.ceil((grounded ? 0.8 : 1.0) * k * reach));
+    int across = 12 + 2 * (int) Math.ceil(reach);
+    int up = Math.min(60, 14 + (int) Math.ceil((grounded ? 0.8 : 1.0) * reach));
     GaussRule rule = GaussRule.of(up);
     double low = grounded ? 0 : -0.5 * Math.PI;
     double span = 0.5 * Math.PI - low;
     double[] azimuths = new double[across * up];
     double[] elevations = new double[across * up];
+    double[] weights = new double[across * up];
     for (int j = 0; j < up; j++) {
+      double elevation = low + span * rule.nodes[j];
       for (int i = 0; i < across; i++) {
         azimuths[j * across + i] = 2 * Math.PI * (i + 0.25) / across;
-        elevations[j * across + i] = low + span * rule.nodes[j];
+        elevations[j * across + i] = elevation;
+        weights[j * across + i] =
+            rule.weights[j] * span * Math.cos(elevation) * 2 * Math.PI / across;
       }
     }
     double[] horizontal = new double[across * up];
     double[] vertical = new double[across * up];
-    Directions d = Directions.of(azimuths, elevations);
-    intensity(d, horizontal, vertical);
-    double sum = 0;
-    for (int j = 0; j < up; j++) {
-      double ring = 0;
-      for (int i = 0; i < across; i++) {
-        ring += horizontal[j * across + i] + vertical[j * across + i];
-      }
-      sum += ring * rule.weights[j] * span * d.cosElevation[j * across] * 2 * Math.PI / across;
+    intensity(Directions.of(azimuths, elevations), horizontal, vertical);
+    for (int i = 0; i < horizontal.length; i++) {
+      horizontal[i] += vertical[i];
     }
-    return sum;
+    return new Sky(azimuths, elevations, horizontal, weights);
   }
 
   /** Greatest distance of a point from the middle of all, or from its foot if that is more [m]. */

@@ -23,7 +23,7 @@ public final class Solution {
   private final double refinementChange;
   private final List<String> warnings;
   private final List<WireSpec> wires;
-  private volatile double radiated = Double.NaN;
+  private volatile FarField.Sky sky;
   private volatile Peak peak;
 
   /** What the solver found. */
@@ -103,10 +103,14 @@ public final class Solution {
   }
 
   private double radiated() {
-    double known = radiated;
-    if (Double.isNaN(known)) {
-      known = far.radiated();
-      radiated = known;
+    return sky().power();
+  }
+
+  private FarField.Sky sky() {
+    FarField.Sky known = sky;
+    if (known == null) {
+      known = far.sky();
+      sky = known;
     }
     return known;
   }
@@ -180,7 +184,7 @@ public final class Solution {
     Peak known = peak;
     if (known == null) {
       boolean grounded = ground.kind() != Ground.Kind.NONE;
-      known = new PeakSearch(far, grounded, perIntensity()).find(k * far.reach());
+      known = new PeakSearch(far, grounded).find(sky(), perIntensity());
       peak = known;
     }
     return known;
