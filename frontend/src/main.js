@@ -2,6 +2,7 @@
 /** Wiring: makes the store, mounts the panels, opens the first plot. */
 import * as api from './api/client.js';
 import * as keep from './api/keep.js';
+import * as pictures from './api/pictures.js';
 import { mountDraft } from './draw/draft.js';
 import { mountFaults } from './draw/faults.js';
 import { mountFocus } from './draw/focus.js';
@@ -11,6 +12,7 @@ import { mountInput, viewKey, zoomBy } from './draw/planinput.js';
 import { createPlanView } from './draw/planview.js';
 import { mountFrame } from './draw/sheetframe.js';
 import { mountSurvey } from './draw/survey.js';
+import { mountTrace } from './draw/trace.js';
 import { mount as mountBrief } from './panels/brief.js';
 import { mount as mountFaultNote } from './panels/faultnote.js';
 import { mount as mountHints } from './panels/hints.js';
@@ -40,7 +42,7 @@ const store = createStore({
   place: 'survey', selection: null, tool: 'select', draft: null, cursor: null, hovered: null, units: 'm',
   faults: [], catalogue: null, demos: [], plots: [],
   search: { id: null, state: 'none', progress: 0, what: '', found: [], result: null, error: null, planAtSearch: null },
-  chosen: null, chosenBand: null, pinned: null, shownRefusal: null, view: null, hint: 0,
+  chosen: null, chosenBand: null, pinned: null, shownRefusal: null, view: null, hint: 0, trace: null,
 });
 
 /** @param {string} sentence told to screen readers */
@@ -68,11 +70,12 @@ const go = (place) => {
 const plots = createPlots(store, keeper, say);
 document.body.append(plots.root);
 const shell = {
-  api, say, go, planView, desk, keeper, strip: STRIP, saveNow: keeper.saveNow, plots: plots.open,
+  api, pictures, say, go, planView, desk, keeper, strip: STRIP, saveNow: keeper.saveNow, plots: plots.open,
   sideView: part('side-view'),
   zoom: (/** @type {number} */ factor) => zoomBy(planView, factor),
 };
 
+mountTrace(planView, store);
 mountSurvey(planView, store);
 mountPlacementLayer(planView, store, shell);
 mountDraft(planView, store);
@@ -103,8 +106,9 @@ function freeze(event) {
 }
 
 function placeFromAddress() {
-  const place = PLACES.find((one) => one === location.hash.slice(1)) ?? 'survey';
-  if (place === store.get().place) return;
+  const named = location.hash.slice(1);
+  const place = PLACES.find((one) => one === named) ?? (named === '' ? 'survey' : null);
+  if (place === null || place === store.get().place) return;
   desk.rest();
   store.set({ place });
 }

@@ -104,6 +104,7 @@ export function mountFoot(root, store, shell) {
 /** @param {any} draft @param {string} tool @param {any} selection @param {any} shell @returns {(Node|string)[]} */
 function doingWords(draft, tool, selection, shell) {
   const label = shell.strip.find((/** @type {any} */ t) => t.name === tool)?.label ?? '';
+  if (tool === 'scale') return [el('b', { text: 'Scale of the picture' }), el('span', { class: 'foot-key', text: 'click two of its points' }), el('span', { class: 'foot-key', text: 'type their true distance, Enter' })];
   const keys = (/** @type {string[]} */ ...list) => list.map((text) => el('span', { class: 'foot-key', text }));
   if (draft?.shape === 'ring' || draft?.shape === 'path') {
     const n = draft.points.length + 1;

@@ -14,6 +14,7 @@ import { el, link, renew } from './el.js';
 import { pick } from './fields.js';
 import { figures } from './surveyfigures.js';
 import { site } from './surveysite.js';
+import { trace } from './surveytrace.js';
 import { draftTable } from './surveywalls.js';
 
 /** @typedef {import('../state/store.js').Store} Store */
@@ -40,6 +41,7 @@ export function mount(root, store, shell) {
       el('div', { class: 'section-head' }, [el('h2', { id: 'ledger-head', text: 'On this plot' }), areaPart]), rowsPart, next, list,
     ]),
     plot.root,
+    trace(store, shell),
   );
 
   /** @type {{key: string, show: () => void}} */
@@ -168,7 +170,7 @@ function faultRow(fault, store) {
 /** The head of the panel while a tool is in hand. @param {any} draft @param {Store} store @returns {(Node|string)[]} */
 function drawingPart(draft, store) {
   const { units } = store.get();
-  const kind = draft.kind ? KINDS[draft.kind].one : draft.shape === 'tapes' ? 'point by two tapes' : 'tape';
+  const kind = draft.kind ? KINDS[draft.kind].one : draft.shape === 'tapes' ? 'point by two tapes' : draft.tool === 'scale' ? 'scale of the picture' : 'tape';
   const title = kind.charAt(0).toUpperCase() + kind.slice(1);
   const ring = draft.at ? [...draft.points, draft.at] : draft.points;
   const parts = [

@@ -55,6 +55,7 @@
  * @property {string|null} pinned id of the pinned placement
  * @property {any|null} shownRefusal
  * @property {View|null} view null: fit the plot
+ * @property {any|null} trace the picture that is traced over: where it lies, its bitmap
  * @property {number} opened counts the plans taken by `load`
  * @property {number} hint which of the three hints is shown; 0 none
  * @property {string|null} undoLabel

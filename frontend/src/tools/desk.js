@@ -13,6 +13,7 @@ import { metalwork } from './metalwork.js';
 import { noise } from './noise.js';
 import { overheadLine } from './overheadline.js';
 import { people } from './people.js';
+import { scale } from './scale.js';
 import { deleteSelected, duplicateSelected, select } from './select.js';
 import { spot } from './spot.js';
 import { support } from './support.js';
@@ -24,7 +25,7 @@ import { zone } from './zone.js';
 /** @type {import('./types.js').Tool[]} */
 const TOOLS = [
   select, boundary, building, support, tree, bracketLine, mastZone, overheadLine, zone, people,
-  metalwork, noise, entry, datum, spot, tape, twotapes,
+  metalwork, noise, entry, datum, spot, tape, twotapes, scale,
 ];
 
 /** The strip, in order: the drawing's key. */

@@ -3,6 +3,7 @@ import { corridor } from '../../geometry/corridor.js';
 import { crossing, nearestOnSegment, pathLength, placeAlong } from '../../geometry/line.js';
 import { overlap, placeLabels } from '../../geometry/labels.js';
 import { area, centre, contains, labelPlace, selfCrossings, uncrossed, walls } from '../../geometry/polygon.js';
+import { onScreen, scaled } from '../../geometry/picture.js';
 import { defaultRidge } from '../../geometry/roof.js';
 import { guidesFor, snap } from '../../geometry/snap.js';
 import { crossingAngle, twoTapes } from '../../geometry/twotapes.js';
@@ -165,4 +166,20 @@ test('a zig-zag ends where its line ends', () => {
   assert.same(line[0], [0, 0]);
   assert.same(line[line.length - 1], [10, 0]);
   assert(line.length > 10);
+});
+
+test('a picture scaled by two points keeps the first and puts the second at its true distance', () => {
+  const lay = { at: [2, 3], width: 40, turn: 0 };
+  const picture = { width: 800, height: 600 };
+  const pixel = (/** @type {any} */ l, /** @type {number[]} */ uv) => {
+    const [a, b, c, d, e, f] = onScreen(l, picture, 1, [l.at[0], -l.at[1]]);
+    return [a * uv[0] + c * uv[1] + e, -(b * uv[0] + d * uv[1] + f)];
+  };
+  const [p, q] = [[100, 500], [500, 200]];
+  const [a, b] = [pixel(lay, p), pixel(lay, q)];
+  const next = scaled(lay, a, b, 12.5, 200);
+  const [c, d] = [pixel(next, p), pixel(next, q)];
+  assert.near(distance(a, c), 0, 1e-9);
+  assert.near(distance(c, d), 12.5, 1e-9);
+  assert.near(direction(c, d), 200, 1e-9);
 });
