@@ -203,7 +203,7 @@ export function clearanceConcern(plan, clearance, length) {
   const part = clearance.what && clearance.what !== 'wire' ? `, ${clearance.what}` : '';
   return {
     state: clearance.state, distance: clearance.distance, rule: clearance.rule,
-    words: `${length(clearance.distance)} to ${nameOf(plan, clearance.to)}${part}; must keep ${length(clearance.required)}`,
+    words: `${clearance.distance < 0 ? `${length(-clearance.distance)} inside` : `${length(clearance.distance)} to`} ${nameOf(plan, clearance.to)}${part}; must keep ${length(clearance.required)}`,
   };
 }
 

@@ -29,7 +29,8 @@ export function mount(root, store, shell) {
   function render(state) {
     const result = state.search.result;
     if (!result) return [];
-    const { refusals, counts } = result;
+    const { counts } = result;
+    const refusals = [...result.refusals].sort((a, b) => cureRank(a) - cureRank(b));
     if (!refusals.length) return [html('p', { class: 'soft' }, counts.refused ? `${count(counts.refused)} refused.` : 'Nothing was refused.')];
     const shown = open.all || result.placements.length === 0 ? refusals : refusals.slice(0, SHOWN_AT_FIRST);
     return [
@@ -59,11 +60,11 @@ export function mount(root, store, shell) {
       html('button', {
         type: 'button', class: 'plain', 'data-key': `refusal-${index}`, 'aria-pressed': String(chosen),
         onclick: () => store.set({ shownRefusal: chosen ? null : refusal }),
-      }, stateMark('foul', 'Refused'), ' ', html('b', {}, `${shapeTitle(refusal.shape)}, ${names}. `), reasonWithoutNames(refusal)),
+      }, stateMark('foul', 'Refused'), ' ', html('b', {}, `${shapeTitle(refusal.shape)}, ${names}. `), refusal.reason),
       html('p', {}, html('b', {}, 'Cure: '), refusal.cure, ' ',
         refusal.cured?.length ? html('button', {
           type: 'button', class: 'link', 'data-key': `cure-${index}`, disabled: open.busy === refusal, onclick: () => takeCure(refusal),
-        }, open.busy === refusal ? 'working it out' : 'Take it') : null),
+        }, open.busy === refusal ? 'working it out' : cureRank(refusal) === 0 ? 'Take it' : 'See it') : null),
       open.error !== null && chosen ? html('p', { class: 'problem' }, stateMark('foul', 'Error'), ` ${open.error}`) : null);
   }
 
@@ -90,12 +91,13 @@ export function mount(root, store, shell) {
 }
 
 /**
- * The names stand before the reason already.
+ * What can be cured is of more use than what cannot; a cure that leaves other refusals stands between.
  * @param {any} refusal
+ * @returns {number} the lesser first
  */
-function reasonWithoutNames(refusal) {
-  const text = refusal.reason.replace(/^[^:.]{0,80}: /, '');
-  return text.charAt(0).toUpperCase() + text.slice(1);
+export function cureRank(refusal) {
+  if (!refusal.cured?.length) return 2;
+  return /\bremains?\b/.test(refusal.cure) ? 1 : 0;
 }
 
 /**

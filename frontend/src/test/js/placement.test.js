@@ -7,7 +7,8 @@ import { windEnvelope } from '/src/draw/placement/wire.js';
 import { parseFrequencies, regionOf, spread } from '/src/panels/brief-bands.js';
 import { faultsAt } from '/src/panels/brief-fields.js';
 import { parsePlace } from '/src/panels/brief-targets.js';
-import { bandSummaries, concerns, nameOf, toBuild } from '/src/panels/placement-facts.js';
+import { bandSummaries, clearanceConcern, concerns, nameOf, toBuild } from '/src/panels/placement-facts.js';
+import { cureRank } from '/src/panels/refusals.js';
 import { fileName } from '/src/panels/sheet.js';
 import { assert, equal, near, test } from './harness.js';
 
@@ -110,6 +111,15 @@ test('a band’s bar is the weighted mean over its targets', () => {
   const [band] = bandSummaries({ brief: { targets: [{ name: 'A', weight: 3 }, { name: 'B', weight: 1 }] } }, ASSESSED);
   near(band.over, 1, 1e-9);
   equal(band.state, 'foul');
+});
+
+test('a distance below nought is told as inside', () => {
+  const one = { rule: 'building-wire', to: 'oak', what: 'wire', distance: -0.4, required: 0.3, state: 'foul' };
+  equal(clearanceConcern(PLOT, one, (metres) => metres.toFixed(2)).words, '0.40 inside Oak; must keep 0.30');
+});
+
+test('refusals that a cure mends wholly come first', () => {
+  equal([cureRank({ cured: [{}], cure: 'Raise it.' }), cureRank({ cured: [{}], cure: 'Move it. 5 other refusals remain.' }), cureRank({ cured: [], cure: 'Nothing cures it.' })], [0, 1, 2]);
 });
 
 test('what must be built is counted, guys with their mast', () => {
