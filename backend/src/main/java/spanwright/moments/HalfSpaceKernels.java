@@ -58,11 +58,6 @@ final class HalfSpaceKernels {
         -ground.conductivity() / (omega * Constants.EPSILON0));
   }
 
-  /** Wave number in the ground, real part [1/m]. */
-  double groundWaveNumber() {
-    return k1R;
-  }
-
   /**
    * Kernels at one distance.
    *

@@ -132,11 +132,6 @@ public final class Solution {
     return warnings;
   }
 
-  /** The mesh, for tests. */
-  Mesh mesh() {
-    return currents.mesh;
-  }
-
   /** Gain is intensity times this. */
   private double perIntensity() {
     return 4 * Math.PI / inputPower;

@@ -91,7 +91,6 @@ class SolverTest {
   @Test
   void an_end_on_another_wires_path_is_joined_there() {
     WireSpec top = wire(v(-5, 0, 6), v(5, 0, 6));
-    WireSpec cut = wire(v(-5, 0, 6), v(2, 0, 6), v(5, 0, 6));
     WireSpec drop = wire(v(2, 0, 6), v(2, 0.5, 3));
     WireSpec feed = wire(v(-5, 0, 6), v(-9, 0, 6));
     Complex touching = solve(fed(feed, top, drop)).impedance();
@@ -99,7 +98,6 @@ class SolverTest {
         solve(fed(feed, wire(v(-5, 0, 6), v(2, 0, 6)), wire(v(2, 0, 6), v(5, 0, 6)), drop))
             .impedance();
     assertTrue(touching.subtract(split).abs() < 1e-6 * split.abs());
-    assertEquals(2, cut.points().size() - 1);
   }
 
   @Test
