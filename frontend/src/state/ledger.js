@@ -43,7 +43,7 @@ export function ledger(plan, faults, length) {
     row('Boundary', corners ? count(corners, 'corner') : 'to draw first', corners > 2, true, 'boundary', ['boundary']),
     row('Buildings', n('buildings') ? count(n('buildings'), 'building') : 'none drawn', n('buildings') > 0, false, 'buildings', ['buildings']),
     row('Supports', n('supports') ? `${n('supports')}, tallest ${length(tallest)}` : placesLack(places), n('supports') > 0, places < 2, 'supports', ['supports']),
-    row('Places for masts', mastWords(n('mastZones'), n('bracketLines')), n('mastZones') + n('bracketLines') > 0, places < 2, 'mastZones', ['mastZones', 'bracketLines']),
+    row('Places for masts', mastWords(n('mastZones'), n('bracketLines')), n('mastZones') + n('bracketLines') > 0, false, 'mastZones', ['mastZones', 'bracketLines']),
     row('Overhead lines', n('overheadLines') ? `${n('overheadLines')}, with heights` : 'none drawn: look up', n('overheadLines') > 0, false, 'overheadLines', ['overheadLines']),
     row('Station entry', plan.entry ? `${length(plan.entry.height ?? 0)} up` : 'where the feed line comes in', Boolean(plan.entry), true, 'entry', ['entry']),
     row('Datums', n('datums') ? listOf(plan, 'datums').map((d) => d.name).join(', ') : 'two, to set out from', n('datums') > 1, false, 'datums', ['datums']),
