@@ -15,6 +15,8 @@ import { ticks } from './scale.js';
 
 const MARGIN = { left: 34, right: 12, top: 18, foot: 36 };
 const LETTER = 5.3;
+/** A low wire is not blown up beyond a view this high, metres. */
+const LEAST_HEIGHT = 7;
 /** A narrower view is described under it instead. */
 export const ROOM_FOR_TITLE = 520;
 
@@ -30,7 +32,7 @@ export function sideScale(along, { width, height, ppm }) {
   const [low, high] = [Math.min(...along.ground.map((one) => one[1]), 0), Math.max(...heights) + 0.4];
   const room = { x: width - MARGIN.left - MARGIN.right, y: height - MARGIN.top - MARGIN.foot };
   const span = along.length + 5;
-  const fit = Math.min(room.x / span, room.y / (high - low));
+  const fit = Math.min(room.x / span, room.y / Math.max(high - low, LEAST_HEIGHT));
   const same = ppm <= fit && ppm * span > room.x * 0.4;
   const scale = same ? ppm : fit;
   const start = MARGIN.left + (room.x - along.length * scale) / 2;

@@ -96,8 +96,8 @@ export function mount(planView, store, shell) {
     planView.letter('placement', {
       labels: [
         ...clearances.map((one, index) => dimensionLabel(one, index, {
-          figure: distance(one.distance),
-          words: [`to ${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`, `must keep ${distance(one.required)}`],
+          figure: one.distance < 0 ? `inside by ${distance(-one.distance)}` : distance(one.distance),
+          words: [`${one.distance < 0 ? '' : 'to '}${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`, `must keep ${distance(one.required)}`],
         })),
         ...aims.labels,
         ...(band?.rose ? [roseLegend(band, view)] : []),
