@@ -138,6 +138,10 @@ planView.root.addEventListener('focusin', (event) => {
   const ref = event.target instanceof Element ? event.target.closest('[data-ref]')?.getAttribute('data-ref') : null;
   store.set({ hovered: ref ?? null });
 });
+// A tool taken from the strip or the ledger by key: arrows and Enter go to the plan from then on.
+store.subscribe((s) => s.tool, (tool) => {
+  if (tool !== 'select' && document.activeElement?.closest('button, a')) planView.root.focus({ preventScroll: true });
+});
 addEventListener('online', () => keeper.retry());
 addEventListener('pagehide', () => store.get().opened && keeper.remember());
 

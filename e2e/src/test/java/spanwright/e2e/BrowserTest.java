@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import com.microsoft.playwright.Browser;
 import com.microsoft.playwright.BrowserContext;
 import com.microsoft.playwright.BrowserType;
+import com.microsoft.playwright.Locator;
 import com.microsoft.playwright.Page;
 import com.microsoft.playwright.Playwright;
 import com.microsoft.playwright.options.ColorScheme;
@@ -19,8 +20,8 @@ import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.io.TempDir;
 
 /**
- * A test in a real browser against the really started program: one browser for the whole run, a program and a context for each test, and
- * no console error in any.
+ * A test in a real browser against the really started program: one browser for the whole run, a
+ * program and a context for each test, and no console error in any.
  */
 abstract class BrowserTest {
   private static final List<String> ARGUMENTS =
@@ -85,6 +86,16 @@ abstract class BrowserTest {
   /** Complaints a test brings about on purpose, such as a server that is gone. */
   boolean expected(String complaint) {
     return false;
+  }
+
+  /** For narrowing a locator to what holds these words. */
+  static Locator.FilterOptions having(String words) {
+    return new Locator.FilterOptions().setHasText(words);
+  }
+
+  /** For a locator of what holds these words. */
+  static Page.LocatorOptions text(String words) {
+    return new Page.LocatorOptions().setHasText(words);
   }
 
   void shot(String name) {

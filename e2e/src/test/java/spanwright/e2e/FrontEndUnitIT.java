@@ -15,7 +15,10 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.TestFactory;
 
-/** The page's own unit tests (frontend/src/test/js), run in the browser against the modules that the server serves. */
+/**
+ * The page's own unit tests (frontend/src/test/js), run in the browser against the modules that the
+ * server serves.
+ */
 class FrontEndUnitIT extends BrowserTest {
   private static final String FOLDER = "/src/test/js/";
   private static final Path FILES =
@@ -38,7 +41,8 @@ class FrontEndUnitIT extends BrowserTest {
                     (String) result.get("name"),
                     () ->
                         assertTrue(
-                            (Boolean) result.get("ok"), () -> String.valueOf(result.get("error")))));
+                            (Boolean) result.get("ok"),
+                            () -> String.valueOf(result.get("error")))));
   }
 
   private static void answer(Route route) {

@@ -34,8 +34,7 @@ final class Program implements AutoCloseable {
             data.toString());
     process = builder.redirectErrorStream(true).start();
     BufferedReader reader =
-        new BufferedReader(
-            new InputStreamReader(process.getInputStream(), StandardCharsets.UTF_8));
+        new BufferedReader(new InputStreamReader(process.getInputStream(), StandardCharsets.UTF_8));
     String found = null;
     for (String line = reader.readLine(); line != null; line = reader.readLine()) {
       output.add(line);
