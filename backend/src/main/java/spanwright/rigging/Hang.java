@@ -241,7 +241,9 @@ final class Hang {
         spans.get(i).calm(most);
         spans.get(i).loaded(true, rigging.isIcy());
         if (spans.get(i).lifted) {
-          spans.set(i, statics(i, tied.make, tied.pullAtEnd, false));
+          // takes the weight off again; the span goes back as it was hung
+          statics(i, tied.make, tied.pullAtEnd, false);
+          spans.set(i, tied);
         } else {
           changed = true;
         }
