@@ -85,7 +85,7 @@ final class RankCommand implements Callable<Integer> {
               planFile
                   + ": no placement is allowed on this plan. The result lists "
                   + result.refusals().size()
-                  + " refusals, each with what would cure it.");
+                  + " refusals, each with its cure where there is one.");
       return Exit.NOTHING_FEASIBLE;
     }
     return Exit.DONE;

@@ -339,8 +339,7 @@ class CommandsTest {
   }
 
   @Test
-  void a_plan_on_which_nothing_is_allowed_ends_with_4_and_the_result_is_written()
-      throws IOException {
+  void a_plan_on_which_nothing_is_allowed_ends_with_4_and_its_refusals() throws IOException {
     String line =
         "\"overheadLines\": [ { \"id\": \"grid\", \"path\": [[-5,12,8],[30,12,8]],"
             + " \"kind\": \"medium-voltage\" } ], \"entry\"";
@@ -349,7 +348,9 @@ class CommandsTest {
     assertSays(ran, 4, "no placement is allowed", "refusals");
     JsonNode result = ran.json();
     assertEquals(0, result.get("placements").size());
-    assertTrue(result.get("refusals").isArray());
+    assertTrue(result.get("refusals").size() > 0);
+    assertTrue(result.at("/refusals/0/cure").asText().length() > 10, ran.out());
+    assertEquals("grid", result.at("/refusals/0/to").asText());
   }
 
   @Test
