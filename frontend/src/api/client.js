@@ -197,6 +197,15 @@ export function sheetAddress(searchId, placementId, type, options = {}) {
 }
 
 /**
+ * A sheet from its address.
+ * @param {string} address as `sheetAddress` gives it
+ * @returns {Promise<Blob>}
+ */
+export async function heldSheet(address) {
+  return (await call('GET', address, { headers: { Accept: '*/*' } })).blob();
+}
+
+/**
  * The sheet of a placement the server no longer holds.
  * @param {any} plan
  * @param {any} placement

@@ -35,7 +35,7 @@ export function mount(root, store, shell) {
     const shown = open.all || result.placements.length === 0 ? refusals : refusals.slice(0, SHOWN_AT_FIRST);
     return [
       html('div', { class: 'line part-head' },
-        html('h3', {}, `${count(counts.refused)} refused`),
+        html('h2', {}, `${count(counts.refused)} refused`),
         refusals.length > SHOWN_AT_FIRST ? html('button', {
           type: 'button', class: 'link', 'data-key': 'all', 'aria-expanded': String(open.all), onclick: () => {
             open.all = !open.all;

@@ -27,6 +27,8 @@ export function mount(root, store, shell) {
   const choice = { paper: 'A4' };
   /** @type {Loaded} */
   let loaded = { key: '', model: null, drawing: null, error: null };
+  /** What went wrong with a download. @type {string|null} */
+  let trouble = null;
   const ask = redrawer(root, () => render(store.get()));
   store.subscribe((state) => [state.place, state.chosen, state.search, state.units, state.plan], () => {
     if (store.get().place !== 'sheet') return;
@@ -47,9 +49,7 @@ export function mount(root, store, shell) {
     loaded = { key, model: null, drawing: null, error: null };
     const options = { paper: choice.paper, units: state.units };
     try {
-      const [list, drawing] = await Promise.all([
-        shell.api.sheet(planOf(state), placement, 'json', options), shell.api.sheet(planOf(state), placement, 'svg', options),
-      ]);
+      const [list, drawing] = await Promise.all([part(state, placement, 'json', options), part(state, placement, 'svg', options)]);
       const model = JSON.parse(await list.text());
       if (loaded.key !== key) return;
       loaded = { key, model, drawing: URL.createObjectURL(drawing), error: null };
@@ -98,9 +98,43 @@ export function mount(root, store, shell) {
       html('p', { class: 'soft' }, state.units === 'm' ? 'Lengths in metres; change them at the head of the page.' : 'Lengths in feet and inches; change them at the head of the page.'),
       isStale(state) ? html('p', {}, stateMark('tight', 'Out of date'), ' The plan has changed since the search; this sheet is of the plan as it was searched.') : null,
       html('div', { class: 'downloads' },
-        html('h3', {}, 'Download'),
-        html('ul', {}, ...FORMATS.map(([type, words]) => html('li', {}, downloadButton(state, placement, type, words))))),
+        html('h2', {}, 'Download'),
+        html('ul', {}, ...FORMATS.map(([type, words]) => html('li', {}, downloadLink(state, placement, type, words)))),
+        trouble ? html('p', { class: 'problem', role: 'alert' }, stateMark('foul', 'Error'), ` ${trouble}`) : null),
       html('button', { type: 'button', class: 'go', 'data-key': 'print', disabled: !loaded.model, onclick: () => window.print() }, 'Print'));
+  }
+
+  /**
+   * One format of the sheet: by its address while the server holds the search, which knows when the plan was saved;
+   * a placement made by hand, or one of a search the server has forgotten, is sent along.
+   * @param {State} state
+   * @param {any} placement
+   * @param {typeof FORMATS[number][0]} type
+   * @param {{paper: string, units: string}} options
+   * @returns {Promise<Blob>}
+   */
+  async function part(state, placement, type, options) {
+    const address = heldAddress(state, placement, type, options);
+    if (address !== null) {
+      try {
+        return await shell.api.heldSheet(address);
+      } catch (problem) {
+        if (/** @type {any} */ (problem).status !== 404) throw problem;
+      }
+    }
+    return shell.api.sheet(planOf(state), placement, type, options);
+  }
+
+  /**
+   * @param {State} state
+   * @param {any} placement
+   * @param {typeof FORMATS[number][0]} type
+   * @param {{paper: string, units: string}} options
+   * @returns {string|null}
+   */
+  function heldAddress(state, placement, type, options) {
+    const held = state.search.id !== null && state.search.result && !placement.madeFrom;
+    return held ? shell.api.sheetAddress(/** @type {string} */ (state.search.id), placement.id, type, options) : null;
   }
 
   /**
@@ -109,33 +143,40 @@ export function mount(root, store, shell) {
    * @param {typeof FORMATS[number][0]} type
    * @param {string} words
    */
-  function downloadButton(state, placement, type, words) {
+  function downloadLink(state, placement, type, words) {
+    const { latitude, longitude } = planOf(state).site ?? {};
+    if (type === 'geojson' && (typeof latitude !== 'number' || typeof longitude !== 'number')) {
+      return html('span', { class: 'soft no-download' }, `${words}: give the site its latitude and longitude in the survey first.`);
+    }
     const name = fileName(planOf(state), placement, type);
     const options = { paper: choice.paper, units: state.units };
-    const held = state.search.id !== null && state.search.result && !placement.madeFrom;
-    if (held) {
-      return html('a', { href: shell.api.sheetAddress(/** @type {string} */ (state.search.id), placement.id, type, options), download: name, 'data-key': `get-${type}` }, words, html('span', { class: 'soft' }, name));
-    }
-    return html('button', { type: 'button', class: 'link', 'data-key': `get-${type}`, onclick: () => fetchAndSave(planOf(state), placement, type, options, name) }, words, html('span', { class: 'soft' }, name));
+    return html('a', {
+      href: heldAddress(state, placement, type, options) ?? '#sheet', download: name, 'data-key': `get-${type}`,
+      onclick: (/** @type {Event} */ event) => {
+        event.preventDefault();
+        void save(state, placement, type, options, name);
+      },
+    }, words, html('span', { class: 'soft' }, name));
   }
 
   /**
-   * A placement made by hand is not held by the server under an address: it is sent, and the answer saved.
-   * @param {any} plan
+   * Fetched first and saved then, so that it gets the plot's name, and a trouble is told in the place.
+   * @param {State} state
    * @param {any} placement
    * @param {typeof FORMATS[number][0]} type
    * @param {{paper: string, units: string}} options
    * @param {string} name
    */
-  async function fetchAndSave(plan, placement, type, options, name) {
+  async function save(state, placement, type, options, name) {
+    trouble = null;
     try {
-      const address = URL.createObjectURL(await shell.api.sheet(plan, placement, type, options));
+      const address = URL.createObjectURL(await part(state, placement, type, options));
       html('a', { href: address, download: name }).click();
       setTimeout(() => URL.revokeObjectURL(address), 10000);
     } catch (problem) {
-      loaded = { ...loaded, error: /** @type {Error} */ (problem).message };
-      ask();
+      trouble = `${name} could not be made. ${/** @type {Error} */ (problem).message}`;
     }
+    ask();
   }
 
   /** @param {State} state */
@@ -162,6 +203,6 @@ export function mount(root, store, shell) {
  * @returns {string} "corner-lot-p01.pdf"
  */
 export function fileName(plan, placement, type) {
-  const title = (plan.title ?? '').normalize('NFKD').replace(/[\u0300-\u036f]/g, '').toLowerCase().replace(/[^a-z0-9]+/g, '-').replace(/^-|-$/g, '').slice(0, 32).replace(/-$/, '') || 'plot';
+  const title = (plan.title ?? '').normalize('NFKD').replace(/[\u0300-\u036f]/g, '').replace(/['’]/g, '').toLowerCase().replace(/[^a-z0-9]+/g, '-').replace(/^-|-$/g, '').slice(0, 48).replace(/-$/, '') || 'plot';
   return `${title}-${placement.id}.${type}`;
 }
