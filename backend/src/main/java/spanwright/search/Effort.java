@@ -8,9 +8,9 @@ import java.util.Optional;
  * any machine and with any number of threads.
  */
 public enum Effort {
-  QUICK(6, 1, 2, 4_000, 1_600, 100, 16),
-  NORMAL(14, 2, 3, 16_000, 8_000, 800, 120),
-  THOROUGH(30, 3, 5, 60_000, 24_000, 3_000, 1_000);
+  QUICK(6, 1, 2, 4_000, 1_600, 100, 16, 10),
+  NORMAL(14, 2, 3, 16_000, 8_000, 800, 120, 24),
+  THOROUGH(30, 3, 5, 60_000, 24_000, 3_000, 1_000, 40);
 
   /** Places tried in each mast zone, and along each bracket line a third of that. */
   final int mastPlaces;
@@ -33,7 +33,18 @@ public enum Effort {
   /** Placements assessed in full at most. */
   final int full;
 
-  Effort(int mastPlaces, int heights, int lengths, int considered, int hung, int coarse, int full) {
+  /** Refusals explained, with their cures, at most. */
+  final int refusals;
+
+  Effort(
+      int mastPlaces,
+      int heights,
+      int lengths,
+      int considered,
+      int hung,
+      int coarse,
+      int full,
+      int refusals) {
     this.mastPlaces = mastPlaces;
     this.heights = heights;
     this.lengths = lengths;
@@ -41,6 +52,7 @@ public enum Effort {
     this.hung = hung;
     this.coarse = coarse;
     this.full = full;
+    this.refusals = refusals;
   }
 
   /** The word in files and on the command line. */

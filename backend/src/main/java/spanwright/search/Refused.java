@@ -1,70 +1,102 @@
 package spanwright.search;
 
 import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
+import java.util.TreeSet;
 import spanwright.assess.Assessor;
 import spanwright.assess.Hung;
 import spanwright.clearance.Clearance;
 import spanwright.clearance.Refusal;
 import spanwright.clearance.State;
+import spanwright.plan.Place;
+import spanwright.rigging.Layout;
 
 /**
- * Keeps what was refused: the most promising for every pair of holding points and thing in the way,
- * so that a reader sees each obstacle once for each idea and not a thousand times. Cures are worked
- * out at the end, for those that are kept.
+ * Keeps what was refused: the most promising for every idea and thing in the way, so that a reader
+ * sees each obstacle once for each idea and not a thousand times. Cures are worked out at the end,
+ * for those that are kept: each costs dozens of hangings.
  */
 final class Refused {
-  /** Refusals in a document. */
-  static final int MOST = 40;
-
   /** Refusals for the same rule and thing. */
   private static final int PER_OBSTACLE = 4;
 
-  private record Kept(Candidate candidate, Hung hung) {}
+  private record Kept(Hung hung, String obstacle, int fouls) {}
 
   private final Map<String, Kept> byIdea = new LinkedHashMap<>();
 
   /** Offers one; call in the order of the candidates, best promise first. */
   void offer(Candidate candidate, Hung hung) {
-    String idea = candidate.family() + "/" + obstacle(hung);
-    byIdea.putIfAbsent(idea, new Kept(candidate, hung));
-  }
-
-  private static String obstacle(Hung hung) {
+    Set<String> fouls = new TreeSet<>();
+    String first = null;
     for (Clearance clearance : hung.clearances()) {
       if (clearance.state() == State.FOUL) {
-        return clearance.rule() + ":" + clearance.to();
+        first = first == null ? clearance.rule() + ":" + clearance.to() : first;
+        fouls.add(clearance.rule() + ":" + clearance.to());
       }
     }
-    return hung.rigged().shortcomings().isEmpty()
-        ? ""
-        : hung.rigged().shortcomings().get(0).rule()
-            + ":"
-            + hung.rigged().shortcomings().get(0).to();
+    for (var shortcoming : hung.rigged().shortcomings()) {
+      String what = shortcoming.rule() + ":" + shortcoming.to();
+      first = first == null ? what : first;
+      fouls.add(what);
+    }
+    if (first != null) {
+      Kept kept = new Kept(hung, first, fouls.size());
+      byIdea.merge(candidate.family() + "/" + first, kept, (a, b) -> b.fouls < a.fouls ? b : a);
+    }
   }
 
-  /** The refusals of a document, with their cures. */
-  List<Refusal> list(Assessor assessor) {
-    List<Refusal> refusals = new ArrayList<>();
-    Map<String, Integer> perObstacle = new LinkedHashMap<>();
-    Set<String> said = new HashSet<>();
-    for (Map.Entry<String, Kept> entry : byIdea.entrySet()) {
-      String obstacle = obstacle(entry.getValue().hung);
-      if (refusals.size() >= MOST || perObstacle.merge(obstacle, 1, Integer::sum) > PER_OBSTACLE) {
-        continue;
-      }
-      for (Refusal refusal : assessor.refuse(entry.getValue().hung)) {
-        boolean first = said.add(refusal.attachments() + refusal.rule() + refusal.to());
-        if (first && refusals.size() < MOST) {
-          refusals.add(refusal);
-          break;
-        }
+  /** The refusals of a document, with their cures: first those that least stands in the way of. */
+  List<Refusal> list(Assessor assessor, Workers workers, int most) {
+    List<Kept> ordered = new ArrayList<>(byIdea.values());
+    ordered.sort(Comparator.comparingInt(Kept::fouls));
+    Map<String, Integer> perObstacle = new HashMap<>();
+    List<Kept> chosen = new ArrayList<>();
+    for (Kept kept : ordered) {
+      if (chosen.size() < most
+          && perObstacle.merge(kept.obstacle, 1, Integer::sum) <= PER_OBSTACLE) {
+        chosen.add(kept);
       }
     }
+    List<Optional<Refusal>> found =
+        workers.map(chosen, kept -> assessor.refuse(kept.hung).stream().findFirst(), () -> {});
+    Set<String> said = new HashSet<>();
+    List<Refusal> refusals = new ArrayList<>();
+    for (Optional<Refusal> refusal : found) {
+      refusal
+          .filter(r -> said.add(r.attachments() + r.shape() + r.rule() + r.to()))
+          .ifPresent(r -> refusals.add(rounded(r)));
+    }
     return refusals;
+  }
+
+  private static Refusal rounded(Refusal r) {
+    return new Refusal(
+        r.attachments(),
+        r.shape(),
+        r.rule(),
+        r.to(),
+        r.what(),
+        rounded(r.at()),
+        millimetres(r.distance()),
+        millimetres(r.required()),
+        r.reason(),
+        r.cure(),
+        r.cured().stream().map(hold -> new Layout.Hold(hold.on(), rounded(hold.at()))).toList(),
+        r.wire().stream().map(points -> points.stream().map(Refused::rounded).toList()).toList());
+  }
+
+  private static Place rounded(Place p) {
+    return new Place(millimetres(p.x()), millimetres(p.y()), millimetres(p.z()));
+  }
+
+  private static double millimetres(double metres) {
+    return Math.round(metres * 1000) / 1000.0 + 0.0;
   }
 }

@@ -101,7 +101,8 @@ public final class Search {
     Search search = new Search(plan, catalogue, options, listener);
     try (Workers workers = new Workers(options.threads(), listener::cancelled)) {
       List<Placement> ranked = search.rank(workers);
-      List<Refusal> why = search.refused.list(search.assessor);
+      search.say(0.98, "working out what would cure the refusals");
+      List<Refusal> why = search.refused.list(search.assessor, workers, options.effort().refusals);
       double seconds = Math.round((System.nanoTime() - start) / 1e7) / 100.0;
       return search.result(ranked, why, seconds);
     } catch (Workers.Cancelled e) {
