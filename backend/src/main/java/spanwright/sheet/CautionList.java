@@ -28,7 +28,7 @@ final class CautionList {
     list.addPulls();
     list.addPermissions();
     list.addStanding();
-    return list.cautions;
+    return list.cautions.stream().distinct().toList();
   }
 
   private void press(String text) {
@@ -74,9 +74,7 @@ final class CautionList {
               + " to "
               + thing
               + ": "
-              + job.figures.found(c.distance())
-              + " of "
-              + job.figures.required(c.required())
+              + job.figures.foundOf(c.distance(), c.required())
               + (job.figures.unit().equals("m") ? " m, " : ", ")
               + (c.state() == State.TIGHT ? "tight. Look again each spring." : "foul."));
     }

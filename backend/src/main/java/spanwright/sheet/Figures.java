@@ -66,6 +66,31 @@ final class Figures {
         : fixed(Math.ceil(metres * 100 - CRUMB) / 100, 2);
   }
 
+  /**
+   * A distance found of one required. Where rounding would turn which is the greater, both are told
+   * to the millimetre.
+   */
+  String foundOf(double found, double required) {
+    boolean enough = found >= required;
+    long least = (long) Math.floor(found / rounding() + CRUMB);
+    long most = (long) Math.ceil(required / rounding() - CRUMB);
+    if (enough == least >= most) {
+      return found(found) + " of " + required(required);
+    }
+    double down = Math.floor(found * 1000 + CRUMB) / 1000;
+    double up = Math.ceil(required * 1000 - CRUMB) / 1000;
+    if (enough && down < up) {
+      down = up;
+    }
+    return feet
+        ? whole(down * 1000) + " of " + whole(up * 1000) + " mm"
+        : fixed(down, 3) + " of " + fixed(up, 3);
+  }
+
+  private double rounding() {
+    return feet ? INCH : 0.01;
+  }
+
   /** A length to cut: never shorter than it is, to 10 mm or the inch. */
   String cut(double metres) {
     return required(metres);

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import spanwright.assess.Placement;
 import spanwright.plan.MatchingChoice;
 import spanwright.plan.MatchingKind;
@@ -32,9 +33,17 @@ final class HardwareList {
   }
 
   private void add(String what, int count, int spares, String note) {
-    if (count > 0) {
-      items.add(new SheetModel.Item(what, count, null, spares, note));
+    if (count <= 0) {
+      return;
     }
+    for (int i = 0; i < items.size(); i++) {
+      SheetModel.Item old = items.get(i);
+      if (old.what().equals(what) && Objects.equals(old.note(), note)) {
+        items.set(i, new SheetModel.Item(what, old.count() + count, null, spares, note));
+        return;
+      }
+    }
+    items.add(new SheetModel.Item(what, count, null, spares, note));
   }
 
   /** Totals by kind, which is how wire and rope are bought. */

@@ -148,7 +148,16 @@ final class Job {
   /** The name of an attachment as the rigger calls it. */
   String holder(Placement.Attachment held) {
     String name = name(held.on());
-    return zone(held.on()).isPresent() ? "New mast, " + name : name;
+    if (zone(held.on()).isEmpty()) {
+      return name;
+    }
+    return mastOf(held).map(this::mastName).orElse("New mast") + ", " + name;
+  }
+
+  /** "New mast", numbered when there are several. */
+  String mastName(Placement.NewMast mast) {
+    int number = placement.masts().indexOf(mast) + 1;
+    return placement.masts().size() > 1 ? "New mast " + number : "New mast";
   }
 
   /** True bearing from one point to another [degrees, 0 to 360]. */

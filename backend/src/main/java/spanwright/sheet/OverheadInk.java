@@ -1,7 +1,9 @@
 package spanwright.sheet;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
+import java.util.stream.Collectors;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.LineString;
 import org.locationtech.jts.geom.Polygon;
@@ -43,7 +45,7 @@ final class OverheadInk {
     if (seen.isEmpty()) {
       return;
     }
-    Hatching.draw(pen, seen, 1.9, false, 0.1, 0.4);
+    Hatching.draw(pen, seen, 1.9, false, 0.13, 0.45);
     for (int i = 0; i < area.getNumGeometries(); i++) {
       if (area.getGeometryN(i) instanceof Polygon part) {
         pen.area(Hatching.outline(part), 0.2, 0.85, Ink.NONE, 2, 0.9);
@@ -66,7 +68,7 @@ final class OverheadInk {
     labels.ask(30, spots);
   }
 
-  /** The line with its zig-zag, its name along it, its heights at its points. */
+  /** The line with its zig-zag and its name along it. */
   void line(OverheadLine line) {
     boolean telephone = line.kind() == OverheadLine.Kind.TELEPHONE;
     SheetModel.Line row = row(line);
@@ -83,26 +85,59 @@ final class OverheadInk {
         double[] at = SurveyInk.along(piece, share);
         for (double off : new double[] {-3, 3, -5, 5}) {
           spots.add(
-              Labels.text(
-                  at[0] - at[3] * off,
-                  at[1] + at[2] * off,
-                  words,
-                  SurveyInk.BODY,
-                  true,
-                  Labels.along(at[2], at[3]),
-                  Math.abs(share - 0.5) + Math.abs(off) / 10));
+              own(
+                  line,
+                  Labels.text(
+                      at[0] - at[3] * off,
+                      at[1] + at[2] * off,
+                      words,
+                      SurveyInk.BODY,
+                      true,
+                      Labels.along(at[2], at[3]),
+                      Math.abs(share - 0.5) + Math.abs(off) / 10)));
         }
       }
     }
     labels.ask(10, spots);
-    for (Place p : line.path()) {
+  }
+
+  /** Dearer where the words would stand nearer to another line than to their own. */
+  private Labels.Spot own(OverheadLine line, Labels.Spot spot) {
+    double near = Labels.line(frame.places(line.path())).distance(spot.box());
+    boolean taken =
+        model.source().plan().overheadLines().stream()
+            .filter(other -> other != line && other.path().size() > 1)
+            .anyMatch(
+                other -> Labels.line(frame.places(other.path())).distance(spot.box()) < near + 0.3);
+    return taken ? new Labels.Spot(spot.box(), spot.cost() + 20, spot.lines(), spot.paint()) : spot;
+  }
+
+  /** Heights at the points of every line; where several meet, from the highest down. */
+  void heights() {
+    List<Place> points =
+        model.source().plan().overheadLines().stream().flatMap(l -> l.path().stream()).toList();
+    List<Place> told = new ArrayList<>();
+    for (Place p : points) {
       double[] at = frame.at(p);
-      if (frame.holds(at, 0)) {
-        pen.circle(at[0], at[1], 0.75, 0.2, 1, 1);
-        labels.ask(
-            12, Labels.around(at[0], at[1], figures.height(p.z()), SurveyInk.BODY, true, 1.6));
+      if (!frame.holds(at, 0) || told.stream().anyMatch(q -> together(p, q))) {
+        continue;
       }
+      told.add(p);
+      pen.circle(at[0], at[1], 0.75, 0.2, 1, 1);
+      String text =
+          points.stream()
+              .filter(q -> together(p, q))
+              .map(Place::z)
+              .sorted(Comparator.reverseOrder())
+              .map(figures::height)
+              .distinct()
+              .collect(Collectors.joining(" / "));
+      labels.ask(12, Labels.around(at[0], at[1], text, SurveyInk.BODY, true, 1.6));
     }
+  }
+
+  private static boolean together(Place p, Place q) {
+    return p.onPlan().distance(q.onPlan()) < 0.5;
   }
 
   /** The pieces of a path on paper that show in the window. */

@@ -85,9 +85,7 @@ final class RigTables {
     if (reach == null) {
       return Setting.Cell.of(line.nearest() == null ? "no figure" : "does not arise");
     }
-    return Setting.Cell.state(
-        figures.found(reach.distance()) + " of " + figures.required(reach.required()),
-        reach.state());
+    return Setting.Cell.state(figures.foundOf(reach.distance(), reach.required()), reach.state());
   }
 
   Flow.Block wire() {

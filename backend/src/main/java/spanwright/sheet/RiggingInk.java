@@ -200,9 +200,7 @@ final class RiggingInk {
               case MAST_FALLS -> " if a mast falls";
             };
         String text =
-            figures.found(c.distance())
-                + " of "
-                + figures.required(c.required())
+            figures.foundOf(c.distance(), c.required())
                 + (overhead(c) ? how : "")
                 + (c.state() == State.TIGHT ? ", tight" : ", foul");
         distance(c, text, 20);

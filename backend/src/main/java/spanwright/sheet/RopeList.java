@@ -177,7 +177,7 @@ final class RopeList {
               "G" + ++guys,
               kindId == null ? "" : kindId,
               kindId == null ? "guy rope" : job.rope(kindId).name(),
-              "ring at the head of the new mast, " + job.name(mast.zone()),
+              "ring at the head of " + lower(job.mastName(mast)) + ", " + job.name(mast.zone()),
               null,
               "peg, " + Job.wind(job.bearing(mast.foot().onPlan(), foot.onPlan())),
               "hitched at the peg",
@@ -191,5 +191,9 @@ final class RopeList {
     var points = guy.points();
     return points.get(points.size() - 1).onPlan().distance(foot.onPlan()) < 0.05
         || points.get(0).onPlan().distance(foot.onPlan()) < 0.05;
+  }
+
+  private static String lower(String text) {
+    return Character.toLowerCase(text.charAt(0)) + text.substring(1);
   }
 }

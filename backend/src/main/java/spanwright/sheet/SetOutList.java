@@ -3,6 +3,7 @@ package spanwright.sheet;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 import java.util.stream.Collectors;
 import spanwright.assess.Placement;
 import spanwright.plan.Building;
@@ -88,7 +89,10 @@ final class SetOutList {
     for (Placement.NewMast mast : job.placement.masts()) {
       for (Place foot : mast.guyFeet()) {
         String wind = Job.wind(job.bearing(mast.foot().onPlan(), foot.onPlan()));
-        wanted.add(new Wanted("Guy, " + wind, job.onGround(foot.onPlan()), 0));
+        String of = job.placement.masts().size() > 1 ? " of " + job.mastName(mast) : "";
+        wanted.add(
+            new Wanted(
+                "Guy" + of.toLowerCase(Locale.ROOT) + ", " + wind, job.onGround(foot.onPlan()), 0));
       }
     }
     Place feed = job.placement.feed().at();
@@ -235,10 +239,10 @@ final class SetOutList {
     for (SheetModel.Known known : List.of(a, b)) {
       Building building = job.between(known.at().onPlan(), at.onPlan());
       if (building != null) {
-        found.add(job.name(building.id()) + " stands between it and " + known.letter());
+        found.add("from " + known.letter() + " by " + job.name(building.id()));
       }
     }
-    return found.isEmpty() ? null : String.join("; ", found);
+    return found.isEmpty() ? null : "hidden " + String.join(", ", found);
   }
 
   /** The pair of known points in sight that cross nearest to square, lettered points first. */

@@ -158,10 +158,9 @@ final class SideInk {
 
   /** What holds each attachment, from the ground up. */
   private void holders() {
-    for (Leg leg : legs) {
-      holder(leg, leg.span().from(), leg.start());
-      holder(leg, leg.span().to(), leg.start() + leg.length());
-    }
+    Leg last = legs.get(legs.size() - 1);
+    legs.forEach(leg -> holder(leg, leg.span().from(), leg.start()));
+    holder(last, last.span().to(), last.start() + last.length());
   }
 
   private void holder(Leg leg, int index, double s) {

@@ -46,6 +46,7 @@ final class SurveyInk {
     boundary();
     plan.metalwork().forEach(this::metal);
     plan.overheadLines().forEach(overhead::line);
+    overhead.heights();
     plan.supports().forEach(this::support);
   }
 

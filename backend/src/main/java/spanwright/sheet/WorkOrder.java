@@ -66,7 +66,8 @@ final class WorkOrder {
   }
 
   private void raise(Placement.NewMast mast) {
-    String where = "mast in " + job.name(mast.zone());
+    String number = job.mastName(mast).substring("New ".length());
+    String where = number + " in " + job.name(mast.zone());
     String height = job.figures.sayHeight(mast.height());
     Optional<Clearance> line = nearestPowerLine(mast);
     String guys =

@@ -156,7 +156,7 @@ final class WorkTables {
               Setting.Cell.of(e.band()),
               Setting.Cell.of(Figures.fixed(e.frequency(), 3)),
               Setting.Cell.of(Figures.impedance(e.resistance(), e.reactance())),
-              Setting.Cell.of(Figures.fixed(e.lineSwr(), 1)),
+              Setting.Cell.of(Figures.fixed(e.lineSwr(), e.lineSwr() < 100 ? 1 : 0)),
               e.match() == null ? Setting.Cell.of("–") : Setting.Cell.state("", e.match())));
     }
     return Setting.table(

@@ -20,6 +20,17 @@ class FiguresTest {
   }
 
   @Test
+  void rounding_never_turns_enough_into_too_little_or_the_other_way_round() {
+    assertEquals("4.45 of 3.05", metres.foundOf(4.456, 3.05));
+    assertEquals("0.079 of 0.079", metres.foundOf(0.0788, 0.0788));
+    assertEquals("0.08 of 0.08", metres.foundOf(0.0815, 0.0788));
+    assertEquals("3.04 of 3.05", metres.foundOf(3.0499, 3.05));
+    assertEquals("3.05 of 3.05", metres.foundOf(3.05, 3.05));
+    assertEquals("3051 of 3050 mm", feet.foundOf(3.0515, 3.05));
+    assertEquals("33′ 5″ of 33′ 0″", feet.foundOf(10.19, 10.05));
+  }
+
+  @Test
   void feet_and_inches_read_as_a_tape_does() {
     assertEquals("12′ 4″", feet.length(12 * 0.3048 + 4 * 0.0254));
     assertEquals("0′ 6½″", feet.length(0.1651));

@@ -129,7 +129,7 @@ class SetOutTest {
     SheetModel.SetOut front =
         model(List.of(new Datum("A", new Point(4, 0)), new Datum("B", new Point(20, 0)))).setOut();
     SheetModel.Mark pole = front.points().get(1);
-    assertTrue(pole.blocked().contains("House stands between it and A"), pole.blocked());
+    assertTrue(pole.blocked().contains("from A by House"), pole.blocked());
     assertNotNull(pole.better());
     assertNull(setOut.points().get(0).blocked());
   }
