@@ -299,12 +299,16 @@ final class Hang {
       boolean room = pulls[i] > floors[i] * (1 + 1e-9) && !spans.get(i).slackerThanAsked;
       if (factor[i] < 1 && room) {
         // A tied span's pull in the gust follows its calm pull only in part.
-        double step = Math.max(0.5, spans.get(i).byWeight ? factor[i] : factor[i] * factor[i]);
+        double step = Math.max(0.5, isTied(i) ? factor[i] * factor[i] : factor[i]);
         pulls[i] = Math.max(floors[i], pulls[i] * step);
         changed = true;
       }
     }
     return changed;
+  }
+
+  private boolean isTied(int i) {
+    return !spans.get(i).byWeight || spans.get(i).lifted;
   }
 
   /** Whole force on an attachment in calm air. */

@@ -225,18 +225,11 @@ final class Shortcomings {
           say("Shorten the wire by %.1f m.", over));
     }
     if (statics.lifted) {
-      add(
-          "hangs",
-          hang.holders.get(statics.pullAtEnd ? i + 1 : i).id(),
-          "counterweight",
-          statics.pullAtEnd ? statics.make.to() : statics.make.from(),
-          statics.pull,
-          statics.pull,
+      notes.add(
           say(
-              "A counterweight of %.1f kg cannot hold this span in the gust: the wind would pull it"
-                  + " up to its pulley.",
-              statics.pull / Hanging.GRAVITY),
-          null);
+              "In the design gust the counterweight at %s is drawn up: tie a stop into its rope at"
+                  + " the pulley, from where the span holds as if tied.",
+              hang.holders.get(statics.pullAtEnd ? i + 1 : i).name()));
     }
   }
 
