@@ -76,7 +76,7 @@ public record Rigged(
    * A radiating conductor.
    *
    * @param wire catalogue id
-   * @param length finished length, unstretched [m]
+   * @param length finished length, as it hangs [m]
    * @param shapes at most 60 points
    */
   public record Conductor(String wire, double length, Shapes shapes) {}
@@ -120,7 +120,7 @@ public record Rigged(
    * @param sag greatest drop below the straight chord, calm [m]
    * @param sagInWind likewise in the worse gust [m]
    * @param blowOut greatest sideways shift in the gust [m]
-   * @param wireLength finished length of the wire in it, unstretched [m]
+   * @param wireLength finished length of the wire in it, as it hangs [m]
    * @param ropeFrom length of rope at its first end [m]
    * @param ropeTo length of rope at its second end [m]
    * @param freeFrom rope beyond the first attachment that would come free with it [m]

@@ -56,6 +56,7 @@ final class SpanStatics {
   private final double dy;
   private final double dz;
   private final boolean adjustTo;
+  private final double[] calmLengths = new double[4];
   private double feedWeight;
   private double feedPush;
   private double iceFeedWeight;
@@ -144,35 +145,39 @@ final class SpanStatics {
     load(false, false);
     double least = make.ropeFrom() < 0.01 && make.ropeTo() < 0.01 ? 0 : Practice.SHORTEST_TAIL;
     Tightening tightening = new Tightening(chain, dx, dy, dz);
-    double slack = tightening.toPull(pull, pullAtEnd, s -> setRope(s, pull));
+    double slack = tightening.toPull(pull, pullAtEnd, s -> setRope(chordLength + s, pull));
     double free = adjustTo ? ropeTo : ropeFrom;
     double drawn = adjustTo ? make.ropeTo() : make.ropeFrom();
     least = Math.min(least, drawn);
     if (Double.isNaN(slack) || free < least) {
       // The wire is longer than this pull leaves room for: it hangs as long as it is.
       slackerThanAsked = true;
-      setFreeRope(least);
+      setFreeRope(least, 0);
       tightening.asLong(chain.totalLength() - chordLength);
       pull = pullAtEnd ? chain.tensionAtEnd() : chain.tensionAtStart();
     }
+    System.arraycopy(chain.length, 0, calmLengths, 0, 4);
   }
 
-  private void setRope(double slack, double tension) {
+  /** Sets the free rope so that everything, stretched by the tension, is so long. */
+  private void setRope(double stretched, double tension) {
     double fixed = adjustTo ? make.ropeFrom() : make.ropeTo();
-    double wire = make.wire() + make.wireAfter();
-    double others =
-        fixed * (1 + tension / materials.ropeStiffness())
-            + wire * (1 + tension / materials.wireStiffness());
-    setFreeRope((chordLength + slack - others) / (1 + tension / materials.ropeStiffness()));
+    setFreeRope(stretched - fixed - make.wire() - make.wireAfter(), tension);
   }
 
-  private void setFreeRope(double free) {
+  /**
+   * Wire and ropes as drawn are as long as they hang; unstretched they are shorter by what the
+   * tension stretches them.
+   */
+  private void setFreeRope(double free, double tension) {
     ropeFrom = adjustTo ? make.ropeFrom() : free;
     ropeTo = adjustTo ? free : make.ropeTo();
-    chain.length[0] = Math.max(0, ropeFrom);
-    chain.length[1] = make.wire();
-    chain.length[2] = make.wireAfter();
-    chain.length[3] = Math.max(0, ropeTo);
+    double rope = 1 + tension / materials.ropeStiffness();
+    double wire = 1 + tension / materials.wireStiffness();
+    chain.length[0] = Math.max(0, ropeFrom) / rope;
+    chain.length[1] = make.wire() / wire;
+    chain.length[2] = make.wireAfter() / wire;
+    chain.length[3] = Math.max(0, ropeTo) / rope;
     // While the solver gropes, a rope shorter than nothing is taken off the wire beside it.
     if (free < 0) {
       int beside = adjustTo ? (make.wireAfter() > 0 ? 2 : 1) : 1;
@@ -233,28 +238,25 @@ final class SpanStatics {
 
   /** Hangs it in the gust, or under ice alone, from its calm lengths. */
   Solved loaded(boolean gust, boolean iced) {
-    double calmFree = adjustTo ? ropeTo : ropeFrom;
     double keepFrom = ropeFrom;
     double keepTo = ropeTo;
     load(gust, iced);
     double[] d = offset(gust);
+    double chordNow = Math.sqrt(d[0] * d[0] + d[1] * d[1] + dz * dz);
     Tightening tightening = new Tightening(chain, d[0], d[1], dz);
-    boolean free = byWeight && !slackerThanAsked && adjustTo == pullAtEnd;
-    if (free) {
-      double chordNow = Math.sqrt(d[0] * d[0] + d[1] * d[1] + dz * dz);
-      double slack =
-          tightening.toPull(pull, pullAtEnd, s -> setRope(s + chordNow - chordLength, pull));
-      lifted = Double.isNaN(slack);
-      free = !lifted;
+    boolean runs = byWeight && !slackerThanAsked && adjustTo == pullAtEnd;
+    if (runs) {
+      double slack = tightening.toPull(pull, pullAtEnd, s -> setRope(chordNow + s, pull));
+      lifted |= Double.isNaN(slack);
+      runs = !Double.isNaN(slack);
     }
-    if (!free) {
-      setFreeRope(calmFree);
-      double chordNow = Math.sqrt(d[0] * d[0] + d[1] * d[1] + dz * dz);
+    if (!runs) {
+      System.arraycopy(calmLengths, 0, chain.length, 0, 4);
       tightening.asLong(chain.totalLength() - chordNow);
     }
     Solved solved = keep(gust);
     if (gust) {
-      weightTravel = free ? (adjustTo ? ropeTo : ropeFrom) - calmFree : 0;
+      weightTravel = runs ? (adjustTo ? ropeTo - keepTo : ropeFrom - keepFrom) : 0;
     }
     ropeFrom = keepFrom;
     ropeTo = keepTo;
