@@ -23,11 +23,16 @@ const STEP = 0.1;
 export function alongWire(plan, placement) {
   const track = trackOf(placement.spans);
   const ground = groundOf(plan.site?.terrain?.spots ?? []);
-  const places = new Map(['supports', 'mastZones', 'bracketLines']
-    .flatMap((kind) => (plan[kind] ?? []).map((/** @type {any} */ thing) => [thing.id, { ...thing, is: kind }])));
+  const places = new Map(
+    ['supports', 'mastZones', 'bracketLines'].flatMap((kind) =>
+      (plan[kind] ?? []).map((/** @type {any} */ thing) => [thing.id, { ...thing, is: kind }]),
+    ),
+  );
   const stations = walk(track);
   /** @type {BuildingCut[]} */
-  const buildings = (plan.buildings ?? []).flatMap((/** @type {any} */ building) => cutBuilding(building, stations, ground));
+  const buildings = (plan.buildings ?? []).flatMap((/** @type {any} */ building) =>
+    cutBuilding(building, stations, ground),
+  );
   return {
     length: track.length,
     ground: stations.map(({ s, x, y }) => /** @type {Station} */ ([s, ground(x, y)])),
@@ -54,11 +59,13 @@ export function trackOf(spans) {
   let s = 0;
   /** @type {number[]|null} */
   let last = null;
-  const unrolled = spans.map((span) => span.points.map((/** @type {number[]} */ point, /** @type {number} */ index) => {
-    if (last && index > 0) s += Math.hypot(point[0] - last[0], point[1] - last[1]);
-    last = point;
-    return { s, x: point[0], y: point[1], z: point[2] };
-  }));
+  const unrolled = spans.map((span) =>
+    span.points.map((/** @type {number[]} */ point, /** @type {number} */ index) => {
+      if (last && index > 0) s += Math.hypot(point[0] - last[0], point[1] - last[1]);
+      last = point;
+      return { s, x: point[0], y: point[1], z: point[2] };
+    }),
+  );
   return { spans: unrolled, length: s };
 }
 
@@ -81,8 +88,10 @@ function walk(track) {
     return Array.from({ length: 40 }, (_, k) => {
       const more = (k + 1) * STEP;
       return {
-        s: to.s + way * more, z: NaN,
-        x: to.x + ((to.x - from.x) / length) * more, y: to.y + ((to.y - from.y) / length) * more,
+        s: to.s + way * more,
+        z: NaN,
+        x: to.x + ((to.x - from.x) / length) * more,
+        y: to.y + ((to.y - from.y) / length) * more,
       };
     });
   };
@@ -105,9 +114,11 @@ function unroll(track, points) {
       const [a, b] = [course[index - 1], course[index]];
       const [dx, dy] = [b.x - a.x, b.y - a.y];
       const square = dx * dx + dy * dy;
-      const share = square === 0 ? 0 : Math.min(1, Math.max(0, ((point[0] - a.x) * dx + (point[1] - a.y) * dy) / square));
-      const distance = Math.hypot(a.x + share * dx - point[0], a.y + share * dy - point[1])
-        + 0.01 * Math.abs(a.z + share * (b.z - a.z) - point[2]);
+      const share =
+        square === 0 ? 0 : Math.min(1, Math.max(0, ((point[0] - a.x) * dx + (point[1] - a.y) * dy) / square));
+      const distance =
+        Math.hypot(a.x + share * dx - point[0], a.y + share * dy - point[1]) +
+        0.01 * Math.abs(a.z + share * (b.z - a.z) - point[2]);
       if (distance < best.distance) best = { distance, s: a.s + share * (b.s - a.s) };
     }
     return /** @type {Station} */ ([best.s, point[2]]);
@@ -127,13 +138,17 @@ function holdsOf(placement, track, places, ground) {
     const after = track.spans[index];
     const s = after ? after[0].s : before ? before[before.length - 1].s : 0;
     const thing = places.get(hold.on) ?? { is: 'supports', kind: 'other' };
-    const mast = placement.masts.find((/** @type {any} */ one) => one.zone === hold.on
-      && Math.hypot(one.foot[0] - hold.at[0], one.foot[1] - hold.at[1]) < 0.5);
+    const mast = placement.masts.find(
+      (/** @type {any} */ one) =>
+        one.zone === hold.on && Math.hypot(one.foot[0] - hold.at[0], one.foot[1] - hold.at[1]) < 0.5,
+    );
     return {
-      s, top: hold.at[2], aboveGround: hold.aboveGround,
+      s,
+      top: hold.at[2],
+      aboveGround: hold.aboveGround,
       foot: mast ? mast.foot[2] : ground(hold.at[0], hold.at[1]),
       name: thing.name ?? hold.on,
-      kind: thing.is === 'mastZones' ? 'mast' : thing.is === 'bracketLines' ? 'wall' : thing.kind ?? 'other',
+      kind: thing.is === 'mastZones' ? 'mast' : thing.is === 'bracketLines' ? 'wall' : (thing.kind ?? 'other'),
       isNew: thing.is === 'mastZones',
     };
   });
@@ -145,17 +160,23 @@ function holdsOf(placement, track, places, ground) {
  * @returns {Station[][]} as far along the course as they reach, seen from the side
  */
 function guysOf(placement, track) {
-  return placement.ropes.filter((/** @type {any} */ rope) => rope.what === 'guy').map((/** @type {any} */ rope) => {
-    const head = rope.points[0];
-    const foot = rope.points[rope.points.length - 1];
-    const hold = track.spans[rope.attachment]?.[0] ?? track.spans[rope.attachment - 1]?.slice(-1)[0];
-    if (!hold) return [];
-    const span = track.spans[rope.attachment] ?? track.spans[rope.attachment - 1];
-    const [a, b] = [span[0], span[span.length - 1]];
-    const length = Math.hypot(b.x - a.x, b.y - a.y) || 1;
-    const along = ((foot[0] - head[0]) * (b.x - a.x) + (foot[1] - head[1]) * (b.y - a.y)) / length;
-    return [[hold.s, head[2]], [hold.s + along, foot[2]]];
-  }).filter((/** @type {Station[]} */ guy) => guy.length > 0);
+  return placement.ropes
+    .filter((/** @type {any} */ rope) => rope.what === 'guy')
+    .map((/** @type {any} */ rope) => {
+      const head = rope.points[0];
+      const foot = rope.points[rope.points.length - 1];
+      const hold = track.spans[rope.attachment]?.[0] ?? track.spans[rope.attachment - 1]?.slice(-1)[0];
+      if (!hold) return [];
+      const span = track.spans[rope.attachment] ?? track.spans[rope.attachment - 1];
+      const [a, b] = [span[0], span[span.length - 1]];
+      const length = Math.hypot(b.x - a.x, b.y - a.y) || 1;
+      const along = ((foot[0] - head[0]) * (b.x - a.x) + (foot[1] - head[1]) * (b.y - a.y)) / length;
+      return [
+        [hold.s, head[2]],
+        [hold.s + along, foot[2]],
+      ];
+    })
+    .filter((/** @type {Station[]} */ guy) => guy.length > 0);
 }
 
 /**
@@ -197,16 +218,24 @@ function cutBuilding(building, stations, ground) {
  */
 function canopiesOf(plan, placement, stations, ground) {
   const held = new Set(placement.attachments.map((/** @type {any} */ hold) => hold.on));
-  return [...(plan.supports ?? []), ...(plan.trees ?? [])].filter((tree) => tree.canopy).flatMap((tree) => {
-    const { radius, from, to } = tree.canopy;
-    const under = stations.filter(({ x, y }) => Math.hypot(x - tree.at[0], y - tree.at[1]) <= radius);
-    if (under.length < 2) return [];
-    const base = ground(tree.at[0], tree.at[1]);
-    return [{
-      s0: under[0].s, s1: under[under.length - 1].s, from: base + from, to: base + to,
-      name: tree.name ?? tree.id, own: held.has(tree.id),
-    }];
-  });
+  return [...(plan.supports ?? []), ...(plan.trees ?? [])]
+    .filter((tree) => tree.canopy)
+    .flatMap((tree) => {
+      const { radius, from, to } = tree.canopy;
+      const under = stations.filter(({ x, y }) => Math.hypot(x - tree.at[0], y - tree.at[1]) <= radius);
+      if (under.length < 2) return [];
+      const base = ground(tree.at[0], tree.at[1]);
+      return [
+        {
+          s0: under[0].s,
+          s1: under[under.length - 1].s,
+          from: base + from,
+          to: base + to,
+          name: tree.name ?? tree.id,
+          own: held.has(tree.id),
+        },
+      ];
+    });
 }
 
 /**

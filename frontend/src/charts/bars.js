@@ -26,8 +26,13 @@ export function rowBarsGeometry(bands, { width, height }) {
       const middle = pitch * (index + 0.5);
       const tip = y(overs[index]);
       return {
-        name: band.name, middle, x: middle - wide / 2, width: wide, below: overs[index] < 0,
-        y: Math.min(tip, y(0)), height: Math.max(1, Math.abs(tip - y(0))),
+        name: band.name,
+        middle,
+        x: middle - wide / 2,
+        width: wide,
+        below: overs[index] < 0,
+        y: Math.min(tip, y(0)),
+        height: Math.max(1, Math.abs(tip - y(0))),
       };
     }),
   };
@@ -46,19 +51,43 @@ const MARK_ROW = 11;
 export function rowBars(bands, size) {
   const { base, bars } = rowBarsGeometry(bands, size);
   const bad = bands.map((band) => (band.state && band.state !== 'clear' ? band.state : null));
-  const words = bands.map((band, index) => `${band.name} ${signed(band.over, 1)}${bad[index] ? ` (matching ${bad[index]})` : ''}`).join(', ');
+  const words = bands
+    .map((band, index) => `${band.name} ${signed(band.over, 1)}${bad[index] ? ` (matching ${bad[index]})` : ''}`)
+    .join(', ');
   const height = size.height + NAME_ROW + (bad.some((state) => state) ? MARK_ROW : 0);
-  return svg('svg', {
-    class: 'chart row-bars', viewBox: `0 0 ${size.width} ${height}`, width: size.width, height,
-    role: 'img', 'aria-label': `Over the reference, dB: ${words}`,
-  }, [
-    ...bars.map((bar) => svg('rect', {
-      class: bar.below ? 'bar below' : 'bar', x: bar.x, y: bar.y, width: bar.width, height: bar.height,
-    })),
-    svg('path', { class: 'bar-base', d: `M0 ${base}H${size.width}` }),
-    ...bars.map((bar) => svg('text', { class: 'axis middle', x: bar.middle, y: size.height + 14 }, [shortBand(bar.name)])),
-    ...bars.map((bar, index) => (bad[index] ? svg('g', { transform: `translate(${bar.middle} ${size.height + 21}) scale(0.75)` }, [markAt(bad[index], 0, 0)]) : null)),
-  ]);
+  return svg(
+    'svg',
+    {
+      class: 'chart row-bars',
+      viewBox: `0 0 ${size.width} ${height}`,
+      width: size.width,
+      height,
+      role: 'img',
+      'aria-label': `Over the reference, dB: ${words}`,
+    },
+    [
+      ...bars.map((bar) =>
+        svg('rect', {
+          class: bar.below ? 'bar below' : 'bar',
+          x: bar.x,
+          y: bar.y,
+          width: bar.width,
+          height: bar.height,
+        }),
+      ),
+      svg('path', { class: 'bar-base', d: `M0 ${base}H${size.width}` }),
+      ...bars.map((bar) =>
+        svg('text', { class: 'axis middle', x: bar.middle, y: size.height + 14 }, [shortBand(bar.name)]),
+      ),
+      ...bars.map((bar, index) =>
+        bad[index]
+          ? svg('g', { transform: `translate(${bar.middle} ${size.height + 21}) scale(0.75)` }, [
+              markAt(bad[index], 0, 0),
+            ])
+          : null,
+      ),
+    ],
+  );
 }
 
 /**
@@ -79,10 +108,20 @@ export function shortBand(name) {
 export function overBar(over, span, { width, height }) {
   const x = linear([Math.min(0, span.low), Math.max(0, span.high)], [2, width - 2]);
   const [from, to] = [Math.min(x(0), x(over)), Math.max(x(0), x(over))];
-  return svg('svg', { class: 'chart over-bar', viewBox: `0 0 ${width} ${height}`, width, height, 'aria-hidden': 'true' }, [
-    svg('rect', { class: over < 0 ? 'bar below' : 'bar', x: from, y: 3, width: Math.max(0.5, to - from), height: height - 6 }),
-    svg('path', { class: 'bar-base', d: `M${x(0)} 0V${height}` }),
-  ]);
+  return svg(
+    'svg',
+    { class: 'chart over-bar', viewBox: `0 0 ${width} ${height}`, width, height, 'aria-hidden': 'true' },
+    [
+      svg('rect', {
+        class: over < 0 ? 'bar below' : 'bar',
+        x: from,
+        y: 3,
+        width: Math.max(0.5, to - from),
+        height: height - 6,
+      }),
+      svg('path', { class: 'bar-base', d: `M${x(0)} 0V${height}` }),
+    ],
+  );
 }
 
 /**
@@ -95,10 +134,19 @@ export function overBar(over, span, { width, height }) {
 export function pullBar({ calm, gust, limit }, most, { width, height }) {
   const x = linear([0, most], [1, width - 2]);
   const middle = height / 2;
-  return svg('svg', { class: 'chart pull-bar', viewBox: `0 0 ${width} ${height}`, width, height, 'aria-hidden': 'true' }, [
-    svg('path', { class: 'pull-track', d: `M1 ${middle}H${limit === null ? x(gust) : Math.min(width - 1, x(limit))}` }),
-    svg('rect', { class: 'pull-gust', x: 1, y: middle - 4, width: Math.max(1, x(gust) - 1), height: 8 }),
-    svg('rect', { class: 'pull-calm', x: 1, y: middle - 4, width: Math.max(1, x(calm) - 1), height: 8 }),
-    limit === null ? null : svg('path', { class: 'pull-limit', d: `M${Math.min(width - 1, x(limit))} ${middle - 6}v12` }),
-  ]);
+  return svg(
+    'svg',
+    { class: 'chart pull-bar', viewBox: `0 0 ${width} ${height}`, width, height, 'aria-hidden': 'true' },
+    [
+      svg('path', {
+        class: 'pull-track',
+        d: `M1 ${middle}H${limit === null ? x(gust) : Math.min(width - 1, x(limit))}`,
+      }),
+      svg('rect', { class: 'pull-gust', x: 1, y: middle - 4, width: Math.max(1, x(gust) - 1), height: 8 }),
+      svg('rect', { class: 'pull-calm', x: 1, y: middle - 4, width: Math.max(1, x(calm) - 1), height: 8 }),
+      limit === null
+        ? null
+        : svg('path', { class: 'pull-limit', d: `M${Math.min(width - 1, x(limit))} ${middle - 6}v12` }),
+    ],
+  );
 }

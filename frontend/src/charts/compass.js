@@ -56,7 +56,10 @@ export function greatCircle(from, to) {
   const dLon = lon2 - lon1;
   const h = Math.sin((lat2 - lat1) / 2) ** 2 + Math.cos(lat1) * Math.cos(lat2) * Math.sin(dLon / 2) ** 2;
   const angle = 2 * Math.atan2(Math.sqrt(h), Math.sqrt(Math.max(0, 1 - h)));
-  const turn = Math.atan2(Math.sin(dLon) * Math.cos(lat2), Math.cos(lat1) * Math.sin(lat2) - Math.sin(lat1) * Math.cos(lat2) * Math.cos(dLon));
+  const turn = Math.atan2(
+    Math.sin(dLon) * Math.cos(lat2),
+    Math.cos(lat1) * Math.sin(lat2) - Math.sin(lat1) * Math.cos(lat2) * Math.cos(dLon),
+  );
   return { bearing: (turn / rad + 360) % 360, distanceKm: angle * 6371 };
 }
 
@@ -74,18 +77,35 @@ export function compass(targets, size) {
     return `M${ax.toFixed(1)} ${ay.toFixed(1)}L${bx.toFixed(1)} ${by.toFixed(1)}`;
   };
   const ticks = Array.from({ length: 36 }, (_, index) => tick(index * 10, index % 3 === 0 ? 6 : 3)).join('');
-  return svg('svg', { class: 'chart compass', viewBox: `${-middle} ${-middle} ${size} ${size}`, width: size, height: size, role: 'group', 'aria-label': 'Targets by bearing and distance' }, [
-    ...[...RINGS_KM].reverse().map((km) => svg('circle', { class: km === HALF_WAY_KM ? 'compass-rim' : 'compass-ring', r: radiusOf(km, radius) })),
-    svg('path', { class: 'compass-ticks', d: ticks }),
-    svg('path', { class: 'compass-axes', d: `M0 ${-radius}V${radius}M${-radius} 0H${radius}` }),
-    ...RINGS_KM.slice(0, 3).map((km) => svg('text', { class: 'axis middle halo', x: 0, y: radiusOf(km, radius) + 4 }, [`${km / 1000}`])),
-    ...['N', '030', '060', '090', '120', '150', '180', '210', '240', '270', '300', '330'].map((name, index) => {
-      const [x, y] = spotOf(index * 30, radius + 16);
-      return svg('text', { class: index ? 'axis middle' : 'axis middle north', x, y: y + 4 }, [name]);
-    }),
-    ...targets.map((target, index) => targetMark(target, index, radius)),
-    svg('circle', { class: 'compass-station', r: 2.6 }),
-  ]);
+  return svg(
+    'svg',
+    {
+      class: 'chart compass',
+      viewBox: `${-middle} ${-middle} ${size} ${size}`,
+      width: size,
+      height: size,
+      role: 'group',
+      'aria-label': 'Targets by bearing and distance',
+    },
+    [
+      ...[...RINGS_KM]
+        .reverse()
+        .map((km) =>
+          svg('circle', { class: km === HALF_WAY_KM ? 'compass-rim' : 'compass-ring', r: radiusOf(km, radius) }),
+        ),
+      svg('path', { class: 'compass-ticks', d: ticks }),
+      svg('path', { class: 'compass-axes', d: `M0 ${-radius}V${radius}M${-radius} 0H${radius}` }),
+      ...RINGS_KM.slice(0, 3).map((km) =>
+        svg('text', { class: 'axis middle halo', x: 0, y: radiusOf(km, radius) + 4 }, [`${km / 1000}`]),
+      ),
+      ...['N', '030', '060', '090', '120', '150', '180', '210', '240', '270', '300', '330'].map((name, index) => {
+        const [x, y] = spotOf(index * 30, radius + 16);
+        return svg('text', { class: index ? 'axis middle' : 'axis middle north', x, y: y + 4 }, [name]);
+      }),
+      ...targets.map((target, index) => targetMark(target, index, radius)),
+      svg('circle', { class: 'compass-station', r: 2.6 }),
+    ],
+  );
 }
 
 /**
@@ -104,14 +124,27 @@ function targetMark(target, index, radius) {
   const bearing = target.bearing ?? 0;
   const [x, y] = spotOf(bearing, Math.max(12, radiusOf(target.distanceKm ?? HALF_WAY_KM, radius)));
   const end = x < 0;
-  return svg('g', {
-    class: 'compass-target', 'data-target': index, 'data-key': `compass-${index}`, tabindex: 0, role: 'slider',
-    'aria-label': `Bearing of ${target.name}`, 'aria-valuemin': 0, 'aria-valuemax': 359,
-    'aria-valuenow': Math.round(bearing), 'aria-valuetext': bearingText(bearing),
-  }, [
-    svg('path', { class: 'compass-ray', d: `M0 0L${x.toFixed(1)} ${y.toFixed(1)}` }),
-    svg('circle', { class: 'compass-hit', cx: x, cy: y, r: 14 }),
-    svg('circle', { class: 'compass-handle', cx: x, cy: y, r: 5.5 }),
-    svg('text', { class: end ? 'drawn bold halo end' : 'drawn bold halo', x: x + (end ? -9 : 9), y: y + 4 }, [target.name]),
-  ]);
+  return svg(
+    'g',
+    {
+      class: 'compass-target',
+      'data-target': index,
+      'data-key': `compass-${index}`,
+      tabindex: 0,
+      role: 'slider',
+      'aria-label': `Bearing of ${target.name}`,
+      'aria-valuemin': 0,
+      'aria-valuemax': 359,
+      'aria-valuenow': Math.round(bearing),
+      'aria-valuetext': bearingText(bearing),
+    },
+    [
+      svg('path', { class: 'compass-ray', d: `M0 0L${x.toFixed(1)} ${y.toFixed(1)}` }),
+      svg('circle', { class: 'compass-hit', cx: x, cy: y, r: 14 }),
+      svg('circle', { class: 'compass-handle', cx: x, cy: y, r: 5.5 }),
+      svg('text', { class: end ? 'drawn bold halo end' : 'drawn bold halo', x: x + (end ? -9 : 9), y: y + 4 }, [
+        target.name,
+      ]),
+    ],
+  );
 }

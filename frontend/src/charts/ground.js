@@ -87,13 +87,24 @@ export function delaunay(spots) {
   const count = spots.length;
   let triangles = [[count, count + 1, count + 2]];
   for (let index = 0; index < count; index++) {
-    const bad = triangles.filter((triangle) => inCircle(triangle.map((corner) => points[corner]), points[index]));
-    const edges = bad.flatMap(([a, b, c]) => [[a, b], [b, c], [c, a]]);
+    const bad = triangles.filter((triangle) =>
+      inCircle(
+        triangle.map((corner) => points[corner]),
+        points[index],
+      ),
+    );
+    const edges = bad.flatMap(([a, b, c]) => [
+      [a, b],
+      [b, c],
+      [c, a],
+    ]);
     const rim = edges.filter(([a, b]) => !edges.some(([c, d]) => a === d && b === c));
     triangles = triangles.filter((triangle) => !bad.includes(triangle));
     triangles.push(...rim.map(([a, b]) => [a, b, index]));
   }
-  return triangles.filter((triangle) => triangle.every((corner) => corner < count) && !flat(triangle.map((corner) => points[corner])));
+  return triangles.filter(
+    (triangle) => triangle.every((corner) => corner < count) && !flat(triangle.map((corner) => points[corner])),
+  );
 }
 
 /** @param {number[][]} corners */

@@ -69,8 +69,10 @@ export function redrawer(root, render) {
     asked = false;
     const active = document.activeElement;
     const key = active && root.contains(active) ? active.getAttribute('data-key') : null;
-    const caret = active instanceof HTMLInputElement && active.type === 'text'
-      ? [active.selectionStart, active.selectionEnd] : null;
+    const caret =
+      active instanceof HTMLInputElement && active.type === 'text'
+        ? [active.selectionStart, active.selectionEnd]
+        : null;
     root.replaceChildren(...render());
     if (key === null) return;
     const again = root.querySelector(`[data-key="${CSS.escape(key)}"]`);

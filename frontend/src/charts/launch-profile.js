@@ -63,9 +63,7 @@ export function profileGeometry(data, { width, height }) {
     const floor = (/** @type {number[]|undefined} */ other) => !other || other[1] >= bottom;
     return point[1] < bottom || !floor(all[index - 1]) || !floor(all[index + 1]);
   }
-  const reference = data.reference
-    .map(({ elevation, dbi }) => [x(elevation), level(dbi)])
-    .filter(inSight);
+  const reference = data.reference.map(({ elevation, dbi }) => [x(elevation), level(dbi)]).filter(inSight);
   const brackets = windows.map((window, row) => {
     const text = `${window.names.join(', ')} ${range(window.from, window.to)}`;
     const from = x(window.from);
@@ -74,11 +72,17 @@ export function profileGeometry(data, { width, height }) {
     return { ...window, text, x0: from, x1: x(window.to), y: row * BRACKET_ROW + 13, textX: start };
   });
   return {
-    left, right, top, bottom, low, high,
+    left,
+    right,
+    top,
+    bottom,
+    low,
+    high,
     across: [0, 10, 20, 30, 45, 60, 75, 90].map((elevation) => ({ elevation, x: x(elevation) })),
     up: ticks(low, high, 5).map((gain) => ({ gain, y: y(gain) })),
     curves: placeNames(curves, reference, x, { left, right, top, bottom }),
-    reference, brackets,
+    reference,
+    brackets,
   };
 }
 
@@ -128,39 +132,74 @@ function placeNames(curves, reference, x, frame) {
  */
 export function launchProfile(data, size) {
   const plot = profileGeometry(data, size);
-  const shades = plot.brackets.map((bracket) => svg('rect', {
-    class: 'profile-window', x: bracket.x0, y: plot.top, width: Math.max(1, bracket.x1 - bracket.x0),
-    height: plot.bottom - plot.top,
-  }));
+  const shades = plot.brackets.map((bracket) =>
+    svg('rect', {
+      class: 'profile-window',
+      x: bracket.x0,
+      y: plot.top,
+      width: Math.max(1, bracket.x1 - bracket.x0),
+      height: plot.bottom - plot.top,
+    }),
+  );
   const brackets = plot.brackets.flatMap((bracket) => [
     svg('path', {
       class: 'profile-bracket',
       d: `M${bracket.x0} ${bracket.y + 6}V${bracket.y + 2}H${bracket.x1}V${bracket.y + 6}`,
     }),
-    svg('path', { class: 'profile-edge', d: `M${bracket.x0} ${bracket.y + 6}V${plot.bottom}M${bracket.x1} ${bracket.y + 6}V${plot.bottom}` }),
+    svg('path', {
+      class: 'profile-edge',
+      d: `M${bracket.x0} ${bracket.y + 6}V${plot.bottom}M${bracket.x1} ${bracket.y + 6}V${plot.bottom}`,
+    }),
     svg('text', { class: 'profile-window-name', x: bracket.textX, y: bracket.y - 1 }, [bracket.text]),
   ]);
   const lines = plot.up.map(({ y }) => svg('path', { class: 'profile-line', d: `M${plot.left} ${y}H${plot.right}` }));
-  const gains = plot.up.map(({ gain, y }) => svg('text', { class: 'axis end', x: plot.left - 5, y: y + 4 }, [String(gain).replace('-', '−')]));
+  const gains = plot.up.map(({ gain, y }) =>
+    svg('text', { class: 'axis end', x: plot.left - 5, y: y + 4 }, [String(gain).replace('-', '−')]),
+  );
   const axis = [
     svg('path', {
       class: 'axis-line',
       d: `M${plot.left} ${plot.bottom}H${plot.right}${plot.across.map(({ x }) => `M${x} ${plot.bottom}v4`).join('')}`,
     }),
-    ...plot.across.map(({ elevation, x }) => svg('text', { class: 'axis middle', x: Math.min(x, plot.right - 4), y: plot.bottom + 15 }, [`${elevation}${elevation % 90 ? '' : '°'}`])),
+    ...plot.across.map(({ elevation, x }) =>
+      svg('text', { class: 'axis middle', x: Math.min(x, plot.right - 4), y: plot.bottom + 15 }, [
+        `${elevation}${elevation % 90 ? '' : '°'}`,
+      ]),
+    ),
   ];
-  const curves = plot.curves.map((curve) => svg('path', { class: curve.lead ? 'profile-curve lead' : 'profile-curve', d: pathOf(curve.points) }));
-  const names = plot.curves.filter((curve) => curve.label).map((curve) => svg('text', {
-    class: curve.lead ? 'profile-name lead' : 'profile-name', x: curve.label?.x ?? 0, y: curve.label?.y ?? 0,
-  }, [curve.name]));
-  const reference = plot.reference.length > 1 ? [
-    svg('path', { class: 'profile-reference', d: pathOf(plot.reference) }),
-    svg('text', { class: 'profile-name reference', ...referenceLabel(plot) }, ['reference']),
-  ] : [];
-  return svg('svg', {
-    class: 'chart launch-profile', viewBox: `0 0 ${size.width} ${size.height}`, role: 'img',
-    'aria-label': `Launch profile: gain in dBi against elevation for ${plot.curves.map((curve) => curve.name).join(', ') || 'no direction'}`,
-  }, [...shades, ...lines, ...gains, ...axis, ...brackets, ...reference, ...curves, ...names]);
+  const curves = plot.curves.map((curve) =>
+    svg('path', { class: curve.lead ? 'profile-curve lead' : 'profile-curve', d: pathOf(curve.points) }),
+  );
+  const names = plot.curves
+    .filter((curve) => curve.label)
+    .map((curve) =>
+      svg(
+        'text',
+        {
+          class: curve.lead ? 'profile-name lead' : 'profile-name',
+          x: curve.label?.x ?? 0,
+          y: curve.label?.y ?? 0,
+        },
+        [curve.name],
+      ),
+    );
+  const reference =
+    plot.reference.length > 1
+      ? [
+          svg('path', { class: 'profile-reference', d: pathOf(plot.reference) }),
+          svg('text', { class: 'profile-name reference', ...referenceLabel(plot) }, ['reference']),
+        ]
+      : [];
+  return svg(
+    'svg',
+    {
+      class: 'chart launch-profile',
+      viewBox: `0 0 ${size.width} ${size.height}`,
+      role: 'img',
+      'aria-label': `Launch profile: gain in dBi against elevation for ${plot.curves.map((curve) => curve.name).join(', ') || 'no direction'}`,
+    },
+    [...shades, ...lines, ...gains, ...axis, ...brackets, ...reference, ...curves, ...names],
+  );
 }
 
 /**

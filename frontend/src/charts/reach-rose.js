@@ -42,7 +42,11 @@ export function roseGeometry(rose, ring, planNorth) {
   const every = ring < SMALL_RING ? 2 : 1;
   for (let azimuth = 0, index = 0; azimuth < 360; azimuth += STROKE_EVERY_DEGREES, index++) {
     const over = sample([...rose.dbi, rose.dbi[0]], rose.step, azimuth) - rose.referenceDbi;
-    const radius = within(ring + over * PIXELS_PER_DECIBEL, ring * INNERMOST, ring + OUTERMOST_DECIBELS * PIXELS_PER_DECIBEL);
+    const radius = within(
+      ring + over * PIXELS_PER_DECIBEL,
+      ring * INNERMOST,
+      ring + OUTERMOST_DECIBELS * PIXELS_PER_DECIBEL,
+    );
     const [dx, dy] = screenDirection(azimuth, planNorth);
     const tip = [dx * radius, dy * radius];
     outline.push(tip);

@@ -23,9 +23,10 @@ export function roofHeight(building, x, y) {
   };
   const here = across(x, y);
   const sides = footprint.map(([px, py]) => across(px, py));
-  const reach = form === 'lean-to'
-    ? Math.max(...sides.map(Math.abs))
-    : Math.max(...sides.filter((side) => side * here >= 0).map(Math.abs), 0);
+  const reach =
+    form === 'lean-to'
+      ? Math.max(...sides.map(Math.abs))
+      : Math.max(...sides.filter((side) => side * here >= 0).map(Math.abs), 0);
   const fall = reach > 0 ? Math.abs(here) / reach : 0;
   const ends = Math.max(...footprint.map(([px, py]) => beyond(px, py)));
   const hip = form === 'hip' && ends > 0 ? beyond(x, y) / ends : 0;

@@ -26,7 +26,9 @@ export const ROOM_FOR_TITLE = 520;
  */
 export function sideScale(along, { width, height, ppm }) {
   const heights = [
-    ...along.runs.flat(), ...along.holds.map((hold) => [0, hold.top]), ...along.ground,
+    ...along.runs.flat(),
+    ...along.holds.map((hold) => [0, hold.top]),
+    ...along.ground,
     ...along.buildings.flatMap((building) => building.outline),
   ].map((station) => station[1]);
   const [low, high] = [Math.min(...along.ground.map((one) => one[1]), 0), Math.max(...heights) + 0.4];
@@ -38,7 +40,10 @@ export function sideScale(along, { width, height, ppm }) {
   const start = MARGIN.left + (room.x - along.length * scale) / 2;
   const base = height - MARGIN.foot;
   return {
-    scale, same, low, high,
+    scale,
+    same,
+    low,
+    high,
     x: (/** @type {number} */ s) => start + s * scale,
     y: (/** @type {number} */ z) => base - (z - low) * scale,
   };
@@ -78,33 +83,52 @@ export function sideView(along, options) {
   const { x, y } = frame;
   const at = (/** @type {number[]} */ [s, z]) => [x(s), y(z)];
   const inView = along.ground.filter(([s]) => x(s) >= MARGIN.left - 2 && x(s) <= width - MARGIN.right + 2);
-  return svg('svg', {
-    class: 'chart side-view', viewBox: `0 0 ${width} ${height}`, width, height, role: 'img',
-    'aria-label': `${options.title}: ${along.holds.map((hold) => `${hold.name} ${options.length(hold.aboveGround)}`).join(', ')}`,
-  }, [
-    svg('defs', {}, [svg('pattern', { id: 'side-hatch', width: 5.5, height: 5.5, patternUnits: 'userSpaceOnUse', patternTransform: 'rotate(45)' }, [svg('path', { class: 'hatch', d: 'M0 0V6' })])]),
-    ...heightLines(frame, width, options),
-    ...along.canopies.map((tree) => svg('path', {
-      class: tree.own ? 'side-canopy' : 'side-canopy beside', d: scallops(x(tree.s0), y(tree.to), x(tree.s1), y(tree.from)),
-    })),
-    ...along.buildings.flatMap(({ outline }) => [
-      svg('path', { class: 'side-building', d: pathOf(outline.map(at), true) }),
-      svg('path', { class: 'side-hatching', fill: 'url(#side-hatch)', d: pathOf(outline.map(at), true) }),
-    ]),
-    svg('path', { class: 'side-ground-hatch', d: groundHatch(inView.map(at)) }),
-    svg('path', { class: 'side-ground', d: pathOf(inView.map(at)) }),
-    ...along.guys.map((guy) => svg('path', { class: 'side-rope', d: pathOf(guy.map(at)) })),
-    ...along.holds.map((hold) => holdMark(hold, frame)),
-    ...along.runs.map((run) => svg('path', { class: 'side-rope run', d: pathOf(run.map(at)) })),
-    svg('path', { class: 'side-feed-line', d: pathOf(along.feedLine.map(at)) }),
-    ...along.wires.map((/** @type {number[][]} */ wire) => svg('path', { class: 'side-wire', d: pathOf(wire.map(at)) })),
-    ...along.lines.flatMap((line) => overhead(line, frame)),
-    ...apart(along.drops, frame).flatMap((drop) => dropMark(drop, frame, options)),
-    feedMark(at(along.feed)),
-    ...holdLabels(along.holds, frame, options),
-    ...footLabels(along.holds, frame, options, height),
-    ...titleBlock(options, frame, width),
-  ]);
+  return svg(
+    'svg',
+    {
+      class: 'chart side-view',
+      viewBox: `0 0 ${width} ${height}`,
+      width,
+      height,
+      role: 'img',
+      'aria-label': `${options.title}: ${along.holds.map((hold) => `${hold.name} ${options.length(hold.aboveGround)}`).join(', ')}`,
+    },
+    [
+      svg('defs', {}, [
+        svg(
+          'pattern',
+          { id: 'side-hatch', width: 5.5, height: 5.5, patternUnits: 'userSpaceOnUse', patternTransform: 'rotate(45)' },
+          [svg('path', { class: 'hatch', d: 'M0 0V6' })],
+        ),
+      ]),
+      ...heightLines(frame, width, options),
+      ...along.canopies.map((tree) =>
+        svg('path', {
+          class: tree.own ? 'side-canopy' : 'side-canopy beside',
+          d: scallops(x(tree.s0), y(tree.to), x(tree.s1), y(tree.from)),
+        }),
+      ),
+      ...along.buildings.flatMap(({ outline }) => [
+        svg('path', { class: 'side-building', d: pathOf(outline.map(at), true) }),
+        svg('path', { class: 'side-hatching', fill: 'url(#side-hatch)', d: pathOf(outline.map(at), true) }),
+      ]),
+      svg('path', { class: 'side-ground-hatch', d: groundHatch(inView.map(at)) }),
+      svg('path', { class: 'side-ground', d: pathOf(inView.map(at)) }),
+      ...along.guys.map((guy) => svg('path', { class: 'side-rope', d: pathOf(guy.map(at)) })),
+      ...along.holds.map((hold) => holdMark(hold, frame)),
+      ...along.runs.map((run) => svg('path', { class: 'side-rope run', d: pathOf(run.map(at)) })),
+      svg('path', { class: 'side-feed-line', d: pathOf(along.feedLine.map(at)) }),
+      ...along.wires.map((/** @type {number[][]} */ wire) =>
+        svg('path', { class: 'side-wire', d: pathOf(wire.map(at)) }),
+      ),
+      ...along.lines.flatMap((line) => overhead(line, frame)),
+      ...apart(along.drops, frame).flatMap((drop) => dropMark(drop, frame, options)),
+      feedMark(at(along.feed)),
+      ...holdLabels(along.holds, frame, options),
+      ...footLabels(along.holds, frame, options, height),
+      ...titleBlock(options, frame, width),
+    ],
+  );
 }
 
 /**
@@ -113,17 +137,25 @@ export function sideView(along, options) {
  * @param {SideOptions} options
  */
 function heightLines(frame, width, options) {
-  return ticks(frame.low / options.unit, frame.high / options.unit, 4).map((height) => height * options.unit).flatMap((z) => [
-    svg('path', { class: 'side-grid', d: `M${MARGIN.left} ${frame.y(z)}H${width - MARGIN.right}` }),
-    svg('text', { class: 'axis end', x: MARGIN.left - 6, y: frame.y(z) + 4 }, [options.length(z).replace(/\.0+$/, '')]),
-  ]);
+  return ticks(frame.low / options.unit, frame.high / options.unit, 4)
+    .map((height) => height * options.unit)
+    .flatMap((z) => [
+      svg('path', { class: 'side-grid', d: `M${MARGIN.left} ${frame.y(z)}H${width - MARGIN.right}` }),
+      svg('text', { class: 'axis end', x: MARGIN.left - 6, y: frame.y(z) + 4 }, [
+        options.length(z).replace(/\.0+$/, ''),
+      ]),
+    ]);
 }
 
 /** @param {number[][]} ground */
 function groundHatch(ground) {
   if (ground.length < 2) return '';
   let d = '';
-  for (let index = 0; index < ground.length; index += Math.max(1, Math.round(9 / Math.max(1, ground[1][0] - ground[0][0])))) {
+  for (
+    let index = 0;
+    index < ground.length;
+    index += Math.max(1, Math.round(9 / Math.max(1, ground[1][0] - ground[0][0])))
+  ) {
     d += `M${ground[index][0].toFixed(1)} ${ground[index][1].toFixed(1)}l-5 6`;
   }
   return d;
@@ -135,7 +167,8 @@ function groundHatch(ground) {
  */
 function holdMark(hold, { x, y }) {
   const [px, top, foot] = [x(hold.s), y(hold.top), y(hold.foot)];
-  if (hold.kind === 'tree') return svg('path', { class: 'side-trunk', d: `M${px - 2} ${foot}V${top}M${px + 2} ${foot}V${top}` });
+  if (hold.kind === 'tree')
+    return svg('path', { class: 'side-trunk', d: `M${px - 2} ${foot}V${top}M${px + 2} ${foot}V${top}` });
   if (hold.kind === 'mast' || hold.kind === 'pole') {
     return svg('path', { class: hold.isNew ? 'side-mast new' : 'side-mast', d: `M${px} ${foot}V${top}` });
   }
@@ -182,7 +215,10 @@ function dropMark(drop, { x, y }, options) {
   const middle = (top + bottom) / 2;
   const words = options.length(drop.top - drop.bottom);
   return [
-    svg('path', { class: 'dimension', d: `M${px} ${top}V${bottom}M${px - 4} ${top + 4}l8 -8M${px - 4} ${bottom + 4}l8 -8` }),
+    svg('path', {
+      class: 'dimension',
+      d: `M${px} ${top}V${bottom}M${px - 4} ${top + 4}l8 -8M${px - 4} ${bottom + 4}l8 -8`,
+    }),
     svg('text', { class: 'drawn bold halo', x: px + 6, y: middle + 4 }, [words]),
     state ? markAt(state, px + 14 + words.length * LETTER * 1.1, middle) : null,
   ].filter((node) => node !== null);
@@ -202,7 +238,9 @@ function holdLabels(holds, { x, y }, options) {
     let py = y(hold.top) - 9;
     while (taken.some(([ox, oy]) => Math.abs(ox - px) < 30 && Math.abs(oy - py) < 13)) py -= 13;
     taken.push([px, py]);
-    return svg('text', { class: 'drawn bold halo middle', x: px, y: Math.max(11, py) }, [options.length(hold.aboveGround)]);
+    return svg('text', { class: 'drawn bold halo middle', x: px, y: Math.max(11, py) }, [
+      options.length(hold.aboveGround),
+    ]);
   });
 }
 
@@ -248,8 +286,16 @@ function titleBlock(options, frame, width) {
   const scale = frame.same ? 'same scale as the plan' : 'heights and lengths at one scale';
   return [
     svg('text', { class: 'side-title end halo', x: width - MARGIN.right, y: 16 }, [options.title]),
-    ...[scale, ...options.notes].map((line, index) => svg('text', {
-      class: 'drawn soft end halo', x: width - MARGIN.right, y: 31 + index * 14,
-    }, [line])),
+    ...[scale, ...options.notes].map((line, index) =>
+      svg(
+        'text',
+        {
+          class: 'drawn soft end halo',
+          x: width - MARGIN.right,
+          y: 31 + index * 14,
+        },
+        [line],
+      ),
+    ),
   ];
 }

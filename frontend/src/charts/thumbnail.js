@@ -31,16 +31,29 @@ export function thumbnail(plan, placement, size) {
   const fit = fitInto([...boundary, ...wires.flat()], size);
   const draw = (/** @type {number[][]} */ points, /** @type {boolean} */ closed) => pathOf(points.map(fit), closed);
   const [feedX, feedY] = fit(placement.feed.at);
-  return svg('svg', { class: 'chart thumbnail', viewBox: `0 0 ${size.width} ${size.height}`, width: size.width, height: size.height, 'aria-hidden': 'true' }, [
-    ...(plan.buildings ?? []).map((/** @type {any} */ building) => svg('path', { class: 'thumb-building', d: draw(building.footprint, true) })),
-    ...(plan.overheadLines ?? []).filter((/** @type {any} */ line) => line.kind !== 'telephone')
-      .map((/** @type {any} */ line) => svg('path', { class: 'thumb-line', d: draw(line.path, false) })),
-    svg('path', { class: 'thumb-boundary', d: draw(boundary, true) }),
-    ...wires.map((/** @type {number[][]} */ wire) => svg('path', { class: 'thumb-wire', d: draw(wire, false) })),
-    ...placement.attachments.map((/** @type {any} */ hold) => {
-      const [x, y] = fit(hold.at);
-      return svg('circle', { class: 'thumb-hold', cx: x, cy: y, r: 1.8 });
-    }),
-    svg('rect', { class: 'thumb-feed', x: feedX - 2, y: feedY - 2, width: 4, height: 4 }),
-  ]);
+  return svg(
+    'svg',
+    {
+      class: 'chart thumbnail',
+      viewBox: `0 0 ${size.width} ${size.height}`,
+      width: size.width,
+      height: size.height,
+      'aria-hidden': 'true',
+    },
+    [
+      ...(plan.buildings ?? []).map((/** @type {any} */ building) =>
+        svg('path', { class: 'thumb-building', d: draw(building.footprint, true) }),
+      ),
+      ...(plan.overheadLines ?? [])
+        .filter((/** @type {any} */ line) => line.kind !== 'telephone')
+        .map((/** @type {any} */ line) => svg('path', { class: 'thumb-line', d: draw(line.path, false) })),
+      svg('path', { class: 'thumb-boundary', d: draw(boundary, true) }),
+      ...wires.map((/** @type {number[][]} */ wire) => svg('path', { class: 'thumb-wire', d: draw(wire, false) })),
+      ...placement.attachments.map((/** @type {any} */ hold) => {
+        const [x, y] = fit(hold.at);
+        return svg('circle', { class: 'thumb-hold', cx: x, cy: y, r: 1.8 });
+      }),
+      svg('rect', { class: 'thumb-feed', x: feedX - 2, y: feedY - 2, width: 4, height: 4 }),
+    ],
+  );
 }

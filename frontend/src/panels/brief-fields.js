@@ -33,12 +33,16 @@ export function editBrief(store, label, patch, group) {
  * @param {string} [group]
  */
 export function editEntry(store, label, list, index, patch, group) {
-  store.edit(label, (plan) => {
-    const entries = [...(plan.brief?.[list] ?? [])];
-    const entry = { ...entries[index], ...patch };
-    entries[index] = Object.fromEntries(Object.entries(entry).filter(([, value]) => value !== undefined));
-    return { ...plan, brief: { ...(plan.brief ?? {}), [list]: entries } };
-  }, group);
+  store.edit(
+    label,
+    (plan) => {
+      const entries = [...(plan.brief?.[list] ?? [])];
+      const entry = { ...entries[index], ...patch };
+      entries[index] = Object.fromEntries(Object.entries(entry).filter(([, value]) => value !== undefined));
+      return { ...plan, brief: { ...(plan.brief ?? {}), [list]: entries } };
+    },
+    group,
+  );
 }
 
 /**
@@ -65,13 +69,25 @@ export function textBox(draft, box) {
   const value = typed?.text ?? box.value;
   const wrong = typed?.wrong ?? box.fault ?? null;
   const id = `brief-${box.key}`;
-  return html('div', { class: 'field' },
+  return html(
+    'div',
+    { class: 'field' },
     html('label', { for: id, class: box.hideLabel ? 'visually-hidden' : null }, box.label),
-    html('span', { class: 'typing' },
+    html(
+      'span',
+      { class: 'typing' },
       html('input', {
-        type: 'text', id, value, 'data-key': box.key, inputmode: box.mode ?? null, autocomplete: 'off', spellcheck: 'false',
-        placeholder: box.placeholder ?? null, disabled: box.disabled ?? false,
-        'aria-invalid': wrong ? 'true' : null, 'aria-describedby': wrong ? `${id}-fault` : null,
+        type: 'text',
+        id,
+        value,
+        'data-key': box.key,
+        inputmode: box.mode ?? null,
+        autocomplete: 'off',
+        spellcheck: 'false',
+        placeholder: box.placeholder ?? null,
+        disabled: box.disabled ?? false,
+        'aria-invalid': wrong ? 'true' : null,
+        'aria-describedby': wrong ? `${id}-fault` : null,
         onchange: (/** @type {Event} */ event) => {
           const text = /** @type {HTMLInputElement} */ (event.target).value;
           const problem = box.take(text);
@@ -85,8 +101,10 @@ export function textBox(draft, box) {
           draft.ask();
         },
       }),
-      box.unit ? html('span', { class: 'unit', 'aria-hidden': 'true' }, box.unit) : null),
-    wrong ? sentence(`${id}-fault`, wrong) : null);
+      box.unit ? html('span', { class: 'unit', 'aria-hidden': 'true' }, box.unit) : null,
+    ),
+    wrong ? sentence(`${id}-fault`, wrong) : null,
+  );
 }
 
 /**
@@ -108,7 +126,9 @@ export function sentence(id, words) {
 export function numberBox(draft, box) {
   const text = box.value === null || box.value === undefined ? '' : String(box.value).replace('-', '−');
   return textBox(draft, {
-    ...box, mode: 'decimal', value: text,
+    ...box,
+    mode: 'decimal',
+    value: text,
     take: (typed) => {
       if (typed.trim() === '' && box.may) {
         if (box.value !== null && box.value !== undefined) box.take(null);
@@ -116,7 +136,8 @@ export function numberBox(draft, box) {
       }
       const value = parseNumber(typed);
       const range = `${box.least ?? ''}${box.most === undefined ? ' or more' : ` to ${box.most}`}`;
-      if (value === null) return `${box.label}: “${typed}” is not a number. Type a figure${box.least === undefined ? '' : ` of ${range}`}.`;
+      if (value === null)
+        return `${box.label}: “${typed}” is not a number. Type a figure${box.least === undefined ? '' : ` of ${range}`}.`;
       if ((box.least !== undefined && value < box.least) || (box.most !== undefined && value > box.most)) {
         return `${box.label} is ${typed.trim()}; it has to be ${range}${box.unit ? ` ${box.unit}` : ''}.`;
       }
@@ -135,7 +156,14 @@ export function numberBox(draft, box) {
 export function weightBar(store, { key, label, value, set }) {
   const figure = html('output', { class: 'weight-figure' }, value.toFixed(1));
   const slider = html('input', {
-    type: 'range', min: 0, max: Math.max(2, Math.ceil(value)), step: 0.1, value, 'aria-label': label, 'data-key': key, class: 'weight',
+    type: 'range',
+    min: 0,
+    max: Math.max(2, Math.ceil(value)),
+    step: 0.1,
+    value,
+    'aria-label': label,
+    'data-key': key,
+    class: 'weight',
     oninput: () => {
       const now = Number(/** @type {HTMLInputElement} */ (slider).value);
       figure.textContent = now.toFixed(1);
@@ -162,11 +190,22 @@ function fillBar(slider) {
 export function kindSelect({ key, label, value, kinds, extra, choose }) {
   const standard = kinds.find((kind) => kind.default)?.id ?? kinds[0]?.id ?? '';
   const id = `brief-${key}`;
-  return html('div', { class: 'field' },
+  return html(
+    'div',
+    { class: 'field' },
     html('label', { for: id }, label),
-    html('select', { id, 'data-key': key, value: value ?? standard, onchange: (/** @type {Event} */ event) => choose(/** @type {HTMLSelectElement} */ (event.target).value) },
+    html(
+      'select',
+      {
+        id,
+        'data-key': key,
+        value: value ?? standard,
+        onchange: (/** @type {Event} */ event) => choose(/** @type {HTMLSelectElement} */ (event.target).value),
+      },
       ...kinds.map((kind) => html('option', { value: kind.id }, kind.name)),
-      extra ? html('option', { value: extra[0] }, extra[1]) : null));
+      extra ? html('option', { value: extra[0] }, extra[1]) : null,
+    ),
+  );
 }
 
 /**
@@ -176,6 +215,7 @@ export function kindSelect({ key, label, value, kinds, extra, choose }) {
  * @returns {string[]} sentences
  */
 export function faultsAt(faults, start) {
-  return faults.filter(({ path }) => path === start || (path.startsWith(start) && /^[.[]/.test(path.slice(start.length))))
+  return faults
+    .filter(({ path }) => path === start || (path.startsWith(start) && /^[.[]/.test(path.slice(start.length))))
     .map(({ message }) => message);
 }

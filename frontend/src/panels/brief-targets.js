@@ -1,9 +1,10 @@
 // @ts-check
-import { bearingOf, compass, FARTHEST_KM, greatCircle, spotOf, radiusOf } from '../charts/compass.js';
+import { FARTHEST_KM, greatCircle } from '../charts/compass.js';
 import { bearing as bearingText } from '../charts/figures.js';
 import { html } from '../charts/html.js';
 import { number, parseNumber } from '../units/figures.js';
 import { bandName } from './brief-bands.js';
+import { compassNode } from './brief-compass.js';
 import { editBrief, editEntry, faultsAt, numberBox, sentence, textBox, weightBar } from './brief-fields.js';
 
 /**
@@ -11,8 +12,6 @@ import { editBrief, editEntry, faultsAt, numberBox, sentence, textBox, weightBar
  * @typedef {import('../state/store.js').Store} Store
  * @typedef {import('../state/types.js').State} State
  */
-
-const SIZE = 280;
 
 /**
  * @param {State} state
@@ -28,18 +27,56 @@ export function targetsSection(state, store, draft, chosen) {
     chosen.target = open === index ? null : index;
     draft.ask();
   };
-  return html('section', { class: 'brief-targets' },
-    html('div', { class: 'line part-head' }, html('h3', {}, 'Targets'), html('span', { class: 'soft' }, 'drag one to turn it; rings in thousands of km')),
+  return html(
+    'section',
+    { class: 'brief-targets' },
+    html(
+      'div',
+      { class: 'line part-head' },
+      html('h3', {}, 'Targets'),
+      html('span', { class: 'soft' }, 'drag one to turn it; rings in thousands of km'),
+    ),
     compassNode(targets, store),
-    html('ol', { class: 'targets' }, ...targets.map((/** @type {any} */ target, /** @type {number} */ index) => html('li', {},
-      targetRow(target, index, targets, open === index, toggle),
-      open === index ? targetEditor(state, store, draft, chosen, index) : null,
-      ...faultsAt(state.faults, `brief.targets[${index}]`).map((words) => sentence(null, words))))),
+    html(
+      'ol',
+      { class: 'targets' },
+      ...targets.map((/** @type {any} */ target, /** @type {number} */ index) =>
+        html(
+          'li',
+          {},
+          targetRow(target, index, targets, open === index, toggle),
+          open === index ? targetEditor(state, store, draft, chosen, index) : null,
+          ...faultsAt(state.faults, `brief.targets[${index}]`).map((words) => sentence(null, words)),
+        ),
+      ),
+    ),
     targets.length ? null : html('p', { class: 'soft' }, 'No target yet: say who is to be reached.'),
     ...state.faults.filter(({ path }) => path === 'brief.targets').map(({ message }) => sentence(null, message)),
-    html('p', { class: 'line start' },
-      html('button', { type: 'button', class: 'link', 'data-key': 'add-far', onclick: () => addTarget(store, chosen, targets, { bearing: 0, distanceKm: 3000 }) }, 'Add a far target'),
-      html('button', { type: 'button', class: 'link', 'data-key': 'add-near', onclick: () => addTarget(store, chosen, targets, { nearVerticalKm: 300 }) }, 'Add near-vertical cover')));
+    html(
+      'p',
+      { class: 'line start' },
+      html(
+        'button',
+        {
+          type: 'button',
+          class: 'link',
+          'data-key': 'add-far',
+          onclick: () => addTarget(store, chosen, targets, { bearing: 0, distanceKm: 3000 }),
+        },
+        'Add a far target',
+      ),
+      html(
+        'button',
+        {
+          type: 'button',
+          class: 'link',
+          'data-key': 'add-near',
+          onclick: () => addTarget(store, chosen, targets, { nearVerticalKm: 300 }),
+        },
+        'Add near-vertical cover',
+      ),
+    ),
+  );
 }
 
 /**
@@ -53,83 +90,9 @@ function addTarget(store, chosen, targets, aim) {
   let count = 1;
   while (targets.some((target) => target.name === `${stem} ${count}`)) count += 1;
   chosen.target = targets.length;
-  editBrief(store, `Add target ${stem} ${count}`, { targets: [...targets, { name: `${stem} ${count}`, ...aim, weight: 1 }] });
-}
-
-/**
- * @param {any[]} targets
- * @param {Store} store
- * @returns {HTMLElement}
- */
-function compassNode(targets, store) {
-  const marks = targets.map((target) => ({
-    name: target.name ?? 'target', bearing: target.bearing ?? null, distanceKm: target.distanceKm ?? null, nearVerticalKm: target.nearVerticalKm ?? null,
-  }));
-  const drawing = compass(marks, SIZE);
-  const turn = (/** @type {number} */ index, /** @type {number} */ bearing) =>
-    editEntry(store, `Turn ${targets[index].name ?? 'target'}`, 'targets', index, { bearing: ((bearing % 360) + 360) % 360 }, `turn-${index}`);
-  for (const handle of drawing.querySelectorAll('[data-target]')) {
-    const index = Number(handle.getAttribute('data-target'));
-    handle.addEventListener('pointerdown', (event) => turnByHand(/** @type {PointerEvent} */ (event), drawing, handle, targets[index], (bearing) => turn(index, bearing), () => store.endGroup()));
-    handle.addEventListener('keydown', (event) => {
-      const { key, shiftKey } = /** @type {KeyboardEvent} */ (event);
-      const way = { ArrowRight: 1, ArrowUp: 1, ArrowLeft: -1, ArrowDown: -1 }[key];
-      if (!way) return;
-      event.preventDefault();
-      event.stopPropagation();
-      turn(index, Math.round(targets[index].bearing) + way * (shiftKey ? 10 : 1));
-    });
-  }
-  return html('div', { class: 'compass-box' }, drawing);
-}
-
-/**
- * Follows the hand round the compass; the handle moves at once, the panel when it is let go.
- * @param {PointerEvent} event
- * @param {SVGElement} drawing
- * @param {Element} handle
- * @param {any} target
- * @param {(bearing: number) => void} turn
- * @param {() => void} done
- */
-function turnByHand(event, drawing, handle, target, turn, done) {
-  if (event.button !== 0) return;
-  event.preventDefault();
-  /** @type {SVGElement} */ (handle).focus({ preventScroll: true });
-  const follow = (/** @type {PointerEvent} */ next) => {
-    const box = drawing.getBoundingClientRect();
-    const bearing = bearingOf(next.clientX - box.left - box.width / 2, next.clientY - box.top - box.height / 2);
-    showBearing(handle, bearing, target.distanceKm);
-    turn(bearing);
-  };
-  const end = () => {
-    window.removeEventListener('pointermove', follow);
-    window.removeEventListener('pointerup', end);
-    window.removeEventListener('pointercancel', end);
-    done();
-  };
-  window.addEventListener('pointermove', follow);
-  window.addEventListener('pointerup', end);
-  window.addEventListener('pointercancel', end);
-}
-
-/**
- * @param {Element} handle
- * @param {number} bearing
- * @param {number} distanceKm
- */
-function showBearing(handle, bearing, distanceKm) {
-  const [x, y] = spotOf(bearing, Math.max(12, radiusOf(distanceKm, SIZE / 2 - 26)));
-  handle.setAttribute('aria-valuenow', String(bearing));
-  handle.querySelector('path')?.setAttribute('d', `M0 0L${x} ${y}`);
-  for (const circle of handle.querySelectorAll('circle')) {
-    circle.setAttribute('cx', String(x));
-    circle.setAttribute('cy', String(y));
-  }
-  const text = handle.querySelector('text');
-  text?.setAttribute('x', String(x + (x < 0 ? -9 : 9)));
-  text?.setAttribute('y', String(y + 4));
-  text?.classList.toggle('end', x < 0);
+  editBrief(store, `Add target ${stem} ${count}`, {
+    targets: [...targets, { name: `${stem} ${count}`, ...aim, weight: 1 }],
+  });
 }
 
 /**
@@ -142,14 +105,25 @@ function showBearing(handle, bearing, distanceKm) {
 function targetRow(target, index, targets, open, toggle) {
   const most = Math.max(1, ...targets.map((one) => one.weight ?? 1));
   const near = target.nearVerticalKm !== undefined;
-  const where = near ? `near-vertical, ${number(target.nearVerticalKm, 0)} km round` : `${bearingText(target.bearing ?? 0)}  ${number(target.distanceKm ?? 0, 0)} km${(target.distanceKm ?? 0) > 20000 ? ', the long way' : ''}`;
+  const where = near
+    ? `near-vertical, ${number(target.nearVerticalKm, 0)} km round`
+    : `${bearingText(target.bearing ?? 0)}  ${number(target.distanceKm ?? 0, 0)} km${(target.distanceKm ?? 0) > 20000 ? ', the long way' : ''}`;
   const bar = html('span', { class: 'chip-bar' });
   bar.style.width = `${((target.weight ?? 1) / most) * 100}%`;
-  return html('button', {
-    type: 'button', class: 'target-row', 'aria-expanded': String(open), 'data-key': `target-${index}`, onclick: () => toggle(index),
-  }, html('b', {}, target.name ?? 'Target'), html('span', {}, where),
-  html('span', { class: 'soft' }, target.bands?.length ? target.bands.join(', ') : 'every band'),
-  html('span', { class: 'chip-track', title: `weight ${target.weight ?? 1}` }, bar));
+  return html(
+    'button',
+    {
+      type: 'button',
+      class: 'target-row',
+      'aria-expanded': String(open),
+      'data-key': `target-${index}`,
+      onclick: () => toggle(index),
+    },
+    html('b', {}, target.name ?? 'Target'),
+    html('span', {}, where),
+    html('span', { class: 'soft' }, target.bands?.length ? target.bands.join(', ') : 'every band'),
+    html('span', { class: 'chip-track', title: `weight ${target.weight ?? 1}` }, bar),
+  );
 }
 
 /**
@@ -162,37 +136,103 @@ function targetRow(target, index, targets, open, toggle) {
 function targetEditor(state, store, draft, chosen, index) {
   const target = state.plan.brief.targets[index];
   const name = target.name ?? 'target';
-  const set = (/** @type {string} */ label, /** @type {object} */ patch, /** @type {string} */ group = '') => editEntry(store, label, 'targets', index, patch, group || undefined);
+  const set = (/** @type {string} */ label, /** @type {object} */ patch, /** @type {string} */ group = '') =>
+    editEntry(store, label, 'targets', index, patch, group || undefined);
   const near = target.nearVerticalKm !== undefined;
-  const boxes = near ? [numberBox(draft, {
-    key: `target-${index}-near`, label: 'Radius', unit: 'km', value: target.nearVerticalKm, least: 1, most: 2000,
-    take: (km) => set(`Radius of ${name}`, { nearVerticalKm: km }),
-  })] : [
-    numberBox(draft, {
-      key: `target-${index}-bearing`, label: 'Bearing, true', unit: '°', value: target.bearing, least: 0, most: 360,
-      take: (degrees) => set(`Bearing of ${name}`, { bearing: degrees }),
-    }),
-    numberBox(draft, {
-      key: `target-${index}-distance`, label: 'Distance', unit: 'km', value: target.distanceKm, least: 1, most: FARTHEST_KM,
-      take: (km) => set(`Distance of ${name}`, { distanceKm: km }),
-    })];
-  return html('div', { class: 'editor' },
-    html('div', { class: near ? 'fields two' : 'fields three' },
-      textBox(draft, { key: `target-${index}-name`, label: 'Name', value: target.name ?? '', take: (text) => {
-        if (text.trim() === '') return 'A target needs a name.';
-        if (text.trim() !== target.name) set(`Call the target ${text.trim()}`, { name: text.trim() });
-        return null;
-      } }), ...boxes),
+  const boxes = near
+    ? [
+        numberBox(draft, {
+          key: `target-${index}-near`,
+          label: 'Radius',
+          unit: 'km',
+          value: target.nearVerticalKm,
+          least: 1,
+          most: 2000,
+          take: (km) => set(`Radius of ${name}`, { nearVerticalKm: km }),
+        }),
+      ]
+    : [
+        numberBox(draft, {
+          key: `target-${index}-bearing`,
+          label: 'Bearing, true',
+          unit: '°',
+          value: target.bearing,
+          least: 0,
+          most: 360,
+          take: (degrees) => set(`Bearing of ${name}`, { bearing: degrees }),
+        }),
+        numberBox(draft, {
+          key: `target-${index}-distance`,
+          label: 'Distance',
+          unit: 'km',
+          value: target.distanceKm,
+          least: 1,
+          most: FARTHEST_KM,
+          take: (km) => set(`Distance of ${name}`, { distanceKm: km }),
+        }),
+      ];
+  return html(
+    'div',
+    { class: 'editor' },
+    html(
+      'div',
+      { class: near ? 'fields two' : 'fields three' },
+      textBox(draft, {
+        key: `target-${index}-name`,
+        label: 'Name',
+        value: target.name ?? '',
+        take: (text) => {
+          if (text.trim() === '') return 'A target needs a name.';
+          if (text.trim() !== target.name) set(`Call the target ${text.trim()}`, { name: text.trim() });
+          return null;
+        },
+      }),
+      ...boxes,
+    ),
     near ? null : placeBox(state, draft, index, (aim) => set(`Aim ${name} at a place`, aim)),
-    weightBar(store, { key: `target-${index}-weight`, label: `Weight of ${name}`, value: target.weight ?? 1, set: (weight) => set(`Weigh ${name}`, { weight }, `target-weight-${index}`) }),
+    weightBar(store, {
+      key: `target-${index}-weight`,
+      label: `Weight of ${name}`,
+      value: target.weight ?? 1,
+      set: (weight) => set(`Weigh ${name}`, { weight }, `target-weight-${index}`),
+    }),
     bandTicks(state, target, index, set),
-    html('p', { class: 'line' },
-      html('button', { type: 'button', class: 'link', 'data-key': `target-${index}-kind`, onclick: () => set(near ? `Make ${name} a far target` : `Make ${name} near-vertical`, near
-        ? { nearVerticalKm: undefined, bearing: 0, distanceKm: 3000 } : { nearVerticalKm: 300, bearing: undefined, distanceKm: undefined }) }, near ? 'Make it a far target' : 'Make it near-vertical'),
-      html('button', { type: 'button', class: 'link', 'data-key': `target-${index}-remove`, onclick: () => {
-        chosen.target = null;
-        editBrief(store, `Take ${name} out`, { targets: state.plan.brief.targets.filter((/** @type {any} */ _, /** @type {number} */ k) => k !== index) });
-      } }, 'Take it out')));
+    html(
+      'p',
+      { class: 'line' },
+      html(
+        'button',
+        {
+          type: 'button',
+          class: 'link',
+          'data-key': `target-${index}-kind`,
+          onclick: () =>
+            set(
+              near ? `Make ${name} a far target` : `Make ${name} near-vertical`,
+              near
+                ? { nearVerticalKm: undefined, bearing: 0, distanceKm: 3000 }
+                : { nearVerticalKm: 300, bearing: undefined, distanceKm: undefined },
+            ),
+        },
+        near ? 'Make it a far target' : 'Make it near-vertical',
+      ),
+      html(
+        'button',
+        {
+          type: 'button',
+          class: 'link',
+          'data-key': `target-${index}-remove`,
+          onclick: () => {
+            chosen.target = null;
+            editBrief(store, `Take ${name} out`, {
+              targets: state.plan.brief.targets.filter((/** @type {any} */ _, /** @type {number} */ k) => k !== index),
+            });
+          },
+        },
+        'Take it out',
+      ),
+    ),
+  );
 }
 
 /**
@@ -205,17 +245,25 @@ function targetEditor(state, store, draft, chosen, index) {
 function placeBox(state, draft, index, take) {
   const { latitude, longitude } = state.plan.site ?? {};
   if (typeof latitude !== 'number' || typeof longitude !== 'number') {
-    return html('p', { class: 'soft' }, 'Give the site its latitude and longitude in the survey, and a target can be given by a place’s coordinates.');
+    return html(
+      'p',
+      { class: 'soft' },
+      'Give the site its latitude and longitude in the survey, and a target can be given by a place’s coordinates.',
+    );
   }
   return textBox(draft, {
-    key: `target-${index}-place`, label: 'or a place: latitude, longitude', unit: '°', value: '', placeholder: '48.2, 16.4',
+    key: `target-${index}-place`,
+    label: 'or a place: latitude, longitude',
+    unit: '°',
+    value: '',
+    placeholder: '48.2, 16.4',
     take: (text) => {
       if (text.trim() === '') return null;
       const place = parsePlace(text);
       if (typeof place === 'string') return place;
       const aim = greatCircle([latitude, longitude], place);
       if (aim.distanceKm < 1) return 'That is the site itself.';
-      take({ bearing: Math.round(aim.bearing * 10) / 10 % 360, distanceKm: Math.round(aim.distanceKm) });
+      take({ bearing: (Math.round(aim.bearing * 10) / 10) % 360, distanceKm: Math.round(aim.distanceKm) });
       return null;
     },
   });
@@ -226,10 +274,16 @@ function placeBox(state, draft, index, take) {
  * @returns {[number, number]|string} degrees north and east, or a sentence
  */
 export function parsePlace(text) {
-  const parts = text.toUpperCase().replace(/°/g, ' ').match(/[+\-−]?\d+(?:\.\d+)?\s*[NSEW]?/g) ?? [];
-  const value = (/** @type {string} */ part) => (parseNumber(part.replace(/[NSEW]/, '').trim()) ?? NaN) * (/[SW]/.test(part) ? -1 : 1);
+  const parts =
+    text
+      .toUpperCase()
+      .replace(/°/g, ' ')
+      .match(/[+\-−]?\d+(?:\.\d+)?\s*[NSEW]?/g) ?? [];
+  const value = (/** @type {string} */ part) =>
+    (parseNumber(part.replace(/[NSEW]/, '').trim()) ?? NaN) * (/[SW]/.test(part) ? -1 : 1);
   const [latitude, longitude] = parts.map(value);
-  if (parts.length !== 2 || Number.isNaN(latitude) || Number.isNaN(longitude)) return 'Type two figures: degrees north, then degrees east, such as 48.2, 16.4 or 33.9 S 151.2 E.';
+  if (parts.length !== 2 || Number.isNaN(latitude) || Number.isNaN(longitude))
+    return 'Type two figures: degrees north, then degrees east, such as 48.2, 16.4 or 33.9 S 151.2 E.';
   if (Math.abs(latitude) > 90 || Math.abs(longitude) > 180) return 'Latitude goes to 90° and longitude to 180°.';
   return [latitude, longitude];
 }
@@ -243,11 +297,26 @@ export function parsePlace(text) {
 function bandTicks(state, target, index, set) {
   const all = (state.plan.brief.bands ?? []).map(bandName);
   const on = new Set(target.bands?.length ? target.bands : all);
-  return html('fieldset', { class: 'ticks' }, html('legend', {}, 'counts on'), ...all.map((/** @type {string} */ band) => html('label', { class: 'tick' }, html('input', {
-    type: 'checkbox', checked: on.has(band), 'data-key': `target-${index}-on-${band}`, disabled: on.has(band) && on.size === 1,
-    onchange: () => {
-      const next = all.filter((/** @type {string} */ one) => (one === band ? !on.has(band) : on.has(one)));
-      set(`Bands of ${target.name ?? 'target'}`, { bands: next.length === all.length ? [] : next });
-    },
-  }), band)));
+  return html(
+    'fieldset',
+    { class: 'ticks' },
+    html('legend', {}, 'counts on'),
+    ...all.map((/** @type {string} */ band) =>
+      html(
+        'label',
+        { class: 'tick' },
+        html('input', {
+          type: 'checkbox',
+          checked: on.has(band),
+          'data-key': `target-${index}-on-${band}`,
+          disabled: on.has(band) && on.size === 1,
+          onchange: () => {
+            const next = all.filter((/** @type {string} */ one) => (one === band ? !on.has(band) : on.has(one)));
+            set(`Bands of ${target.name ?? 'target'}`, { bands: next.length === all.length ? [] : next });
+          },
+        }),
+        band,
+      ),
+    ),
+  );
 }

@@ -35,12 +35,18 @@ export function mount(root, store, shell) {
       next(state, shell),
     ];
   });
-  store.subscribe((state) => state.planId, () => {
-    chosen.band = null;
-    chosen.target = null;
-    draft.typed.clear();
-  });
-  store.subscribe((state) => [state.plan.brief, state.plan.site, state.catalogue, state.faults, state.units, state.place], ask);
+  store.subscribe(
+    (state) => state.planId,
+    () => {
+      chosen.band = null;
+      chosen.target = null;
+      draft.typed.clear();
+    },
+  );
+  store.subscribe(
+    (state) => [state.plan.brief, state.plan.site, state.catalogue, state.faults, state.units, state.place],
+    ask,
+  );
 }
 
 /**
@@ -50,7 +56,22 @@ export function mount(root, store, shell) {
 function next(state, shell) {
   const here = state.faults.filter(({ path }) => path.startsWith('brief')).length;
   const elsewhere = state.faults.length - here;
-  return html('p', { class: 'brief-next' },
-    html('button', { type: 'button', class: 'go', 'data-key': 'next', onclick: () => shell.go('placements') }, 'On to placements'),
-    state.faults.length ? html('span', { class: 'soft' }, [here ? `${here} to mend here` : '', elsewhere ? `${elsewhere} in the survey` : ''].filter((text) => text).join(', ')) : null);
+  return html(
+    'p',
+    { class: 'brief-next' },
+    html(
+      'button',
+      { type: 'button', class: 'go', 'data-key': 'next', onclick: () => shell.go('placements') },
+      'On to placements',
+    ),
+    state.faults.length
+      ? html(
+          'span',
+          { class: 'soft' },
+          [here ? `${here} to mend here` : '', elsewhere ? `${elsewhere} in the survey` : '']
+            .filter((text) => text)
+            .join(', '),
+        )
+      : null,
+  );
 }

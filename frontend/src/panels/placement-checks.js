@@ -15,26 +15,74 @@ const SHOWN_AT_FIRST = 6;
  * @returns {HTMLElement}
  */
 export function pullsTable(plan, placement) {
-  const most = Math.max(1, ...placement.attachments.flatMap((/** @type {any} */ hold) => [hold.pullInWind, hold.pullLimit ?? 0]));
+  const most = Math.max(
+    1,
+    ...placement.attachments.flatMap((/** @type {any} */ hold) => [hold.pullInWind, hold.pullLimit ?? 0]),
+  );
   const wind = plan.brief?.rules?.wind ?? 25;
-  return html('section', { class: 'pulls' },
-    html('div', { class: 'line part-head' }, html('h3', {}, 'Pulls, newtons'), html('span', { class: 'soft' }, `filled calm, open in a ${number(wind, 0)} m/s gust`)),
-    html('table', {},
-      html('thead', {}, html('tr', {},
-        html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'holding point')), html('th', { scope: 'col', class: 'n' }, 'calm'), html('th', { scope: 'col', class: 'n' }, 'gust'),
-        html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'bars')), html('th', { scope: 'col', class: 'n' }, 'limit'), html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'state')))),
-      html('tbody', {}, ...placement.attachments.map((/** @type {any} */ hold) => html('tr', {},
-        html('th', { scope: 'row' }, nameOf(plan, hold.on), held(hold)),
-        html('td', { class: 'n' }, number(hold.pull, 0)),
-        html('td', { class: 'n' }, number(hold.pullInWind, 0)),
-        html('td', { class: 'bar-cell' }, pullBar({ calm: hold.pull, gust: hold.pullInWind, limit: hold.pullLimit ?? null }, most, { width: 120, height: 16 })),
-        html('td', { class: 'n' }, hold.pullLimit === undefined || hold.pullLimit === null ? html('span', { class: 'soft' }, 'not known') : number(hold.pullLimit, 0)),
-        html('td', { class: 'mark-cell' }, stateMark(hold.state, hold.state)))))));
+  return html(
+    'section',
+    { class: 'pulls' },
+    html(
+      'div',
+      { class: 'line part-head' },
+      html('h3', {}, 'Pulls, newtons'),
+      html('span', { class: 'soft' }, `filled calm, open in a ${number(wind, 0)} m/s gust`),
+    ),
+    html(
+      'table',
+      {},
+      html(
+        'thead',
+        {},
+        html(
+          'tr',
+          {},
+          html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'holding point')),
+          html('th', { scope: 'col', class: 'n' }, 'calm'),
+          html('th', { scope: 'col', class: 'n' }, 'gust'),
+          html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'bars')),
+          html('th', { scope: 'col', class: 'n' }, 'limit'),
+          html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'state')),
+        ),
+      ),
+      html(
+        'tbody',
+        {},
+        ...placement.attachments.map((/** @type {any} */ hold) =>
+          html(
+            'tr',
+            {},
+            html('th', { scope: 'row' }, nameOf(plan, hold.on), held(hold)),
+            html('td', { class: 'n' }, number(hold.pull, 0)),
+            html('td', { class: 'n' }, number(hold.pullInWind, 0)),
+            html(
+              'td',
+              { class: 'bar-cell' },
+              pullBar({ calm: hold.pull, gust: hold.pullInWind, limit: hold.pullLimit ?? null }, most, {
+                width: 120,
+                height: 16,
+              }),
+            ),
+            html(
+              'td',
+              { class: 'n' },
+              hold.pullLimit === undefined || hold.pullLimit === null
+                ? html('span', { class: 'soft' }, 'not known')
+                : number(hold.pullLimit, 0),
+            ),
+            html('td', { class: 'mark-cell' }, stateMark(hold.state, hold.state)),
+          ),
+        ),
+      ),
+    ),
+  );
 }
 
 /** @param {any} hold */
 function held(hold) {
-  if (hold.held === 'weight' && hold.kilograms) return html('span', { class: 'soft' }, `, weight ${number(hold.kilograms, 1)} kg`);
+  if (hold.held === 'weight' && hold.kilograms)
+    return html('span', { class: 'soft' }, `, weight ${number(hold.kilograms, 1)} kg`);
   return hold.held ? html('span', { class: 'soft' }, `, ${hold.held === 'centre' ? 'middle' : hold.held}`) : null;
 }
 
@@ -46,21 +94,46 @@ function held(hold) {
  * @returns {HTMLElement}
  */
 export function clearancesTable(plan, placement, catalogue, length) {
-  const rows = placement.clearances.map((/** @type {any} */ one) => html('tr', {},
-    html('td', { class: 'mark-cell' }, stateMark(one.state, one.state)),
-    html('th', { scope: 'row' }, nameOf(plan, one.to), html('span', { class: 'soft' }, ` ${part(one, catalogue)}`)),
-    html('td', { class: 'n' }, html('b', {}, length(one.distance))),
-    html('td', { class: 'n soft' }, length(one.required))));
+  const rows = placement.clearances.map((/** @type {any} */ one) =>
+    html(
+      'tr',
+      {},
+      html('td', { class: 'mark-cell' }, stateMark(one.state, one.state)),
+      html('th', { scope: 'row' }, nameOf(plan, one.to), html('span', { class: 'soft' }, ` ${part(one, catalogue)}`)),
+      html('td', { class: 'n' }, html('b', {}, length(one.distance))),
+      html('td', { class: 'n soft' }, length(one.required)),
+    ),
+  );
   const bad = placement.clearances.filter((/** @type {any} */ one) => one.state !== 'clear').length;
   const first = Math.max(SHOWN_AT_FIRST, bad);
-  const head = () => html('thead', {}, html('tr', {},
-    html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'state')), html('th', { scope: 'col' }, 'to'),
-    html('th', { scope: 'col', class: 'n' }, 'found'), html('th', { scope: 'col', class: 'n' }, 'must keep')));
-  return html('section', { class: 'clearances' },
+  const head = () =>
+    html(
+      'thead',
+      {},
+      html(
+        'tr',
+        {},
+        html('th', { scope: 'col' }, html('span', { class: 'visually-hidden' }, 'state')),
+        html('th', { scope: 'col' }, 'to'),
+        html('th', { scope: 'col', class: 'n' }, 'found'),
+        html('th', { scope: 'col', class: 'n' }, 'must keep'),
+      ),
+    );
+  return html(
+    'section',
+    { class: 'clearances' },
     html('h3', {}, 'Clearances'),
     html('table', {}, head(), html('tbody', {}, ...rows.slice(0, first))),
-    rows.length > first ? html('details', {}, html('summary', {}, `${rows.length - first} more, all clear`), html('table', {}, head(), html('tbody', {}, ...rows.slice(first)))) : null,
-    html('p', { class: 'soft' }, 'Calm and blown by the wind. Local code and licensed practice decide.'));
+    rows.length > first
+      ? html(
+          'details',
+          {},
+          html('summary', {}, `${rows.length - first} more, all clear`),
+          html('table', {}, head(), html('tbody', {}, ...rows.slice(first))),
+        )
+      : null,
+    html('p', { class: 'soft' }, 'Calm and blown by the wind. Local code and licensed practice decide.'),
+  );
 }
 
 /**

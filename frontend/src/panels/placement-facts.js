@@ -53,7 +53,18 @@ export function isStale(state) {
   return state.search.planAtSearch !== null && state.search.planAtSearch !== state.plan;
 }
 
-const KINDS = ['supports', 'mastZones', 'bracketLines', 'buildings', 'trees', 'overheadLines', 'zones', 'people', 'noise', 'metalwork'];
+const KINDS = [
+  'supports',
+  'mastZones',
+  'bracketLines',
+  'buildings',
+  'trees',
+  'overheadLines',
+  'zones',
+  'people',
+  'noise',
+  'metalwork',
+];
 
 /**
  * @param {any} plan
@@ -84,7 +95,8 @@ const isMastZone = (plan, id) => (plan.mastZones ?? []).some((/** @type {any} */
  */
 export function hangsOn(plan, placement) {
   return placement.attachments.map((/** @type {any} */ hold) =>
-    (isMastZone(plan, hold.on) ? `new mast (${nameOf(plan, hold.on)})` : nameOf(plan, hold.on)));
+    isMastZone(plan, hold.on) ? `new mast (${nameOf(plan, hold.on)})` : nameOf(plan, hold.on),
+  );
 }
 
 /** @param {any} placement @returns {number} metres */
@@ -96,7 +108,8 @@ export function wireLength(placement) {
 export function toBuild(placement) {
   const ropes = placement.ropes.filter((/** @type {any} */ rope) => rope.what === 'tail').length;
   const masts = placement.masts.length;
-  const some = (/** @type {number} */ number, /** @type {string} */ one) => `${number} ${one}${number === 1 ? '' : 's'}`;
+  const some = (/** @type {number} */ number, /** @type {string} */ one) =>
+    `${number} ${one}${number === 1 ? '' : 's'}`;
   if (masts) return `new: ${some(masts, 'mast')}, ${some(ropes, 'rope')}`;
   return ropes ? `no mast; ${some(ropes, 'rope')}` : 'nothing new';
 }
@@ -167,10 +180,14 @@ export function nearestConcern(plan, placement, length) {
  */
 function hangingConcerns(plan, placement, length) {
   const clearances = placement.clearances.map((/** @type {any} */ one) => clearanceConcern(plan, one, length));
-  const pulls = placement.attachments.filter((/** @type {any} */ hold) => hold.state !== 'clear').map((/** @type {any} */ hold) => ({
-    state: hold.state, distance: null, rule: 'pull',
-    words: `pull of ${Math.round(hold.pullInWind)} N at ${nameOf(plan, hold.on)} in the gust; it may take ${Math.round(hold.pullLimit)} N`,
-  }));
+  const pulls = placement.attachments
+    .filter((/** @type {any} */ hold) => hold.state !== 'clear')
+    .map((/** @type {any} */ hold) => ({
+      state: hold.state,
+      distance: null,
+      rule: 'pull',
+      words: `pull of ${Math.round(hold.pullInWind)} N at ${nameOf(plan, hold.on)} in the gust; it may take ${Math.round(hold.pullLimit)} N`,
+    }));
   return [...clearances, ...pulls].sort((a, b) => RANK[a.state] - RANK[b.state]);
 }
 
@@ -185,11 +202,20 @@ export function concerns(plan, placement, length) {
   const hanging = hangingConcerns(plan, placement, length);
   const matching = bandsOf(placement).flatMap(({ name, rows }) => {
     const bad = rows.find((row) => row.matching.state === 'foul') ?? rows.find((row) => row.matching.state === 'tight');
-    return bad ? [{
-      state: bad.matching.state, distance: null, rule: 'matching', words: `matching on ${name}: ${bad.matching.why}`,
-    }] : [];
+    return bad
+      ? [
+          {
+            state: bad.matching.state,
+            distance: null,
+            rule: 'matching',
+            words: `matching on ${name}: ${bad.matching.why}`,
+          },
+        ]
+      : [];
   });
-  const bad = [...hanging, ...matching].filter((one) => one.state !== 'clear').sort((a, b) => RANK[a.state] - RANK[b.state]);
+  const bad = [...hanging, ...matching]
+    .filter((one) => one.state !== 'clear')
+    .sort((a, b) => RANK[a.state] - RANK[b.state]);
   return bad.length ? bad : hanging.slice(0, 1);
 }
 
@@ -202,7 +228,9 @@ export function concerns(plan, placement, length) {
 export function clearanceConcern(plan, clearance, length) {
   const part = clearance.what && clearance.what !== 'wire' ? `, ${clearance.what}` : '';
   return {
-    state: clearance.state, distance: clearance.distance, rule: clearance.rule,
+    state: clearance.state,
+    distance: clearance.distance,
+    rule: clearance.rule,
     words: `${clearance.distance < 0 ? `${length(-clearance.distance)} inside` : `${length(clearance.distance)} to`} ${nameOf(plan, clearance.to)}${part}; must keep ${length(clearance.required)}`,
   };
 }

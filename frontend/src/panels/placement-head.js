@@ -20,17 +20,50 @@ export function headLine(state, placement, index, store) {
     const next = list[index + way];
     if (next) store.set({ chosen: next.id });
   };
-  const arrow = (/** @type {number} */ way, /** @type {string} */ name) => html('button', {
-    type: 'button', class: 'step', 'aria-label': name, 'data-key': `step${way}`, disabled: !list[index + way], onclick: () => step(way),
-  }, svg('svg', { viewBox: '0 0 20 20', width: 20, height: 20, 'aria-hidden': 'true' }, [svg('path', { d: way < 0 ? 'M13 3 6 10l7 7' : 'M7 3l7 7-7 7' })]));
-  return html('div', { class: 'headline' },
+  const arrow = (/** @type {number} */ way, /** @type {string} */ name) =>
+    html(
+      'button',
+      {
+        type: 'button',
+        class: 'step',
+        'aria-label': name,
+        'data-key': `step${way}`,
+        disabled: !list[index + way],
+        onclick: () => step(way),
+      },
+      svg('svg', { viewBox: '0 0 20 20', width: 20, height: 20, 'aria-hidden': 'true' }, [
+        svg('path', { d: way < 0 ? 'M13 3 6 10l7 7' : 'M7 3l7 7-7 7' }),
+      ]),
+    );
+  return html(
+    'div',
+    { class: 'headline' },
     arrow(-1, 'Previous placement'),
-    html('div', { class: 'headline-words' },
+    html(
+      'div',
+      { class: 'headline-words' },
       html('h2', {}, scoreWords(placement.score)),
-      html('p', {},
-        html('button', { type: 'button', class: 'link', 'data-key': 'to-list', onclick: () => { document.body.dataset.column = 'list'; } },
-          index < 0 ? 'to the list' : `${index + 1} of ${list.length}`),
+      html(
+        'p',
+        {},
+        html(
+          'button',
+          {
+            type: 'button',
+            class: 'link',
+            'data-key': 'to-list',
+            onclick: () => {
+              document.body.dataset.column = 'list';
+            },
+          },
+          index < 0 ? 'to the list' : `${index + 1} of ${list.length}`,
+        ),
         ` · ${shapeTitle(placement.shape)} · `,
-        concern ? stateMark(concern.state) : null, ' ', concern ? html('b', { class: concern.state }, concern.state) : null)),
-    arrow(1, 'Next placement'));
+        concern ? stateMark(concern.state) : null,
+        ' ',
+        concern ? html('b', { class: concern.state }, concern.state) : null,
+      ),
+    ),
+    arrow(1, 'Next placement'),
+  );
 }

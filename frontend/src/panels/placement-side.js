@@ -20,7 +20,12 @@ export function sideViewNode(state, placement, size) {
   const plan = planOf(state);
   const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 1);
   return sideView(alongWire(plan, placement), {
-    ...size, length, unit: state.units === 'm' ? 1 : FOOT, title: 'Along the wire', notes: sagWords(state, placement), stateOf: (to) => stateUnder(plan, placement, to),
+    ...size,
+    length,
+    unit: state.units === 'm' ? 1 : FOOT,
+    title: 'Along the wire',
+    notes: sagWords(state, placement),
+    stateOf: (to) => stateUnder(plan, placement, to),
   });
 }
 
@@ -49,7 +54,10 @@ export function sagWords(state, placement) {
 function stateUnder(plan, placement, to) {
   const building = (plan.buildings ?? []).find((/** @type {any} */ one) => (one.name ?? one.id) === to);
   const id = building ? building.id : to;
-  return placement.clearances.find((/** @type {any} */ one) => one.to === id && (one.what ?? 'wire') === 'wire')?.state ?? null;
+  return (
+    placement.clearances.find((/** @type {any} */ one) => one.to === id && (one.what ?? 'wire') === 'wire')?.state ??
+    null
+  );
 }
 
 /**
@@ -67,7 +75,9 @@ export function mountSideView(root, store, shell) {
     const size = { width: root.clientWidth, height: root.clientHeight, ppm };
     if (state.place !== 'placements' || size.width < 60) return;
     if (!placement) {
-      root.replaceChildren(html('p', { class: 'side-none soft' }, 'The chosen wire is drawn here from the side, with what lies under it.'));
+      root.replaceChildren(
+        html('p', { class: 'side-none soft' }, 'The chosen wire is drawn here from the side, with what lies under it.'),
+      );
       return;
     }
     const folded = size.height < 80;
@@ -88,5 +98,15 @@ export function mountSideView(root, store, shell) {
 
 /** @param {HTMLElement} root */
 function foldedLine(root) {
-  return html('button', { type: 'button', class: 'side-fold', onclick: () => { root.dataset.open = ''; } }, 'Along the wire: open the side view');
+  return html(
+    'button',
+    {
+      type: 'button',
+      class: 'side-fold',
+      onclick: () => {
+        root.dataset.open = '';
+      },
+    },
+    'Along the wire: open the side view',
+  );
 }

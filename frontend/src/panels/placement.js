@@ -7,7 +7,18 @@ import { stateMark } from '../charts/marks.js';
 import { clearancesTable, pullsTable } from './placement-checks.js';
 import { comparison } from './placement-compare.js';
 import {
-  bandsOf, concerns, distanceFigure, hangsOn, isStale, listOf, ownOf, placementOf, placementTitle, planOf, scoreWords, wireLength,
+  bandsOf,
+  concerns,
+  distanceFigure,
+  hangsOn,
+  isStale,
+  listOf,
+  ownOf,
+  placementOf,
+  placementTitle,
+  planOf,
+  scoreWords,
+  wireLength,
 } from './placement-facts.js';
 import { feedFacts, gainTable, remarks, scoreTable } from './placement-gain.js';
 import { headLine } from './placement-head.js';
@@ -33,7 +44,13 @@ export function shownBand(state, placement) {
   const names = bandsOf(placement).map((band) => band.name);
   if (state.chosenBand !== null && names.includes(state.chosenBand)) return state.chosenBand;
   const heaviest = [...(planOf(state).brief?.bands ?? [])]
-    .filter((band) => names.includes(band.name) && bandsOf(placement).find((one) => one.name === band.name)?.middle.targets.some((/** @type {any} */ target) => target.bearing !== undefined && target.bearing !== null))
+    .filter(
+      (band) =>
+        names.includes(band.name) &&
+        bandsOf(placement)
+          .find((one) => one.name === band.name)
+          ?.middle.targets.some((/** @type {any} */ target) => target.bearing !== undefined && target.bearing !== null),
+    )
     .sort((a, b) => (b.weight ?? 1) - (a.weight ?? 1))[0];
   return heaviest?.name ?? names[0] ?? null;
 }
@@ -47,7 +64,10 @@ export function mount(root, store, shell) {
   root.classList.add('placement');
   const narrow = window.matchMedia(NARROW);
   const ask = redrawer(root, () => render(store.get()));
-  store.subscribe((state) => [state.search, state.chosen, state.chosenBand, state.units, state.pinned, state.plan, state.place], ask);
+  store.subscribe(
+    (state) => [state.search, state.chosen, state.chosenBand, state.units, state.pinned, state.plan, state.place],
+    ask,
+  );
   new ResizeObserver(ask).observe(root);
   narrow.addEventListener('change', ask);
   const sideRoot = shell.sideView ?? document.getElementById('side-view');
@@ -64,8 +84,16 @@ export function mount(root, store, shell) {
     return [
       headLine(state, placement, rank, store),
       head(state, plan, placement),
-      ...(narrow.matches ? [html('div', { class: 'inline-side' }, sideViewNode(state, placement, { width: Math.max(300, root.clientWidth), height: 180, ppm: 0 }),
-        html('p', { class: 'soft' }, `Along the wire, ${sagWords(state, placement).join('; ')}`))] : []),
+      ...(narrow.matches
+        ? [
+            html(
+              'div',
+              { class: 'inline-side' },
+              sideViewNode(state, placement, { width: Math.max(300, root.clientWidth), height: 180, ppm: 0 }),
+              html('p', { class: 'soft' }, `Along the wire, ${sagWords(state, placement).join('; ')}`),
+            ),
+          ]
+        : []),
       ...(state.pinned !== null && state.pinned !== placement.id ? [comparison(state, placement, store)] : []),
       profile(state, plan, placement, band),
       gainTable(placement, band, (name) => store.set({ chosenBand: name })),
@@ -79,11 +107,16 @@ export function mount(root, store, shell) {
 
   /** @param {State} state */
   function unchosen(state) {
-    const words = state.search.state === 'none' ? 'The figures of a placement stand here once a search has found one.'
-      : state.search.state === 'running' ? 'Choose one of the list while the search runs, or wait: the best is chosen when it ends.'
-        : state.search.state === 'failed' ? 'The search stopped; what went wrong stands beside the plan.'
-          : ownOf(state).length + listOf(state).length ? 'Choose a placement in the list.'
-            : 'No placement to show. The refusals say what stands in the way.';
+    const words =
+      state.search.state === 'none'
+        ? 'The figures of a placement stand here once a search has found one.'
+        : state.search.state === 'running'
+          ? 'Choose one of the list while the search runs, or wait: the best is chosen when it ends.'
+          : state.search.state === 'failed'
+            ? 'The search stopped; what went wrong stands beside the plan.'
+            : ownOf(state).length + listOf(state).length
+              ? 'Choose a placement in the list.'
+              : 'No placement to show. The refusals say what stands in the way.';
     return html('p', { class: 'placement-none soft' }, words);
   }
 
@@ -95,21 +128,63 @@ export function mount(root, store, shell) {
   function head(state, plan, placement) {
     const list = concerns(plan, placement, (metres) => distanceFigure(metres, state.units));
     const pinned = state.pinned === placement.id;
-    return html('section', { class: 'placement-head' },
-      html('p', { class: 'soft line' },
-        html('span', {}, `${placementTitle(state, placement)}, ${placement.shape}, ${lengthWithUnit(wireLength(placement), state.units, 1)} of wire`),
-        isStale(state) ? html('span', { class: 'tight' }, stateMark('tight'), ' plan changed since') : null),
+    return html(
+      'section',
+      { class: 'placement-head' },
+      html(
+        'p',
+        { class: 'soft line' },
+        html(
+          'span',
+          {},
+          `${placementTitle(state, placement)}, ${placement.shape}, ${lengthWithUnit(wireLength(placement), state.units, 1)} of wire`,
+        ),
+        isStale(state) ? html('span', { class: 'tight' }, stateMark('tight'), ' plan changed since') : null,
+      ),
       html('h2', {}, scoreWords(placement.score)),
-      html('ul', { class: 'concerns' }, ...list.slice(0, 4).map((one) => html('li', {},
-        stateMark(one.state), ' ', html('b', { class: one.state }, one.state), ` ${one.words}`))),
+      html(
+        'ul',
+        { class: 'concerns' },
+        ...list
+          .slice(0, 4)
+          .map((one) =>
+            html('li', {}, stateMark(one.state), ' ', html('b', { class: one.state }, one.state), ` ${one.words}`),
+          ),
+      ),
       list.length > 4 ? html('p', { class: 'soft' }, `and ${list.length - 4} more under Pulls and Clearances`) : null,
       html('p', { class: 'soft hangs' }, hangsOn(plan, placement).join(' – ')),
-      ...consents(state, placement).map((words) => html('p', { class: 'consent' }, stateMark('tight', 'Consent'), ` ${words}`)),
-      html('p', { class: 'actions' },
-        html('button', { type: 'button', class: 'link', 'data-key': 'pin', 'aria-pressed': String(pinned), onclick: () => store.set({ pinned: pinned ? null : placement.id }) }, pinned ? 'Unpin' : 'Pin to compare'),
-        placement.madeFrom ? html('button', { type: 'button', class: 'link', 'data-key': 'back', onclick: () => putBack(placement) }, placement.from ? 'Put it back' : 'Drop it') : null,
-        html('button', { type: 'button', class: 'link', 'data-key': 'sheet', onclick: () => shell.go('sheet') }, 'Open its sheet'),
-        html('span', { class: 'soft' }, 'drag any end on the plan')));
+      ...consents(state, placement).map((words) =>
+        html('p', { class: 'consent' }, stateMark('tight', 'Consent'), ` ${words}`),
+      ),
+      html(
+        'p',
+        { class: 'actions' },
+        html(
+          'button',
+          {
+            type: 'button',
+            class: 'link',
+            'data-key': 'pin',
+            'aria-pressed': String(pinned),
+            onclick: () => store.set({ pinned: pinned ? null : placement.id }),
+          },
+          pinned ? 'Unpin' : 'Pin to compare',
+        ),
+        placement.madeFrom
+          ? html(
+              'button',
+              { type: 'button', class: 'link', 'data-key': 'back', onclick: () => putBack(placement) },
+              placement.from ? 'Put it back' : 'Drop it',
+            )
+          : null,
+        html(
+          'button',
+          { type: 'button', class: 'link', 'data-key': 'sheet', onclick: () => shell.go('sheet') },
+          'Open its sheet',
+        ),
+        html('span', { class: 'soft' }, 'drag any end on the plan'),
+      ),
+    );
   }
 
   /**
@@ -120,7 +195,8 @@ export function mount(root, store, shell) {
     const state = store.get();
     const own = ownOf(state).filter((one) => one.id !== placement.id);
     store.set({
-      search: { ...state.search, own }, chosen: placement.from ?? listOf(state)[0]?.id ?? null,
+      search: { ...state.search, own },
+      chosen: placement.from ?? listOf(state)[0]?.id ?? null,
       pinned: state.pinned === placement.id ? null : state.pinned,
     });
   }
@@ -134,22 +210,67 @@ export function mount(root, store, shell) {
   function profile(state, plan, placement, band) {
     const bands = bandsOf(placement);
     const shown = bands.find((one) => one.name === band)?.middle;
-    const reference = state.search.result?.reference?.bands?.find((/** @type {any} */ one) => one.name === band)?.gains ?? [];
-    const targets = (shown?.targets ?? []);
+    const reference =
+      state.search.result?.reference?.bands?.find((/** @type {any} */ one) => one.name === band)?.gains ?? [];
+    const targets = shown?.targets ?? [];
     const lead = leadTarget(plan, targets);
-    const profiles = (shown?.profiles ?? []).filter((/** @type {any} */ one) => one.name !== 'peak' || !targets.some((/** @type {any} */ target) => target.bearing !== undefined));
+    const profiles = (shown?.profiles ?? []).filter(
+      (/** @type {any} */ one) =>
+        one.name !== 'peak' || !targets.some((/** @type {any} */ target) => target.bearing !== undefined),
+    );
     const width = Math.min(560, Math.max(300, root.clientWidth - 32));
-    return html('section', { class: 'profile' },
-      html('div', { class: 'line part-head' }, html('h3', {}, 'Launch profile'), html('span', { class: 'soft' }, 'dBi, before line loss')),
-      html('div', { class: 'tabs band-tabs', role: 'group', 'aria-label': 'Band shown' }, ...bands.map((one) => html('button', {
-        type: 'button', class: 'tab', 'aria-pressed': String(one.name === band), 'data-key': `band-${one.name}`, onclick: () => store.set({ chosenBand: one.name }),
-      }, one.name))),
-      shown?.rose ? html('p', { class: 'soft' }, `The reach rose on the plan is for ${number(shown.rose.elevation, 0)}° up; it betters the reference over ${number(shown.rose.betterShare * 100, 0)} % of azimuths.`) : null,
-      profiles.length ? launchProfile({
-        profiles: profiles.map((/** @type {any} */ one) => ({ ...one, name: one.name === 'peak' ? 'strongest direction' : one.name })),
-        windows: targets.map((/** @type {any} */ target) => ({ name: target.name, from: target.window[0], to: target.window[1] })),
-        reference, lead: lead ?? profiles[0].name,
-      }, { width, height: PROFILE_HEIGHT + 12 * targets.length }) : html('p', { class: 'soft' }, 'The launch profile comes with the full result.'));
+    return html(
+      'section',
+      { class: 'profile' },
+      html(
+        'div',
+        { class: 'line part-head' },
+        html('h3', {}, 'Launch profile'),
+        html('span', { class: 'soft' }, 'dBi, before line loss'),
+      ),
+      html(
+        'div',
+        { class: 'tabs band-tabs', role: 'group', 'aria-label': 'Band shown' },
+        ...bands.map((one) =>
+          html(
+            'button',
+            {
+              type: 'button',
+              class: 'tab',
+              'aria-pressed': String(one.name === band),
+              'data-key': `band-${one.name}`,
+              onclick: () => store.set({ chosenBand: one.name }),
+            },
+            one.name,
+          ),
+        ),
+      ),
+      shown?.rose
+        ? html(
+            'p',
+            { class: 'soft' },
+            `The reach rose on the plan is for ${number(shown.rose.elevation, 0)}° up; it betters the reference over ${number(shown.rose.betterShare * 100, 0)} % of azimuths.`,
+          )
+        : null,
+      profiles.length
+        ? launchProfile(
+            {
+              profiles: profiles.map((/** @type {any} */ one) => ({
+                ...one,
+                name: one.name === 'peak' ? 'strongest direction' : one.name,
+              })),
+              windows: targets.map((/** @type {any} */ target) => ({
+                name: target.name,
+                from: target.window[0],
+                to: target.window[1],
+              })),
+              reference,
+              lead: lead ?? profiles[0].name,
+            },
+            { width, height: PROFILE_HEIGHT + 12 * targets.length },
+          )
+        : html('p', { class: 'soft' }, 'The launch profile comes with the full result.'),
+    );
   }
 }
 
@@ -166,8 +287,11 @@ function consents(state, placement) {
     if (!mast.consent || mast.consent === 'none') continue;
     byNeed.set(mast.consent, [...(byNeed.get(mast.consent) ?? []), lengthWithUnit(mast.height, state.units, 1)]);
   }
-  return [...byNeed].map(([need, heights]) => (heights.length === 1 ? `The new ${heights[0]} mast needs: ${need}.`
-    : `The new masts of ${heights.join(' and ')} each need: ${need}.`));
+  return [...byNeed].map(([need, heights]) =>
+    heights.length === 1
+      ? `The new ${heights[0]} mast needs: ${need}.`
+      : `The new masts of ${heights.join(' and ')} each need: ${need}.`,
+  );
 }
 
 /**
@@ -177,6 +301,11 @@ function consents(state, placement) {
  * @returns {string|null}
  */
 function leadTarget(plan, targets) {
-  const weight = (/** @type {string} */ name) => (plan.brief?.targets ?? []).find((/** @type {any} */ one) => one.name === name)?.weight ?? 1;
-  return [...targets].filter((target) => target.bearing !== undefined && target.bearing !== null).sort((a, b) => weight(b.name) - weight(a.name))[0]?.name ?? null;
+  const weight = (/** @type {string} */ name) =>
+    (plan.brief?.targets ?? []).find((/** @type {any} */ one) => one.name === name)?.weight ?? 1;
+  return (
+    [...targets]
+      .filter((target) => target.bearing !== undefined && target.bearing !== null)
+      .sort((a, b) => weight(b.name) - weight(a.name))[0]?.name ?? null
+  );
 }

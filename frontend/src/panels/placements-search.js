@@ -30,10 +30,23 @@ export async function startSearch(store, shell, effort) {
   following.get(store)?.();
   const planAtSearch = store.get().plan;
   store.set({
-    chosen: null, pinned: null, shownRefusal: null,
+    chosen: null,
+    pinned: null,
+    shownRefusal: null,
     search: /** @type {any} */ ({
-      id: null, state: 'running', progress: 0, what: 'saving the plan', found: [], own: [], result: null, error: null,
-      faults: [], planAtSearch, effort, considered: 0, refused: 0,
+      id: null,
+      state: 'running',
+      progress: 0,
+      what: 'saving the plan',
+      found: [],
+      own: [],
+      result: null,
+      error: null,
+      faults: [],
+      planAtSearch,
+      effort,
+      considered: 0,
+      refused: 0,
     }),
   });
   shell.say('Search started.');
@@ -64,7 +77,11 @@ function follow(store, shell, id) {
     progress(data) {
       if (!mine()) return;
       patchSearch(store, {
-        progress: data.progress, what: data.what, considered: data.considered, refused: data.refused, broken: false,
+        progress: data.progress,
+        what: data.what,
+        considered: data.considered,
+        refused: data.refused,
+        broken: false,
       });
     },
     found(placement) {
@@ -80,8 +97,11 @@ function follow(store, shell, id) {
       patchSearch(store, { state: 'done', progress: 1, result });
       store.set({ chosen: (kept ?? result.placements[0])?.id ?? null });
       const count = result.placements.length;
-      shell.say(count ? `Search done: ${count} placements, the best ${result.placements[0].score.toFixed(1)} decibels over the reference.`
-        : 'Search done: no placement is allowed.');
+      shell.say(
+        count
+          ? `Search done: ${count} placements, the best ${result.placements[0].score.toFixed(1)} decibels over the reference.`
+          : 'Search done: no placement is allowed.',
+      );
     },
     failed(problem) {
       if (!mine()) return;
@@ -112,20 +132,31 @@ async function recover(store, shell, id) {
       patchSearch(store, { state: 'done', progress: 1, result: search.result, broken: false });
       if (!store.get().chosen) store.set({ chosen: search.result.placements[0]?.id ?? null });
     } else {
-      patchSearch(store, { state: search.state, error: 'The search ended on the server without a result. Start it again.' });
+      patchSearch(store, {
+        state: search.state,
+        error: 'The search ended on the server without a result. Start it again.',
+      });
     }
     following.get(store)?.();
   } catch (problem) {
     if (/** @type {any} */ (problem).status === 404 && store.get().search.id === id) {
       following.get(store)?.();
-      patchSearch(store, { state: 'failed', error: 'The server was started anew and no longer knows this search. Start it again.', faults: [] });
+      patchSearch(store, {
+        state: 'failed',
+        error: 'The server was started anew and no longer knows this search. Start it again.',
+        faults: [],
+      });
     }
   }
 }
 
 /** @param {any} a @param {any} b */
 function sameHolds(a, b) {
-  const key = (/** @type {any} */ one) => one.shape + one.attachments.map((/** @type {any} */ hold) => hold.on + hold.at.map((/** @type {number} */ v) => v.toFixed(1))).join();
+  const key = (/** @type {any} */ one) =>
+    one.shape +
+    one.attachments
+      .map((/** @type {any} */ hold) => hold.on + hold.at.map((/** @type {number} */ v) => v.toFixed(1)))
+      .join();
   return key(a) === key(b);
 }
 

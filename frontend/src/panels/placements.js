@@ -1,13 +1,10 @@
 // @ts-check
 import { html, redrawer } from '../charts/html.js';
-import { rowBars } from '../charts/bars.js';
 import { count } from '../charts/figures.js';
-import { number, signed } from '../units/figures.js';
 import { stateMark } from '../charts/marks.js';
-import { thumbnail } from '../charts/thumbnail.js';
-import {
-  bandSummaries, distanceFigure, hangsOn, isStale, listOf, nearestConcern, ownOf, planOf, shapeTitle, toBuild,
-} from './placement-facts.js';
+import { number } from '../units/figures.js';
+import { isStale, listOf, ownOf } from './placement-facts.js';
+import { ORDERS, placementRows } from './placements-list.js';
 import { cancelSearch, startSearch } from './placements-search.js';
 
 /**
@@ -18,10 +15,10 @@ import { cancelSearch, startSearch } from './placements-search.js';
  */
 
 const EFFORTS = /** @type {const} */ ([
-  ['quick', 'a few seconds'], ['normal', 'under a minute'], ['thorough', 'up to three minutes'],
+  ['quick', 'a few seconds'],
+  ['normal', 'under a minute'],
+  ['thorough', 'up to three minutes'],
 ]);
-const VIEWS = /** @type {const} */ (['overall', 'one band', 'no new mast', 'least to build']);
-
 /**
  * @param {HTMLElement} root empty element that this panel owns
  * @param {Store} store the page's one store
@@ -29,14 +26,28 @@ const VIEWS = /** @type {const} */ (['overall', 'one band', 'no new mast', 'leas
  */
 export function mount(root, store, shell) {
   root.classList.add('placements');
-  /** @type {{effort: 'quick'|'normal'|'thorough', view: typeof VIEWS[number], again: boolean}} */
+  /** @type {{effort: 'quick'|'normal'|'thorough', view: import('./placements-list.js').Order, again: boolean}} */
   const choice = { effort: 'normal', view: 'overall', again: false };
   const ask = redrawer(root, () => render(store.get()));
   // Where list and figures share a column: the list while there is nothing to look at, then the best placement.
-  store.subscribe((state) => state.search.state, (now) => {
-    document.body.dataset.column = now === 'done' || now === 'cancelled' ? 'figures' : 'list';
-  });
-  store.subscribe((state) => [state.search, state.chosen, state.chosenBand, state.units, state.faults.length, state.plan, state.pinned], ask);
+  store.subscribe(
+    (state) => state.search.state,
+    (now) => {
+      document.body.dataset.column = now === 'done' || now === 'cancelled' ? 'figures' : 'list';
+    },
+  );
+  store.subscribe(
+    (state) => [
+      state.search,
+      state.chosen,
+      state.chosenBand,
+      state.units,
+      state.faults.length,
+      state.plan,
+      state.pinned,
+    ],
+    ask,
+  );
 
   /** @param {State} state */
   function render(state) {
@@ -45,8 +56,16 @@ export function mount(root, store, shell) {
     return [
       search.state === 'running' ? running(state) : ended(state),
       ...(isStale(state) ? [stale(state)] : []),
-      ...(listOf(state).length || ownOf(state).length ? [views(), list(state)] : [empty(state)]),
+      ...(listOf(state).length || ownOf(state).length
+        ? [views(), placementRows(state, choice.view, choose)]
+        : [empty(state)]),
     ].filter((node) => node !== null);
+  }
+
+  /** @param {string} id */
+  function choose(id) {
+    store.set({ chosen: id, shownRefusal: null });
+    document.body.dataset.column = 'figures';
   }
 
   /** @param {string} word */
@@ -60,25 +79,47 @@ export function mount(root, store, shell) {
   }
 
   function efforts() {
-    return html('fieldset', { class: 'efforts' },
+    return html(
+      'fieldset',
+      { class: 'efforts' },
       html('legend', {}, 'How hard to look'),
-      ...EFFORTS.map(([name, time]) => html('label', {},
-        html('input', {
-          type: 'radio', name: 'effort', value: name, checked: choice.effort === name, 'data-key': `effort-${name}`,
-          onchange: () => { choice.effort = name; },
-        }),
-        html('b', {}, name), html('span', { class: 'soft' }, time))));
+      ...EFFORTS.map(([name, time]) =>
+        html(
+          'label',
+          {},
+          html('input', {
+            type: 'radio',
+            name: 'effort',
+            value: name,
+            checked: choice.effort === name,
+            'data-key': `effort-${name}`,
+            onchange: () => {
+              choice.effort = name;
+            },
+          }),
+          html('b', {}, name),
+          html('span', { class: 'soft' }, time),
+        ),
+      ),
+    );
   }
 
   /** @param {State} state */
   function opening(state) {
     const { faults } = state;
-    return html('div', { class: 'search-opening' },
+    return html(
+      'div',
+      { class: 'search-opening' },
       html('h2', {}, 'Placements'),
-      html('p', {}, 'Every way to hang the wire that the plot allows is laid out, checked against its clearances, followed down to the station’s socket, and ranked.'),
+      html(
+        'p',
+        {},
+        'Every way to hang the wire that the plot allows is laid out, checked against its clearances, followed down to the station’s socket, and ranked.',
+      ),
       efforts(),
       startButton('Find placements'),
-      faults.length ? faultList(faults, 'Still to mend before a search can start:') : null);
+      faults.length ? faultList(faults, 'Still to mend before a search can start:') : null,
+    );
   }
 
   /**
@@ -86,28 +127,51 @@ export function mount(root, store, shell) {
    * @param {string} heading
    */
   function faultList(faults, heading) {
-    return html('div', { class: 'search-faults' },
+    return html(
+      'div',
+      { class: 'search-faults' },
       html('p', {}, stateMark('foul', 'Fault'), ' ', heading),
       html('ul', {}, ...faults.slice(0, 4).map((fault) => html('li', {}, fault.message))),
       faults.length > 4 ? html('p', { class: 'soft' }, `and ${faults.length - 4} more.`) : null,
-      html('button', { class: 'link', type: 'button', onclick: () => shell.go('survey') }, 'To the survey'));
+      html('button', { class: 'link', type: 'button', onclick: () => shell.go('survey') }, 'To the survey'),
+    );
   }
 
   /** @param {State} state */
   function running(state) {
     const search = /** @type {any} */ (state.search);
     const done = Math.round(search.progress * 100);
-    const rule = html('div', {
-      class: 'search-rule', role: 'progressbar', 'aria-label': 'Search', 'aria-valuemin': 0, 'aria-valuemax': 100, 'aria-valuenow': done,
-    }, html('span', {}));
+    const rule = html(
+      'div',
+      {
+        class: 'search-rule',
+        role: 'progressbar',
+        'aria-label': 'Search',
+        'aria-valuemin': 0,
+        'aria-valuemax': 100,
+        'aria-valuenow': done,
+      },
+      html('span', {}),
+    );
     /** @type {HTMLElement} */ (rule.firstElementChild).style.width = `${done}%`;
-    return html('div', { class: 'search-running' },
+    return html(
+      'div',
+      { class: 'search-running' },
       rule,
-      search.broken ? html('p', {}, 'The connection broke; listening again.')
+      search.broken
+        ? html('p', {}, 'The connection broke; listening again.')
         : html('p', {}, 'Trying ', html('b', {}, search.what || 'the first layouts')),
-      html('p', { class: 'soft line' },
+      html(
+        'p',
+        { class: 'soft line' },
         html('span', {}, `${count(search.considered)} considered, ${count(search.refused)} refused`),
-        html('button', { class: 'link', type: 'button', 'data-key': 'cancel', onclick: () => cancelSearch(store, shell) }, 'Cancel')));
+        html(
+          'button',
+          { class: 'link', type: 'button', 'data-key': 'cancel', onclick: () => cancelSearch(store, shell) },
+          'Cancel',
+        ),
+      ),
+    );
   }
 
   /** @param {State} state */
@@ -115,127 +179,109 @@ export function mount(root, store, shell) {
     const search = /** @type {any} */ (state.search);
     const found = listOf(state).length;
     if (search.state === 'failed') {
-      return html('div', { class: 'search-ended' },
-        html('p', { class: 'problem' }, stateMark('foul', 'Failed'), ' ', html('b', {}, 'The search stopped. '), search.error ?? ''),
+      return html(
+        'div',
+        { class: 'search-ended' },
+        html(
+          'p',
+          { class: 'problem' },
+          stateMark('foul', 'Failed'),
+          ' ',
+          html('b', {}, 'The search stopped. '),
+          search.error ?? '',
+        ),
         search.faults?.length ? faultList(search.faults, 'What the plan still lacks:') : null,
-        efforts(), startButton('Search again'));
+        efforts(),
+        startButton('Search again'),
+      );
     }
-    const said = search.state === 'cancelled' ? 'cancelled'
-      : `searched ${count(search.result.counts.considered)} in ${search.result.seconds < 10 ? number(search.result.seconds, 1) : number(search.result.seconds, 0)} s`;
-    return html('div', { class: 'search-ended' },
-      html('p', { class: 'line' },
+    const said =
+      search.state === 'cancelled'
+        ? 'cancelled'
+        : `searched ${count(search.result.counts.considered)} in ${search.result.seconds < 10 ? number(search.result.seconds, 1) : number(search.result.seconds, 0)} s`;
+    return html(
+      'div',
+      { class: 'search-ended' },
+      html(
+        'p',
+        { class: 'line' },
         html('b', { class: 'title' }, `${found} placement${found === 1 ? '' : 's'}`),
         html('span', { class: 'soft' }, said),
-        html('button', { type: 'button', class: 'link', 'data-key': 'again', 'aria-expanded': String(choice.again), onclick: () => { choice.again = !choice.again; ask(); } }, 'again')),
-      choice.again ? html('div', { class: 'again' }, efforts(), startButton('Search again')) : null);
+        html(
+          'button',
+          {
+            type: 'button',
+            class: 'link',
+            'data-key': 'again',
+            'aria-expanded': String(choice.again),
+            onclick: () => {
+              choice.again = !choice.again;
+              ask();
+            },
+          },
+          'again',
+        ),
+      ),
+      choice.again ? html('div', { class: 'again' }, efforts(), startButton('Search again')) : null,
+    );
   }
 
   /** @param {State} state */
   function stale(state) {
     void state;
-    return html('p', { class: 'stale' }, stateMark('tight', 'Out of date'), ' The plan has changed since this search; these figures are of the plan as it was. ',
-      html('button', { class: 'link', type: 'button', onclick: begin }, 'Search again'));
+    return html(
+      'p',
+      { class: 'stale' },
+      stateMark('tight', 'Out of date'),
+      ' The plan has changed since this search; these figures are of the plan as it was. ',
+      html('button', { class: 'link', type: 'button', onclick: begin }, 'Search again'),
+    );
   }
 
   /** @param {State} state */
   function empty(state) {
-    if (state.search.state === 'running') return html('p', { class: 'search-empty soft' }, 'The first placements appear here and on the plan as they are found.');
+    if (state.search.state === 'running')
+      return html(
+        'p',
+        { class: 'search-empty soft' },
+        'The first placements appear here and on the plan as they are found.',
+      );
     if (state.search.state !== 'done') return null;
-    return html('div', { class: 'search-empty' },
+    return html(
+      'div',
+      { class: 'search-empty' },
       html('p', {}, stateMark('foul', 'None'), html('b', {}, ' No placement is allowed on this plot as it stands.')),
       html('p', {}, 'The refusals below say why, nearest first, each with the change that would cure it.'),
-      html('p', {}, 'A support more, a mast zone, or more shapes in the ',
-        html('button', { class: 'link', type: 'button', onclick: () => shell.go('brief') }, 'brief'), ' may open a way.'));
+      html(
+        'p',
+        {},
+        'A support more, a mast zone, or more shapes in the ',
+        html('button', { class: 'link', type: 'button', onclick: () => shell.go('brief') }, 'brief'),
+        ' may open a way.',
+      ),
+    );
   }
 
   function views() {
-    return html('div', { class: 'tabs', role: 'group', 'aria-label': 'Order of the list' },
-      ...VIEWS.map((view) => html('button', {
-        type: 'button', class: 'tab', 'aria-pressed': String(choice.view === view), 'data-key': `view-${view}`,
-        onclick: () => { choice.view = view; ask(); },
-      }, view)));
+    return html(
+      'div',
+      { class: 'tabs', role: 'group', 'aria-label': 'Order of the list' },
+      ...ORDERS.map((view) =>
+        html(
+          'button',
+          {
+            type: 'button',
+            class: 'tab',
+            'aria-pressed': String(choice.view === view),
+            'data-key': `view-${view}`,
+            onclick: () => {
+              choice.view = view;
+              ask();
+            },
+          },
+          view,
+        ),
+      ),
+    );
   }
-
-  /** @param {State} state */
-  function list(state) {
-    const rows = ordered(state, choice.view);
-    return html('ol', { class: 'rows', onkeydown: walkRows },
-      ...ownOf(state).map((placement) => row(state, placement, null)),
-      ...rows.map((placement) => row(state, placement, listOf(state).indexOf(placement) + 1)));
-  }
-
-  /**
-   * @param {State} state
-   * @param {any} placement
-   * @param {number|null} rank null for one made by hand
-   */
-  function row(state, placement, rank) {
-    const plan = planOf(state);
-    const bars = bandSummaries(plan, placement);
-    const concern = nearestConcern(plan, placement, (metres) => distanceFigure(metres, state.units));
-    const names = hangsOn(plan, placement).join(', ');
-    return html('li', {}, html('button', {
-      type: 'button', class: 'row', 'data-key': `row-${placement.id}`, 'aria-current': placement.id === state.chosen ? 'true' : null,
-      onclick: () => {
-        store.set({ chosen: placement.id, shownRefusal: null });
-        document.body.dataset.column = 'figures';
-      },
-    },
-    html('span', { class: 'rank' }, rank === null ? '' : String(rank)),
-    thumbnail(plan, placement, { width: 54, height: 68 }),
-    html('span', { class: 'row-words' },
-      html('b', {}, shapeTitle(placement.shape), placement.madeFrom ? html('span', { class: 'soft' }, `, ${placement.madeFrom.toLowerCase()}`) : null,
-        state.pinned === placement.id ? html('span', { class: 'soft' }, ', pinned') : null),
-      html('span', { class: 'row-names', title: names }, names),
-      concern ? html('span', { class: 'row-state' }, stateMark(concern.state), ' ', html('b', { class: concern.state }, concern.state), ` ${short(concern.words)}`) : null,
-      html('span', { class: 'soft' }, toBuild(placement))),
-    html('span', { class: 'row-figures' },
-      html('span', { class: 'score' }, html('b', {}, signed(placement.score, 1)), ' dB'),
-      rowBars(bars, { width: 98, height: 30 }))));
-  }
-}
-
-/**
- * @param {string} words
- * @returns {string} without what the rule asks and which part of ours is near; the row has no room for them
- */
-function short(words) {
-  return words.replace(/; (must keep|it may take).*$/, '').replace(/ in the gust$/, '').replace(/,[^,]*$/, '');
-}
-
-/**
- * @param {State} state
- * @param {typeof VIEWS[number]} view
- * @returns {any[]}
- */
-function ordered(state, view) {
-  const list = listOf(state);
-  if (view === 'no new mast') return list.filter((placement) => placement.masts.length === 0);
-  if (view === 'one band') {
-    const plan = planOf(state);
-    const over = (/** @type {any} */ placement) => {
-      const bands = bandSummaries(plan, placement);
-      return (bands.find((band) => band.name === state.chosenBand) ?? bands[0])?.over ?? 0;
-    };
-    return [...list].sort((a, b) => over(b) - over(a));
-  }
-  if (view === 'least to build') {
-    const work = (/** @type {any} */ placement) => placement.masts.length * 10 + placement.ropes.length;
-    return [...list].sort((a, b) => work(a) - work(b) || b.score - a.score);
-  }
-  return list;
-}
-
-/**
- * Arrow keys walk the list.
- * @param {KeyboardEvent} event
- */
-function walkRows(event) {
-  if (event.key !== 'ArrowDown' && event.key !== 'ArrowUp') return;
-  const rows = [...document.querySelectorAll('.rows .row')];
-  const now = rows.indexOf(/** @type {Element} */ (document.activeElement));
-  const next = rows[now + (event.key === 'ArrowDown' ? 1 : -1)];
-  if (now < 0 || !(next instanceof HTMLElement)) return;
-  event.preventDefault();
-  next.focus();
 }

@@ -31,19 +31,39 @@ export function mount(root, store, shell) {
     if (!result) return [];
     const { counts } = result;
     const refusals = [...result.refusals].sort((a, b) => cureRank(a) - cureRank(b));
-    if (!refusals.length) return [html('p', { class: 'soft' }, counts.refused ? `${count(counts.refused)} refused.` : 'Nothing was refused.')];
+    if (!refusals.length)
+      return [
+        html('p', { class: 'soft' }, counts.refused ? `${count(counts.refused)} refused.` : 'Nothing was refused.'),
+      ];
     const shown = open.all || result.placements.length === 0 ? refusals : refusals.slice(0, SHOWN_AT_FIRST);
     return [
-      html('div', { class: 'line part-head' },
+      html(
+        'div',
+        { class: 'line part-head' },
         html('h2', {}, `${count(counts.refused)} refused`),
-        refusals.length > SHOWN_AT_FIRST ? html('button', {
-          type: 'button', class: 'link', 'data-key': 'all', 'aria-expanded': String(open.all), onclick: () => {
-            open.all = !open.all;
-            store.set({ search: { ...store.get().search, ghosts: open.all } });
-            ask();
-          },
-        }, open.all ? 'only the nearest' : `the nearest ${refusals.length}, and their ghosts`) : null),
-      html('ul', {}, ...shown.map((/** @type {any} */ refusal, /** @type {number} */ index) => item(state, refusal, index))),
+        refusals.length > SHOWN_AT_FIRST
+          ? html(
+              'button',
+              {
+                type: 'button',
+                class: 'link',
+                'data-key': 'all',
+                'aria-expanded': String(open.all),
+                onclick: () => {
+                  open.all = !open.all;
+                  store.set({ search: { ...store.get().search, ghosts: open.all } });
+                  ask();
+                },
+              },
+              open.all ? 'only the nearest' : `the nearest ${refusals.length}, and their ghosts`,
+            )
+          : null,
+      ),
+      html(
+        'ul',
+        {},
+        ...shown.map((/** @type {any} */ refusal, /** @type {number} */ index) => item(state, refusal, index)),
+      ),
     ];
   }
 
@@ -56,16 +76,47 @@ export function mount(root, store, shell) {
     const chosen = state.shownRefusal === refusal;
     const plan = planOf(state);
     const names = refusal.attachments.map((/** @type {string} */ id) => nameOf(plan, id)).join(' to ');
-    return html('li', { class: chosen ? 'shown' : null },
-      html('button', {
-        type: 'button', class: 'plain', 'data-key': `refusal-${index}`, 'aria-pressed': String(chosen),
-        onclick: () => store.set({ shownRefusal: chosen ? null : refusal }),
-      }, stateMark('foul', 'Refused'), ' ', html('b', {}, `${shapeTitle(refusal.shape)}, ${names}. `), refusal.reason),
-      html('p', {}, html('b', {}, 'Cure: '), refusal.cure, ' ',
-        refusal.cured?.length ? html('button', {
-          type: 'button', class: 'link', 'data-key': `cure-${index}`, disabled: open.busy === refusal, onclick: () => takeCure(refusal),
-        }, open.busy === refusal ? 'working it out' : cureRank(refusal) === 0 ? 'Take it' : 'See it') : null),
-      open.error !== null && chosen ? html('p', { class: 'problem' }, stateMark('foul', 'Error'), ` ${open.error}`) : null);
+    return html(
+      'li',
+      { class: chosen ? 'shown' : null },
+      html(
+        'button',
+        {
+          type: 'button',
+          class: 'plain',
+          'data-key': `refusal-${index}`,
+          'aria-pressed': String(chosen),
+          onclick: () => store.set({ shownRefusal: chosen ? null : refusal }),
+        },
+        stateMark('foul', 'Refused'),
+        ' ',
+        html('b', {}, `${shapeTitle(refusal.shape)}, ${names}. `),
+        refusal.reason,
+      ),
+      html(
+        'p',
+        {},
+        html('b', {}, 'Cure: '),
+        refusal.cure,
+        ' ',
+        refusal.cured?.length
+          ? html(
+              'button',
+              {
+                type: 'button',
+                class: 'link',
+                'data-key': `cure-${index}`,
+                disabled: open.busy === refusal,
+                onclick: () => takeCure(refusal),
+              },
+              open.busy === refusal ? 'working it out' : cureRank(refusal) === 0 ? 'Take it' : 'See it',
+            )
+          : null,
+      ),
+      open.error !== null && chosen
+        ? html('p', { class: 'problem' }, stateMark('foul', 'Error'), ` ${open.error}`)
+        : null,
+    );
   }
 
   /**
@@ -110,10 +161,23 @@ export function curedLayout(plan, catalogue, refusal) {
   const wire = plan.brief?.wire ?? catalogue?.wires?.find((/** @type {any} */ one) => one.default)?.id;
   const line = plan.brief?.line ?? catalogue?.lines?.find((/** @type {any} */ one) => one.default)?.id;
   const [drawn] = refusal.wire;
-  const length = (drawn ?? []).slice(1).reduce((/** @type {number} */ sum, /** @type {number[]} */ point, /** @type {number} */ index) =>
-    sum + Math.hypot(...[0, 1, 2].map((k) => point[k] - drawn[index][k])), 0);
-  const { points, fraction } = laidAlong(refusal.cured.map((/** @type {any} */ hold) => hold.at), length || Infinity);
-  return { shape: refusal.shape, attachments: refusal.cured, conductors: [{ points, wire }], feed: { conductor: 0, fraction, line } };
+  const length = (drawn ?? [])
+    .slice(1)
+    .reduce(
+      (/** @type {number} */ sum, /** @type {number[]} */ point, /** @type {number} */ index) =>
+        sum + Math.hypot(...[0, 1, 2].map((k) => point[k] - drawn[index][k])),
+      0,
+    );
+  const { points, fraction } = laidAlong(
+    refusal.cured.map((/** @type {any} */ hold) => hold.at),
+    length || Infinity,
+  );
+  return {
+    shape: refusal.shape,
+    attachments: refusal.cured,
+    conductors: [{ points, wire }],
+    feed: { conductor: 0, fraction, line },
+  };
 }
 
 /**

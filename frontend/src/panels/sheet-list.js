@@ -1,9 +1,10 @@
 // @ts-check
 import { html } from '../charts/html.js';
-import { count, impedance, megahertz } from '../charts/figures.js';
 import { stateMark } from '../charts/marks.js';
 import { number } from '../units/figures.js';
 import { formatLength, lengthWithUnit } from '../units/length.js';
+import { bold, square, table } from './sheet-table.js';
+import { cautions, checks, order, setOut, sweep } from './sheet-work.js';
 
 /**
  * The rigging list from the sheet's own document, in the order it prints: overhead lines first, in the only box.
@@ -19,43 +20,59 @@ import { formatLength, lengthWithUnit } from '../units/length.js';
 export function sheetList(model, units) {
   const length = (/** @type {number} */ metres) => formatLength(metres, units, 2);
   const { head } = model;
-  return html('article', { class: 'page list', 'aria-label': 'Rigging list' },
-    html('header', {},
+  return html(
+    'article',
+    { class: 'page list', 'aria-label': 'Rigging list' },
+    html(
+      'header',
+      {},
       html('div', {}, html('p', {}, `Rigging sheet, revision ${head.revision}`), html('h2', {}, head.title)),
-      html('div', { class: 'end' },
+      html(
+        'div',
+        { class: 'end' },
         html('p', {}, html('b', {}, `${head.name}, ${lengthWithUnit(head.wireLength, units, 1)} of wire`)),
         html('p', {}, `${head.bands.join(', ')}; ${number(head.power, 0)} W`),
-        html('p', {}, units === 'm' ? 'Metres. Heights above ground at that spot.' : 'Feet and inches. Heights above ground at that spot.'),
-        head.savedAt ? html('p', {}, `Plan as saved ${head.savedAt}`) : null)),
-    head.verdict ? html('p', { class: 'verdict' }, stateMark('foul', 'Not allowed'), html('b', {}, ` ${head.verdict}`)) : null,
+        html(
+          'p',
+          {},
+          units === 'm'
+            ? 'Metres. Heights above ground at that spot.'
+            : 'Feet and inches. Heights above ground at that spot.',
+        ),
+        head.savedAt ? html('p', {}, `Plan as saved ${head.savedAt}`) : null,
+      ),
+    ),
+    head.verdict
+      ? html('p', { class: 'verdict' }, stateMark('foul', 'Not allowed'), html('b', {}, ` ${head.verdict}`))
+      : null,
     overheadBox(model.overhead, length),
     html('div', { class: 'pair' }, wires(model, length), ropes(model, length)),
-    html('div', { class: 'pair' }, html('div', { class: 'stack' }, holdings(model, length), sags(model, length)), hardware(model, length)),
+    html(
+      'div',
+      { class: 'pair' },
+      html('div', { class: 'stack' }, holdings(model, length), sags(model, length)),
+      hardware(model, length),
+    ),
     setOut(model.setOut, length),
     html('div', { class: 'pair' }, order(model), cautions(model)),
     html('div', { class: 'pair' }, checks('Before', model.before), checks('After', model.after)),
     sweep(model),
-    model.notes?.length ? html('section', {}, html('h3', {}, 'Worth knowing'), html('ul', { class: 'notes' }, ...model.notes.map((/** @type {string} */ note) => html('li', {}, note)))) : null,
-    html('footer', {}, html('p', {}, [...head.weather, model.decides].join(' ')), html('p', {}, 'RF exposure not computed.')));
+    model.notes?.length
+      ? html(
+          'section',
+          {},
+          html('h3', {}, 'Worth knowing'),
+          html('ul', { class: 'notes' }, ...model.notes.map((/** @type {string} */ note) => html('li', {}, note))),
+        )
+      : null,
+    html(
+      'footer',
+      {},
+      html('p', {}, [...head.weather, model.decides].join(' ')),
+      html('p', {}, 'RF exposure not computed.'),
+    ),
+  );
 }
-
-/**
- * @param {string[]} heads each "text" or ">text" for figures
- * @param {(string|Node|null)[][]} rows
- * @param {string} [caption] for screen readers
- */
-function table(heads, rows, caption) {
-  const right = heads.map((head) => head.startsWith('>'));
-  return html('div', { class: 'scroll', tabindex: 0, role: 'group', 'aria-label': caption ?? 'table' }, html('table', {},
-    caption ? html('caption', { class: 'visually-hidden' }, caption) : null,
-    html('thead', {}, html('tr', {}, ...heads.map((head, index) => html('th', { scope: 'col', class: right[index] ? 'n' : null }, head.replace(/^>/, '') || html('span', { class: 'visually-hidden' }, 'mark'))))),
-    html('tbody', {}, ...rows.map((row) => html('tr', {}, ...row.map((cell, index) => html(index === 0 ? 'th' : 'td', {
-      scope: index === 0 ? 'row' : null, class: right[index] ? 'n' : null, 'data-label': heads[index].replace(/^>/, '') || null,
-    }, cell)))))));
-}
-
-/** @param {string} text */
-const bold = (text) => html('b', {}, text);
 
 /**
  * @param {any} overhead
@@ -67,15 +84,32 @@ function overheadBox(overhead, length) {
     const of = keep !== undefined && Math.abs(one.required - keep) < 1e-6 ? '' : ` of ${length(one.required)}`;
     return html('span', { class: one.state }, `${length(one.distance)}${of} `, stateMark(one.state), ` ${one.state}`);
   };
-  return html('section', { class: 'overhead' },
+  return html(
+    'section',
+    { class: 'overhead' },
     html('h3', {}, 'Overhead lines first'),
     ...overhead.say.map((/** @type {string} */ words) => html('p', {}, words)),
-    overhead.lines.length ? table(['Line', 'Kind', '>Height', '>Keep', '>Nearest, in the gust', '>If a wire lets go', '>If a mast falls'],
-      overhead.lines.map((/** @type {any} */ line) => [
-        html('span', {}, bold(line.name), line.authority ? html('span', { class: 'small' }, ` ${line.authority}`) : null), line.kind, `${length(line.lowest)}–${length(line.highest)}`,
-        line.keep === undefined || line.keep === null ? 'not checked' : bold(length(line.keep)),
-        reach(line.nearest, 'not checked', line.keep), reach(line.wireLetGo, 'not required', line.keep), reach(line.mastFalls, 'not required', line.keep),
-      ]), 'Overhead lines') : null);
+    overhead.lines.length
+      ? table(
+          ['Line', 'Kind', '>Height', '>Keep', '>Nearest, in the gust', '>If a wire lets go', '>If a mast falls'],
+          overhead.lines.map((/** @type {any} */ line) => [
+            html(
+              'span',
+              {},
+              bold(line.name),
+              line.authority ? html('span', { class: 'small' }, ` ${line.authority}`) : null,
+            ),
+            line.kind,
+            `${length(line.lowest)}–${length(line.highest)}`,
+            line.keep === undefined || line.keep === null ? 'not checked' : bold(length(line.keep)),
+            reach(line.nearest, 'not checked', line.keep),
+            reach(line.wireLetGo, 'not required', line.keep),
+            reach(line.mastFalls, 'not required', line.keep),
+          ]),
+          'Overhead lines',
+        )
+      : null,
+  );
 }
 
 /**
@@ -84,14 +118,33 @@ function overheadBox(overhead, length) {
  */
 function wires({ wires: pieces, feedLine }, length) {
   const kinds = [...new Set(pieces.map((/** @type {any} */ piece) => piece.kind))];
-  return html('section', {},
+  return html(
+    'section',
+    {},
     html('h3', {}, 'Wire and line'),
-    table(['', 'Piece', '>Hangs', '>Added', '>Cut'], [
-      ...pieces.map((/** @type {any} */ piece) => [bold(piece.mark), piece.piece, length(piece.finished), length(piece.turnsBack + piece.trim), bold(length(piece.cut))]),
-      [bold(feedLine.mark), 'feedpoint to entry', length(feedLine.finished), length(feedLine.madeOff), bold(length(feedLine.cut))],
-    ], 'Wire and line to cut'),
+    table(
+      ['', 'Piece', '>Hangs', '>Added', '>Cut'],
+      [
+        ...pieces.map((/** @type {any} */ piece) => [
+          bold(piece.mark),
+          piece.piece,
+          length(piece.finished),
+          length(piece.turnsBack + piece.trim),
+          bold(length(piece.cut)),
+        ]),
+        [
+          bold(feedLine.mark),
+          'feedpoint to entry',
+          length(feedLine.finished),
+          length(feedLine.madeOff),
+          bold(length(feedLine.cut)),
+        ],
+      ],
+      'Wire and line to cut',
+    ),
     html('p', { class: 'small' }, `${kinds.join('; ')}. ${feedLine.mark}: ${feedLine.kind}.`),
-    ...feedLine.notes.map((/** @type {string} */ words) => html('p', { class: 'small' }, words)));
+    ...feedLine.notes.map((/** @type {string} */ words) => html('p', { class: 'small' }, words)),
+  );
 }
 
 /**
@@ -100,12 +153,24 @@ function wires({ wires: pieces, feedLine }, length) {
  */
 function ropes({ ropes: all }, length) {
   const kinds = [...new Set(all.map((/** @type {any} */ rope) => rope.kind))];
-  return html('section', {},
+  return html(
+    'section',
+    {},
     html('h3', {}, 'Rope'),
-    all.length ? table(['', 'Runs', '>Run', '>Cut'], all.map((/** @type {any} */ rope) => [
-      bold(rope.mark), `${rope.from}${rope.over ? ` over ${rope.over}` : ''} to ${rope.to}; ${rope.madeOff}`, length(rope.run), bold(length(rope.cut)),
-    ]), 'Ropes to cut') : html('p', {}, 'None.'),
-    kinds.length ? html('p', { class: 'small' }, `${kinds.join('; ')}.`) : null);
+    all.length
+      ? table(
+          ['', 'Runs', '>Run', '>Cut'],
+          all.map((/** @type {any} */ rope) => [
+            bold(rope.mark),
+            `${rope.from}${rope.over ? ` over ${rope.over}` : ''} to ${rope.to}; ${rope.madeOff}`,
+            length(rope.run),
+            bold(length(rope.cut)),
+          ]),
+          'Ropes to cut',
+        )
+      : html('p', {}, 'None.'),
+    kinds.length ? html('p', { class: 'small' }, `${kinds.join('; ')}.`) : null,
+  );
 }
 
 /**
@@ -113,29 +178,49 @@ function ropes({ ropes: all }, length) {
  * @param {Length} length
  */
 function holdings({ attachments }, length) {
-  return html('section', {},
+  return html(
+    'section',
+    {},
     html('h3', {}, 'Heights, pulls, and what to hang'),
-    table(['', 'Point', '>Height', '>Calm, N', '>Gust, N', '>May take, N', '>Hang'], attachments.map((/** @type {any} */ one) => [
-      square(one.point), one.name, bold(length(one.aboveGround)), number(one.pull, 0), number(one.pullInWind, 0),
-      one.mayTake === undefined || one.mayTake === null ? 'not known' : html('span', {}, `${number(one.mayTake, 0)} `, stateMark(one.state, one.state)),
-      one.kilograms ? bold(`${number(one.kilograms, 1)} kg`) : one.held === 'centre' ? 'middle' : one.held,
-    ]), 'Attachments'));
+    table(
+      ['', 'Point', '>Height', '>Calm, N', '>Gust, N', '>May take, N', '>Hang'],
+      attachments.map((/** @type {any} */ one) => [
+        square(one.point),
+        one.name,
+        bold(length(one.aboveGround)),
+        number(one.pull, 0),
+        number(one.pullInWind, 0),
+        one.mayTake === undefined || one.mayTake === null
+          ? 'not known'
+          : html('span', {}, `${number(one.mayTake, 0)} `, stateMark(one.state, one.state)),
+        one.kilograms ? bold(`${number(one.kilograms, 1)} kg`) : one.held === 'centre' ? 'middle' : one.held,
+      ]),
+      'Attachments',
+    ),
+  );
 }
-
-/** @param {number} point */
-const square = (point) => html('span', { class: 'point' }, String(point));
 
 /**
  * @param {any} model
  * @param {Length} length
  */
 function hardware({ hardware: items }, length) {
-  const remark = (/** @type {any} */ item) => [item.length ? `${length(item.length)}` : '', item.note ?? ''].filter((text) => text).join(' ');
-  return html('section', {},
+  const remark = (/** @type {any} */ item) =>
+    [item.length ? `${length(item.length)}` : '', item.note ?? ''].filter((text) => text).join(' ');
+  return html(
+    'section',
+    {},
     html('h3', {}, 'Hardware'),
-    table(['>', 'What', '>Spare'], items.map((/** @type {any} */ item) => [
-      bold(String(item.count)), html('span', {}, item.what, remark(item) ? html('span', { class: 'small' }, `, ${remark(item)}`) : null), item.spares ? `+${item.spares}` : '',
-    ]), 'Hardware'));
+    table(
+      ['>', 'What', '>Spare'],
+      items.map((/** @type {any} */ item) => [
+        bold(String(item.count)),
+        html('span', {}, item.what, remark(item) ? html('span', { class: 'small' }, `, ${remark(item)}`) : null),
+        item.spares ? `+${item.spares}` : '',
+      ]),
+      'Hardware',
+    ),
+  );
 }
 
 /**
@@ -143,72 +228,22 @@ function hardware({ hardware: items }, length) {
  * @param {Length} length
  */
 function sags({ sags: all }, length) {
-  return html('section', {},
+  return html(
+    'section',
+    {},
     html('h3', {}, 'Sag to sight'),
-    table(['Span', '>Level', '>Sag, middle', '>Height', '>In gust', '>Blown out', '>Compass'], all.map((/** @type {any} */ sag) => [
-      sag.span, length(sag.level), bold(length(sag.middle)), length(sag.heightMiddle), length(sag.inGust), length(sag.blowOut), `${number(sag.magnetic, 0)}°`,
-    ]), 'Sag of each span'));
-}
-
-/**
- * @param {any} setOutModel
- * @param {Length} length
- */
-function setOut(setOutModel, length) {
-  const { a, b, c, points, notes } = setOutModel;
-  const known = [a, b, c].filter((one) => one);
-  return html('section', {},
-    html('h3', {}, 'Set-out by two tapes'),
-    table(['', 'Point', `>From ${a?.letter ?? 'A'}`, `>From ${b?.letter ?? 'B'}`, 'Side', `>Check${c ? `, from ${c.letter}` : ''}`, '>Tapes cross', '>By compass', '>Height'],
-      points.map((/** @type {any} */ point) => [
-        square(point.number), html('span', {}, point.name, remark(point, length)), bold(length(point.fromA)), bold(length(point.fromB)), point.side,
-        point.check === undefined || point.check === null ? '–' : length(point.check),
-        html('span', {}, `${number(point.crossing, 0)}° `, point.flat ? stateMark('tight', 'flat') : null), `${number(point.magnetic, 0)}°`, length(point.height),
-      ]), 'Points to set out'),
-    html('p', { class: 'small' }, `${known.map((one) => `${one.letter}: ${one.what}`).join('. ')}.`),
-    ...notes.map((/** @type {string} */ words) => html('p', { class: 'small' }, words)));
-}
-
-/**
- * @param {any} point
- * @param {Length} length
- */
-function remark(point, length) {
-  const words = [
-    point.blocked ?? '',
-    point.better ? `better ${length(point.better.fromTape)} from ${point.better.from} and ${length(point.better.withTape)} from ${point.better.with}, crossing at ${number(point.better.crossing, 0)}°` : '',
-  ].filter((text) => text);
-  return words.length ? html('span', { class: 'small' }, `; ${words.join('; ')}`) : null;
-}
-
-/** @param {any} model */
-function order({ order: steps }) {
-  return html('section', {}, html('h3', {}, 'Order of work'), html('ol', { class: 'ticked' }, ...steps.map((/** @type {string} */ step, /** @type {number} */ index) =>
-    html('li', {}, bold(String(index + 1)), html('span', { class: 'tickbox', 'aria-hidden': 'true' }), html('span', {}, step)))));
-}
-
-/**
- * @param {string} when
- * @param {string[]} all
- */
-function checks(when, all) {
-  return html('section', {}, html('h3', {}, `${when === 'Before' ? 'Before anything is raised' : 'When all hangs'}`), html('ul', { class: 'ticked' }, ...all.map((one) =>
-    html('li', {}, html('span', { class: 'tickbox', 'aria-hidden': 'true' }), html('span', {}, one)))));
-}
-
-/** @param {any} model */
-function cautions({ cautions: all }) {
-  return html('section', {}, html('h3', {}, 'Cautions'), html('ul', { class: 'cautions' }, ...all.map((/** @type {any} */ caution) =>
-    html('li', {}, caution.pressing ? stateMark('tight', 'Pressing') : html('span', {}), html('span', {}, caution.text)))));
-}
-
-/** @param {any} model */
-function sweep({ sweep: rows }) {
-  if (!rows.length) return null;
-  return html('section', {},
-    html('h3', {}, 'What a sweep at the station should find'),
-    table(['Band', '>MHz', '>Ohm', '>SWR on the line', 'Matching'], rows.map((/** @type {any} */ row) => [
-      row.band, megahertz(row.frequency), impedance([row.resistance, row.reactance]), row.lineSwr < 10 ? number(row.lineSwr, 1) : count(row.lineSwr),
-      html('span', {}, stateMark(row.match), ` ${row.match}`),
-    ]), 'Expected at the station'));
+    table(
+      ['Span', '>Level', '>Sag, middle', '>Height', '>In gust', '>Blown out', '>Compass'],
+      all.map((/** @type {any} */ sag) => [
+        sag.span,
+        length(sag.level),
+        bold(length(sag.middle)),
+        length(sag.heightMiddle),
+        length(sag.inGust),
+        length(sag.blowOut),
+        `${number(sag.magnetic, 0)}°`,
+      ]),
+      'Sag of each span',
+    ),
+  );
 }

@@ -14,7 +14,11 @@ import { sheetList } from './sheet-list.js';
  */
 
 const FORMATS = /** @type {const} */ ([
-  ['pdf', 'PDF, list and drawing'], ['csv', 'CSV, the list'], ['svg', 'SVG, the drawing'], ['geojson', 'GeoJSON, the site'], ['json', 'JSON, all of it'],
+  ['pdf', 'PDF, list and drawing'],
+  ['csv', 'CSV, the list'],
+  ['svg', 'SVG, the drawing'],
+  ['geojson', 'GeoJSON, the site'],
+  ['json', 'JSON, all of it'],
 ]);
 
 /**
@@ -30,11 +34,14 @@ export function mount(root, store, shell) {
   /** What went wrong with a download. @type {string|null} */
   let trouble = null;
   const ask = redrawer(root, () => render(store.get()));
-  store.subscribe((state) => [state.place, state.chosen, state.search, state.units, state.plan], () => {
-    if (store.get().place !== 'sheet') return;
-    void load();
-    ask();
-  });
+  store.subscribe(
+    (state) => [state.place, state.chosen, state.search, state.units, state.plan],
+    () => {
+      if (store.get().place !== 'sheet') return;
+      void load();
+      ask();
+    },
+  );
 
   /**
    * Fetches list and drawing for what is chosen, once for each choice; the latest wins.
@@ -43,13 +50,22 @@ export function mount(root, store, shell) {
     const state = store.get();
     const placement = placementOf(state);
     if (!placement) return;
-    const key = [state.search.id, placement.id, choice.paper, state.units, placement.madeFrom ? JSON.stringify(placement.attachments) : ''].join(' ');
+    const key = [
+      state.search.id,
+      placement.id,
+      choice.paper,
+      state.units,
+      placement.madeFrom ? JSON.stringify(placement.attachments) : '',
+    ].join(' ');
     if (loaded.key === key) return;
     if (loaded.drawing) URL.revokeObjectURL(loaded.drawing);
     loaded = { key, model: null, drawing: null, error: null };
     const options = { paper: choice.paper, units: state.units };
     try {
-      const [list, drawing] = await Promise.all([part(state, placement, 'json', options), part(state, placement, 'svg', options)]);
+      const [list, drawing] = await Promise.all([
+        part(state, placement, 'json', options),
+        part(state, placement, 'svg', options),
+      ]);
       const model = JSON.parse(await list.text());
       if (loaded.key !== key) return;
       loaded = { key, model, drawing: URL.createObjectURL(drawing), error: null };
@@ -70,10 +86,19 @@ export function mount(root, store, shell) {
   /** @param {State} state */
   function none(state) {
     const searched = listOf(state).length > 0;
-    return html('div', { class: 'sheet-none' },
+    return html(
+      'div',
+      { class: 'sheet-none' },
       html('h2', {}, 'Sheet'),
-      html('p', {}, searched ? 'Choose a placement first; its rigging list and drawing stand here.' : 'The rigging list and the site drawing of a placement stand here once a search has found one.'),
-      html('button', { type: 'button', class: 'go', onclick: () => shell.go('placements') }, 'To placements'));
+      html(
+        'p',
+        {},
+        searched
+          ? 'Choose a placement first; its rigging list and drawing stand here.'
+          : 'The rigging list and the site drawing of a placement stand here once a search has found one.',
+      ),
+      html('button', { type: 'button', class: 'go', onclick: () => shell.go('placements') }, 'To placements'),
+    );
   }
 
   /**
@@ -82,26 +107,82 @@ export function mount(root, store, shell) {
    */
   function bar(state, placement) {
     const all = [...listOf(state), ...ownOf(state)];
-    return html('div', { class: 'sheet-bar' },
-      html('div', { class: 'field' },
+    return html(
+      'div',
+      { class: 'sheet-bar' },
+      html(
+        'div',
+        { class: 'field' },
         html('label', { for: 'sheet-placement' }, 'Placement'),
-        html('select', { id: 'sheet-placement', 'data-key': 'placement', value: placement.id, onchange: (/** @type {Event} */ event) => store.set({ chosen: /** @type {HTMLSelectElement} */ (event.target).value }) },
-          ...all.map((one) => html('option', { value: one.id }, `${placementTitle(state, one)}: ${shapeTitle(one.shape).toLowerCase()}, ${signed(one.score, 1)} dB`)))),
-      html('fieldset', { class: 'ticks' }, html('legend', {}, 'Paper'), ...['A4', 'Letter'].map((paper) => html('label', { class: 'tick' }, html('input', {
-        type: 'radio', name: 'paper', checked: choice.paper === paper, 'data-key': `paper-${paper}`,
-        onchange: () => {
-          choice.paper = paper;
-          void load();
-          ask();
-        },
-      }), paper))),
-      html('p', { class: 'soft' }, state.units === 'm' ? 'Lengths in metres; change them at the head of the page.' : 'Lengths in feet and inches; change them at the head of the page.'),
-      isStale(state) ? html('p', {}, stateMark('tight', 'Out of date'), ' The plan has changed since the search; this sheet is of the plan as it was searched.') : null,
-      html('div', { class: 'downloads' },
+        html(
+          'select',
+          {
+            id: 'sheet-placement',
+            'data-key': 'placement',
+            value: placement.id,
+            onchange: (/** @type {Event} */ event) =>
+              store.set({ chosen: /** @type {HTMLSelectElement} */ (event.target).value }),
+          },
+          ...all.map((one) =>
+            html(
+              'option',
+              { value: one.id },
+              `${placementTitle(state, one)}: ${shapeTitle(one.shape).toLowerCase()}, ${signed(one.score, 1)} dB`,
+            ),
+          ),
+        ),
+      ),
+      html(
+        'fieldset',
+        { class: 'ticks' },
+        html('legend', {}, 'Paper'),
+        ...['A4', 'Letter'].map((paper) =>
+          html(
+            'label',
+            { class: 'tick' },
+            html('input', {
+              type: 'radio',
+              name: 'paper',
+              checked: choice.paper === paper,
+              'data-key': `paper-${paper}`,
+              onchange: () => {
+                choice.paper = paper;
+                void load();
+                ask();
+              },
+            }),
+            paper,
+          ),
+        ),
+      ),
+      html(
+        'p',
+        { class: 'soft' },
+        state.units === 'm'
+          ? 'Lengths in metres; change them at the head of the page.'
+          : 'Lengths in feet and inches; change them at the head of the page.',
+      ),
+      isStale(state)
+        ? html(
+            'p',
+            {},
+            stateMark('tight', 'Out of date'),
+            ' The plan has changed since the search; this sheet is of the plan as it was searched.',
+          )
+        : null,
+      html(
+        'div',
+        { class: 'downloads' },
         html('h2', {}, 'Download'),
         html('ul', {}, ...FORMATS.map(([type, words]) => html('li', {}, downloadLink(state, placement, type, words)))),
-        trouble ? html('p', { class: 'problem', role: 'alert' }, stateMark('foul', 'Error'), ` ${trouble}`) : null),
-      html('button', { type: 'button', class: 'go', 'data-key': 'print', disabled: !loaded.model, onclick: () => window.print() }, 'Print'));
+        trouble ? html('p', { class: 'problem', role: 'alert' }, stateMark('foul', 'Error'), ` ${trouble}`) : null,
+      ),
+      html(
+        'button',
+        { type: 'button', class: 'go', 'data-key': 'print', disabled: !loaded.model, onclick: () => window.print() },
+        'Print',
+      ),
+    );
   }
 
   /**
@@ -146,17 +227,28 @@ export function mount(root, store, shell) {
   function downloadLink(state, placement, type, words) {
     const { latitude, longitude } = planOf(state).site ?? {};
     if (type === 'geojson' && (typeof latitude !== 'number' || typeof longitude !== 'number')) {
-      return html('span', { class: 'soft no-download' }, `${words}: give the site its latitude and longitude in the survey first.`);
+      return html(
+        'span',
+        { class: 'soft no-download' },
+        `${words}: give the site its latitude and longitude in the survey first.`,
+      );
     }
     const name = fileName(planOf(state), placement, type);
     const options = { paper: choice.paper, units: state.units };
-    return html('a', {
-      href: heldAddress(state, placement, type, options) ?? '#sheet', download: name, 'data-key': `get-${type}`,
-      onclick: (/** @type {Event} */ event) => {
-        event.preventDefault();
-        void save(state, placement, type, options, name);
+    return html(
+      'a',
+      {
+        href: heldAddress(state, placement, type, options) ?? '#sheet',
+        download: name,
+        'data-key': `get-${type}`,
+        onclick: (/** @type {Event} */ event) => {
+          event.preventDefault();
+          void save(state, placement, type, options, name);
+        },
       },
-    }, words, html('span', { class: 'soft' }, name));
+      words,
+      html('span', { class: 'soft' }, name),
+    );
   }
 
   /**
@@ -182,17 +274,53 @@ export function mount(root, store, shell) {
   /** @param {State} state */
   function pages(state) {
     if (loaded.error !== null) {
-      return html('div', { class: 'sheet-pages' }, html('p', { class: 'problem' }, stateMark('foul', 'Error'), html('b', {}, ' The sheet could not be made. '), loaded.error, ' ',
-        html('button', { type: 'button', class: 'link', onclick: () => {
-          loaded = { key: '', model: null, drawing: null, error: null };
-          void load();
-          ask();
-        } }, 'Try again')));
+      return html(
+        'div',
+        { class: 'sheet-pages' },
+        html(
+          'p',
+          { class: 'problem' },
+          stateMark('foul', 'Error'),
+          html('b', {}, ' The sheet could not be made. '),
+          loaded.error,
+          ' ',
+          html(
+            'button',
+            {
+              type: 'button',
+              class: 'link',
+              onclick: () => {
+                loaded = { key: '', model: null, drawing: null, error: null };
+                void load();
+                ask();
+              },
+            },
+            'Try again',
+          ),
+        ),
+      );
     }
-    if (!loaded.model) return html('div', { class: 'sheet-pages' }, html('p', { class: 'soft', role: 'status' }, 'Working out the sheet.'));
-    return html('div', { class: `sheet-pages paper-${choice.paper.toLowerCase()}` },
+    if (!loaded.model)
+      return html(
+        'div',
+        { class: 'sheet-pages' },
+        html('p', { class: 'soft', role: 'status' }, 'Working out the sheet.'),
+      );
+    return html(
+      'div',
+      { class: `sheet-pages paper-${choice.paper.toLowerCase()}` },
       sheetList(loaded.model, state.units),
-      loaded.drawing ? html('div', { class: 'page drawing' }, html('img', { src: loaded.drawing, alt: `Site drawing to scale: ${loaded.model.head.name}; the list before it says the same in figures` })) : null);
+      loaded.drawing
+        ? html(
+            'div',
+            { class: 'page drawing' },
+            html('img', {
+              src: loaded.drawing,
+              alt: `Site drawing to scale: ${loaded.model.head.name}; the list before it says the same in figures`,
+            }),
+          )
+        : null,
+    );
   }
 }
 
@@ -203,6 +331,15 @@ export function mount(root, store, shell) {
  * @returns {string} "corner-lot-p01.pdf"
  */
 export function fileName(plan, placement, type) {
-  const title = (plan.title ?? '').normalize('NFKD').replace(/[\u0300-\u036f]/g, '').replace(/['’]/g, '').toLowerCase().replace(/[^a-z0-9]+/g, '-').replace(/^-|-$/g, '').slice(0, 48).replace(/-$/, '') || 'plot';
+  const title =
+    (plan.title ?? '')
+      .normalize('NFKD')
+      .replace(/[\u0300-\u036f]/g, '')
+      .replace(/['’]/g, '')
+      .toLowerCase()
+      .replace(/[^a-z0-9]+/g, '-')
+      .replace(/^-|-$/g, '')
+      .slice(0, 48)
+      .replace(/-$/, '') || 'plot';
   return `${title}-${placement.id}.${type}`;
 }

@@ -42,8 +42,15 @@ export function dimension(clearance, view) {
 export function dimensionLabel(clearance, index, { figure, words }) {
   const middle = [0, 1].map((k) => (clearance.at[k] + clearance.toAt[k]) / 2);
   return {
-    id: `clearance-${index}`, weight: WEIGHT.dimension - index, at: middle, also: [], sit: 'around', gap: 13,
-    lines: [{ text: figure, bold: true }, ...words.map((text) => ({ text }))], mark: clearance.state, look: clearance.state,
+    id: `clearance-${index}`,
+    weight: WEIGHT.dimension - index,
+    at: middle,
+    also: [],
+    sit: 'around',
+    gap: 13,
+    lines: [{ text: figure, bold: true }, ...words.map((text) => ({ text }))],
+    mark: clearance.state,
+    look: clearance.state,
   };
 }
 
@@ -54,7 +61,10 @@ function between(a, b, [ux, uy], state) {
     return `M${(x - tx).toFixed(1)} ${(y - ty).toFixed(1)}L${(x + tx).toFixed(1)} ${(y + ty).toFixed(1)}`;
   };
   return [
-    svg('path', { class: `dimension ${state}`, d: `M${a[0].toFixed(1)} ${a[1].toFixed(1)}L${b[0].toFixed(1)} ${b[1].toFixed(1)}` }),
+    svg('path', {
+      class: `dimension ${state}`,
+      d: `M${a[0].toFixed(1)} ${a[1].toFixed(1)}L${b[0].toFixed(1)} ${b[1].toFixed(1)}`,
+    }),
     svg('path', { class: `dimension-tick ${state}`, d: tick(a) + tick(b) }),
   ];
 }

@@ -57,7 +57,13 @@ export function handles(planView, store, shell) {
     working = true;
     try {
       const answer = await shell.api.assess(plan, layout);
-      keep({ ...answer, id: 'moved', rank: 0, madeFrom: movedName(origin ?? placement), from: (origin ?? placement).from ?? (origin ?? placement).id });
+      keep({
+        ...answer,
+        id: 'moved',
+        rank: 0,
+        madeFrom: movedName(origin ?? placement),
+        from: (origin ?? placement).from ?? (origin ?? placement).id,
+      });
     } catch (problem) {
       shell.say(`That could not be worked out. ${/** @type {Error} */ (problem).message}`);
     }
@@ -79,19 +85,34 @@ export function handles(planView, store, shell) {
     store.set({ search: { ...search, own }, chosen: placement.id });
   }
 
-  return (placement, plan, view) => [...guide(placement), ...placement.attachments.map((/** @type {any} */ hold, /** @type {number} */ index) => {
-    const name = [...(plan.supports ?? []), ...(plan.mastZones ?? []), ...(plan.bracketLines ?? [])].find((one) => one.id === hold.on)?.name ?? hold.on;
-    const handle = atPlace(hold.at, view.ppm, [
-      svg('circle', { class: 'hold-hit', r: 22 }),
-      svg('circle', { class: 'hold-handle', r: 6.5 }),
-    ], {
-      class: 'hold', tabindex: 0, role: 'button', 'data-key': `hold-${index}`,
-      'aria-label': `${name}, ${hold.aboveGround.toFixed(1)} metres up. Arrow keys move it, Page Up and Page Down change its height.`,
-    });
-    handle.addEventListener('pointerdown', (event) => grab(/** @type {PointerEvent} */ (event), placement, plan, index, view));
-    handle.addEventListener('keydown', (event) => nudge(/** @type {KeyboardEvent} */ (event), placement, plan, index));
-    return handle;
-  })];
+  return (placement, plan, view) => [
+    ...guide(placement),
+    ...placement.attachments.map((/** @type {any} */ hold, /** @type {number} */ index) => {
+      const name =
+        [...(plan.supports ?? []), ...(plan.mastZones ?? []), ...(plan.bracketLines ?? [])].find(
+          (one) => one.id === hold.on,
+        )?.name ?? hold.on;
+      const handle = atPlace(
+        hold.at,
+        view.ppm,
+        [svg('circle', { class: 'hold-hit', r: 22 }), svg('circle', { class: 'hold-handle', r: 6.5 })],
+        {
+          class: 'hold',
+          tabindex: 0,
+          role: 'button',
+          'data-key': `hold-${index}`,
+          'aria-label': `${name}, ${hold.aboveGround.toFixed(1)} metres up. Arrow keys move it, Page Up and Page Down change its height.`,
+        },
+      );
+      handle.addEventListener('pointerdown', (event) =>
+        grab(/** @type {PointerEvent} */ (event), placement, plan, index, view),
+      );
+      handle.addEventListener('keydown', (event) =>
+        nudge(/** @type {KeyboardEvent} */ (event), placement, plan, index),
+      );
+      return handle;
+    }),
+  ];
 
   /** @param {any} placement */
   function guide(placement) {
@@ -141,8 +162,12 @@ export function handles(planView, store, shell) {
   function nudge(event, placement, plan, index) {
     const step = event.shiftKey ? BIG_STEP : STEP;
     const ways = /** @type {Record<string, number[]>} */ ({
-      ArrowLeft: [-step, 0, 0], ArrowRight: [step, 0, 0], ArrowUp: [0, step, 0], ArrowDown: [0, -step, 0],
-      PageUp: [0, 0, step], PageDown: [0, 0, -step],
+      ArrowLeft: [-step, 0, 0],
+      ArrowRight: [step, 0, 0],
+      ArrowUp: [0, step, 0],
+      ArrowDown: [0, -step, 0],
+      PageUp: [0, 0, step],
+      PageDown: [0, 0, -step],
     });
     const way = ways[event.key];
     if (!way) return;

@@ -12,7 +12,8 @@ export function candidates(placements, choose) {
   return placements.map((placement) => {
     const d = placement.conductors.map((/** @type {any} */ conductor) => pathOf(conductor.points)).join('');
     const group = svg('g', { class: 'candidate' }, [
-      svg('path', { class: 'candidate-hit', d }), svg('path', { class: 'candidate-line', d }),
+      svg('path', { class: 'candidate-hit', d }),
+      svg('path', { class: 'candidate-line', d }),
     ]);
     group.addEventListener('click', () => choose(placement.id));
     return group;

@@ -20,15 +20,28 @@ const NEAR_HOLD = 0.8;
  * @returns {Holding[]} nearest first
  */
 export function holdings(plan, point) {
-  const supports = (plan.supports ?? []).filter((/** @type {any} */ one) => one.pullLimit !== 0).map((/** @type {any} */ one) => ({
-    on: one.id, at: one.at, lowest: one.lowest, highest: one.highest, base: 0,
-  }));
+  const supports = (plan.supports ?? [])
+    .filter((/** @type {any} */ one) => one.pullLimit !== 0)
+    .map((/** @type {any} */ one) => ({
+      on: one.id,
+      at: one.at,
+      lowest: one.lowest,
+      highest: one.highest,
+      base: 0,
+    }));
   const brackets = (plan.bracketLines ?? []).map((/** @type {any} */ one) => ({
-    on: one.id, at: nearest(point, one.path, false), lowest: one.lowest, highest: one.highest, base: 0,
+    on: one.id,
+    at: nearest(point, one.path, false),
+    lowest: one.lowest,
+    highest: one.highest,
+    base: 0,
   }));
   const zones = (plan.mastZones ?? []).map((/** @type {any} */ one) => ({
-    on: one.id, at: contains(point, one.area) ? [point[0], point[1]] : nearest(point, one.area, true),
-    lowest: (one.base ?? 0) + LEAST_MAST, highest: one.highest, base: one.base ?? 0,
+    on: one.id,
+    at: contains(point, one.area) ? [point[0], point[1]] : nearest(point, one.area, true),
+    lowest: (one.base ?? 0) + LEAST_MAST,
+    highest: one.highest,
+    base: one.base ?? 0,
   }));
   return [...supports, ...brackets, ...zones]
     .map((one) => ({ ...one, distance: Math.hypot(one.at[0] - point[0], one.at[1] - point[1]) }))
@@ -51,15 +64,27 @@ function nearest(point, path, closed) {
  */
 export function movedLayout(placement, index, to) {
   const attachments = placement.attachments.map((/** @type {any} */ hold, /** @type {number} */ k) =>
-    (k === index ? { on: to.on, at: [to.at[0], to.at[1], to.z] } : { on: hold.on, at: hold.at }));
+    k === index ? { on: to.on, at: [to.at[0], to.at[1], to.z] } : { on: hold.on, at: hold.at },
+  );
   const { conductor, line } = placement.feed;
-  const conductors = placement.conductors.map((/** @type {any} */ one) => ({ points: carried(one.points, placement.attachments, attachments), wire: one.wire }));
+  const conductors = placement.conductors.map((/** @type {any} */ one) => ({
+    points: carried(one.points, placement.attachments, attachments),
+    wire: one.wire,
+  }));
   const [feedAt] = carried([placement.feed.at], placement.attachments, attachments);
   // A feedpoint that hangs free keeps its share of the wire; one at a holding point stays there.
-  const held = placement.attachments.some((/** @type {any} */ hold) => Math.hypot(...[0, 1, 2].map((k) => hold.at[k] - placement.feed.at[k])) < NEAR_HOLD);
+  const held = placement.attachments.some(
+    (/** @type {any} */ hold) => Math.hypot(...[0, 1, 2].map((k) => hold.at[k] - placement.feed.at[k])) < NEAR_HOLD,
+  );
   return {
-    shape: placement.shape, attachments, conductors,
-    feed: { conductor, fraction: held ? shareAlong(conductors[conductor].points, feedAt) : placement.feed.fraction, line },
+    shape: placement.shape,
+    attachments,
+    conductors,
+    feed: {
+      conductor,
+      fraction: held ? shareAlong(conductors[conductor].points, feedAt) : placement.feed.fraction,
+      line,
+    },
   };
 }
 

@@ -49,5 +49,6 @@ export function inPixels(view, children, className) {
 export function along(view, from, to) {
   const count = Math.max(1, Math.ceil(Math.hypot(to[0] - from[0], to[1] - from[1]) / 11));
   return Array.from({ length: count + 1 }, (_, index) =>
-    toMetres(view, [from[0] + ((to[0] - from[0]) * index) / count, from[1] + ((to[1] - from[1]) * index) / count]));
+    toMetres(view, [from[0] + ((to[0] - from[0]) * index) / count, from[1] + ((to[1] - from[1]) * index) / count]),
+  );
 }

@@ -28,7 +28,9 @@ export function mount(planView, store, shell) {
   /** @type {any} */
   let view = null;
   let asked = false;
-  const layers = Object.fromEntries(['candidates', 'ghosts', 'rose', 'placement'].map((name) => [name, planView.layer(name)]));
+  const layers = Object.fromEntries(
+    ['candidates', 'ghosts', 'rose', 'placement'].map((name) => [name, planView.layer(name)]),
+  );
   for (const layer of Object.values(layers)) layer.classList.add('placement-layer');
   const drag = handles(planView, store, shell);
 
@@ -45,7 +47,12 @@ export function mount(planView, store, shell) {
     if (!shown || !placementsOf(state).chosen) planView.letter('placement', null);
     if (!shown) return;
     const { list, chosen } = placementsOf(state);
-    layers.candidates.append(...candidates(list.filter((one) => one !== chosen), (id) => store.set({ chosen: id, shownRefusal: null })));
+    layers.candidates.append(
+      ...candidates(
+        list.filter((one) => one !== chosen),
+        (id) => store.set({ chosen: id, shownRefusal: null }),
+      ),
+    );
     layers.ghosts.append(...ghosts(ghostsShown(state), state.shownRefusal, view.ppm));
     if (chosen) drawChosen(state, chosen);
     if (focused) /** @type {SVGElement|null} */ (layers.placement.querySelector(`[data-key="${focused}"]`))?.focus();
@@ -63,10 +70,21 @@ export function mount(planView, store, shell) {
   function drawAims(state) {
     for (const layer of Object.values(layers)) layer.replaceChildren();
     const corners = state.plan.boundary ?? [];
-    const centre = corners.length ? [0, 1].map((k) => (Math.min(...corners.map((/** @type {number[]} */ corner) => corner[k])) + Math.max(...corners.map((/** @type {number[]} */ corner) => corner[k]))) / 2)
+    const centre = corners.length
+      ? [0, 1].map(
+          (k) =>
+            (Math.min(...corners.map((/** @type {number[]} */ corner) => corner[k])) +
+              Math.max(...corners.map((/** @type {number[]} */ corner) => corner[k]))) /
+            2,
+        )
       : [view.x + view.width / 2, view.y + view.height / 2];
-    const targets = (state.plan.brief?.targets ?? []).filter((/** @type {any} */ target) => typeof target.bearing === 'number')
-      .map((/** @type {any} */ target) => ({ name: target.name ?? 'target', bearing: target.bearing, distance: distanceWords(target.bearing, target.distanceKm) }));
+    const targets = (state.plan.brief?.targets ?? [])
+      .filter((/** @type {any} */ target) => typeof target.bearing === 'number')
+      .map((/** @type {any} */ target) => ({
+        name: target.name ?? 'target',
+        bearing: target.bearing,
+        distance: distanceWords(target.bearing, target.distanceKm),
+      }));
     const aims = bearings(targets, { middle: toPixels(view, centre), ring: 0 }, view, state.plan.site?.planNorth ?? 0);
     layers.rose.append(inPixels(view, aims.nodes, 'rose-drawing'));
     planView.letter('placement', { labels: aims.labels, symbols: aims.symbols, hide: [] });
@@ -80,40 +98,73 @@ export function mount(planView, store, shell) {
     const plan = state.search.planAtSearch ?? state.plan;
     const planNorth = plan.site?.planNorth ?? 0;
     const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
-    const distance = (/** @type {number} */ metres) => formatLength(metres, state.units, metres > 0 && metres < 0.1 ? 3 : 2);
+    const distance = (/** @type {number} */ metres) =>
+      formatLength(metres, state.units, metres > 0 && metres < 0.1 ? 3 : 2);
     const clearances = toDimension(chosen.clearances);
     const band = bandShown(state, chosen);
     const frame = roseFrame(chosen, view);
     const aims = bearings(band?.rose ? targetsOf(plan, band) : [], frame, view, planNorth);
-    layers.rose.append(inPixels(view, [
-      ...aims.nodes, band?.rose ? roseNode(band.rose, frame, planNorth) : null,
-    ], 'rose-drawing'));
+    layers.rose.append(
+      inPixels(view, [...aims.nodes, band?.rose ? roseNode(band.rose, frame, planNorth) : null], 'rose-drawing'),
+    );
     layers.placement.append(
       ...chosenWire(chosen, view.ppm),
-      inPixels(view, clearances.flatMap((one) => dimension(one, view)), 'placement-dimensions'),
+      inPixels(
+        view,
+        clearances.flatMap((one) => dimension(one, view)),
+        'placement-dimensions',
+      ),
       ...drag(chosen, plan, view),
     );
     planView.letter('placement', {
       labels: [
-        ...clearances.map((one, index) => dimensionLabel(one, index, {
-          figure: one.distance < 0 ? `inside by ${distance(-one.distance)}` : distance(one.distance),
-          words: [`${one.distance < 0 ? '' : 'to '}${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`, `must keep ${distance(one.required)}`],
-        })),
+        ...clearances.map((one, index) =>
+          dimensionLabel(one, index, {
+            figure: one.distance < 0 ? `inside by ${distance(-one.distance)}` : distance(one.distance),
+            words: [
+              `${one.distance < 0 ? '' : 'to '}${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`,
+              `must keep ${distance(one.required)}`,
+            ],
+          }),
+        ),
         ...aims.labels,
         ...(band?.rose ? [roseLegend(band, view)] : []),
-        ...chosen.attachments.map((/** @type {any} */ hold, /** @type {number} */ index) => holdLabel(plan, hold, index, state)),
+        ...chosen.attachments.map((/** @type {any} */ hold, /** @type {number} */ index) =>
+          holdLabel(plan, hold, index, state),
+        ),
         ...wireLengths(chosen, view.ppm, length),
       ],
       symbols: [
-        ...aims.symbols, chosen.feed.at,
-        ...chosen.conductors.flatMap((/** @type {any} */ one) => one.points.slice(1).flatMap((/** @type {number[]} */ point, /** @type {number} */ index) =>
-          along(view, toPixels(view, one.points[index]), toPixels(view, point)))),
+        ...aims.symbols,
+        chosen.feed.at,
+        ...chosen.conductors.flatMap((/** @type {any} */ one) =>
+          one.points
+            .slice(1)
+            .flatMap((/** @type {number[]} */ point, /** @type {number} */ index) =>
+              along(view, toPixels(view, one.points[index]), toPixels(view, point)),
+            ),
+        ),
       ],
-      hide: chosen.attachments.flatMap((/** @type {any} */ hold) => ['supports', 'supports-short'].map((kind) => `${kind}:${hold.on}`)),
+      hide: chosen.attachments.flatMap((/** @type {any} */ hold) =>
+        ['supports', 'supports-short'].map((kind) => `${kind}:${hold.on}`),
+      ),
     });
   }
 
-  store.subscribe((state) => [state.search, state.chosen, state.chosenBand, state.shownRefusal, state.units, state.place, state.plan.brief, state.plan.boundary, state.plan.site], ask);
+  store.subscribe(
+    (state) => [
+      state.search,
+      state.chosen,
+      state.chosenBand,
+      state.shownRefusal,
+      state.units,
+      state.place,
+      state.plan.brief,
+      state.plan.boundary,
+      state.plan.site,
+    ],
+    ask,
+  );
   planView.onView((next) => {
     view = next;
     ask();
@@ -147,18 +198,23 @@ function ghostsShown(state) {
  */
 function bandShown(state, placement) {
   const rows = placement.bands.filter((/** @type {any} */ row) => row.rose);
-  const weight = (/** @type {string} */ name) => (state.plan.brief?.bands ?? []).find((/** @type {any} */ band) => band.name === name)?.weight ?? 1;
-  const aimed = rows.filter((/** @type {any} */ row) => row.targets.some((/** @type {any} */ target) => typeof target.bearing === 'number'));
+  const weight = (/** @type {string} */ name) =>
+    (state.plan.brief?.bands ?? []).find((/** @type {any} */ band) => band.name === name)?.weight ?? 1;
+  const aimed = rows.filter((/** @type {any} */ row) =>
+    row.targets.some((/** @type {any} */ target) => typeof target.bearing === 'number'),
+  );
   const heaviest = [...(aimed.length ? aimed : rows)].sort((a, b) => weight(b.name) - weight(a.name))[0];
   return rows.find((/** @type {any} */ row) => row.name === state.chosenBand) ?? heaviest ?? null;
 }
 
 /** @param {any} plan @param {any} band */
 function targetsOf(plan, band) {
-  return band.targets.filter((/** @type {any} */ target) => typeof target.bearing === 'number').map((/** @type {any} */ target) => {
-    const km = (plan.brief?.targets ?? []).find((/** @type {any} */ one) => one.name === target.name)?.distanceKm;
-    return { name: target.name, bearing: target.bearing, distance: distanceWords(target.bearing, km) };
-  });
+  return band.targets
+    .filter((/** @type {any} */ target) => typeof target.bearing === 'number')
+    .map((/** @type {any} */ target) => {
+      const km = (plan.brief?.targets ?? []).find((/** @type {any} */ one) => one.name === target.name)?.distanceKm;
+      return { name: target.name, bearing: target.bearing, distance: distanceWords(target.bearing, km) };
+    });
 }
 
 /** @param {number} bearing @param {number|undefined} km */
@@ -174,11 +230,23 @@ function distanceWords(bearing, km) {
  */
 function roseLegend(band, view) {
   const [width, height] = [view.width * view.ppm, view.height * view.ppm];
-  const [first, ...others] = [[100, 28], [100, height - 28], [width - 200, 28], [width - 330, height - 28], [width / 2, 28]]
-    .map((at) => toMetres(view, at));
+  const [first, ...others] = [
+    [100, 28],
+    [100, height - 28],
+    [width - 200, 28],
+    [width - 330, height - 28],
+    [width / 2, 28],
+  ].map((at) => toMetres(view, at));
   return {
-    id: 'rose', weight: WEIGHT.legend, at: first, also: others, sit: 'middle',
-    lines: [{ text: `Reach rose, ${band.name} at ${number(band.rose.elevation, 0)}° up`, bold: true }, { text: 'outside the dotted ring is better' }],
+    id: 'rose',
+    weight: WEIGHT.legend,
+    at: first,
+    also: others,
+    sit: 'middle',
+    lines: [
+      { text: `Reach rose, ${band.name} at ${number(band.rose.elevation, 0)}° up`, bold: true },
+      { text: 'outside the dotted ring is better' },
+    ],
   };
 }
 
@@ -192,17 +260,35 @@ function roseLegend(band, view) {
 function holdLabel(plan, hold, index, state) {
   const isNew = (plan.mastZones ?? []).some((/** @type {any} */ zone) => zone.id === hold.on);
   return {
-    id: `hold-${index}`, weight: WEIGHT.hold - index, at: hold.at, sit: 'around', gap: 13,
-    lines: [{ text: `${isNew ? 'New mast' : nameIn(plan, hold.on)} ${formatLength(hold.aboveGround, state.units, 1)}`, bold: true }],
+    id: `hold-${index}`,
+    weight: WEIGHT.hold - index,
+    at: hold.at,
+    sit: 'around',
+    gap: 13,
+    lines: [
+      {
+        text: `${isNew ? 'New mast' : nameIn(plan, hold.on)} ${formatLength(hold.aboveGround, state.units, 1)}`,
+        bold: true,
+      },
+    ],
   };
 }
 
 /** @param {any} plan @param {string} id */
 function nameIn(plan, id) {
-  for (const kind of ['supports', 'mastZones', 'bracketLines', 'buildings', 'trees', 'overheadLines', 'zones', 'people', 'metalwork']) {
+  for (const kind of [
+    'supports',
+    'mastZones',
+    'bracketLines',
+    'buildings',
+    'trees',
+    'overheadLines',
+    'zones',
+    'people',
+    'metalwork',
+  ]) {
     const thing = (plan[kind] ?? []).find((/** @type {any} */ one) => one.id === id);
     if (thing) return thing.name ?? id.replace(/[-_]+/g, ' ');
   }
   return id === 'ground' || id === 'boundary' ? `the ${id}` : id.replace(/[-_]+/g, ' ');
 }
-

@@ -11,12 +11,16 @@ import { along, toMetres, toPixels, WEIGHT } from './labels.js';
  * @returns {{middle: [number, number], ring: number}} px
  */
 export function roseFrame(placement, view) {
-  const points = placement.conductors.flatMap((/** @type {any} */ one) => one.points).map((/** @type {number[]} */ point) => toPixels(view, point));
+  const points = placement.conductors
+    .flatMap((/** @type {any} */ one) => one.points)
+    .map((/** @type {number[]} */ point) => toPixels(view, point));
   const xs = points.map((/** @type {number[]} */ point) => point[0]);
   const ys = points.map((/** @type {number[]} */ point) => point[1]);
   /** @type {[number, number]} */
   const middle = [(Math.min(...xs) + Math.max(...xs)) / 2, (Math.min(...ys) + Math.max(...ys)) / 2];
-  const half = Math.max(...points.map((/** @type {number[]} */ point) => Math.hypot(point[0] - middle[0], point[1] - middle[1])));
+  const half = Math.max(
+    ...points.map((/** @type {number[]} */ point) => Math.hypot(point[0] - middle[0], point[1] - middle[1])),
+  );
   const [width, height] = [view.width * view.ppm, view.height * view.ppm];
   const space = Math.min(middle[0], middle[1], width - middle[0], height - middle[1]);
   return { middle, ring: ringRadius(half, Math.max(space, Math.min(width, height) * 0.3)) };
@@ -74,7 +78,9 @@ export function bearings(targets, { middle, ring }, view, planNorth) {
     const start = Math.min(ring, reach * 0.8);
     const from = [middle[0] + ux * start, middle[1] + uy * start];
     const back = (/** @type {number} */ far) => [end[0] - ux * far, end[1] - uy * far];
-    const head = [-1, 0, 1].map((way) => (way ? [end[0] - ux * 11 + way * uy * 4, end[1] - uy * 11 - way * ux * 4] : end));
+    const head = [-1, 0, 1].map((way) =>
+      way ? [end[0] - ux * 11 + way * uy * 4, end[1] - uy * 11 - way * ux * 4] : end,
+    );
     return {
       nodes: [
         svg('path', { class: 'bearing-inside', d: pathOf([middle, from]) }),
@@ -86,7 +92,9 @@ export function bearings(targets, { middle, ring }, view, planNorth) {
     };
   });
   return {
-    nodes: drawn.flatMap((one) => one.nodes), labels: drawn.map((one) => one.label), symbols: drawn.flatMap((one) => one.symbols),
+    nodes: drawn.flatMap((one) => one.nodes),
+    labels: drawn.map((one) => one.label),
+    symbols: drawn.flatMap((one) => one.symbols),
   };
 }
 
@@ -106,7 +114,11 @@ function bearingLabel(target, view, feet, [ux, uy]) {
     toMetres(view, [x - uy * way * aside, y + ux * way * aside]);
   const [first, ...others] = feet.flatMap((foot) => [beside(foot, 1), beside(foot, -1)]);
   return {
-    id: `bearing-${target.name}`, weight: WEIGHT.bearing, at: first, also: others, sit: 'middle',
+    id: `bearing-${target.name}`,
+    weight: WEIGHT.bearing,
+    at: first,
+    also: others,
+    sit: 'middle',
     lines: [{ text: target.name, bold: true }, { text: target.distance }],
   };
 }

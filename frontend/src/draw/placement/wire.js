@@ -2,7 +2,6 @@
 import { readingTurn } from '../dimension.js';
 import { atPlace, pathOf, svg } from '../svg.js';
 
-
 /** The chosen placement on the plan: wire, ropes, feed line, guys, envelope in the wind, symbols. Plan metres. */
 
 /**
@@ -38,10 +37,12 @@ export function chosenWire(placement, ppm) {
     line('feed-run', placement.feed.path ?? []),
     ...placement.conductors.map((/** @type {any} */ conductor) => line('wire-gap', conductor.points)),
     ...placement.conductors.map((/** @type {any} */ conductor) => line('wire-chosen', conductor.points)),
-    ...placement.masts.map((/** @type {any} */ mast) => atPlace(mast.foot, ppm, [
-      svg('circle', { class: 'new-mast', r: 8 }),
-      svg('path', { class: 'new-mast-cross', d: 'M-11 0H11M0 -11V11' }),
-    ])),
+    ...placement.masts.map((/** @type {any} */ mast) =>
+      atPlace(mast.foot, ppm, [
+        svg('circle', { class: 'new-mast', r: 8 }),
+        svg('path', { class: 'new-mast-cross', d: 'M-11 0H11M0 -11V11' }),
+      ]),
+    ),
     ...ends.map((/** @type {number[]} */ end) => atPlace(end, ppm, [svg('circle', { class: 'insulator', r: 3.4 })])),
     atPlace(placement.feed.at, ppm, [svg('rect', { class: 'feedpoint', x: -4, y: -4, width: 8, height: 8 })]),
   ];
@@ -69,9 +70,17 @@ export function wireLengths(placement, ppm, length) {
     const side = [-(b[1] - a[1]) / pixels, (b[0] - a[0]) / pixels].map((part) => part * 12);
     const at = (/** @type {number} */ share, /** @type {number} */ way) =>
       [0, 1].map((k) => a[k] + (b[k] - a[k]) * share + way * side[k]);
-    return [{
-      id: `span-${index}`, weight: Infinity, at: at(0.55, 1), also: [at(0.45, -1), at(0.35, 1), at(0.65, -1), at(0.3, -1)],
-      lines: [{ text: `${length(span.wireLength)} wire`, bold: true }], look: 'copper', sit: 'middle', turn: readingTurn(a, b),
-    }];
+    return [
+      {
+        id: `span-${index}`,
+        weight: Infinity,
+        at: at(0.55, 1),
+        also: [at(0.45, -1), at(0.35, 1), at(0.65, -1), at(0.3, -1)],
+        lines: [{ text: `${length(span.wireLength)} wire`, bold: true }],
+        look: 'copper',
+        sit: 'middle',
+        turn: readingTurn(a, b),
+      },
+    ];
   });
 }

@@ -5,23 +5,65 @@ import { roofHeight } from '/src/charts/roof.js';
 import { scallops, sideScale, sideView } from '/src/charts/side-view.js';
 import { assert, equal, near, test } from './harness.js';
 
-const HOUSE = { id: 'house', name: 'House', footprint: [[8, -3], [14, -3], [14, 3], [8, 3]], eaves: 4, ridge: 6, roof: 'gable', ridgeLine: [[8, 0], [14, 0]] };
+const HOUSE = {
+  id: 'house',
+  name: 'House',
+  footprint: [
+    [8, -3],
+    [14, -3],
+    [14, 3],
+    [8, 3],
+  ],
+  eaves: 4,
+  ridge: 6,
+  roof: 'gable',
+  ridgeLine: [
+    [8, 0],
+    [14, 0],
+  ],
+};
 const PLAN = {
-  boundary: [[0, -10], [30, -10], [30, 10], [0, 10]],
+  boundary: [
+    [0, -10],
+    [30, -10],
+    [30, 10],
+    [0, 10],
+  ],
   buildings: [HOUSE],
   supports: [
     { id: 'oak', name: 'Oak', kind: 'tree', at: [0, 0], lowest: 4, highest: 9, canopy: { radius: 3, from: 3, to: 11 } },
     { id: 'pole', name: 'Pole', kind: 'pole', at: [20, 0], lowest: 2, highest: 8 },
   ],
-  overheadLines: [{ id: 'drop', name: 'Drop', kind: 'low-voltage', path: [[18, -10, 12], [18, 10, 12]] }],
+  overheadLines: [
+    {
+      id: 'drop',
+      name: 'Drop',
+      kind: 'low-voltage',
+      path: [
+        [18, -10, 12],
+        [18, 10, 12],
+      ],
+    },
+  ],
 };
 const RUN = Array.from({ length: 21 }, (_, index) => [index, 0, 8 - 0.01 * index * (20 - index)]);
 const PLACEMENT = {
   spans: [{ from: 0, to: 1, points: RUN, sag: 1, sagInWind: 1.2, blowOut: 1.5, wireLength: 18, tension: 60 }],
   conductors: [{ points: RUN.slice(1, 20), wire: 'w', length: 18 }],
-  attachments: [{ on: 'oak', at: [0, 0, 8], aboveGround: 8 }, { on: 'pole', at: [20, 0, 8], aboveGround: 8 }],
-  feed: { at: [10, 0, 7], path: [[10, 0, 7], [10, 2, 1.5]] },
-  ropes: [], masts: [], clearances: [],
+  attachments: [
+    { on: 'oak', at: [0, 0, 8], aboveGround: 8 },
+    { on: 'pole', at: [20, 0, 8], aboveGround: 8 },
+  ],
+  feed: {
+    at: [10, 0, 7],
+    path: [
+      [10, 0, 7],
+      [10, 2, 1.5],
+    ],
+  },
+  ropes: [],
+  masts: [],
+  clearances: [],
 };
 
 test('the course along the wire is as long as its plan', () => {
@@ -30,7 +72,24 @@ test('the course along the wire is as long as its plan', () => {
 });
 
 test('spans that turn a corner add up', () => {
-  near(trackOf([{ points: [[0, 0, 5], [3, 4, 5]] }, { points: [[3, 4, 5], [3, 10, 5]] }]).length, 11, 1e-9);
+  near(
+    trackOf([
+      {
+        points: [
+          [0, 0, 5],
+          [3, 4, 5],
+        ],
+      },
+      {
+        points: [
+          [3, 4, 5],
+          [3, 10, 5],
+        ],
+      },
+    ]).length,
+    11,
+    1e-9,
+  );
 });
 
 test('a building under the wire is cut with its ridge', () => {
@@ -56,32 +115,64 @@ test('a gable roof falls evenly from ridge to eaves, a lean-to from its high sid
   near(roofHeight(HOUSE, 10, 0), 6, 1e-9);
   near(roofHeight(HOUSE, 10, 1.5), 5, 1e-9);
   near(roofHeight(HOUSE, 10, -3), 4, 1e-9);
-  const lean = { ...HOUSE, roof: 'lean-to', ridgeLine: [[8, 3], [14, 3]] };
+  const lean = {
+    ...HOUSE,
+    roof: 'lean-to',
+    ridgeLine: [
+      [8, 3],
+      [14, 3],
+    ],
+  };
   near(roofHeight(lean, 10, 3), 6, 1e-9);
   near(roofHeight(lean, 10, -3), 4, 1e-9);
   near(roofHeight({ ...HOUSE, roof: 'flat', ridgeLine: [] }, 10, 0), 4, 1e-9);
 });
 
 test('a hip roof falls at its ends too', () => {
-  const hip = { ...HOUSE, roof: 'hip', ridgeLine: [[10, 0], [12, 0]] };
+  const hip = {
+    ...HOUSE,
+    roof: 'hip',
+    ridgeLine: [
+      [10, 0],
+      [12, 0],
+    ],
+  };
   near(roofHeight(hip, 8, 0), 4, 1e-9);
   near(roofHeight(hip, 11, 0), 6, 1e-9);
 });
 
 test('the ground is flat without spots, level past them, and straight between them', () => {
   equal(groundOf([])(3, 4), 0);
-  const ground = groundOf([[0, 0, 0], [10, 0, 1], [0, 10, 2]]);
+  const ground = groundOf([
+    [0, 0, 0],
+    [10, 0, 1],
+    [0, 10, 2],
+  ]);
   near(ground(2, 3), 0.2 + 0.6, 1e-9);
   near(ground(20, 0), 1, 1e-9);
   near(ground(-5, 0), 0, 1e-9);
 });
 
 test('spots in a line give the slope along it', () => {
-  near(groundOf([[0, 0, 0], [10, 0, 2], [5, 0, 1]])(2.5, 7), 0.5, 1e-9);
+  near(
+    groundOf([
+      [0, 0, 0],
+      [10, 0, 2],
+      [5, 0, 1],
+    ])(2.5, 7),
+    0.5,
+    1e-9,
+  );
 });
 
 test('the triangles of a square of spots cover it and hold no spot inside their circle', () => {
-  const spots = [[0, 0, 0], [10, 0, 0], [10, 10, 0], [0, 10, 0], [4, 5, 0]];
+  const spots = [
+    [0, 0, 0],
+    [10, 0, 0],
+    [10, 10, 0],
+    [0, 10, 0],
+    [4, 5, 0],
+  ];
   const triangles = delaunay(spots);
   equal(triangles.length, 4);
   assert(triangles.every((triangle) => triangle.includes(4)));
@@ -100,7 +191,14 @@ test('the side view keeps the plan’s scale when it fits and one scale in both 
 
 test('the side view is drawn with no figure that is not a number', () => {
   const drawn = sideView(alongWire(PLAN, PLACEMENT), {
-    width: 640, height: 190, ppm: 12, length: (metres) => metres.toFixed(1), title: 'Along the wire', notes: [], unit: 1, stateOf: () => 'tight',
+    width: 640,
+    height: 190,
+    ppm: 12,
+    length: (metres) => metres.toFixed(1),
+    title: 'Along the wire',
+    notes: [],
+    unit: 1,
+    stateOf: () => 'tight',
   });
   const markup = new XMLSerializer().serializeToString(drawn);
   assert(!markup.includes('NaN') && !markup.includes('undefined'));

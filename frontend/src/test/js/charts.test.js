@@ -46,14 +46,22 @@ test('a state not known is never drawn as clear', () => {
 
 test('a rose stroke is seven pixels a decibel outward where better, inward where worse', () => {
   const dbi = Array.from({ length: 180 }, (_, index) => (index === 45 ? 3 : 0));
-  const { outline, better, worse } = roseGeometry({ elevation: 10, step: 2, dbi, referenceDbi: 1, betterShare: 0 }, 200, 0);
+  const { outline, better, worse } = roseGeometry(
+    { elevation: 10, step: 2, dbi, referenceDbi: 1, betterShare: 0 },
+    200,
+    0,
+  );
   near(outline[45][0], 200 + 2 * PIXELS_PER_DECIBEL, 1e-9);
   near(Math.hypot(...outline[0]), 200 - PIXELS_PER_DECIBEL, 1e-9);
   equal([better.length, worse.length], [1, 179]);
 });
 
 test('a null of the rose stays outside the wire’s middle', () => {
-  const { outline } = roseGeometry({ elevation: 10, step: 2, dbi: new Array(180).fill(-40), referenceDbi: 0, betterShare: 0 }, 100, 0);
+  const { outline } = roseGeometry(
+    { elevation: 10, step: 2, dbi: new Array(180).fill(-40), referenceDbi: 0, betterShare: 0 },
+    100,
+    0,
+  );
   near(Math.hypot(...outline[10]), 12, 1e-9);
 });
 
@@ -72,12 +80,23 @@ test('the ring goes round the wire but leaves room to the frame', () => {
 });
 
 test('windows of the same range are one bracket', () => {
-  equal(gatherWindows([{ name: 'B', from: 5, to: 20 }, { name: 'A', from: 3, to: 13 }, { name: 'C', from: 5, to: 20 }]),
-    [{ names: ['A'], from: 3, to: 13 }, { names: ['B', 'C'], from: 5, to: 20 }]);
+  equal(
+    gatherWindows([
+      { name: 'B', from: 5, to: 20 },
+      { name: 'A', from: 3, to: 13 },
+      { name: 'C', from: 5, to: 20 },
+    ]),
+    [
+      { names: ['A'], from: 3, to: 13 },
+      { names: ['B', 'C'], from: 5, to: 20 },
+    ],
+  );
 });
 
 const PROFILE = {
-  profiles: [{ name: 'West', azimuth: 274, step: 1, dbi: Array.from({ length: 91 }, (_, e) => 6 - ((e - 30) / 20) ** 2) }],
+  profiles: [
+    { name: 'West', azimuth: 274, step: 1, dbi: Array.from({ length: 91 }, (_, e) => 6 - ((e - 30) / 20) ** 2) },
+  ],
   windows: [{ name: 'West', from: 5, to: 20 }],
   reference: Array.from({ length: 46 }, (_, index) => ({ elevation: index * 2, dbi: -index / 2 })),
   lead: 'West',
@@ -105,7 +124,13 @@ test('the launch profile is drawn with no figure that is not a number', () => {
 });
 
 test('bars stand up from the base above the reference and hang below it', () => {
-  const { base, bars } = rowBarsGeometry([{ name: '20 m', over: 4 }, { name: '15 m', over: -2 }], { width: 98, height: 30 });
+  const { base, bars } = rowBarsGeometry(
+    [
+      { name: '20 m', over: 4 },
+      { name: '15 m', over: -2 },
+    ],
+    { width: 98, height: 30 },
+  );
   near(bars[0].y + bars[0].height, base, 1e-9);
   near(bars[1].y, base, 1e-9);
   assert(bars[0].height > bars[1].height && bars[1].below && !bars[0].below);
@@ -117,7 +142,8 @@ test('a bar beyond fifteen decibels stays in its box', () => {
 });
 
 test('table bars share one base line', () => {
-  const base = (/** @type {number} */ over) => overBar(over, { low: -5, high: 10 }, { width: 62, height: 16 }).querySelector('.bar-base')?.getAttribute('d');
+  const base = (/** @type {number} */ over) =>
+    overBar(over, { low: -5, high: 10 }, { width: 62, height: 16 }).querySelector('.bar-base')?.getAttribute('d');
   equal(base(3), base(-4));
 });
 
@@ -127,7 +153,13 @@ test('a pull with no known limit has no tick', () => {
 });
 
 test('a thumbnail keeps the plot’s shape and has north up', () => {
-  const fit = fitInto([[0, 0], [10, 20]], { width: 54, height: 68 });
+  const fit = fitInto(
+    [
+      [0, 0],
+      [10, 20],
+    ],
+    { width: 54, height: 68 },
+  );
   const [a, b] = [fit([0, 0]), fit([10, 20])];
   near((a[1] - b[1]) / (b[0] - a[0]), 2, 1e-9);
   assert(b[1] < a[1]);
@@ -150,10 +182,13 @@ test('great circles: a quarter of the way round along the equator and due north'
 });
 
 test('each far target has a handle that says its bearing; near cover is a ring', () => {
-  const drawn = compass([
-    { name: 'Far', bearing: 45, distanceKm: 5000, nearVerticalKm: null },
-    { name: 'Near', bearing: null, distanceKm: null, nearVerticalKm: 300 },
-  ], 280);
+  const drawn = compass(
+    [
+      { name: 'Far', bearing: 45, distanceKm: 5000, nearVerticalKm: null },
+      { name: 'Near', bearing: null, distanceKm: null, nearVerticalKm: 300 },
+    ],
+    280,
+  );
   const sliders = drawn.querySelectorAll('[role=slider]');
   equal([sliders.length, sliders[0].getAttribute('aria-valuetext')], [1, '045°']);
   assert(drawn.querySelector('.compass-near-ring'));

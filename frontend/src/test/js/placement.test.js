@@ -25,7 +25,14 @@ test('a bearing meets the frame where it should', () => {
 });
 
 test('the wind-blown envelope is widest in the middle and closed at the ends', () => {
-  const outline = windEnvelope({ points: [[0, 0, 5], [5, 0, 4], [10, 0, 5]], blowOut: 0.5 });
+  const outline = windEnvelope({
+    points: [
+      [0, 0, 5],
+      [5, 0, 4],
+      [10, 0, 5],
+    ],
+    blowOut: 0.5,
+  });
   near(outline[1][1], 0.5, 1e-9);
   near(outline[4][1], -0.5, 1e-9);
   near(outline[0][1], 0, 1e-9);
@@ -39,15 +46,43 @@ test('what is tight or foul is dimensioned; when all is clear the nearest is', (
 
 test('a long dimension has ticks, a short one comes from outside, an upright one is a ring', () => {
   const at = (/** @type {number} */ x) => dimension({ state: 'tight', at: [0, 0, 5], toAt: [x, 0, 5] }, VIEW);
-  equal(at(4).map((node) => node.getAttribute('class')), ['dimension tight', 'dimension-tick tight']);
+  equal(
+    at(4).map((node) => node.getAttribute('class')),
+    ['dimension tight', 'dimension-tick tight'],
+  );
   equal(at(0.9).length, 1);
   equal(at(0)[0].nodeName, 'circle');
 });
 
 const PLOT = {
-  supports: [{ id: 'oak', name: 'Oak', at: [0, 0], lowest: 3, highest: 8 }, { id: 'chimney', at: [1, 0], lowest: 5, highest: 7, pullLimit: 0 }],
-  mastZones: [{ id: 'bed', name: 'Bed', area: [[10, 0], [20, 0], [20, 5], [10, 5]], highest: 9 }],
-  bracketLines: [{ id: 'eaves', path: [[0, 10], [10, 10]], lowest: 4, highest: 5 }],
+  supports: [
+    { id: 'oak', name: 'Oak', at: [0, 0], lowest: 3, highest: 8 },
+    { id: 'chimney', at: [1, 0], lowest: 5, highest: 7, pullLimit: 0 },
+  ],
+  mastZones: [
+    {
+      id: 'bed',
+      name: 'Bed',
+      area: [
+        [10, 0],
+        [20, 0],
+        [20, 5],
+        [10, 5],
+      ],
+      highest: 9,
+    },
+  ],
+  bracketLines: [
+    {
+      id: 'eaves',
+      path: [
+        [0, 10],
+        [10, 10],
+      ],
+      lowest: 4,
+      highest: 5,
+    },
+  ],
   overheadLines: [{ id: 'service-drop', path: [] }],
 };
 
@@ -61,7 +96,14 @@ test('a dragged end goes to the nearest place that may hold it', () => {
 test('the wire is carried along with its end', () => {
   const before = [{ at: [0, 0, 8] }, { at: [10, 0, 8] }];
   const after = [{ at: [0, 0, 8] }, { at: [10, 4, 6] }];
-  const [start, end] = carried([[0, 0, 8], [5, 0, 7.5]], before, after);
+  const [start, end] = carried(
+    [
+      [0, 0, 8],
+      [5, 0, 7.5],
+    ],
+    before,
+    after,
+  );
   equal(start, [0, 0, 8]);
   near(end[1], 2, 1e-9);
   near(end[2], 6.5, 1e-9);
@@ -69,8 +111,22 @@ test('the wire is carried along with its end', () => {
 
 test('a moved layout holds what assess reads and nothing that is stale', () => {
   const placement = {
-    shape: 'level', attachments: [{ on: 'oak', at: [0, 0, 8], pull: 5 }, { on: 'bed', at: [12, 2, 7], pull: 5 }],
-    conductors: [{ points: [[1, 0, 8], [11, 2, 7]], wire: 'w', length: 10 }], feed: { at: [6, 1, 7], line: 'l', lineLength: 9, conductor: 0, fraction: 0.5 },
+    shape: 'level',
+    attachments: [
+      { on: 'oak', at: [0, 0, 8], pull: 5 },
+      { on: 'bed', at: [12, 2, 7], pull: 5 },
+    ],
+    conductors: [
+      {
+        points: [
+          [1, 0, 8],
+          [11, 2, 7],
+        ],
+        wire: 'w',
+        length: 10,
+      },
+    ],
+    feed: { at: [6, 1, 7], line: 'l', lineLength: 9, conductor: 0, fraction: 0.5 },
   };
   const layout = movedLayout(placement, 1, { on: 'bed', at: [15, 2], z: 6 });
   equal(Object.keys(layout), ['shape', 'attachments', 'conductors', 'feed']);
@@ -80,35 +136,97 @@ test('a moved layout holds what assess reads and nothing that is stale', () => {
 });
 
 test('a feed at a held corner stays at the corner when one leg grows', () => {
-  near(shareAlong([[0, 0, 0], [3, 0, 0], [3, 9, 0]], [3, 0, 0]), 0.25, 1e-9);
+  near(
+    shareAlong(
+      [
+        [0, 0, 0],
+        [3, 0, 0],
+        [3, 9, 0],
+      ],
+      [3, 0, 0],
+    ),
+    0.25,
+    1e-9,
+  );
 });
 
 test('a wire laid along its holding points keeps its length, its corner, and rope at both ends', () => {
-  const { points, fraction } = laidAlong([[0, 0, 8], [10, 0, 8], [10, 10, 8]], 16);
-  equal(points, [[2, 0, 8], [10, 0, 8], [10, 8, 8]]);
+  const { points, fraction } = laidAlong(
+    [
+      [0, 0, 8],
+      [10, 0, 8],
+      [10, 10, 8],
+    ],
+    16,
+  );
+  equal(points, [
+    [2, 0, 8],
+    [10, 0, 8],
+    [10, 8, 8],
+  ]);
   near(fraction, 0.5, 1e-9);
-  const tight = laidAlong([[0, 0, 8], [10, 0, 8]], 30).points;
-  equal(tight, [[0.5, 0, 8], [9.5, 0, 8]]);
+  const tight = laidAlong(
+    [
+      [0, 0, 8],
+      [10, 0, 8],
+    ],
+    30,
+  ).points;
+  equal(tight, [
+    [0.5, 0, 8],
+    [9.5, 0, 8],
+  ]);
 });
 
 test('names are those the user gave, else the id in plain words', () => {
-  equal([nameOf(PLOT, 'oak'), nameOf(PLOT, 'service-drop'), nameOf(PLOT, 'ground')], ['Oak', 'service drop', 'the ground']);
+  equal(
+    [nameOf(PLOT, 'oak'), nameOf(PLOT, 'service-drop'), nameOf(PLOT, 'ground')],
+    ['Oak', 'service drop', 'the ground'],
+  );
 });
 
 const ASSESSED = {
-  attachments: [{ on: 'oak', state: 'tight', pullInWind: 290, pullLimit: 300 }], masts: [{}], ropes: [{ what: 'tail' }, { what: 'guy' }],
-  clearances: [{ rule: 'canopy-wire', to: 'oak', what: 'wire', distance: 0.7, required: 0.5, state: 'tight' }, { rule: 'headroom', to: 'ground', what: 'wire', distance: 7, required: 2.5, state: 'clear' }],
-  bands: [{ name: '20 m', frequency: 14.1, matching: { state: 'foul', why: 'its capacitor runs out' }, targets: [{ name: 'A', deliveredDbi: 3, referenceDbi: 1 }, { name: 'B', deliveredDbi: 1, referenceDbi: 3 }] }],
+  attachments: [{ on: 'oak', state: 'tight', pullInWind: 290, pullLimit: 300 }],
+  masts: [{}],
+  ropes: [{ what: 'tail' }, { what: 'guy' }],
+  clearances: [
+    { rule: 'canopy-wire', to: 'oak', what: 'wire', distance: 0.7, required: 0.5, state: 'tight' },
+    { rule: 'headroom', to: 'ground', what: 'wire', distance: 7, required: 2.5, state: 'clear' },
+  ],
+  bands: [
+    {
+      name: '20 m',
+      frequency: 14.1,
+      matching: { state: 'foul', why: 'its capacitor runs out' },
+      targets: [
+        { name: 'A', deliveredDbi: 3, referenceDbi: 1 },
+        { name: 'B', deliveredDbi: 1, referenceDbi: 3 },
+      ],
+    },
+  ],
 };
 
 test('concerns come worst first and leave out what is clear', () => {
   const list = concerns(PLOT, ASSESSED, (metres) => metres.toFixed(2));
-  equal(list.map((one) => one.state), ['foul', 'tight', 'tight']);
+  equal(
+    list.map((one) => one.state),
+    ['foul', 'tight', 'tight'],
+  );
   assert(list.some((one) => one.words === '0.70 to Oak; must keep 0.50'));
 });
 
 test('a band’s bar is the weighted mean over its targets', () => {
-  const [band] = bandSummaries({ brief: { targets: [{ name: 'A', weight: 3 }, { name: 'B', weight: 1 }] } }, ASSESSED);
+  const [band] = bandSummaries(
+    {
+      brief: {
+        targets: [
+          { name: 'A', weight: 3 },
+          { name: 'B', weight: 1 },
+        ],
+      },
+    },
+    ASSESSED,
+  );
   near(band.over, 1, 1e-9);
   equal(band.state, 'foul');
 });
@@ -119,7 +237,14 @@ test('a distance below nought is told as inside', () => {
 });
 
 test('refusals that a cure mends wholly come first', () => {
-  equal([cureRank({ cured: [{}], cure: 'Raise it.' }), cureRank({ cured: [{}], cure: 'Move it. 5 other refusals remain.' }), cureRank({ cured: [], cure: 'Nothing cures it.' })], [0, 1, 2]);
+  equal(
+    [
+      cureRank({ cured: [{}], cure: 'Raise it.' }),
+      cureRank({ cured: [{}], cure: 'Move it. 5 other refusals remain.' }),
+      cureRank({ cured: [], cure: 'Nothing cures it.' }),
+    ],
+    [0, 1, 2],
+  );
 });
 
 test('what must be built is counted, guys with their mast', () => {
@@ -140,7 +265,15 @@ test('a band taken from the catalogue gets frequencies inside its edges', () => 
 });
 
 test('the region is guessed from the site', () => {
-  equal([regionOf({ latitude: 41, longitude: -84 }), regionOf({ latitude: 51, longitude: 7 }), regionOf({ latitude: -34, longitude: 151 }), regionOf({})], ['2', '1', '3', '1']);
+  equal(
+    [
+      regionOf({ latitude: 41, longitude: -84 }),
+      regionOf({ latitude: 51, longitude: 7 }),
+      regionOf({ latitude: -34, longitude: 151 }),
+      regionOf({}),
+    ],
+    ['2', '1', '3', '1'],
+  );
 });
 
 test('a place is read with signs or letters', () => {
@@ -150,7 +283,10 @@ test('a place is read with signs or letters', () => {
 });
 
 test('faults are told at the part they belong to', () => {
-  const faults = [{ path: 'brief.bands[1].frequencies[0]', message: 'a' }, { path: 'brief.bands[10]', message: 'b' }];
+  const faults = [
+    { path: 'brief.bands[1].frequencies[0]', message: 'a' },
+    { path: 'brief.bands[10]', message: 'b' },
+  ];
   equal(faultsAt(faults, 'brief.bands[1]'), ['a']);
 });
 
