@@ -9,7 +9,7 @@ import java.util.List;
 /** The plots that come with the program, invented, to look at and to start from. */
 public final class DemoPlans {
   private static final List<String> NAMES =
-      List.of("old-orchard", "garden-in-steps", "corner-plot");
+      List.of("corner-plot", "garden-in-steps", "old-orchard");
 
   private DemoPlans() {}
 
