@@ -23,7 +23,8 @@ class WeightPutBackTest {
             .filter(demo -> demo.name().equals("old-orchard"))
             .findFirst()
             .orElseThrow()
-            .json();
+            .json()
+            .replace("\"ice\": 0", "\"ice\": 3");
     Plan plan = PlanReader.read(json).plan();
     Layout layout =
         new Layout(
