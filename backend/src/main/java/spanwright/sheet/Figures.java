@@ -39,7 +39,7 @@ final class Figures {
 
   /** A length in a sentence, with its unit. */
   String say(double metres) {
-    return length(metres) + suffix();
+    return unbroken(length(metres) + suffix());
   }
 
   /** A height to the nearest 0.1 m or inch. */
@@ -49,7 +49,7 @@ final class Figures {
 
   /** A height in a sentence, with its unit. */
   String sayHeight(double metres) {
-    return height(metres) + suffix();
+    return unbroken(height(metres) + suffix());
   }
 
   /** A distance found: never more than it is. */
@@ -98,7 +98,7 @@ final class Figures {
 
   /** A length to cut in a sentence, with its unit. */
   String sayCut(double metres) {
-    return cut(metres) + suffix();
+    return unbroken(cut(metres) + suffix());
   }
 
   /** A rope to cut: to 0.5 m or the foot, upward. */

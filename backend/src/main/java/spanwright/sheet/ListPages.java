@@ -74,7 +74,7 @@ final class ListPages {
 
   private double head(Pen pen) {
     SheetModel.Head head = model.head();
-    double side = 62;
+    double side = 72;
     List<String> right = new ArrayList<>();
     right.add(head.name() + ", " + figures.say(head.wireLength()) + " of wire");
     right.addAll(

@@ -40,8 +40,8 @@ final class RigTables {
               Setting.Cell.of(heights(line)),
               Setting.Cell.bold(line.keep() == null ? "?" : figures.required(line.keep())),
               nearest(line.nearest()),
-              falls(line, line.wireLetGo()),
-              falls(line, line.mastFalls())));
+              falls(line, line.wireLetGo(), false),
+              falls(line, line.mastFalls(), true)));
     }
     List<String> notes = new ArrayList<>();
     for (SheetModel.Line line : model.overhead().lines()) {
@@ -53,11 +53,11 @@ final class RigTables {
         "Overhead lines first",
         List.of(
             Setting.Column.left("Line", 0),
-            Setting.Column.left("Kind", 25),
+            Setting.Column.left("Kind", wide(25, 24)),
             Setting.Column.right("Height", wide(14, 23)),
             Setting.Column.right("Keep", wide(11, 14)),
             Setting.Column.right("Nearest, in the gust", 27),
-            Setting.Column.right("If a wire lets go", wide(35, 38)),
+            Setting.Column.right("If a wire lets go", wide(29, 28)),
             Setting.Column.right("If a mast falls", wide(38, 40))),
         rows,
         notes,
@@ -78,14 +78,15 @@ final class RigTables {
         : Setting.Cell.state(figures.found(reach.distance()), reach.state());
   }
 
-  private Setting.Cell falls(SheetModel.Line line, SheetModel.Reach reach) {
+  private Setting.Cell falls(SheetModel.Line line, SheetModel.Reach reach, boolean both) {
     if (!OverheadList.countsWhenThingsFall(line)) {
       return Setting.Cell.of("not required");
     }
     if (reach == null) {
       return Setting.Cell.of(line.nearest() == null ? "no figure" : "does not arise");
     }
-    return Setting.Cell.state(figures.foundOf(reach.distance(), reach.required()), reach.state());
+    String told = figures.foundOf(reach.distance(), reach.required());
+    return Setting.Cell.state(both ? told : told.replaceFirst(" of .*", ""), reach.state());
   }
 
   Flow.Block wire() {

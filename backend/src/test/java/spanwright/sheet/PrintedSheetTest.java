@@ -144,6 +144,37 @@ class PrintedSheetTest {
   }
 
   @Test
+  void nothing_on_the_list_runs_over_the_margin_or_into_its_neighbour() {
+    for (SheetOptions.Paper paper : SheetOptions.Paper.values()) {
+      for (SheetOptions.Units units : SheetOptions.Units.values()) {
+        for (Pen page : ListPages.of(Fixture.model(paper, units))) {
+          List<Polygon> boxes = new ArrayList<>();
+          for (Ink ink : page.inks()) {
+            if (ink instanceof Ink.Lettering l) {
+              double width = Letters.width(l);
+              double left =
+                  switch (l.anchor()) {
+                    case START -> l.x();
+                    case MIDDLE -> l.x() - width / 2;
+                    case END -> l.x() - width;
+                  };
+              assertTrue(left >= ListPages.MARGIN - 0.01, l.text());
+              assertTrue(left + width <= paper.width() - ListPages.MARGIN + 0.01, l.text());
+              double tall = l.points() * Letters.POINT * 0.7;
+              boxes.add(Labels.box(left + width / 2, l.y() - tall / 2, width, tall, 0));
+            }
+          }
+          for (int i = 0; i < boxes.size(); i++) {
+            for (int k = i + 1; k < boxes.size(); k++) {
+              assertFalse(boxes.get(i).intersects(boxes.get(k)), boxes.get(i) + " " + page);
+            }
+          }
+        }
+      }
+    }
+  }
+
+  @Test
   void feet_and_inches_stand_on_every_page_that_lengths_do() throws IOException {
     String text = text(Fixture.model(SheetOptions.Paper.LETTER, SheetOptions.Units.FEET));
     assertTrue(text.contains("Feet and inches."));
