@@ -32,6 +32,11 @@ final class Figures {
     return feet ? "" : " m";
   }
 
+  /** A figure and its unit stay on one line. */
+  private static String unbroken(String figure) {
+    return figure.replace(' ', '\u00a0');
+  }
+
   /** A length to the nearest 10 mm or half inch. */
   String length(double metres) {
     return feet ? halfInches(Math.round(metres / (INCH / 2))) : fixed(metres, 2);
