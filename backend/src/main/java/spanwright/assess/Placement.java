@@ -1,5 +1,6 @@
 package spanwright.assess;
 
+import com.fasterxml.jackson.annotation.JsonInclude;
 import java.util.List;
 import spanwright.clearance.Clearance;
 import spanwright.clearance.State;
@@ -209,7 +210,7 @@ public record Placement(
       double peakElevation,
       double peakAzimuth,
       double efficiency,
-      Double powerBalance,
+      @JsonInclude(JsonInclude.Include.ALWAYS) Double powerBalance,
       List<TargetResult> targets,
       Rose rose,
       List<Profile> profiles) {}
