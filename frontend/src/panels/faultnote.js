@@ -18,7 +18,7 @@ const RING = 12;
 export function mount(root, store, shell) {
   const leader = el('span', { class: 'fault-leader', 'aria-hidden': 'true' });
   const words = el('div', { class: 'fault' });
-  const note = el('aside', { class: 'fault-note', 'aria-label': 'Fault', hidden: true }, [leader, words]);
+  const note = el('div', { class: 'fault-note', role: 'note', 'aria-label': 'Fault', hidden: true }, [leader, words]);
   root.append(note);
   /** @type {number[]|null} */
   let at = null;

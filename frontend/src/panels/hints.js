@@ -16,7 +16,7 @@ const HINTS = [
  * @param {any} shell
  */
 export function mount(root, store, shell) {
-  const hint = el('aside', { class: 'hint', 'aria-label': 'Hint' });
+  const hint = el('div', { class: 'hint', role: 'note', 'aria-label': 'Hint' });
   const notice = el('div', { class: 'notice', role: 'alert' });
   const empty = el('p', { class: 'empty' });
   root.append(
@@ -29,7 +29,7 @@ export function mount(root, store, shell) {
   );
   store.subscribe((s) => [s.hint, s.place], () => {
     const { hint: n } = store.get();
-    hint.hidden = n === 0 || store.get().place === 'sheet';
+    hint.hidden = n === 0 || store.get().place !== 'survey';
     if (n === 0) return;
     hint.replaceChildren(
       el('p', { text: HINTS[n - 1] }),

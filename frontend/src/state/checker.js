@@ -1,5 +1,6 @@
 // @ts-check
 /** Asks the server what is wrong with the plan, a moment after it changed; old answers are dropped. */
+import { placeOf } from './cures.js';
 
 const REST = 350;
 
@@ -27,7 +28,11 @@ export function createChecker(store, check) {
     }
   }
 
-  store.subscribe((s) => s.plan, () => {
+  store.subscribe((s) => s.plan, (plan, before) => {
+    // What was missing and has just been drawn is not marked as faulty until the answer comes.
+    const { faults } = store.get();
+    const still = faults.filter((fault) => !before || placeOf(before, fault) || !placeOf(plan, fault));
+    if (still.length < faults.length) store.set({ faults: still });
     clearTimeout(timer);
     timer = setTimeout(ask, REST);
   });
