@@ -165,9 +165,14 @@ final class Hang {
       weightSpan[atEnd ? i + 1 : i] = i;
     }
     SpanStatics statics = new SpanStatics(make, materials, atEnd, weight);
-    statics.setWireParts(Math.max(10, Math.min(28, 56 / course.spans().size())));
+    int room = 57 - ReadOut.TAIL_PARTS * (isLoose(course.headTail()) + isLoose(course.endTail()));
+    statics.setWireParts(Math.max(6, Math.min(28, room / course.spans().size())));
     statics.setFeedLoad(feedWeight, feedPush, feedIced);
     return statics;
+  }
+
+  private static int isLoose(double tail) {
+    return tail > 1e-6 ? 1 : 0;
   }
 
   /** Whether the pull of a span is set at its second end. */

@@ -3,11 +3,13 @@ package spanwright.rigging;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
-import java.util.Locale;
 import spanwright.plan.Place;
 
 /** Reads a hang out into its record. */
 final class ReadOut {
+  /** Pieces that wire hanging free is drawn in. */
+  static final int TAIL_PARTS = 8;
+
   private final Hang hang;
   private final Rigging rigging;
   private final Layout layout;
@@ -209,7 +211,7 @@ final class ReadOut {
     }
     double size = Math.hypot(weight, push);
     double sway = hang.windy ? hang.holders.get(attachment).sway() : 0;
-    int parts = 8;
+    int parts = TAIL_PARTS;
     List<Place> calm = new ArrayList<>();
     List<List<Place>> blown = List.of(new ArrayList<>(), new ArrayList<>());
     for (int i = 0; i <= parts; i++) {
@@ -340,9 +342,5 @@ final class ReadOut {
     int points = tail.shapes().calm().size() - 1;
     int index = (int) Math.round(points * Math.min(1, down / tail.length()));
     return tail.shapes().part(index, index);
-  }
-
-  static String metres(double value) {
-    return String.format(Locale.ROOT, "%.1f m", value);
   }
 }

@@ -197,7 +197,7 @@ class RiggingTest {
     List<Place> calm = rigged.conductors().get(0).shapes().calm();
     assertEquals(6, calm.get(0).z(), 1e-6);
     assertEquals(5, calm.get(calm.size() - 1).z(), 1e-6);
-    assertTrue(calm.size() <= 60 + 16);
+    assertTrue(calm.size() <= 60);
   }
 
   @Test
