@@ -49,7 +49,7 @@ export function shortFigures(kind, thing, units) {
       return `${LINE_WORDS[thing.kind] ?? thing.kind}, ${f(Math.min(...z))} to ${f(Math.max(...z))} up, kept distance ${f(thing.clearance ?? 0)}`;
     }
     case 'zones':
-      return ruleWords(thing, units);
+      return thing.rule === 'headroom' ? `headroom ${f(thing.height ?? 0)}` : ruleWords(thing, units);
     case 'people':
       return `from ${f(thing.from ?? 0)} to ${f(thing.to ?? 0)} above the ground`;
     case 'metalwork':

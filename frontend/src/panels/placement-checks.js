@@ -91,9 +91,10 @@ function held(hold) {
  * @param {any} placement
  * @param {any} catalogue
  * @param {(metres: number) => string} length
+ * @param {'m'|'ft'} units
  * @returns {HTMLElement}
  */
-export function clearancesTable(plan, placement, catalogue, length) {
+export function clearancesTable(plan, placement, catalogue, length, units) {
   const rows = placement.clearances.map((/** @type {any} */ one) =>
     html(
       'tr',
@@ -122,7 +123,12 @@ export function clearancesTable(plan, placement, catalogue, length) {
   return html(
     'section',
     { class: 'clearances' },
-    html('h3', {}, 'Clearances'),
+    html(
+      'div',
+      { class: 'line part-head' },
+      html('h3', {}, 'Clearances'),
+      html('span', { class: 'soft' }, units === 'm' ? 'metres' : 'feet and inches'),
+    ),
     html('table', {}, head(), html('tbody', {}, ...rows.slice(0, first))),
     rows.length > first
       ? html(

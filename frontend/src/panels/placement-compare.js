@@ -6,7 +6,7 @@ import { stateMark } from '../charts/marks.js';
 import {
   bandSummaries,
   concerns,
-  distanceFigure,
+  distanceWords,
   placementOf,
   placementTitle,
   planOf,
@@ -30,7 +30,7 @@ export function comparison(state, placement, store) {
   const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
   const bandsHere = bandSummaries(plan, placement);
   const bandsThere = bandSummaries(plan, pinned);
-  const worstOf = (/** @type {any} */ one) => concerns(plan, one, (metres) => distanceFigure(metres, state.units))[0];
+  const worstOf = (/** @type {any} */ one) => concerns(plan, one, (metres) => distanceWords(metres, state.units))[0];
   const gust = (/** @type {any} */ one) =>
     Math.max(...one.attachments.map((/** @type {any} */ hold) => hold.pullInWind));
   /** @type {[string, string|Node, string|Node, string][]} */

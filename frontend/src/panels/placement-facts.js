@@ -254,6 +254,16 @@ export function distanceFigure(metres, units) {
 }
 
 /**
+ * The same in a sentence.
+ * @param {number} metres
+ * @param {'m'|'ft'} units
+ * @returns {string} with its unit
+ */
+export function distanceWords(metres, units) {
+  return units === 'm' ? `${distanceFigure(metres, units)} m` : distanceFigure(metres, units);
+}
+
+/**
  * Names of shapes as they begin a sentence.
  * @param {string} shape
  */

@@ -2,7 +2,7 @@
 import { html } from '../charts/html.js';
 import { svg } from '../draw/svg.js';
 import { stateMark } from '../charts/marks.js';
-import { concerns, distanceFigure, listOf, planOf, scoreWords, shapeTitle } from './placement-facts.js';
+import { concerns, distanceWords, listOf, planOf, scoreWords, shapeTitle } from './placement-facts.js';
 
 /** On a narrow screen: the headline with previous and next, and the way to the list. Hidden by the style sheet on a wide one. */
 
@@ -15,7 +15,7 @@ import { concerns, distanceFigure, listOf, planOf, scoreWords, shapeTitle } from
  */
 export function headLine(state, placement, index, store) {
   const list = listOf(state);
-  const concern = concerns(planOf(state), placement, (metres) => distanceFigure(metres, state.units))[0];
+  const concern = concerns(planOf(state), placement, (metres) => distanceWords(metres, state.units))[0];
   const step = (/** @type {number} */ way) => {
     const next = list[index + way];
     if (next) store.set({ chosen: next.id });

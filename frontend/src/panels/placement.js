@@ -10,6 +10,7 @@ import {
   bandsOf,
   concerns,
   distanceFigure,
+  distanceWords,
   hangsOn,
   isStale,
   listOf,
@@ -98,7 +99,7 @@ export function mount(root, store, shell) {
       profile(state, plan, placement, band),
       gainTable(placement, band, (name) => store.set({ chosenBand: name })),
       pullsTable(plan, placement),
-      clearancesTable(plan, placement, state.catalogue, length),
+      clearancesTable(plan, placement, state.catalogue, length, state.units),
       feedFacts(state, placement),
       scoreTable(placement),
       remarks(placement),
@@ -126,7 +127,7 @@ export function mount(root, store, shell) {
    * @param {any} placement
    */
   function head(state, plan, placement) {
-    const list = concerns(plan, placement, (metres) => distanceFigure(metres, state.units));
+    const list = concerns(plan, placement, (metres) => distanceWords(metres, state.units));
     const pinned = state.pinned === placement.id;
     return html(
       'section',

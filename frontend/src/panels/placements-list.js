@@ -6,7 +6,7 @@ import { thumbnail } from '../charts/thumbnail.js';
 import { signed } from '../units/figures.js';
 import {
   bandSummaries,
-  distanceFigure,
+  distanceWords,
   hangsOn,
   listOf,
   nearestConcern,
@@ -49,7 +49,7 @@ export function placementRows(state, order, choose) {
 function row(state, placement, rank, choose) {
   const plan = planOf(state);
   const bars = bandSummaries(plan, placement);
-  const concern = nearestConcern(plan, placement, (metres) => distanceFigure(metres, state.units));
+  const concern = nearestConcern(plan, placement, (metres) => distanceWords(metres, state.units));
   const names = hangsOn(plan, placement).join(', ');
   return html(
     'li',

@@ -114,7 +114,7 @@ export function mount(root, store, shell) {
       html(
         'p',
         {},
-        'Every way to hang the wire that the plot allows is laid out, checked against its clearances, followed down to the station’s socket, and ranked.',
+        'Ways to hang the wire on this plot are laid out, held against its clearances, followed down to the station’s socket, and ranked.',
       ),
       efforts(),
       startButton('Find placements'),

@@ -61,7 +61,7 @@ export function sheetList(model, units) {
       ? html(
           'section',
           {},
-          html('h3', {}, 'Worth knowing'),
+          html('h3', {}, 'Notes'),
           html('ul', { class: 'notes' }, ...model.notes.map((/** @type {string} */ note) => html('li', {}, note))),
         )
       : null,
@@ -84,6 +84,8 @@ function overheadBox(overhead, length) {
     const of = keep !== undefined && Math.abs(one.required - keep) < 1e-6 ? '' : ` of ${length(one.required)}`;
     return html('span', { class: one.state }, `${length(one.distance)}${of} `, stateMark(one.state), ` ${one.state}`);
   };
+  const falls = (/** @type {any} */ line) =>
+    line.kind === 'telephone' ? 'not required' : line.nearest ? 'does not arise' : 'no figure';
   return html(
     'section',
     { class: 'overhead' },
@@ -102,9 +104,9 @@ function overheadBox(overhead, length) {
             line.kind,
             `${length(line.lowest)}–${length(line.highest)}`,
             line.keep === undefined || line.keep === null ? 'not checked' : bold(length(line.keep)),
-            reach(line.nearest, 'not checked', line.keep),
-            reach(line.wireLetGo, 'not required', line.keep),
-            reach(line.mastFalls, 'not required', line.keep),
+            reach(line.nearest, 'no figure', line.keep),
+            reach(line.wireLetGo, falls(line), line.keep),
+            reach(line.mastFalls, falls(line), line.keep),
           ]),
           'Overhead lines',
         )
@@ -181,7 +183,7 @@ function holdings({ attachments }, length) {
   return html(
     'section',
     {},
-    html('h3', {}, 'Heights, pulls, and what to hang'),
+    html('h3', {}, 'Attachments, pulls, what to hang'),
     table(
       ['', 'Point', '>Height', '>Calm, N', '>Gust, N', '>May take, N', '>Hang'],
       attachments.map((/** @type {any} */ one) => [
@@ -191,7 +193,7 @@ function holdings({ attachments }, length) {
         number(one.pull, 0),
         number(one.pullInWind, 0),
         one.mayTake === undefined || one.mayTake === null
-          ? 'not known'
+          ? 'not checked'
           : html('span', {}, `${number(one.mayTake, 0)} `, stateMark(one.state, one.state)),
         one.kilograms ? bold(`${number(one.kilograms, 1)} kg`) : one.held === 'centre' ? 'middle' : one.held,
       ]),
@@ -210,7 +212,7 @@ function hardware({ hardware: items }, length) {
   return html(
     'section',
     {},
-    html('h3', {}, 'Hardware'),
+    html('h3', {}, 'Hardware, with spares'),
     table(
       ['>', 'What', '>Spare'],
       items.map((/** @type {any} */ item) => [
@@ -231,7 +233,7 @@ function sags({ sags: all }, length) {
   return html(
     'section',
     {},
-    html('h3', {}, 'Sag to sight'),
+    html('h3', {}, 'Spans, and sag to sight'),
     table(
       ['Span', '>Level', '>Sag, middle', '>Height', '>In gust', '>Blown out', '>Compass'],
       all.map((/** @type {any} */ sag) => [

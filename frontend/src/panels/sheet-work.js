@@ -108,7 +108,7 @@ export function cautions({ cautions: all }) {
   return html(
     'section',
     {},
-    html('h3', {}, 'Cautions'),
+    html('h3', {}, 'Cautions for this site'),
     html(
       'ul',
       { class: 'cautions' },
@@ -130,9 +130,9 @@ export function sweep({ sweep: rows }) {
   return html(
     'section',
     {},
-    html('h3', {}, 'What a sweep at the station should find'),
+    html('h3', {}, 'What the sweep should find, at the entry'),
     table(
-      ['Band', '>MHz', '>Ohm', '>SWR on the line', 'Matching'],
+      ['Band', '>MHz', '>Impedance, Ω', '>Line SWR', 'Match'],
       rows.map((/** @type {any} */ row) => [
         row.band,
         megahertz(row.frequency),

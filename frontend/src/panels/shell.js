@@ -4,7 +4,7 @@ import { svg } from '../draw/svg.js';
 import { mark } from '../draw/mark.js';
 import { number } from '../units/figures.js';
 import { clock } from '../units/figures.js';
-import { formatLength } from '../units/length.js';
+import { formatLength, lengthWithUnit } from '../units/length.js';
 import { button, el } from './el.js';
 
 /** @typedef {import('../state/store.js').Store} Store */
@@ -92,7 +92,7 @@ export function mountFoot(root, store, shell) {
   store.subscribe((s) => [s.cursor, s.units, s.place], () => {
     const { cursor, units, place } = store.get();
     at.textContent = cursor && place === 'survey'
-      ? `${cursor.reason ? `${cursor.reason}   ` : ''}E ${formatLength(cursor.point[0], units, 1)}  N ${formatLength(cursor.point[1], units, 1)}` : '';
+      ? `${cursor.reason ? `${cursor.reason}   ` : ''}E ${formatLength(cursor.point[0], units, 1)}  N ${lengthWithUnit(cursor.point[1], units)}` : '';
   });
   shell.planView.onView((/** @type {any} */ sight) => {
     // A CSS pixel is 1/96 inch.

@@ -34,7 +34,7 @@ export function wallTable(store, ref) {
   const agreed = own ? agreedPart(store) : null;
   const fourth = heights ? 'Height' : own ? 'Over it' : 'Corner';
   const table = el('table', { class: 'walls' }, [
-    el('thead', {}, [el('tr', {}, [closed ? (own ? 'Side' : 'Wall') : 'Run', 'Length', 'Direction', fourth].map((text) => el('th', { scope: 'col', text })))]),
+    el('thead', {}, [el('tr', {}, [closed ? (kind === 'buildings' ? 'Wall' : 'Side') : 'Run', 'Length', 'Direction', fourth].map((text) => el('th', { scope: 'col', text })))]),
     el('tbody', {}, [...rows, ...last].map((r) => r.root)),
   ]);
   return {
@@ -217,7 +217,7 @@ export function draftTable(draft, units) {
   const points = live ? [...draft.points, draft.at] : draft.points;
   const list = points.length > 1 ? walls(points, false) : [];
   return el('table', { class: 'walls' }, [
-    el('thead', {}, [el('tr', {}, [draft.shape === 'ring' ? 'Wall' : 'Run', 'Length', 'Direction', 'Corner'].map((text) => el('th', { scope: 'col', text })))]),
+    el('thead', {}, [el('tr', {}, [draft.shape === 'ring' ? (draft.kind === 'buildings' ? 'Wall' : 'Side') : 'Run', 'Length', 'Direction', 'Corner'].map((text) => el('th', { scope: 'col', text })))]),
     el('tbody', {}, list.map((side, i) => el('tr', { class: i === list.length - 1 && live ? 'live' : null }, [
       el('th', { scope: 'row', text: `${i + 1}–${i + 2}` }),
       el('td', { class: 'figure', text: formatLength(side.length, units, 2) }),

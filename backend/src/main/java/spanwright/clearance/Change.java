@@ -136,6 +136,11 @@ record Change(Kind kind, int attachment, double direction, double amount, String
     return null;
   }
 
+  /** A coordinate as it stands on the page, with a true minus. */
+  private static String signed(double metres) {
+    return String.format(Locale.ROOT, "%.2f", metres).replace('-', '−');
+  }
+
   /** The change as an order. */
   String sentence(List<Layout.Hold> to, List<Holder> holders, GroundSurface ground) {
     String metres = String.format(Locale.ROOT, "%.2f m", amount);
@@ -158,12 +163,12 @@ record Change(Kind kind, int attachment, double direction, double amount, String
         Place at = to.get(attachment).at();
         return String.format(
             Locale.ROOT,
-            "Move the %s at %s by %s, to x %.2f, y %.2f on the plan.",
+            "Move the %s at %s by %s, to %s m east, %s m north on the plan.",
             kind == Kind.MOVE ? "mast" : "bracket",
             holders.get(attachment).name(),
             metres,
-            at.x(),
-            at.y());
+            signed(at.x()),
+            signed(at.y()));
       }
       case SHORTEN -> {
         String where =

@@ -282,10 +282,7 @@ final class SurveyChecks {
     boolean named = by != null && !by.isBlank();
     boolean given = date != null && !date.isBlank();
     if (clearance < least - ROUNDING && !(named && given)) {
-      String lacking =
-          named
-              ? "\"authorisedOn\" is"
-              : given ? "\"authorisedBy\" is" : "\"authorisedBy\" and \"authorisedOn\" are";
+      String lacking = named ? "the day is" : given ? "who allowed it is" : "both are";
       String cure = Wording.number(least) + " m or more";
       say(
           line.at("clearance"),

@@ -136,9 +136,9 @@ enum Wording {
 
   // overhead lines
   CLEARANCE_UNAUTHORISED(
-      "%s: a clearance of %s m is less than the %s m kept from a line of this kind."
-          + " It counts only with both \"authorisedBy\" and \"authorisedOn\"; %s missing. Ask the"
-          + " line's owner, or give %s."),
+      "%s: a kept distance of %s m is less than the %s m for a line of this kind. It counts"
+          + " only with who allowed it (\"authorisedBy\") and on what day (\"authorisedOn\"); %s"
+          + " missing. Ask the line's owner, or give %s."),
   BAD_DATE("%s: authorisedOn must be a date as YYYY-MM-DD, but is %s."),
 
   // brief

@@ -118,7 +118,7 @@ class CataloguePagesTest {
             List.of(
                 id(m.id(), m.isDefault()),
                 m.name(),
-                m.unit().network().name(),
+                Json.mapper().valueToTree(m.unit().network()).asText(),
                 span(m.unit().inductance(), 1e6),
                 span(m.unit().capacitance(), 1e12),
                 n(m.unit().coilQ()),

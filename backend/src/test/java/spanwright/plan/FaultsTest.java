@@ -432,10 +432,10 @@ class FaultsTest {
         set(
             "overheadLines[0].clearance",
             "1",
-            "Overhead line \"Service drop\": a clearance of 1 m is less than the 3.05 m kept from a"
-                + " line of this kind. It counts only with both \"authorisedBy\" and"
-                + " \"authorisedOn\"; \"authorisedBy\" and \"authorisedOn\" are missing. Ask the"
-                + " line's owner, or give 3.05 m or more."),
+            "Overhead line \"Service drop\": a kept distance of 1 m is less than the 3.05 m for a"
+                + " line of this kind. It counts only with who allowed it (\"authorisedBy\") and on"
+                + " what day (\"authorisedOn\"); both are missing. Ask the line's owner, or give"
+                + " 3.05 m or more."),
         set(
             "overheadLines[0].authorisedOn",
             "\"2026-02-30\"",
@@ -741,8 +741,7 @@ class FaultsTest {
             Pattern.quote("").isEmpty()
                 ? ""
                 : java.util.regex.Matcher.quoteReplacement(line.toString()));
-    assertTrue(
-        PlanReader.read(half).faults().get(0).message().contains("; \"authorisedOn\" is missing."));
+    assertTrue(PlanReader.read(half).faults().get(0).message().contains("; the day is missing."));
     line.put("authorisedOn", "2026-05-01");
     String both =
         SOUND.replaceAll(

@@ -24,14 +24,14 @@ public class HandbookEarthTypesTest extends PublishedChecks {
   @Override
   public List<Check> checks() {
     List<Check> checks = new ArrayList<>();
-    add(checks, "very-good", 20, 0.0303, TABLE);
-    add(checks, "good", 14, 0.01, TABLE);
-    add(checks, "marshy", 12, 0.0075, TABLE);
-    add(checks, "pastoral", 13, 0.006, TABLE);
-    add(checks, "average", 13, 0.005, TABLE);
-    add(checks, "rocky", 13, 0.002, TABLE + ": 12 to 14");
-    add(checks, "sandy", 10, 0.002, TABLE);
-    add(checks, "city", 5, 0.001, TABLE);
+    add(checks, "rich-best", 20, 0.0303, TABLE);
+    add(checks, "rich", 14, 0.01, TABLE);
+    add(checks, "marsh", 12, 0.0075, TABLE);
+    add(checks, "wood", 13, 0.006, TABLE);
+    add(checks, "clay", 13, 0.005, TABLE);
+    add(checks, "rock", 13, 0.002, TABLE + ": 12 to 14");
+    add(checks, "sand", 10, 0.002, TABLE);
+    add(checks, "town", 5, 0.001, TABLE);
     add(checks, "industry", 3, 0.001, TABLE);
     add(checks, "fresh-water", 80, 0.001, TABLE);
     add(checks, "salt-water", 81, 5, TABLE);
