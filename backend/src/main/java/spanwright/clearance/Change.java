@@ -18,7 +18,7 @@ import spanwright.rigging.Rigged;
  * @param kind what is changed
  * @param attachment index of the attachment that moves, or -1 for all or none
  * @param direction of a move on plan [rad from east], or +1 and -1 along a bracket line; for a
- *     shorter wire -1 at its first end, +1 at its last, 0 at both
+ *     shorter wire or a moved feedpoint -1 at or to its first end, +1 its last, 0 at both
  * @param amount metres
  * @param wire catalogue id of another wire, or null
  */
@@ -30,13 +30,14 @@ record Change(Kind kind, int attachment, double direction, double amount, String
     MOVE,
     SLIDE,
     SHORTEN,
+    FEED,
     LIGHTEN
   }
 
   private static final double[] STEPS = {0.25, 0.5, 1, 1.5, 2, 3, 4, 6};
 
   /** Everything worth trying on a layout, smallest first. */
-  static List<Change> all(List<Holder> holders, boolean pulls, List<String> lighter) {
+  static List<Change> all(List<Holder> holders, boolean line, List<String> lighter) {
     List<Change> all = new ArrayList<>();
     for (double step : STEPS) {
       for (int a = 0; a < holders.size(); a++) {
@@ -56,10 +57,12 @@ record Change(Kind kind, int attachment, double direction, double amount, String
       all.add(new Change(Kind.SHORTEN, -1, 0, 2 * step, null));
       all.add(new Change(Kind.SHORTEN, -1, -1, step, null));
       all.add(new Change(Kind.SHORTEN, -1, 1, step, null));
+      if (line) {
+        all.add(new Change(Kind.FEED, -1, -1, step, null));
+        all.add(new Change(Kind.FEED, -1, 1, step, null));
+      }
     }
-    if (pulls) {
-      lighter.forEach(each -> all.add(new Change(Kind.LIGHTEN, -1, 0, 1, each)));
-    }
+    lighter.forEach(each -> all.add(new Change(Kind.LIGHTEN, -1, 0, 1, each)));
     return all;
   }
 
@@ -74,8 +77,9 @@ record Change(Kind kind, int attachment, double direction, double amount, String
   /** The attachments after the change, or null where what holds them does not allow it. */
   List<Layout.Hold> holds(List<Layout.Hold> holds, List<Holder> holders, GroundSurface ground) {
     List<Layout.Hold> changed = new ArrayList<>(holds);
-    boolean moved = kind == Kind.SHORTEN || kind == Kind.LIGHTEN;
-    for (int a = 0; a < holds.size() && !(kind == Kind.SHORTEN || kind == Kind.LIGHTEN); a++) {
+    boolean stays = kind == Kind.SHORTEN || kind == Kind.LIGHTEN || kind == Kind.FEED;
+    boolean moved = stays;
+    for (int a = 0; a < holds.size() && !stays; a++) {
       if (attachment >= 0 && attachment != a) {
         continue;
       }
@@ -177,6 +181,13 @@ record Change(Kind kind, int attachment, double direction, double amount, String
                 : "at " + holders.get(direction < 0 ? 0 : holders.size() - 1).name();
         return "Shorten the wire by " + metres + ", " + where + ", with rope in its place.";
       }
+      case FEED -> {
+        return String.format(
+            Locale.ROOT,
+            "Move the feedpoint %s towards %s.",
+            metres,
+            holders.get(direction < 0 ? 0 : holders.size() - 1).name());
+      }
       default -> {
         return "Take a lighter wire: " + wire + ".";
       }
@@ -228,6 +239,12 @@ record Change(Kind kind, int attachment, double direction, double amount, String
     tailPoint(rigged, last + 1, holds.get(last + 1).at(), points, false);
     Layout old = rigged.layout();
     double fraction = beforeFeed > 0 ? beforeFeed / total : forwards(rigged);
+    if (kind == Kind.FEED) {
+      fraction += direction * amount / total;
+      if (beforeFeed > 0 || fraction < 0.05 || fraction > 0.95) {
+        return null;
+      }
+    }
     return new Layout(
         old.shape(),
         holds,

@@ -14,11 +14,12 @@ import spanwright.rigging.Rigging;
 
 /**
  * Refusals with their cures. A cure is found by trying: an end raised or lowered, a mast or bracket
- * moved, the wire shortened, a lighter wire; each is hung and checked like any placement. The
- * smallest that leaves nothing foul is the cure; where there is none, the smallest that at least
- * mends this and spoils nothing else, and the cure says that others remain.
+ * or feedpoint moved, the wire shortened, a lighter wire; each is hung and checked like any
+ * placement. The smallest that leaves nothing foul is the cure; where there is none, the smallest
+ * that at least mends this and spoils nothing else, and the cure says that others remain.
  */
 final class Cures {
+  private static final String LINE = Strand.Part.FEED_LINE.word;
   private static final double FINEST = 0.05;
   private static final double ENOUGH = 2;
 
@@ -116,7 +117,9 @@ final class Cures {
     List<String> lighter =
         pulls ? rigging.lighterWires(rigged.conductors().get(0).wire()) : List.of();
     Set<String> open = new HashSet<>(fouls);
-    for (Change change : Change.all(holders, pulls, lighter)) {
+    boolean line =
+        found.stream().anyMatch(each -> each.state() == State.FOUL && each.what().equals(LINE));
+    for (Change change : Change.all(holders, line, lighter)) {
       Trial trial = attempt(change);
       if (trial == null) {
         continue;
@@ -229,13 +232,13 @@ final class Cures {
         cure += String.format(Locale.ROOT, " %d other refusals remain.", trial.left().size());
         cure = cure.replace(" 1 other refusals remain.", " One other refusal remains.");
       }
-      cured = trial.change().kind() == Change.Kind.SHORTEN ? List.of() : trial.holds();
+      cured = trial.holds().equals(layout.attachments()) ? List.of() : trial.holds();
     } else if (known != null) {
       cure = known;
     } else {
       cure =
-          "Nothing cures it: raising or lowering an end, moving a mast or bracket and shortening"
-              + " the wire were tried.";
+          "Nothing tried cures it: an end raised or lowered, a mast, bracket or the feedpoint"
+              + " moved, the wire shortened.";
     }
     return new Refusal(
         layout.attachments().stream().map(Layout.Hold::on).toList(),
