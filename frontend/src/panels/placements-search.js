@@ -1,4 +1,6 @@
 // @ts-check
+import { scoreWords } from './placement-facts.js';
+
 /**
  * Starting, following and stopping a search. Everything known of it is in `state.search`.
  *
@@ -99,7 +101,7 @@ function follow(store, shell, id) {
       const count = result.placements.length;
       shell.say(
         count
-          ? `Search done: ${count} placements, the best ${result.placements[0].score.toFixed(1)} decibels over the reference.`
+          ? `Search done: ${count} placement${count === 1 ? '' : 's'}, the best ${scoreWords(result.placements[0].score)}.`
           : 'Search done: no placement is allowed.',
       );
     },

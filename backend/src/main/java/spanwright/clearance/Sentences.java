@@ -34,9 +34,9 @@ final class Sentences {
           say(
               "%s: its foot is %.2f m from %s; its height and the kept distance make %.2f m.",
               first(c.what()), d, name, r);
-      case "headroom" -> say("%s hangs %.2f m above the ground; %.2f m is the least.", ours, d, r);
+      case "headroom" -> say("%s hangs %s; %.2f m is the least.", ours, height(d), r);
       case "zone-headroom" ->
-          say("%s passes %.2f m above the ground in %s; %.2f m is the least.", ours, d, name, r);
+          say("%s passes %s in %s; %.2f m is the least.", ours, height(d), name, r);
       case "people" ->
           d < 0
               ? say("%s comes into %s, where people are.", ours, name)
@@ -60,5 +60,11 @@ final class Sentences {
                   ? say("%s would touch %s; %.2f m must be kept.", ours, name, r)
                   : say("%s comes within %.2f m of %s; %.2f m must be kept.", ours, d, name, r);
     };
+  }
+
+  private static String height(double above) {
+    return above < 0
+        ? say("%.2f m below the ground", -above)
+        : say("%.2f m above the ground", above);
   }
 }
