@@ -128,19 +128,20 @@ final class Rows {
   }
 
   /**
-   * The middle of the windows of the targets that have a bearing, by weight; 45 degrees when none
-   * has.
+   * The middle of the scored window of the target that weighs most on the band; 45 degrees where
+   * none counts.
    */
   private static double roseElevation(List<Row.Look> looks) {
-    double sum = 0;
-    double weights = 0;
+    Row.Look heaviest = null;
     for (Row.Look look : looks) {
-      if (look.bearing() != null) {
-        Window window = look.windows().scored();
-        sum += look.target().weight() * (window.fromDegrees() + window.toDegrees()) / 2;
-        weights += look.target().weight();
+      if (heaviest == null || look.target().weight() > heaviest.target().weight()) {
+        heaviest = look;
       }
     }
-    return weights > 0 ? Rounded.tenth(sum / weights) : 45;
+    if (heaviest == null) {
+      return 45;
+    }
+    Window window = heaviest.windows().scored();
+    return Rounded.tenth((window.fromDegrees() + window.toDegrees()) / 2);
   }
 }
