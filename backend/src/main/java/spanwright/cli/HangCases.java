@@ -34,7 +34,7 @@ final class HangCases {
             form.number("pull", SMALLEST, 1e6, "N"),
             form.word(
                 "held", Map.of("weight", HangCase.Held.WEIGHT, "tied", HangCase.Held.TIED), null),
-            form.number("wind", 0, 150, "m/s", null),
+            form.number("wind", 0, 100, "m/s", null),
             form.number("drag", 0, 10, "", null),
             form.number("air", 0, 10, "kg/m³", null));
     form.finish();
@@ -46,7 +46,7 @@ final class HangCases {
         new HangCase.Wire(
             form.number("weight", SMALLEST, 100, "kg/m"),
             form.number("diameter", 0, 1, "m"),
-            form.number("stiffness", SMALLEST, 1e12, "N", null));
+            form.number("stiffness", 1e-3, 1e12, "N", null));
     form.finish();
     return wire;
   }
