@@ -2,11 +2,13 @@ package spanwright.search;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.locationtech.jts.algorithm.Distance;
 import org.locationtech.jts.algorithm.locate.IndexedPointInAreaLocator;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.GeometryFactory;
 import org.locationtech.jts.geom.Location;
 import org.locationtech.jts.geom.Polygon;
+import spanwright.plan.BoundaryRule;
 import spanwright.plan.Canopy;
 import spanwright.plan.GroundSurface;
 import spanwright.plan.Place;
@@ -29,6 +31,7 @@ final class WireRoom {
 
   private record Crown(double x, double y, double radius, double from, double to) {}
 
+  private final Plan plan;
   private final IndexedPointInAreaLocator inside;
   private final List<IndexedPointInAreaLocator> noWire;
   private final List<Crown> crowns;
@@ -41,6 +44,7 @@ final class WireRoom {
   }
 
   WireRoom(Plan plan, GroundSurface surface) {
+    this.plan = plan;
     inside = locator(plan.boundary());
     noWire =
         plan.zones().stream()
@@ -110,7 +114,7 @@ final class WireRoom {
 
   private boolean wireMayBe(Place a, Place b, double t) {
     Coordinate at = new Coordinate(a.x() + t * (b.x() - a.x()), a.y() + t * (b.y() - a.y()));
-    if (inside.locate(at) == Location.EXTERIOR) {
+    if (inside.locate(at) == Location.EXTERIOR && !mayHangOver(at)) {
       return false;
     }
     for (IndexedPointInAreaLocator zone : noWire) {
@@ -119,6 +123,26 @@ final class WireRoom {
       }
     }
     return !inLeaves(a, b, t, WIRE_FROM_LEAVES);
+  }
+
+  /** Whether the boundary edge next to a place outside lets wire over. */
+  private boolean mayHangOver(Coordinate at) {
+    int nearest = -1;
+    double least = Double.POSITIVE_INFINITY;
+    List<Point> corners = plan.boundary();
+    for (int i = 0; i < corners.size(); i++) {
+      Point a = corners.get(i);
+      Point b = corners.get((i + 1) % corners.size());
+      double away =
+          Distance.pointToSegment(at, new Coordinate(a.x(), a.y()), new Coordinate(b.x(), b.y()));
+      if (away < least) {
+        least = away;
+        nearest = i;
+      }
+    }
+    int edge = nearest;
+    return plan.boundaryRules().stream()
+        .anyMatch(r -> r.edge() == edge && r.overhang() == BoundaryRule.Overhang.WIRES);
   }
 
   private boolean inLeaves(Place a, Place b, double t, double margin) {
