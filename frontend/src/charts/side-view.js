@@ -14,6 +14,8 @@ import { ticks } from './scale.js';
  */
 
 const MARGIN = { left: 34, right: 12, top: 18, foot: 36 };
+/** The title has a line to itself: heights are written over the highest points. */
+const TITLE_LINE = 15;
 const LETTER = 5.3;
 /** A low wire is not blown up beyond a view this high, metres. */
 const LEAST_HEIGHT = 7;
@@ -32,7 +34,8 @@ export function sideScale(along, { width, height, ppm }) {
     ...along.buildings.flatMap((building) => building.outline),
   ].map((station) => station[1]);
   const [low, high] = [Math.min(...along.ground.map((one) => one[1]), 0), Math.max(...heights) + 0.4];
-  const room = { x: width - MARGIN.left - MARGIN.right, y: height - MARGIN.top - MARGIN.foot };
+  const top = width < ROOM_FOR_TITLE ? MARGIN.top : MARGIN.top + TITLE_LINE;
+  const room = { x: width - MARGIN.left - MARGIN.right, y: height - top - MARGIN.foot };
   const span = along.length + 5;
   const fit = Math.min(room.x / span, room.y / Math.max(high - low, LEAST_HEIGHT));
   const same = ppm <= fit && ppm * span > room.x * 0.4;
@@ -285,17 +288,7 @@ function titleBlock(options, frame, width) {
   if (width < ROOM_FOR_TITLE) return [];
   const scale = frame.same ? 'same scale as the plan' : 'heights and lengths at one scale';
   return [
-    svg('text', { class: 'side-title end halo', x: width - MARGIN.right, y: 16 }, [options.title]),
-    ...[scale, ...options.notes].map((line, index) =>
-      svg(
-        'text',
-        {
-          class: 'drawn soft end halo',
-          x: width - MARGIN.right,
-          y: 31 + index * 14,
-        },
-        [line],
-      ),
-    ),
+    svg('text', { class: 'side-title halo', x: 8, y: 15 }, [options.title]),
+    svg('text', { class: 'drawn soft end halo', x: width - MARGIN.right, y: 15 }, [[scale, ...options.notes].join('; ')]),
   ];
 }

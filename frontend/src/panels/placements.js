@@ -251,7 +251,7 @@ export function mount(root, store, shell) {
       'div',
       { class: 'search-empty' },
       html('p', {}, stateMark('foul', 'None'), html('b', {}, ' No placement is allowed on this plot as it stands.')),
-      html('p', {}, 'The refusals below say why, nearest first, each with the change that would cure it.'),
+      html('p', {}, 'The refusals below say why, and what would cure each where a change would.'),
       html(
         'p',
         {},
