@@ -1,6 +1,5 @@
 package spanwright.assess;
 
-import java.util.List;
 import spanwright.path.ReferenceVertical;
 import spanwright.plan.Band;
 import spanwright.plan.Soil;
@@ -14,11 +13,10 @@ public final class ReferenceGains {
 
   /** Gain on a band's middle frequency [dBi]. */
   public static double dbi(Band band, Soil soil, double elevationDegrees) {
-    List<Double> frequencies = band.frequencies();
     return Rounded.hundredth(
         ReferenceVertical.gainDbi(
             Math.toRadians(elevationDegrees),
-            frequencies.get(frequencies.size() / 2),
+            band.middleMHz(),
             soil.permittivity(),
             soil.conductivity()));
   }

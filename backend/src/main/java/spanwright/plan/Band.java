@@ -14,4 +14,9 @@ public record Band(String name, List<Double> frequencies, double weight, boolean
   public Band {
     frequencies = frequencies == null ? List.of() : List.copyOf(frequencies);
   }
+
+  /** The one of its frequencies that stands for the band [MHz]: the middle, of two the upper. */
+  public double middleMHz() {
+    return frequencies.get(frequencies.size() / 2);
+  }
 }

@@ -40,4 +40,15 @@ public record Place(double x, double y, double z) {
     double dz = z - other.z;
     return Math.sqrt(dx * dx + dy * dy + dz * dz);
   }
+
+  /** The place nearest to this on the straight line from one place to another. */
+  public Place nearestOn(Place a, Place b) {
+    double dx = b.x - a.x;
+    double dy = b.y - a.y;
+    double dz = b.z - a.z;
+    double square = dx * dx + dy * dy + dz * dz;
+    double along = (x - a.x) * dx + (y - a.y) * dy + (z - a.z) * dz;
+    double t = square == 0 ? 0 : Math.max(0, Math.min(1, along / square));
+    return new Place(a.x + t * dx, a.y + t * dy, a.z + t * dz);
+  }
 }

@@ -36,25 +36,15 @@ final class MastLimits {
 
   /** Highest top above the ground for a mast with its foot there [m]. */
   double highest(MastZone zone, Point at) {
-    double foot = surface.heightAt(at.x(), at.y()) + zone.base();
+    double level = surface.heightAt(at.x(), at.y()) + zone.base();
+    Place foot = new Place(at.x(), at.y(), level);
     double height = zone.highest() - zone.base();
     for (Line line : lines) {
       for (int i = 1; i < line.path.size(); i++) {
-        double distance =
-            distance(new Place(at.x(), at.y(), foot), line.path.get(i - 1), line.path.get(i));
-        height = Math.min(height, distance - line.kept - IN_HAND);
+        Place nearest = foot.nearestOn(line.path.get(i - 1), line.path.get(i));
+        height = Math.min(height, foot.distance(nearest) - line.kept - IN_HAND);
       }
     }
     return zone.base() + height;
-  }
-
-  private static double distance(Place p, Place a, Place b) {
-    double dx = b.x() - a.x();
-    double dy = b.y() - a.y();
-    double dz = b.z() - a.z();
-    double square = dx * dx + dy * dy + dz * dz;
-    double along = (p.x() - a.x()) * dx + (p.y() - a.y()) * dy + (p.z() - a.z()) * dz;
-    double t = square == 0 ? 0 : Math.max(0, Math.min(1, along / square));
-    return p.distance(new Place(a.x() + t * dx, a.y() + t * dy, a.z() + t * dz));
   }
 }
