@@ -2,6 +2,7 @@ package spanwright.assess;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import spanwright.moments.AntennaModel;
 import spanwright.moments.Sheath;
@@ -67,7 +68,7 @@ final class Antennas {
             match -> {
               int index = Integer.parseInt(match.group(1)) - rigged.conductors().size();
               String name = index < 0 ? "The wire" : metal.names().get(index);
-              return java.util.regex.Matcher.quoteReplacement(name);
+              return Matcher.quoteReplacement(name);
             });
   }
 

@@ -211,7 +211,8 @@ public final class Assessor {
     for (int i = 0; i < wanted.size(); i++) {
       Row row = wanted.get(i);
       Solution solution = solutions.get(i);
-      FeedResult feed = station.run(line, length, row.frequencyMHz(), solution.impedance());
+      FeedResult feed =
+          station.run(line, length, row.band(), row.frequencyMHz(), solution.impedance());
       results.add(radio.row(row, solution, feed, full));
       for (String warning : solution.warnings()) {
         String named = antennas.named(warning, hung.rigged());
@@ -233,7 +234,7 @@ public final class Assessor {
       Row row = wanted.get(i);
       if (row.middle() && !row.band().receiveOnly()) {
         Complex z = solutions.get(i).impedance();
-        loads.add(new Station.Load(row.frequencyMHz(), z, row.band().weight()));
+        loads.add(new Station.Load(row.band(), row.frequencyMHz(), z));
       }
     }
     return station.bestLength(line, hung.rigged().feedLine().runLength(), loads);

@@ -218,7 +218,7 @@ public record Placement(
   /**
    * What the matching unit makes of the load at the station.
    *
-   * @param state clear, tight or foul
+   * @param state clear, tight or foul: the worse of the unit's and of what the line's volts make it
    * @param why the reason in words
    * @param lossDb in the unit
    * @param peakVolts on its parts at full power

@@ -33,7 +33,7 @@ final class Radio {
   Placement.BandResult row(Row row, Solution solution, FeedResult feed, boolean withDrawings) {
     Peak peak = solution.peak();
     Complex z = solution.impedance();
-    double losses = finite(feed.lossDb(), MOST_LOSS_DB) + matchingLoss(feed.matching());
+    double losses = finite(feed.lossDb(), MOST_LOSS_DB) + unitLoss(feed.matching());
     List<Placement.TargetResult> targets =
         row.looks().stream().map(look -> target(look, solution, losses)).toList();
     boolean drawn = withDrawings && row.middle();
@@ -44,7 +44,7 @@ final class Radio {
         Rounded.hundredth(finite(feed.lineSwr(), MOST)),
         Rounded.thousandth(finite(feed.lossDb(), MOST_LOSS_DB)),
         pair(feed.atStation()),
-        matching(feed.matching()),
+        matching(feed),
         Rounded.hundredth(peak.dbi()),
         Rounded.tenth(Math.toDegrees(peak.elevation())),
         Rounded.tenth(bearing(peak.azimuth())) % 360,
@@ -75,19 +75,18 @@ final class Radio {
     return value < most ? value : most;
   }
 
-  private static double matchingLoss(Match match) {
-    return match == null ? 0 : finite(match.lossDb(), MOST_LOSS_DB);
+  private static double unitLoss(Match match) {
+    return finite(match.lossDb(), MOST_LOSS_DB);
   }
 
-  private static Placement.Matching matching(Match match) {
-    if (match == null) {
-      return new Placement.Matching(State.FOUL, "there is no matching unit", 0, 0, null, null);
-    }
+  private static Placement.Matching matching(FeedResult feed) {
+    Match match = feed.matching();
     Match.Settings settings = match.settings();
+    State state = Station.state(feed);
     return new Placement.Matching(
-        Station.state(match.state()),
-        match.why(),
-        Rounded.thousandth(matchingLoss(match)),
+        state,
+        state == Station.state(match.state()) ? match.why() : feed.lineWhy(),
+        Rounded.thousandth(unitLoss(match)),
         Rounded.tenth(finite(match.peakVolts(), MOST)),
         settings == null ? null : settings.inductance(),
         settings == null ? null : settings.capacitance());

@@ -37,7 +37,8 @@ record Row(
    * @param windows take-off windows
    * @param directions the scored window's directions in the solver's frame
    * @param referenceDbi of the reference vertical, averaged over the same window
-   * @param profile directions from horizon to zenith, on the middle frequency only, else null
+   * @param profile directions from horizon to zenith; null without a bearing and on other than the
+   *     middle frequency
    */
   record Look(
       Target target,

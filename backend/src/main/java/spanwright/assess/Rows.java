@@ -90,7 +90,7 @@ final class Rows {
         windows,
         directions(scored, bearing),
         ReferenceVertical.meanDbi(scored, frequencyMHz, soil.permittivity(), soil.conductivity()),
-        middle ? profile(bearing == null ? 0 : bearing) : null);
+        middle && bearing != null ? profile(bearing) : null);
   }
 
   /** The solver's azimuths run from the plan's +y, whose true bearing is planNorth. */

@@ -78,23 +78,27 @@ final class Scoring {
     double weights = 0;
     for (Band band : brief.bands()) {
       List<Placement.BandResult> own = rowsOf(band, rows);
-      for (Target target : brief.targets()) {
-        if (!target.countsOn(band) || own.isEmpty()) {
-          continue;
-        }
-        double weight = band.weight() * target.weight();
-        double over =
-            own.stream()
-                .flatMap(row -> row.targets().stream())
-                .filter(result -> result.name().equals(target.name()))
-                .mapToDouble(result -> result.deliveredDbi() - result.referenceDbi())
-                .average()
-                .orElse(0);
-        sum += weight * over;
+      List<Target> targets = brief.targets().stream().filter(t -> t.countsOn(band)).toList();
+      for (int t = 0; t < targets.size() && !own.isEmpty(); t++) {
+        double weight = band.weight() * targets.get(t).weight();
+        sum += weight * overReference(own, t);
         weights += weight;
       }
     }
     return weights == 0 ? 0 : sum / weights;
+  }
+
+  /**
+   * Mean over a band's rows of what a target gets above the reference [dB]. Taken by the target's
+   * place among those that count there: two may have one name.
+   */
+  private static double overReference(List<Placement.BandResult> rows, int target) {
+    double sum = 0;
+    for (Placement.BandResult row : rows) {
+      Placement.TargetResult result = row.targets().get(target);
+      sum += result.deliveredDbi() - result.referenceDbi();
+    }
+    return sum / rows.size();
   }
 
   private void addMatching(List<Placement.BandResult> rows, List<Placement.ScorePart> parts) {

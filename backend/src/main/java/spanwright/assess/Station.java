@@ -9,6 +9,7 @@ import spanwright.feed.FeedResult;
 import spanwright.feed.Line;
 import spanwright.feed.MatchingNetwork;
 import spanwright.feed.Verdict;
+import spanwright.plan.Band;
 import spanwright.plan.Catalogue;
 import spanwright.plan.LineKind;
 import spanwright.plan.LineLengths;
@@ -43,11 +44,11 @@ final class Station {
   /**
    * A load that a line length is chosen for.
    *
+   * @param band it is on
    * @param frequencyMHz of the load
    * @param impedance ohm
-   * @param weight of the band
    */
-  record Load(double frequencyMHz, Complex impedance, double weight) {}
+  record Load(Band band, double frequencyMHz, Complex impedance) {}
 
   private static MatchingNetwork network(MatchingUnit unit) {
     if (unit.network() == MatchingUnit.Network.BALUN) {
@@ -73,9 +74,10 @@ final class Station {
         .withPeakVolts(kind.peakVolts());
   }
 
-  FeedResult run(String lineId, double length, double frequencyMHz, Complex load) {
-    return FeedChain.run(
-        passive(load), frequencyMHz, line(lineId), length, unit, plan.brief().power());
+  /** The way to the socket of a band; one that is only heard carries no power. */
+  FeedResult run(String lineId, double length, Band band, double frequencyMHz, Complex load) {
+    double power = band.receiveOnly() ? 0 : plan.brief().power();
+    return FeedChain.run(passive(load), frequencyMHz, line(lineId), length, unit, power);
   }
 
   /** A feedpoint takes power; rounding may not say otherwise. */
@@ -93,7 +95,8 @@ final class Station {
     for (double length : lengths(shortest)) {
       double cost = 0;
       for (Load load : loads) {
-        cost += load.weight() * cost(run(lineId, length, load.frequencyMHz(), load.impedance()));
+        FeedResult result = run(lineId, length, load.band(), load.frequencyMHz(), load.impedance());
+        cost += load.band().weight() * cost(result);
       }
       if (cost < least - 1e-6) {
         least = cost;
@@ -104,14 +107,9 @@ final class Station {
   }
 
   private static double cost(FeedResult result) {
-    double loss = Math.min(60, result.lossDb());
-    if (result.matching() == null) {
-      return loss;
-    }
-    double matching = Math.min(60, result.matching().lossDb());
-    return loss
-        + matching
-        + switch (result.matching().state()) {
+    return Math.min(60, result.lossDb())
+        + Math.min(60, result.matching().lossDb())
+        + switch (state(result)) {
           case CLEAR -> 0;
           case TIGHT -> TIGHT_COSTS;
           case FOUL -> FOUL_COSTS;
@@ -130,6 +128,11 @@ final class Station {
       }
     }
     return lengths.isEmpty() ? List.of(shortest) : lengths;
+  }
+
+  /** The worse of what the matching unit makes of the load and what the volts do to the line. */
+  static State state(FeedResult result) {
+    return state(result.matching().state()).worse(state(result.lineState()));
   }
 
   static State state(Verdict verdict) {
