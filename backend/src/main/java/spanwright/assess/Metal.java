@@ -24,25 +24,32 @@ final class Metal {
   private static final double TOUCH = 0.02;
 
   private static final double SAME = 1e-6;
+  private static final int MOST_PASSES = 4;
 
   private record Piece(String name, List<Place> path, double radius) {}
 
   private final List<Piece> pieces;
+  private final GroundSurface surface;
 
-  private Metal(List<Piece> pieces) {
+  private Metal(List<Piece> pieces, GroundSurface surface) {
     this.pieces = pieces;
+    this.surface = surface;
   }
 
   static Metal of(Plan plan, GroundSurface surface) {
     List<Piece> raised = new ArrayList<>();
     for (Metalwork metal : plan.metalwork()) {
-      List<Place> path = withoutRepeats(surface.raise(metal.path()));
+      List<Place> path = withoutRepeats(surface.raise(offTheGround(metal.path())));
       if (path.size() > 1) {
         String name = metal.name() == null ? metal.id() : metal.name();
         raised.add(new Piece(name, path, metal.radius()));
       }
     }
-    return new Metal(parted(raised));
+    return new Metal(parted(raised), surface);
+  }
+
+  private static List<Place> offTheGround(List<Place> path) {
+    return path.stream().map(p -> new Place(p.x(), p.y(), Math.max(LEAST_HEIGHT, p.z()))).toList();
   }
 
   boolean isEmpty() {
@@ -54,15 +61,6 @@ final class Metal {
     return pieces.stream().map(Piece::name).toList();
   }
 
-  /** Highest point above the plan's zero [m]. */
-  double highest() {
-    return pieces.stream()
-        .flatMap(piece -> piece.path.stream())
-        .mapToDouble(Place::z)
-        .max()
-        .orElse(0);
-  }
-
   /** As conductors over a ground plane at a height above the plan's zero [m]. */
   List<WireSpec> over(double plane) {
     return pieces.stream()
@@ -70,11 +68,22 @@ final class Metal {
             piece ->
                 WireSpec.of(
                     piece.path.stream()
-                        .map(p -> new Vertex(p.x(), p.y(), Math.max(LEAST_HEIGHT, p.z() - plane)))
+                        .map(p -> new Vertex(p.x(), p.y(), height(p, plane)))
                         .toList(),
                     piece.radius,
                     CONDUCTIVITY))
         .toList();
+  }
+
+  /**
+   * Height over the plane. Metal on ground that lies lower than the plane would come under it:
+   * there it keeps half its height above its own ground at least, so that no two pieces fall
+   * together.
+   */
+  private double height(Place p, double plane) {
+    double aboveGround = p.z() - surface.heightAt(p.x(), p.y());
+    double least = LEAST_HEIGHT + Math.max(0, aboveGround - LEAST_HEIGHT) / 2;
+    return Math.max(least, p.z() - plane);
   }
 
   private static List<Place> withoutRepeats(List<Place> path) {
@@ -93,29 +102,40 @@ final class Metal {
     raised.forEach(piece -> paths.add(new ArrayList<>(piece.path)));
     List<List<Place>> cuts = new ArrayList<>();
     raised.forEach(piece -> cuts.add(new ArrayList<>()));
-    for (int i = 0; i < paths.size(); i++) {
-      for (int j = 0; j < paths.size(); j++) {
-        if (i != j) {
-          join(paths.get(i), 0, paths.get(j), cuts.get(j));
-          join(paths.get(i), paths.get(i).size() - 1, paths.get(j), cuts.get(j));
-        }
-      }
+    // An end drawn onto one piece may leave another that touches it: then that follows.
+    boolean moved = true;
+    for (int pass = 0; pass < MOST_PASSES && moved; pass++) {
+      moved = joinAll(paths, cuts);
     }
     List<Piece> parts = new ArrayList<>();
     for (int i = 0; i < paths.size(); i++) {
-      for (List<Place> part : split(paths.get(i), cuts.get(i))) {
+      for (List<Place> part : split(withoutRepeats(paths.get(i)), cuts.get(i))) {
         parts.add(new Piece(raised.get(i).name, part, raised.get(i).radius));
       }
     }
     return parts;
   }
 
-  private static void join(List<Place> path, int end, List<Place> other, List<Place> cuts) {
+  private static boolean joinAll(List<List<Place>> paths, List<List<Place>> cuts) {
+    boolean moved = false;
+    for (int i = 0; i < paths.size(); i++) {
+      for (int j = 0; j < paths.size(); j++) {
+        if (i != j) {
+          moved |= join(paths.get(i), 0, paths.get(j), cuts.get(j));
+          moved |= join(paths.get(i), paths.get(i).size() - 1, paths.get(j), cuts.get(j));
+        }
+      }
+    }
+    return moved;
+  }
+
+  /** Whether the end had to be moved to lie on the other piece. */
+  private static boolean join(List<Place> path, int end, List<Place> other, List<Place> cuts) {
     Place tip = path.get(end);
     for (int s = 1; s < other.size(); s++) {
       Place a = other.get(s - 1);
       Place b = other.get(s);
-      Place nearest = nearest(a, b, tip);
+      Place nearest = tip.nearestOn(a, b);
       if (nearest.distance(tip) > TOUCH) {
         continue;
       }
@@ -127,18 +147,9 @@ final class Metal {
         other.add(s, joint);
       }
       cuts.add(joint);
-      return;
+      return joint.distance(tip) > SAME;
     }
-  }
-
-  private static Place nearest(Place a, Place b, Place p) {
-    double dx = b.x() - a.x();
-    double dy = b.y() - a.y();
-    double dz = b.z() - a.z();
-    double square = dx * dx + dy * dy + dz * dz;
-    double along = (p.x() - a.x()) * dx + (p.y() - a.y()) * dy + (p.z() - a.z()) * dz;
-    double t = Math.max(0, Math.min(1, along / square));
-    return new Place(a.x() + t * dx, a.y() + t * dy, a.z() + t * dz);
+    return false;
   }
 
   private static List<List<Place>> split(List<Place> path, List<Place> cuts) {
