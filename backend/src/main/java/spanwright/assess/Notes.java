@@ -3,15 +3,20 @@ package spanwright.assess;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.geom.GeometryFactory;
+import org.locationtech.jts.geom.LineString;
 import spanwright.plan.Building;
 import spanwright.plan.NoisePoint;
-import spanwright.plan.Place;
 import spanwright.plan.Plan;
 import spanwright.plan.Point;
 import spanwright.rigging.Rigged;
 
 /** What is worth saying about a placement beside its figures, as sentences. */
 final class Notes {
+  private static final GeometryFactory GEOMETRY = new GeometryFactory();
+
   /** Metal roofs nearer than this in plan are warned about [m]. */
   private static final double METAL_ROOF_NEAR = 10;
 
@@ -60,63 +65,57 @@ final class Notes {
   }
 
   private void addMetalRoofs(Rigged rigged, List<String> notes) {
+    Geometry wire = inPlan(rigged);
     for (Building building : plan.buildings()) {
-      double distance = building.metalRoof() ? distance(rigged, building.footprint()) : 1e9;
+      if (!building.metalRoof()) {
+        continue;
+      }
+      double distance = wire.distance(outline(building.footprint()));
       if (distance < METAL_ROOF_NEAR) {
         notes.add(
             String.format(
                 Locale.ROOT,
-                "The metal roof of %s is %s of the wire in plan; it is not in the radio figures.",
+                "The metal roof of %s is %s; it is not in the radio figures.",
                 name(building.name(), building.id()),
                 distance < 0.05
-                    ? "within reach"
-                    : String.format(Locale.ROOT, "within %.1f m", distance)));
+                    ? "under the wire"
+                    : String.format(Locale.ROOT, "within %.1f m of the wire in plan", distance)));
       }
     }
-  }
-
-  private static double distance(Rigged rigged, List<Point> outline) {
-    double least = Double.POSITIVE_INFINITY;
-    for (Rigged.Conductor conductor : rigged.conductors()) {
-      for (Place place : conductor.shapes().calm()) {
-        for (int i = 0; i < outline.size(); i++) {
-          Point a = outline.get(i);
-          Point b = outline.get((i + 1) % outline.size());
-          least = Math.min(least, distance(place.onPlan(), a, b));
-        }
-      }
-    }
-    return least;
-  }
-
-  private static double distance(Point p, Point a, Point b) {
-    double dx = b.x() - a.x();
-    double dy = b.y() - a.y();
-    double square = dx * dx + dy * dy;
-    double t =
-        square == 0
-            ? 0
-            : Math.max(0, Math.min(1, ((p.x() - a.x()) * dx + (p.y() - a.y()) * dy) / square));
-    return p.distance(new Point(a.x() + t * dx, a.y() + t * dy));
   }
 
   private void addNoise(Rigged rigged, List<String> notes) {
+    Geometry wire = inPlan(rigged);
     for (NoisePoint noise : plan.noise()) {
-      double least = Double.POSITIVE_INFINITY;
-      for (Rigged.Conductor conductor : rigged.conductors()) {
-        for (Place place : conductor.shapes().calm()) {
-          least = Math.min(least, place.onPlan().distance(noise.at()));
-        }
-      }
-      if (least < NOISE_NEAR) {
+      double distance = wire.distance(GEOMETRY.createPoint(coordinate(noise.at())));
+      if (distance < NOISE_NEAR) {
         notes.add(
             String.format(
                 Locale.ROOT,
                 "The wire passes %.1f m in plan from %s.",
-                least,
+                distance,
                 name(noise.name(), noise.id())));
       }
     }
+  }
+
+  private static Geometry inPlan(Rigged rigged) {
+    return GEOMETRY.createMultiLineString(
+        rigged.conductors().stream()
+            .map(conductor -> conductor.shapes().calm())
+            .map(points -> points.stream().map(p -> coordinate(p.onPlan())))
+            .map(points -> GEOMETRY.createLineString(points.toArray(Coordinate[]::new)))
+            .toArray(LineString[]::new));
+  }
+
+  private static Geometry outline(List<Point> corners) {
+    List<Point> ring = new ArrayList<>(corners);
+    ring.add(corners.get(0));
+    return GEOMETRY.createPolygon(ring.stream().map(Notes::coordinate).toArray(Coordinate[]::new));
+  }
+
+  private static Coordinate coordinate(Point point) {
+    return new Coordinate(point.x(), point.y());
   }
 
   private static String name(String name, String id) {
