@@ -3,6 +3,7 @@ package spanwright.rigging;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import spanwright.plan.LineLengths;
 import spanwright.plan.Place;
 import spanwright.plan.Point;
 
@@ -259,6 +260,26 @@ final class Shortcomings {
 
   private void line() {
     Rigged.FeedLine line = rigged.feedLine();
+    LineLengths atHand = rigging.plan.brief().lineLengths();
+    boolean proposed = rigged.layout().feed().lineLength() == null && !atHand.isFree();
+    double longest = atHand.lengths().stream().mapToDouble(l -> l).max().orElse(0);
+    if (proposed && longest < line.runLength() - ROUNDING) {
+      add(
+          "hangs",
+          "entry",
+          "feed line",
+          line.feedpoint(),
+          longest,
+          line.runLength(),
+          say(
+              "No feed line at hand reaches: the longest is %.1f m, the way to the entry takes"
+                  + " %.1f m.",
+              longest, line.runLength()),
+          say(
+              "Add a length of at least %.1f m to the brief's line lengths.",
+              Math.ceil(line.runLength() * 10) / 10));
+      return;
+    }
     if (line.length() < line.runLength() - ROUNDING) {
       add(
           "hangs",
