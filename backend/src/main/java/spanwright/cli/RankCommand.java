@@ -83,9 +83,12 @@ final class RankCommand implements Callable<Integer> {
           .err()
           .println(
               planFile
-                  + ": no placement is allowed on this plan. The result lists "
-                  + result.refusals().size()
-                  + " refusals, each with its cure where there is one.");
+                  + (result.refusals().isEmpty()
+                      ? ": no two places to hold a wire are far enough apart for one. Add a support,"
+                          + " a bracket line or a mast zone, or allow new masts in the brief."
+                      : ": no placement is allowed on this plan. The result lists "
+                          + result.refusals().size()
+                          + " refusals, each with its cure where there is one."));
       return Exit.NOTHING_FEASIBLE;
     }
     return Exit.DONE;

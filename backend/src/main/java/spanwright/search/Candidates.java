@@ -22,6 +22,11 @@ final class Candidates {
   private static final double OFF_CENTRE = 0.34;
   private static final double LEAST_LEG = 2.0;
 
+  /** Ideas kept at most before the best are taken. */
+  private static final int MOST_IDEAS = 200_000;
+
+  private static final int MOST_BARRED = 30;
+
   private final Plan plan;
   private final List<HoldSite> sites;
   private final WireRoom room;
@@ -33,7 +38,16 @@ final class Candidates {
   private final String line;
 
   /** Holding points at their heights, before the wire is fitted between them. */
-  private record Idea(List<HoldSite> sites, List<Place> at, double promise, String family) {}
+  private record Idea(Shape shape, List<HoldSite> sites, List<Place> at, double promise) {
+    /** What it hangs on. */
+    String on() {
+      return String.join("+", sites.stream().map(HoldSite::on).toList());
+    }
+
+    String family() {
+      return ShapeWord.of(shape) + ":" + on();
+    }
+  }
 
   Candidates(
       Plan plan,
@@ -55,10 +69,15 @@ final class Candidates {
     this.line = line;
   }
 
-  /** Every layout worth checking, best promise first within what the effort allows. */
+  /**
+   * Every layout worth checking, best promise first within what the effort allows. Where nothing
+   * leaves room for wire, the best ideas as if they did: so that a reader learns what is in the
+   * way.
+   */
   List<Candidate> list() {
+    List<Idea> ideas = byFamily(ideas(), effort.considered);
     List<Candidate> made = new ArrayList<>();
-    for (Idea idea : byFamily(ideas(), effort.considered)) {
+    for (Idea idea : ideas) {
       if (made.size() >= effort.considered) {
         break;
       }
@@ -67,6 +86,9 @@ final class Candidates {
       } else {
         addLegs(idea, made);
       }
+    }
+    if (made.isEmpty()) {
+      ideas.stream().limit(MOST_BARRED).forEach(idea -> addBarred(idea, made));
     }
     return made;
   }
@@ -79,14 +101,24 @@ final class Candidates {
           addPairs(sites.get(i), sites.get(j), ideas);
         }
       }
+      bound(ideas);
     }
     if (shapes.contains(Shape.APEX) || shapes.contains(Shape.BENT)) {
       List<HoldSite> ends = ends();
       for (HoldSite middle : middles()) {
         addTriples(middle, ends, ideas);
+        bound(ideas);
       }
     }
     return ideas;
+  }
+
+  /** Lets go of the less promising when there are far too many, so that memory stays bounded. */
+  private static void bound(List<Idea> ideas) {
+    if (ideas.size() > 2 * MOST_IDEAS) {
+      ideas.sort(Comparator.comparingDouble((Idea idea) -> -idea.promise));
+      ideas.subList(MOST_IDEAS, ideas.size()).clear();
+    }
   }
 
   private boolean mayPair(HoldSite a, HoldSite b) {
@@ -125,7 +157,7 @@ final class Candidates {
       List<Place> at = List.of(place(a, za), place(b, zb));
       double span = at.get(0).distance(at.get(1));
       double worth = promise.of(at, span - 2 * WireRoom.LEAST_TAIL, plan.site().planNorth());
-      ideas.add(new Idea(List.of(a, b), at, worth, shape + ":" + a.on() + "+" + b.on()));
+      ideas.add(new Idea(shape, List.of(a, b), at, worth));
     }
   }
 
@@ -199,8 +231,7 @@ final class Candidates {
       List<Place> at = List.of(place(a, za), place(middle, zm), place(b, zb));
       double span = at.get(0).distance(at.get(1)) + at.get(1).distance(at.get(2));
       double worth = promise.of(at, span - 2 * WireRoom.LEAST_TAIL, plan.site().planNorth());
-      String family = shape + ":" + a.on() + "+" + middle.on() + "+" + b.on();
-      ideas.add(new Idea(List.of(a, middle, b), at, worth, family));
+      ideas.add(new Idea(shape, List.of(a, middle, b), at, worth));
     }
   }
 
@@ -227,18 +258,37 @@ final class Candidates {
     Place b = idea.at.get(1);
     WireRoom.Room free = room.along(a, b, WireRoom.LEAST_TAIL, WireRoom.LEAST_TAIL);
     double span = a.distance(b);
-    Shape shape = Math.abs(a.z() - b.z()) <= LEVEL_WITHIN ? Shape.LEVEL : Shape.SLOPING;
     for (double length : lengths.in(free.length())) {
       double start = free.from() + (free.length() - length) / 2;
       List<Place> wirePoints =
           List.of(between(a, b, start / span), between(a, b, (start + length) / span));
-      if (shapes.contains(shape)) {
-        made.add(candidate(idea, shape, wirePoints, length, 0.5, made.size()));
+      if (shapes.contains(idea.shape)) {
+        made.add(candidate(idea, idea.shape, wirePoints, length, 0.5, made.size()));
       }
       if (shapes.contains(Shape.OFF_CENTRE)) {
         made.add(candidate(idea, Shape.OFF_CENTRE, wirePoints, length, OFF_CENTRE, made.size()));
       }
     }
+  }
+
+  /** Wire all the way, but for the ropes at its ends. */
+  private void addBarred(Idea idea, List<Candidate> made) {
+    List<Place> points = new ArrayList<>(idea.at);
+    int last = points.size() - 1;
+    double first = points.get(0).distance(points.get(1));
+    double end = points.get(last - 1).distance(points.get(last));
+    points.set(0, between(idea.at.get(0), idea.at.get(1), WireRoom.LEAST_TAIL / first));
+    points.set(last, between(idea.at.get(last), idea.at.get(last - 1), WireRoom.LEAST_TAIL / end));
+    double length = first - WireRoom.LEAST_TAIL;
+    double fraction = 0.5;
+    if (last == 1) {
+      length -= WireRoom.LEAST_TAIL;
+    } else {
+      double leg = length;
+      length += end - WireRoom.LEAST_TAIL;
+      fraction = leg / length;
+    }
+    made.add(candidate(idea, idea.shape, points, length, fraction, made.size()));
   }
 
   private void addLegs(Idea idea, List<Candidate> made) {
@@ -253,28 +303,22 @@ final class Candidates {
         || roomB.length() < LEAST_LEG) {
       return;
     }
-    Shape shape = idea.family.startsWith(Shape.APEX.name()) ? Shape.APEX : Shape.BENT;
     Set<Double> tried = new HashSet<>();
     for (double length : lengths.in(roomA.length() + roomB.length())) {
       // Legs as equal as the room allows.
       double legA = Math.min(roomA.length(), Math.max(length / 2, length - roomB.length()));
       double legB = Math.min(roomB.length(), length - legA);
-      addLegPair(idea, shape, a, middle, b, legA, legB, tried, made);
+      addLegPair(idea, legA, legB, tried, made);
     }
     double equal = Math.min(roomA.length(), roomB.length());
-    addLegPair(idea, shape, a, middle, b, equal, equal, tried, made);
+    addLegPair(idea, equal, equal, tried, made);
   }
 
   private void addLegPair(
-      Idea idea,
-      Shape shape,
-      Place a,
-      Place middle,
-      Place b,
-      double legA,
-      double legB,
-      Set<Double> tried,
-      List<Candidate> made) {
+      Idea idea, double legA, double legB, Set<Double> tried, List<Candidate> made) {
+    Place a = idea.at.get(0);
+    Place middle = idea.at.get(1);
+    Place b = idea.at.get(2);
     double length = legA + legB;
     boolean fits = legA >= LEAST_LEG && legB >= LEAST_LEG && length >= lengths.least();
     if (!fits || !tried.add((double) Math.round(20 * length))) {
@@ -285,7 +329,7 @@ final class Candidates {
             between(middle, a, legA / middle.distance(a)),
             middle,
             between(middle, b, legB / middle.distance(b)));
-    made.add(candidate(idea, shape, points, length, legA / length, made.size()));
+    made.add(candidate(idea, idea.shape, points, length, legA / length, made.size()));
   }
 
   private static Place between(Place a, Place b, double t) {
@@ -306,12 +350,11 @@ final class Candidates {
             holds,
             List.of(new Layout.Run(points, wire)),
             new Layout.FeedChoice(0, fraction, line, null));
-    String family = word + idea.family.substring(idea.family.indexOf(':'));
     return new Candidate(
         layout,
         masts(idea.sites),
         promise.of(points, length, plan.site().planNorth()),
-        family,
+        word + ":" + idea.on(),
         number);
   }
 }

@@ -28,6 +28,9 @@ final class HoldSites {
   /** A mast lower than this holds nothing worth hanging [m]. */
   private static final double LEAST_MAST = 2.6;
 
+  /** Places kept at most: four times what the richest demo plot has. */
+  private static final int MOST = 300;
+
   private final Plan plan;
   private final GroundSurface surface;
   private final Effort effort;
@@ -67,11 +70,23 @@ final class HoldSites {
     if (plan.brief().newMasts() > 0) {
       plan.mastZones().forEach(zone -> sites.addMasts(zone, all));
     }
-    return all;
+    return thinned(all);
+  }
+
+  /** Every so many-th where there are more than can be paired, so that memory stays bounded. */
+  private static List<HoldSite> thinned(List<HoldSite> all) {
+    if (all.size() <= MOST) {
+      return all;
+    }
+    List<HoldSite> kept = new ArrayList<>();
+    for (int i = 0; i < MOST; i++) {
+      kept.add(all.get((int) ((long) i * all.size() / MOST)));
+    }
+    return kept;
   }
 
   private void addSupport(Support support, List<HoldSite> all) {
-    if (support.pullLimit() != null && support.pullLimit() <= 0) {
+    if (neverPulls(support.pullLimit())) {
       return;
     }
     boolean crowned = support.canopy() != null;
@@ -88,7 +103,15 @@ final class HoldSites {
             crowned));
   }
 
+  /** A limit of 0 means: never use it. */
+  private static boolean neverPulls(Double pullLimit) {
+    return pullLimit != null && pullLimit <= 0;
+  }
+
   private void addBrackets(BracketLine line, List<HoldSite> all) {
+    if (neverPulls(line.pullLimit())) {
+      return;
+    }
     double length = 0;
     for (int i = 1; i < line.path().size(); i++) {
       length += line.path().get(i).distance(line.path().get(i - 1));
@@ -126,26 +149,32 @@ final class HoldSites {
   }
 
   private void addMasts(MastZone zone, List<HoldSite> all) {
-    for (Point at : placesIn(zone)) {
-      double top = Math.min(zone.highest(), mastLimit.applyAsDouble(new MastFoot(zone, at)));
-      double lowest = zone.base() + LEAST_MAST;
-      if (top < lowest) {
-        continue;
-      }
-      List<Double> steps =
-          zone.consents().stream().map(Consent::highest).filter(h -> h > lowest).toList();
-      all.add(
-          new HoldSite(
-              zone.id(),
-              at,
-              surface.heightAt(at.x(), at.y()),
-              lowest,
-              top,
-              spread(lowest, top, steps),
-              true,
-              true,
-              false));
+    if (neverPulls(zone.pullLimit())) {
+      return;
     }
+    double lowest = zone.base() + LEAST_MAST;
+    List<Point> places = placesIn(zone);
+    boolean any = false;
+    for (Point at : places) {
+      double top = Math.min(zone.highest(), mastLimit.applyAsDouble(new MastFoot(zone, at)));
+      if (top >= lowest) {
+        List<Double> steps =
+            zone.consents().stream().map(Consent::highest).filter(h -> h > lowest).toList();
+        all.add(mast(zone, at, top, spread(lowest, top, steps)));
+        any = true;
+      }
+    }
+    if (!any && zone.highest() >= lowest && !places.isEmpty()) {
+      // An overhead line is too near for any mast here: one is proposed so that it is refused
+      // aloud.
+      all.add(mast(zone, places.get(0), zone.highest(), List.of(zone.highest())));
+    }
+  }
+
+  private HoldSite mast(MastZone zone, Point at, double top, List<Double> heights) {
+    double ground = surface.heightAt(at.x(), at.y());
+    double lowest = zone.base() + LEAST_MAST;
+    return new HoldSite(zone.id(), at, ground, lowest, top, heights, true, true, false);
   }
 
   /** The highest height, every consent step below it, and as many between as the effort allows. */

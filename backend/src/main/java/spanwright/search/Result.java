@@ -42,8 +42,8 @@ public record Result(
    * What was done.
    *
    * @param considered layouts made
-   * @param refused by a rule
-   * @param screened dropped by screening or the coarse solve
+   * @param refused by a rule, or not to be hung at all
+   * @param screened left aside for others of more promise, before hanging or after a coarse look
    * @param solved assessed in full
    * @param systems matrices filled and factored
    * @param meanUnknowns of those matrices

@@ -10,6 +10,7 @@ import spanwright.assess.Hung;
 import spanwright.assess.Placement;
 import spanwright.assess.ReferenceGains;
 import spanwright.clearance.Refusal;
+import spanwright.moments.ModelFault;
 import spanwright.plan.Band;
 import spanwright.plan.Catalogue;
 import spanwright.plan.Place;
@@ -150,7 +151,7 @@ public final class Search {
             options.effort(),
             options.seed(),
             foot -> limits.highest(foot.zone(), foot.at()));
-    List<Double> centres = plan.brief().bands().stream().map(Search::centre).toList();
+    List<Double> centres = plan.brief().bands().stream().map(Band::middleMHz).toList();
     return new Candidates(
             plan,
             sites,
@@ -161,10 +162,6 @@ public final class Search {
             assessor.wireId(),
             assessor.lineId())
         .list();
-  }
-
-  private static double centre(Band band) {
-    return band.frequencies().get(band.frequencies().size() / 2);
   }
 
   private static List<Candidate> byPromise(List<Candidate> all, int most) {
@@ -272,17 +269,20 @@ public final class Search {
 
   private List<Placement> full(Workers workers, List<Free> free) {
     Stage stage = new Stage(0.60, 0.98, free.size(), "solving every band in full");
-    List<Placement> placements =
-        workers.map(
-            free,
-            f -> {
-              Placement placement = assessor.assess(f.hung);
-              found(placement);
-              return placement;
-            },
-            stage::tick);
-    solved = placements.size();
-    return placements;
+    return workers.map(free, f -> assessed(f.hung), stage::tick).stream()
+        .flatMap(Optional::stream)
+        .toList();
+  }
+
+  /** Empty when the field solver cannot take the shape on its full mesh: then it is left aside. */
+  private Optional<Placement> assessed(Hung hung) {
+    try {
+      Placement placement = assessor.assess(hung);
+      found(placement);
+      return Optional.of(placement);
+    } catch (ModelFault fault) {
+      return Optional.empty();
+    }
   }
 
   private synchronized void found(Placement placement) {

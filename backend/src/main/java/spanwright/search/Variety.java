@@ -15,6 +15,7 @@ final class Variety {
   private static final double NEAR_PLAN = 1.5;
   private static final double NEAR_HEIGHT = 0.8;
   private static final double NEAR_LENGTH = 0.1;
+  private static final double NEAR_FRACTION = 0.05;
 
   private Variety() {}
 
@@ -54,21 +55,30 @@ final class Variety {
   }
 
   private static boolean same(Placement a, Placement b) {
-    if (!family(a).equals(family(b))) {
+    double la = wire(a);
+    double lb = wire(b);
+    return a.shape().equals(b.shape())
+        && Math.abs(la - lb) < NEAR_LENGTH * Math.max(la, lb)
+        && (sameWay(a, b, false) || sameWay(a, b, true));
+  }
+
+  /** Whether both hang and are fed alike, the second read from its other end when so asked. */
+  private static boolean sameWay(Placement a, Placement b, boolean backwards) {
+    int count = a.attachments().size();
+    if (count != b.attachments().size()) {
       return false;
     }
-    for (int i = 0; i < a.attachments().size(); i++) {
-      var p = a.attachments().get(i).at();
-      var q = b.attachments().get(i).at();
-      if (Math.hypot(p.x() - q.x(), p.y() - q.y()) > NEAR_PLAN
-          || Math.abs(p.z() - q.z()) > NEAR_HEIGHT) {
+    for (int i = 0; i < count; i++) {
+      Placement.Attachment one = a.attachments().get(i);
+      Placement.Attachment other = b.attachments().get(backwards ? count - 1 - i : i);
+      if (!one.on().equals(other.on())
+          || one.at().onPlan().distance(other.at().onPlan()) > NEAR_PLAN
+          || Math.abs(one.at().z() - other.at().z()) > NEAR_HEIGHT) {
         return false;
       }
     }
-    double la = wire(a);
-    double lb = wire(b);
-    return Math.abs(la - lb) < NEAR_LENGTH * Math.max(la, lb)
-        && Math.abs(a.feed().fraction() - b.feed().fraction()) < 0.05;
+    double fraction = b.feed().fraction();
+    return Math.abs(a.feed().fraction() - (backwards ? 1 - fraction : fraction)) < NEAR_FRACTION;
   }
 
   private static double wire(Placement placement) {

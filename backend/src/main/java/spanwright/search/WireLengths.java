@@ -12,6 +12,9 @@ final class WireLengths {
   private static final double LIGHT = 299.792458; // metres times MHz
   private static final double NEARLY_SAME = 0.035;
 
+  /** On a plot with no room for more, wire of this length is worth a look on any band [m]. */
+  private static final double LONGEST_LEAST = 4;
+
   private final List<Double> bandCentresMHz;
   private final int count;
   private final double least;
@@ -20,7 +23,7 @@ final class WireLengths {
     this.bandCentresMHz = List.copyOf(bandCentresMHz);
     this.count = count;
     double highest = bandCentresMHz.stream().mapToDouble(f -> f).max().orElse(14);
-    this.least = Math.max(2.5, 0.3 * LIGHT / highest);
+    this.least = Math.max(2.5, Math.min(LONGEST_LEAST, 0.3 * LIGHT / highest));
   }
 
   /** The shortest wire worth hanging [m]. */

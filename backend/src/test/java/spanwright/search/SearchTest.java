@@ -14,6 +14,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.TestFactory;
+import spanwright.BrokenPlans;
 import spanwright.assess.Placement;
 import spanwright.clearance.Clearance;
 import spanwright.clearance.State;
@@ -144,5 +145,29 @@ class SearchTest {
                     return true;
                   }
                 }));
+  }
+
+  @Test
+  void a_plot_where_no_wire_may_hang_says_what_is_in_the_way() {
+    String zone =
+        "\"zones\": [ { \"id\": \"field\", \"area\": [[-5,-5],[30,-5],[30,25],[-5,25]],"
+            + " \"rule\": \"no-wire\" } ], \"entry\"";
+    Result result = search(PlanReader.read(BrokenPlans.SOUND.replace("\"entry\"", zone)).plan());
+    assertTrue(result.placements().isEmpty());
+    assertFalse(result.refusals().isEmpty());
+    assertTrue(result.refusals().stream().allMatch(r -> r.to().equals("field")));
+    assertEquals(result.counts().considered(), result.counts().refused());
+  }
+
+  @Test
+  void a_short_span_is_tried_on_a_low_band_when_there_is_no_other() {
+    String json =
+        BrokenPlans.SOUND
+            .replace("\"at\": [22,12]", "\"at\": [12,12]")
+            .replace("20 m", "80 m")
+            .replace("14.175", "3.65");
+    Result result = search(PlanReader.read(json).plan());
+    assertFalse(result.placements().isEmpty());
+    assertTrue(result.placements().get(0).conductors().get(0).length() < 10);
   }
 }
