@@ -42,23 +42,21 @@ export function createKeeper(store, api, keep, say) {
 
   /** @returns {Promise<void>} */
   async function saveOnce() {
-    const { plan, planId, etag } = store.get();
+    const { plan, planId, etag, opened: asked } = store.get();
     if (plan === onServer) return;
+    // Another plot may be shown before the answer comes; then it is none of that one's business.
+    const gone = () => store.get().opened !== asked;
     mark('saving');
     try {
-      if (planId === null) {
-        const made = await api.createPlan(plan);
-        onServer = plan;
-        store.set({ planId: made.id, etag: made.etag });
-      } else {
-        const answer = await api.savePlan(planId, plan, etag);
-        onServer = plan;
-        store.set({ etag: answer.etag });
-      }
+      const answer = planId === null ? await api.createPlan(plan) : await api.savePlan(planId, plan, etag);
+      if (gone()) return;
+      onServer = plan;
+      store.set({ planId: answer.id ?? planId, etag: answer.etag });
       store.set({ notice: null });
       mark(store.get().plan === onServer ? 'saved' : 'unsaved', now());
       list();
     } catch (problem) {
+      if (gone()) return;
       if (isOffline(problem)) mark('offline');
       else if (status(problem) === 412 || status(problem) === 428) await copyAside(plan);
       else if (status(problem) === 404 && planId !== null) store.set({ planId: null, etag: '' });
@@ -76,7 +74,8 @@ export function createKeeper(store, api, keep, say) {
     const copy = { ...plan, title: `${plan.title || 'Plot'} (copy ${new Date().toTimeString().slice(0, 5)})` };
     const made = await api.createPlan(copy);
     onServer = copy;
-    store.edit('Keep as a copy', () => copy);
+    // What was drawn while the copy was made stays.
+    store.edit('Keep as a copy', (now) => (now === plan ? copy : { ...now, title: copy.title }));
     store.set({
       planId: made.id, etag: made.etag, clash: first,
       notice: 'Another window saved this plot in the meantime. Yours is kept as a copy, and you are working on it.',
@@ -197,6 +196,7 @@ export function createKeeper(store, api, keep, say) {
     async open(id) {
       await leave();
       const { plan, etag } = await api.readPlan(id);
+      await leave();
       show(plan, id, etag, true);
     },
     async begin() {
@@ -205,8 +205,9 @@ export function createKeeper(store, api, keep, say) {
     },
     /** @param {string} name */
     async demo(name) {
+      const plan = await api.demo(name);
       await leave();
-      show(await api.demo(name), null, '', false);
+      show(plan, null, '', false);
     },
     async copy() {
       await leave();
@@ -224,8 +225,8 @@ export function createKeeper(store, api, keep, say) {
       if (plan?.format !== 'spanwright-plan/1') {
         throw new Error(`${name} is not a plan of this program: its format says ${JSON.stringify(plan?.format ?? null)}, not spanwright-plan/1.`);
       }
-      await leave();
       const made = await api.createPlan(plan);
+      await leave();
       show(plan, made.id, made.etag, true);
       list();
     },
@@ -251,9 +252,9 @@ export function createKeeper(store, api, keep, say) {
     },
   };
 
-  /** What is unsaved is saved before another plot is shown; unless the server is gone. */
+  /** What is unsaved is saved before another plot is shown; throws a sentence when it cannot be. */
   async function leave() {
-    if (store.get().plan !== onServer) await save();
+    if (opened >= 0 && store.get().plan !== onServer) await saveNow();
   }
 }
 
