@@ -11,9 +11,7 @@ import spanwright.feed.MatchingNetwork;
 import spanwright.feed.Verdict;
 import spanwright.plan.Band;
 import spanwright.plan.Catalogue;
-import spanwright.plan.LineKind;
 import spanwright.plan.LineLengths;
-import spanwright.plan.MatchingUnit;
 import spanwright.plan.Plan;
 
 /** From the feedpoint to the transmitter's socket: the line, its length, the matching unit. */
@@ -38,7 +36,7 @@ final class Station {
   Station(Plan plan, Catalogue catalogue) {
     this.plan = plan;
     this.catalogue = catalogue;
-    this.unit = network(catalogue.matchingUnit(plan.brief().matching()));
+    this.unit = FeedParts.network(catalogue.matchingUnit(plan.brief().matching()));
   }
 
   /**
@@ -50,34 +48,11 @@ final class Station {
    */
   record Load(Band band, double frequencyMHz, Complex impedance) {}
 
-  private static MatchingNetwork network(MatchingUnit unit) {
-    if (unit.network() == MatchingUnit.Network.BALUN) {
-      return MatchingNetwork.balun(unit.peakVolts());
-    }
-    MatchingNetwork.Kind kind =
-        unit.network() == MatchingUnit.Network.L ? MatchingNetwork.Kind.L : MatchingNetwork.Kind.T;
-    return new MatchingNetwork(
-        kind,
-        unit.inductance().get(0),
-        unit.inductance().get(1),
-        unit.capacitance().get(0),
-        unit.capacitance().get(1),
-        unit.coilQ(),
-        unit.capacitorQ(),
-        unit.peakVolts());
-  }
-
-  private Line line(String id) {
-    LineKind kind = catalogue.line(id);
-    return Line.of(
-            kind.impedance(), kind.velocityFactor(), kind.conductorLoss(), kind.dielectricLoss())
-        .withPeakVolts(kind.peakVolts());
-  }
-
   /** The way to the socket of a band; one that is only heard carries no power. */
   FeedResult run(String lineId, double length, Band band, double frequencyMHz, Complex load) {
     double power = band.receiveOnly() ? 0 : plan.brief().power();
-    return FeedChain.run(passive(load), frequencyMHz, line(lineId), length, unit, power);
+    Line line = FeedParts.line(catalogue.line(lineId));
+    return FeedChain.run(passive(load), frequencyMHz, line, length, unit, power);
   }
 
   /** A feedpoint takes power; rounding may not say otherwise. */

@@ -9,6 +9,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import org.apache.commons.math3.complex.Complex;
+import spanwright.assess.FeedParts;
 import spanwright.feed.FeedChain;
 import spanwright.feed.FeedResult;
 import spanwright.feed.Line;
@@ -76,7 +77,7 @@ final class FeedCases {
       if (kind.isEmpty()) {
         form.note("line", "there is no such line in the catalogue. `catalogue` prints it.");
       }
-      return kind.map(FeedCases::line).orElse(null);
+      return kind.map(FeedParts::line).orElse(null);
     }
     Form given = form.form("line");
     double impedance = given.number("impedance", 1, 5000, "ohm");
@@ -85,12 +86,6 @@ final class FeedCases {
     given.finish();
     // A stand-in keeps reading going where the figures are noted as faults already.
     return Line.ofLoss(impedance, velocityFactor, loss);
-  }
-
-  private static Line line(LineKind kind) {
-    return Line.of(
-            kind.impedance(), kind.velocityFactor(), kind.conductorLoss(), kind.dielectricLoss())
-        .withPeakVolts(kind.peakVolts());
   }
 
   private static MatchingNetwork unit(Form form, Catalogue catalogue) {
@@ -105,24 +100,9 @@ final class FeedCases {
         form.note(
             "matching", "there is no such matching unit in the catalogue. `catalogue` prints it.");
       }
-      return unit.map(FeedCases::network).orElse(null);
+      return unit.map(FeedParts::network).orElse(null);
     }
     return described(form.form("matching"));
-  }
-
-  private static MatchingNetwork network(MatchingUnit unit) {
-    if (unit.network() == MatchingUnit.Network.BALUN) {
-      return MatchingNetwork.balun(unit.peakVolts());
-    }
-    return new MatchingNetwork(
-        unit.network() == MatchingUnit.Network.T ? MatchingNetwork.Kind.T : MatchingNetwork.Kind.L,
-        unit.inductance().get(0),
-        unit.inductance().get(1),
-        unit.capacitance().get(0),
-        unit.capacitance().get(1),
-        unit.coilQ(),
-        unit.capacitorQ(),
-        unit.peakVolts());
   }
 
   private static MatchingNetwork described(Form form) {

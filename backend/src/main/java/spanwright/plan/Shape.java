@@ -1,6 +1,7 @@
 package spanwright.plan;
 
 import com.fasterxml.jackson.annotation.JsonProperty;
+import java.util.Locale;
 
 /** Shapes a wire may be hung in. */
 public enum Shape {
@@ -21,5 +22,10 @@ public enum Shape {
   @JsonProperty("loop")
   LOOP,
   @JsonProperty("inverted-l")
-  INVERTED_L
+  INVERTED_L;
+
+  /** The word for it in plan and result files. */
+  public String word() {
+    return name().toLowerCase(Locale.ROOT).replace('_', '-');
+  }
 }

@@ -71,20 +71,6 @@ final class Chain {
     return sum;
   }
 
-  /** The sum of all loads [N]: what the two ends bear between them. */
-  double totalLoad() {
-    double x = 0;
-    double y = 0;
-    double z = 0;
-    for (int i = 0; i < pieces; i++) {
-      boolean last = i == pieces - 1;
-      x += load[3 * i] * length[i] + (last ? 0 : point[3 * i]);
-      y += load[3 * i + 1] * length[i] + (last ? 0 : point[3 * i + 1]);
-      z += load[3 * i + 2] * length[i] + (last ? 0 : point[3 * i + 2]);
-    }
-    return Math.sqrt(x * x + y * y + z * z);
-  }
-
   /**
    * Finds the tension at the start for which the chain ends at (dx, dy, dz) from its beginning,
    * from the guess that stands in {@link #start}.

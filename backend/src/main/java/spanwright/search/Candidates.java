@@ -45,7 +45,7 @@ final class Candidates {
     }
 
     String family() {
-      return ShapeWord.of(shape) + ":" + on();
+      return shape.word() + ":" + on();
     }
   }
 
@@ -343,7 +343,7 @@ final class Candidates {
     for (int i = 0; i < idea.sites.size(); i++) {
       holds.add(new Layout.Hold(idea.sites.get(i).on(), idea.at.get(i)));
     }
-    String word = ShapeWord.of(shape);
+    String word = shape.word();
     Layout layout =
         new Layout(
             word,

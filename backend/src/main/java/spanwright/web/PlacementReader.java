@@ -65,17 +65,13 @@ public final class PlacementReader {
     List<Layout.Hold> holds = form.forms("attachments", 2, MOST_HOLDS, this::hold);
     List<Layout.Run> runs = form.forms("conductors", 1, MOST_CONDUCTORS, this::run);
     Layout.FeedChoice feed = feed(form.form("feed"), runs.size());
-    return new Layout(shape == null ? "" : word(shape), holds, runs, feed);
-  }
-
-  private static String word(Shape shape) {
-    return Json.mapper().convertValue(shape, String.class);
+    return new Layout(shape == null ? "" : shape.word(), holds, runs, feed);
   }
 
   private static Map<String, Shape> shapes() {
     Map<String, Shape> shapes = new HashMap<>();
     for (Shape shape : Shape.values()) {
-      shapes.put(word(shape), shape);
+      shapes.put(shape.word(), shape);
     }
     return shapes;
   }
