@@ -15,6 +15,7 @@ import spanwright.plan.Band;
 import spanwright.plan.Catalogue;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
+import spanwright.rigging.Layout;
 
 /**
  * Searches a plan for places to hang a wire and ranks them. The same plan, seed and effort give the
@@ -237,22 +238,19 @@ public final class Search {
       return;
     }
     say(0.30, "working out the ground");
-    double left = Double.POSITIVE_INFINITY;
-    double right = Double.NEGATIVE_INFINITY;
-    double bottom = Double.POSITIVE_INFINITY;
-    double top = Double.NEGATIVE_INFINITY;
+    double reach = 0;
     double highest = 1;
     for (Free one : free) {
-      for (var hold : one.candidate.layout().attachments()) {
+      List<Layout.Hold> holds = one.candidate.layout().attachments();
+      for (Layout.Hold hold : holds) {
         Place at = hold.at();
-        left = Math.min(left, at.x());
-        right = Math.max(right, at.x());
-        bottom = Math.min(bottom, at.y());
-        top = Math.max(top, at.y());
         highest = Math.max(highest, at.z() - assessor.surface().heightAt(at.x(), at.y()));
+        for (Layout.Hold other : holds) {
+          reach = Math.max(reach, at.onPlan().distance(other.at().onPlan()));
+        }
       }
     }
-    assessor.prepareTables(Math.hypot(right - left, top - bottom), highest, options.threads());
+    assessor.prepareTables(reach, highest, options.threads());
   }
 
   private List<Free> coarse(Workers workers, List<Free> free) {
