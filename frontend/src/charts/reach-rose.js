@@ -15,6 +15,8 @@ const SMALL_RING = 110;
 /** Nulls are drawn no farther in than this share of the ring, outward no farther than this many decibels. */
 const INNERMOST = 0.12;
 const OUTERMOST_DECIBELS = 14;
+/** Strokes end here, so that a far better or worse placement does not cover the plan; the closed line goes on. */
+const STROKE_DECIBELS = 5;
 
 /**
  * @param {number} azimuth degrees clockwise from true north
@@ -50,7 +52,13 @@ export function roseGeometry(rose, ring, planNorth) {
     const [dx, dy] = screenDirection(azimuth, planNorth);
     const tip = [dx * radius, dy * radius];
     outline.push(tip);
-    if (index % every === 0) (over >= 0 ? better : worse).push([[dx * ring, dy * ring], tip]);
+    const reach = within(
+      radius,
+      ring - STROKE_DECIBELS * PIXELS_PER_DECIBEL,
+      ring + STROKE_DECIBELS * PIXELS_PER_DECIBEL,
+    );
+    const end = [dx * reach, dy * reach];
+    if (index % every === 0) (over >= 0 ? better : worse).push([[dx * ring, dy * ring], end]);
   }
   return { outline, better, worse };
 }

@@ -17,6 +17,9 @@ final class Requests {
   /** All of a body must be here within this time, however lively it drips. */
   private static final long SLOWEST_BODY_NANOS = 60_000_000_000L;
 
+  /** Of a body that is too large, so much is still read and thrown away. */
+  private static final long MOST_DISCARDED = 64 << 20;
+
   private static final int CHUNK = 64 << 10;
 
   private Requests() {}
@@ -52,7 +55,7 @@ final class Requests {
   /** The body, bounded in size and time. */
   static byte[] bytes(Context ctx) {
     if (ctx.req().getContentLengthLong() > MOST_BYTES) {
-      throw new ProblemException(Problem.tooLarge());
+      throw tooLarge(ctx);
     }
     long started = System.nanoTime();
     ByteArrayOutputStream all = new ByteArrayOutputStream();
@@ -62,7 +65,7 @@ final class Requests {
       for (int n = in.read(chunk); n >= 0; n = in.read(chunk)) {
         all.write(chunk, 0, n);
         if (all.size() > MOST_BYTES) {
-          throw new ProblemException(Problem.tooLarge());
+          throw tooLarge(ctx);
         }
         if (System.nanoTime() - started > SLOWEST_BODY_NANOS) {
           throw new ProblemException(Errors.unexpected(408));
@@ -72,6 +75,28 @@ final class Requests {
     } catch (IOException e) {
       throw new ProblemException(Problem.badRequest("The body broke off. Send it again."));
     }
+  }
+
+  /**
+   * Lets the client finish sending, within bounds: one whose connection is closed while it still
+   * sends sees a broken line and never the answer.
+   */
+  private static ProblemException tooLarge(Context ctx) {
+    long started = System.nanoTime();
+    byte[] chunk = new byte[CHUNK];
+    long left = MOST_DISCARDED;
+    try {
+      InputStream in = ctx.req().getInputStream();
+      for (int n = in.read(chunk); n >= 0 && left > 0; n = in.read(chunk)) {
+        left -= n;
+        if (System.nanoTime() - started > SLOWEST_BODY_NANOS / 6) {
+          break;
+        }
+      }
+    } catch (IOException e) {
+      ctx.header("Connection", "close");
+    }
+    return new ProblemException(Problem.tooLarge());
   }
 
   static void requireJson(Context ctx) {
