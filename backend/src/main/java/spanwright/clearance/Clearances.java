@@ -50,7 +50,7 @@ public final class Clearances {
     margin = rules.value("tight-margin");
     headroom = rules.value("headroom");
     rigging = Rigging.of(plan, catalogue);
-    overhead = new Overhead(plan, ground, rules);
+    overhead = new Overhead(plan, catalogue, ground, rules);
     boundary = new Boundary(plan, rules, RANGE);
     List<Obstacle> obstacles = obstacles(plan);
     for (Obstacle each : obstacles) {

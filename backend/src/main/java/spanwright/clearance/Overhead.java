@@ -2,7 +2,7 @@ package spanwright.clearance;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
+import spanwright.plan.Catalogue;
 import spanwright.plan.GroundSurface;
 import spanwright.plan.OverheadLine;
 import spanwright.plan.Place;
@@ -46,16 +46,15 @@ final class Overhead {
   private final double fallShare;
   private final double margin;
 
-  Overhead(Plan plan, GroundSurface ground, RuleBook rules) {
+  Overhead(Plan plan, Catalogue catalogue, GroundSurface ground, RuleBook rules) {
     List<Line> all = new ArrayList<>();
     for (OverheadLine each : plan.overheadLines()) {
       double[] path = Strand.flat(ground.raise(each.path()));
-      String rule = rule(each.kind());
       all.add(
           new Line(
               each,
-              rule,
-              kept(each, rules.value(rule)),
+              catalogue.overheadRule(each.kind()).id(),
+              catalogue.keptDistance(each, plan.brief().rules()),
               path,
               Space.box(path, 0, path.length / 3 - 1)));
     }
@@ -75,20 +74,6 @@ final class Overhead {
 
   double fallShare() {
     return fallShare;
-  }
-
-  private static String rule(OverheadLine.Kind kind) {
-    OverheadLine.Kind known = kind == null ? OverheadLine.Kind.UNKNOWN : kind;
-    return "overhead-" + known.name().toLowerCase(Locale.ROOT).replace('_', '-');
-  }
-
-  /** What must be kept: a figure below the default counts only when someone authorised it. */
-  private static double kept(OverheadLine line, double usual) {
-    if (line.clearance() == null) {
-      return usual;
-    }
-    boolean authorised = line.authorisedBy() != null && line.authorisedOn() != null;
-    return authorised ? line.clearance() : Math.max(usual, line.clearance());
   }
 
   /** Every clearance to every line: one of the first rule at least, however far. */

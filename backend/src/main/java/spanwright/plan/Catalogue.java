@@ -1,6 +1,7 @@
 package spanwright.plan;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Function;
 import java.util.function.Predicate;
@@ -96,7 +97,7 @@ public record Catalogue(
 
   /** The rule that holds the kept distance to a kind of overhead line. */
   public RuleKind overheadRule(OverheadLine.Kind kind) {
-    return rule("overhead-" + kind.name().toLowerCase(java.util.Locale.ROOT).replace('_', '-'));
+    return rule("overhead-" + kind.name().toLowerCase(Locale.ROOT).replace('_', '-'));
   }
 
   /**

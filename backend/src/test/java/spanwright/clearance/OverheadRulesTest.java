@@ -192,6 +192,25 @@ class OverheadRulesTest {
   }
 
   @Test
+  void a_rule_that_the_brief_raised_holds_above_an_authorised_figure_that_is_no_smaller() {
+    String more =
+        ", \"clearance\": 4.0, \"authorisedBy\": \"the operator\","
+            + " \"authorisedOn\": \"2026-05-01\"";
+    Plan plan =
+        Plots.bare()
+            .poles(MAST)
+            .rules("\"wind\": 20, \"ice\": 0, \"overrides\": { \"overhead-low-voltage\": 5.0 }")
+            .with(
+                "overheadLines",
+                "[ { \"id\": \"line\", \"kind\": \"low-voltage\", \"path\": "
+                    + across(50, 8)
+                    + more
+                    + " } ]")
+            .plan();
+    assertEquals(5.0, get(check(plan, LEVEL), "overhead-low-voltage").required());
+  }
+
+  @Test
   void a_smaller_figure_counts_only_when_someone_authorised_it() {
     Clearance authorised =
         get(
