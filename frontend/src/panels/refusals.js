@@ -130,7 +130,7 @@ export function mount(root, store, shell) {
     ask();
     try {
       const placement = await shell.api.assess(planOf(state), curedLayout(planOf(state), state.catalogue, refusal));
-      addOwn(store, { ...placement, id: `cured-${ownOf(store.get()).length + 1}`, rank: 0, madeFrom: 'Cured' });
+      addOwn(store, { ...placement, id: freeId('cured', ownOf(store.get())), rank: 0, madeFrom: 'Cured' });
       shell.say('The cured placement is worked out and chosen.');
     } catch (problem) {
       open.error = /** @type {Error} */ (problem).message;
@@ -178,6 +178,18 @@ export function curedLayout(plan, catalogue, refusal) {
     conductors: [{ points, wire }],
     feed: { conductor: 0, fraction, line },
   };
+}
+
+/**
+ * An id that none of them has, also when one before was dropped.
+ * @param {string} word
+ * @param {{id: string}[]} own
+ */
+export function freeId(word, own) {
+  const taken = new Set(own.map((one) => one.id));
+  let n = own.length + 1;
+  while (taken.has(`${word}-${n}`)) n += 1;
+  return `${word}-${n}`;
 }
 
 /**

@@ -8,7 +8,7 @@ import { parseFrequencies, regionOf, spread } from '/src/panels/brief-bands.js';
 import { faultsAt } from '/src/panels/brief-fields.js';
 import { parsePlace } from '/src/panels/brief-targets.js';
 import { bandSummaries, clearanceConcern, concerns, nameOf, toBuild } from '/src/panels/placement-facts.js';
-import { cureRank } from '/src/panels/refusals.js';
+import { cureRank, freeId } from '/src/panels/refusals.js';
 import { fileName } from '/src/panels/sheet.js';
 import { assert, equal, near, test } from './harness.js';
 
@@ -292,4 +292,10 @@ test('faults are told at the part they belong to', () => {
 
 test('a download is named after its plot and placement', () => {
   equal(fileName({ title: 'Côte lot, 7 × 22 m!' }, { id: 'p01' }, 'pdf'), 'cote-lot-7-22-m-p01.pdf');
+});
+
+test('a cured placement never takes the id of one that is still there', () => {
+  assert.same(freeId('cured', []), 'cured-1');
+  assert.same(freeId('cured', [{ id: 'cured-2' }]), 'cured-3');
+  assert.same(freeId('cured', [{ id: 'cured-1' }, { id: 'moved-1' }]), 'cured-3');
 });
