@@ -67,7 +67,8 @@ final class Antennas {
         .replaceAll(
             match -> {
               int index = Integer.parseInt(match.group(1)) - rigged.conductors().size();
-              String name = index < 0 ? "The wire" : metal.names().get(index);
+              String wire = match.start() == 0 ? "The wire" : "the wire";
+              String name = index < 0 ? wire : metal.names().get(index);
               return Matcher.quoteReplacement(name);
             });
   }

@@ -175,7 +175,11 @@ public final class Assessor {
     return assess(hang(layout));
   }
 
-  /** A hung layout, the whole chain: full mesh, every frequency, metalwork and all. */
+  /**
+   * A hung layout, the whole chain: full mesh, every frequency, metalwork and all.
+   *
+   * @throws Unsolvable with a sentence when the field solver cannot take it as it hangs
+   */
   public Placement assess(Hung hung) {
     List<String> doubts = new ArrayList<>();
     Solved solved = solveInFull(hung, doubts);
@@ -197,7 +201,11 @@ public final class Assessor {
                 + antennas.named(fault.getMessage(), hung.rigged()));
       }
     }
-    return rowsOf(hung, rows, antennas.of(hung.rigged(), false), MeshAim.FULL, true);
+    try {
+      return rowsOf(hung, rows, antennas.of(hung.rigged(), false), MeshAim.FULL, true);
+    } catch (ModelFault fault) {
+      throw new Unsolvable(antennas.named(fault.getMessage(), hung.rigged()), fault);
+    }
   }
 
   private Solved rowsOf(

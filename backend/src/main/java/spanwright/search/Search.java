@@ -9,8 +9,8 @@ import spanwright.assess.Assessor;
 import spanwright.assess.Hung;
 import spanwright.assess.Placement;
 import spanwright.assess.ReferenceGains;
+import spanwright.assess.Unsolvable;
 import spanwright.clearance.Refusal;
-import spanwright.moments.ModelFault;
 import spanwright.plan.Band;
 import spanwright.plan.Catalogue;
 import spanwright.plan.Place;
@@ -278,7 +278,7 @@ public final class Search {
       Placement placement = assessor.assess(hung);
       found(placement);
       return Optional.of(placement);
-    } catch (ModelFault fault) {
+    } catch (Unsolvable aside) {
       return Optional.empty();
     }
   }

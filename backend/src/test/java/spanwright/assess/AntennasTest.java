@@ -1,6 +1,8 @@
 package spanwright.assess;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
@@ -77,5 +79,20 @@ class AntennasTest {
     assertEquals(kind.radius(), wire.radius());
     assertEquals(kind.conductivity(), wire.conductivity());
     assertEquals(kind.insulation() == null, wire.sheath() == null);
+  }
+
+  @Test
+  void what_the_solver_cannot_take_is_told_of_the_wire_and_not_of_the_solvers_numbers() {
+    Assessor assessor = Assessor.of(plan, CATALOGUE);
+    Layout fedAtItsEnd =
+        new Layout(
+            "level",
+            span().attachments(),
+            span().conductors(),
+            new Layout.FeedChoice(0, 0, null, null));
+    Unsolvable refused =
+        assertThrows(Unsolvable.class, () -> assessor.assess(assessor.hang(fedAtItsEnd)));
+    assertTrue(refused.getMessage().contains("of the wire lies"), refused.getMessage());
+    assertFalse(refused.getMessage().contains("wires["), refused.getMessage());
   }
 }
