@@ -84,8 +84,10 @@ final class RankCommand implements Callable<Integer> {
           .println(
               planFile
                   + (result.refusals().isEmpty()
-                      ? ": no two places to hold a wire are far enough apart for one. Add a support,"
-                          + " a bracket line or a mast zone, or allow new masts in the brief."
+                      ? ": no layout could be made. Either no two places to hold a wire are far"
+                          + " enough apart for one (about 5 m): add a support, a bracket line or a"
+                          + " mast zone. Or the brief allows none of the shapes that are searched:"
+                          + " level, sloping, apex, bent, off-centre."
                       : ": no placement is allowed on this plan. The result lists "
                           + result.refusals().size()
                           + " refusals, each with its cure where there is one."));
