@@ -2,6 +2,7 @@ package spanwright.assess;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import spanwright.moments.AntennaModel;
@@ -36,7 +37,13 @@ final class Antennas {
     return !metal.isEmpty();
   }
 
-  AntennaModel of(Rigged rigged, boolean withMetal) {
+  /** All the plan's metalwork. */
+  Metal metal() {
+    return metal;
+  }
+
+  /** The wire and this much of the metalwork. */
+  AntennaModel of(Rigged rigged, Metal with) {
     double plane = plane(rigged);
     List<WireSpec> wires = new ArrayList<>();
     for (Rigged.Conductor conductor : rigged.conductors()) {
@@ -52,9 +59,7 @@ final class Antennas {
       wires.add(
           new WireSpec(points, kind.radius(), kind.conductivity(), kind.permeability(), sheath));
     }
-    if (withMetal) {
-      wires.addAll(metal.over(plane));
-    }
+    wires.addAll(with.over(plane));
     var feed = rigged.layout().feed();
     return AntennaModel.of(wires, feed.conductor(), feed.fraction());
   }
@@ -62,15 +67,28 @@ final class Antennas {
   /**
    * A sentence of the field solver, its numbered wires called by the names they have on the plan.
    */
-  String named(String sentence, Rigged rigged) {
+  String named(String sentence, Rigged rigged, Metal with) {
     return WIRE.matcher(sentence)
         .replaceAll(
             match -> {
               int index = Integer.parseInt(match.group(1)) - rigged.conductors().size();
               String wire = match.start() == 0 ? "The wire" : "the wire";
-              String name = index < 0 ? wire : metal.names().get(index);
+              String name = index < 0 ? wire : with.names().get(index);
               return Matcher.quoteReplacement(name);
             });
+  }
+
+  /** The piece of metalwork that a sentence of the field solver is about, if it is about one. */
+  Optional<String> blamed(String sentence, Rigged rigged, Metal with) {
+    Optional<String> blamed = Optional.empty();
+    Matcher numbered = WIRE.matcher(sentence);
+    while (numbered.find()) {
+      int index = Integer.parseInt(numbered.group(1)) - rigged.conductors().size();
+      if (index >= 0) {
+        blamed = Optional.of(with.names().get(index));
+      }
+    }
+    return blamed;
   }
 
   /** Mean height of the ground under the wire above the plan's zero [m]. */

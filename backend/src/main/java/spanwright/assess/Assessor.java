@@ -2,6 +2,7 @@ package spanwright.assess;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.apache.commons.math3.complex.Complex;
 import spanwright.clearance.Clearances;
 import spanwright.clearance.Refusal;
@@ -158,7 +159,7 @@ public final class Assessor {
   public double coarseScore(Hung hung) {
     try {
       List<Placement.BandResult> quick =
-          rowsOf(hung, middleRows, antennas.of(hung.rigged(), false), MeshAim.COARSE, false).rows();
+          rowsOf(hung, middleRows, Metal.none(), MeshAim.COARSE, false).rows();
       return Scoring.total(
           scoring.parts(quick, PlacementWriter.masts(hung.rigged()), hung.clearances()));
     } catch (ModelFault fault) {
@@ -191,25 +192,28 @@ public final class Assessor {
   private record Solved(
       List<Placement.BandResult> rows, double lineLength, List<String> warnings) {}
 
+  /**
+   * With all the metalwork that the field solver can take; what it cannot is named and left out.
+   */
   private Solved solveInFull(Hung hung, List<String> doubts) {
-    if (antennas.hasMetal()) {
+    Metal with = antennas.metal();
+    while (true) {
       try {
-        return rowsOf(hung, rows, antennas.of(hung.rigged(), true), MeshAim.FULL, true);
+        return rowsOf(hung, rows, with, MeshAim.FULL, true);
       } catch (ModelFault fault) {
-        doubts.add(
-            "The metalwork is not in these figures. "
-                + antennas.named(fault.getMessage(), hung.rigged()));
+        String sentence = antennas.named(fault.getMessage(), hung.rigged(), with);
+        if (with.isEmpty()) {
+          throw new Unsolvable(sentence, fault);
+        }
+        Optional<String> piece = antennas.blamed(fault.getMessage(), hung.rigged(), with);
+        doubts.add(piece.orElse("The metalwork") + " is not in these figures. " + sentence);
+        with = piece.isPresent() ? with.without(piece.get()) : Metal.none();
       }
-    }
-    try {
-      return rowsOf(hung, rows, antennas.of(hung.rigged(), false), MeshAim.FULL, true);
-    } catch (ModelFault fault) {
-      throw new Unsolvable(antennas.named(fault.getMessage(), hung.rigged()), fault);
     }
   }
 
-  private Solved rowsOf(
-      Hung hung, List<Row> wanted, AntennaModel model, MeshAim aim, boolean full) {
+  private Solved rowsOf(Hung hung, List<Row> wanted, Metal with, MeshAim aim, boolean full) {
+    AntennaModel model = antennas.of(hung.rigged(), with);
     List<Solution> solutions = solver.solve(model, ground, frequencies(wanted), aim);
     solutions.forEach(solution -> tally.add(solution.unknowns()));
     String line = hung.layout().feed().line() == null ? lineId() : hung.layout().feed().line();
@@ -223,7 +227,7 @@ public final class Assessor {
           station.run(line, length, row.band(), row.frequencyMHz(), solution.impedance());
       results.add(radio.row(row, solution, feed, full));
       for (String warning : solution.warnings()) {
-        String named = antennas.named(warning, hung.rigged());
+        String named = antennas.named(warning, hung.rigged(), with);
         if (full && !warnings.contains(named)) {
           warnings.add(named);
         }

@@ -52,6 +52,16 @@ final class Metal {
     return path.stream().map(p -> new Place(p.x(), p.y(), Math.max(LEAST_HEIGHT, p.z()))).toList();
   }
 
+  /** No metalwork at all. */
+  static Metal none() {
+    return new Metal(List.of(), GroundSurface.level());
+  }
+
+  /** The same without the piece of that name. */
+  Metal without(String name) {
+    return new Metal(pieces.stream().filter(piece -> !piece.name.equals(name)).toList(), surface);
+  }
+
   boolean isEmpty() {
     return pieces.isEmpty();
   }

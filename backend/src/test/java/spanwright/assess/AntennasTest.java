@@ -50,7 +50,7 @@ class AntennasTest {
 
   @Test
   void the_wire_keeps_its_hanging_shape_and_stands_over_that_plane() {
-    AntennaModel model = antennas.of(rigged, false);
+    AntennaModel model = antennas.of(rigged, Metal.none());
     List<Place> calm = rigged.conductors().get(0).shapes().calm();
     WireSpec wire = model.wires().get(0);
     assertEquals(1, model.wires().size());
@@ -64,17 +64,29 @@ class AntennasTest {
 
   @Test
   void metal_comes_after_the_wire_and_is_called_by_its_name() {
-    AntennaModel model = antennas.of(rigged, true);
+    AntennaModel model = antennas.of(rigged, antennas.metal());
     assertEquals(2, model.wires().size());
     assertEquals(0.02, model.wires().get(1).radius());
     assertEquals(
         "The wire: too near. See Top rail.",
-        antennas.named("wires[0]: too near. See wires[1].", rigged));
+        antennas.named("wires[0]: too near. See wires[1].", rigged, antennas.metal()));
+  }
+
+  @Test
+  void only_the_piece_that_cannot_be_solved_is_left_out_and_named() {
+    String crossed = "{ \"id\": \"stay\", \"path\": [[15,4,1],[15,6,1]], \"radius\": 0.01 }";
+    String apart = "{ \"id\": \"pipe\", \"path\": [[30,5,2],[34,5,2]], \"radius\": 0.01 }";
+    Plan crossing = Gardens.withMetal("", String.join(",", RAIL, crossed, apart));
+    Placement placement = Assessor.of(crossing, CATALOGUE).assess(span());
+    List<String> said =
+        placement.notes().stream().filter(n -> n.contains("not in these figures")).toList();
+    assertEquals(1, said.size(), said::toString);
+    assertTrue(said.get(0).startsWith("stay") || said.get(0).startsWith("Top rail"), said.get(0));
   }
 
   @Test
   void wire_figures_come_from_the_catalogue() {
-    WireSpec wire = antennas.of(rigged, false).wires().get(0);
+    WireSpec wire = antennas.of(rigged, Metal.none()).wires().get(0);
     var kind = CATALOGUE.wire(rigged.conductors().get(0).wire());
     assertEquals(kind.radius(), wire.radius());
     assertEquals(kind.conductivity(), wire.conductivity());
