@@ -281,6 +281,9 @@ final class ReadOut {
 
   // --- the feed line
 
+  /** A line that hangs steeper than this has no direction of its own [m]. */
+  private static final double LEAST_RUN = 0.3;
+
   private Rigged.FeedLine feedLine(List<Rigged.Span> spans, List<Rigged.Tail> loose) {
     Rigged.Shapes at = feedpoint(spans, loose);
     List<Place> feet = rigging.lineRun.foot(at.calm().get(0));
@@ -301,8 +304,9 @@ final class ReadOut {
     List<Place> left = calm;
     List<Place> right = calm;
     if (hang.windy) {
-      double px = push * span.sideX;
-      double py = push * span.sideY;
+      double[] across = across(at.calm().get(0), foot, span);
+      double px = push * across[0];
+      double py = push * across[1];
       double heavy = rigging.isIcy() ? iced : weight;
       left = LineRun.hang(at.left().get(0), feet, hanging, heavy, px, py).points();
       right = LineRun.hang(at.right().get(0), feet, hanging, heavy, -px, -py).points();
@@ -320,6 +324,21 @@ final class ReadOut {
         length,
         Math.max(0, length - run),
         hang.feedWeight() / Hanging.GRAVITY);
+  }
+
+  /**
+   * The level direction square to the feed line's own run, toward the side the span is blown to:
+   * the wind that carries the line farthest, while the span carries its feedpoint.
+   */
+  private static double[] across(Place feedpoint, Place foot, SpanStatics span) {
+    double dx = foot.x() - feedpoint.x();
+    double dy = foot.y() - feedpoint.y();
+    double run = Math.hypot(dx, dy);
+    if (run < LEAST_RUN) {
+      return new double[] {span.sideX, span.sideY};
+    }
+    double turn = -dy * span.sideX + dx * span.sideY >= 0 ? 1 / run : -1 / run;
+    return new double[] {-dy * turn, dx * turn};
   }
 
   /** The feedpoint in each state, as shapes of one point. */
