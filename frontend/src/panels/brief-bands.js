@@ -44,8 +44,24 @@ export function bandsSection(state, store, draft, chosen) {
     ...faultsAt(state.faults, 'brief.bands')
       .filter((words, index, all) => all.indexOf(words) === index)
       .map((words) => sentence(null, words)),
+    untargeted(state.plan.brief),
     adder(state, store, draft, chosen),
   );
+}
+
+/**
+ * The bands that no target counts on: they are matched but add nothing to the score, which a new band does not show.
+ * @param {any} brief
+ * @returns {HTMLElement|null}
+ */
+function untargeted(brief) {
+  const targets = brief?.targets ?? [];
+  if (targets.length === 0 || targets.some((/** @type {any} */ target) => !target.bands?.length)) return null;
+  const idle = (brief.bands ?? [])
+    .map(bandName)
+    .filter((/** @type {string} */ name) => !targets.some((/** @type {any} */ target) => target.bands.includes(name)));
+  if (idle.length === 0) return null;
+  return html('p', { class: 'soft' }, `No target counts on ${idle.join(', ')}: open a target below and tick it there.`);
 }
 
 /**

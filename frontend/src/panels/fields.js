@@ -91,7 +91,7 @@ export function box(config) {
     if (input.value === shown) return fail('');
     const value = fromText(config.type, input.value, units);
     if (value === undefined) return fail(`Write ${WANTED[config.type] ?? 'it again'}.`);
-    if (value === null && !config.optional) return fail('This figure is needed.');
+    if (value === null && !config.optional) return fail(config.type === 'text' ? 'This cannot be empty.' : 'This figure is needed.');
     if (typeof value === 'number' && config.least !== undefined && value < config.least) {
       return fail(`At least ${toText(config.type, config.least, units)}.`);
     }
@@ -114,6 +114,8 @@ export function box(config) {
   input.addEventListener('keydown', (/** @type {KeyboardEvent} */ event) => {
     if (event.key === 'Enter' && !notes) commit();
     if (event.key === 'Escape') {
+      // The first gives up what was typed; with nothing to give up it leaves the box, so that letters are tools again.
+      if (input.value === shown && !error.textContent) input.blur();
       input.value = shown;
       fail('');
       event.stopPropagation();

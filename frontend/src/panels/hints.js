@@ -27,9 +27,10 @@ export function mount(root, store, shell) {
     ]),
     hint, notice, empty,
   );
-  store.subscribe((s) => [s.hint, s.place], () => {
+  // The first hint speaks of the demo plot, so on an empty one it gives way to the words in the middle of the plan.
+  store.subscribe((s) => [s.hint, s.place, things(s.plan).length === 0], () => {
     const { hint: n } = store.get();
-    hint.hidden = n === 0 || store.get().place !== 'survey';
+    hint.hidden = n === 0 || store.get().place !== 'survey' || things(store.get().plan).length === 0;
     if (n === 0) return;
     hint.replaceChildren(
       el('p', { text: HINTS[n - 1] }),

@@ -71,12 +71,18 @@ export function pullsTable(plan, placement) {
                 ? html('span', { class: 'soft' }, 'not known')
                 : number(hold.pullLimit, 0),
             ),
-            html('td', { class: 'mark-cell' }, stateMark(hold.state, hold.state)),
+            html('td', { class: 'mark-cell' }, holdMark(hold)),
           ),
         ),
       ),
     ),
   );
+}
+
+/** No tick where the limit is not known: nothing was held against anything. @param {any} hold */
+function holdMark(hold) {
+  const unchecked = hold.state === 'clear' && (hold.pullLimit === undefined || hold.pullLimit === null);
+  return unchecked ? html('span', { class: 'soft', 'aria-label': 'not checked' }, '–') : stateMark(hold.state, hold.state);
 }
 
 /** @param {any} hold */

@@ -42,7 +42,7 @@ export function ledger(plan, faults, length) {
   return [
     row('Boundary', corners ? count(corners, 'corner') : 'to draw first', corners > 2, true, 'boundary', ['boundary']),
     row('Buildings', n('buildings') ? count(n('buildings'), 'building') : 'none drawn', n('buildings') > 0, false, 'buildings', ['buildings']),
-    row('Supports', n('supports') ? `${n('supports')}, tallest ${length(tallest)}` : placesLack(places), n('supports') > 0, places < 2, 'supports', ['supports']),
+    row('Supports', n('supports') ? `${n('supports')}, tallest ${length(tallest)}` : placesLack(places), n('supports') > 0 && places > 1, places < 2, 'supports', ['supports']),
     row('Places for masts', mastWords(n('mastZones'), n('bracketLines')), n('mastZones') + n('bracketLines') > 0, false, 'mastZones', ['mastZones', 'bracketLines']),
     row('Overhead lines', n('overheadLines') ? `${n('overheadLines')}, with heights` : 'none drawn: look up', n('overheadLines') > 0, false, 'overheadLines', ['overheadLines']),
     row('Station entry', plan.entry ? `${length(plan.entry.height ?? 0)} up` : 'where the feed line comes in', Boolean(plan.entry), true, 'entry', ['entry']),
@@ -85,8 +85,8 @@ export function nextStep(plan, faults) {
   if (!listOf(plan, 'buildings').length && places === 0) return 'Next the house: walk round it with the building tool.';
   if (places < 2) {
     return places
-      ? 'One more place to hang a wire: a tree, a chimney, a wall, or a zone where a mast may stand.'
-      : 'Two places to hang a wire: a tree, a chimney, a wall, or a zone where a mast may stand.';
+      ? 'One more place to hang a wire: a support (a strong tree is one too), a bracket line, or a zone where a mast may stand.'
+      : 'Two places to hang a wire: supports (a strong tree is one too), a bracket line, or a zone where a mast may stand.';
   }
   if (!plan.entry) return 'Show where the feed line comes into the station.';
   if (faults.length) return 'Mend what is marked, then the plot can be searched.';
