@@ -140,6 +140,12 @@ final class Strand {
       strands.add(still(Part.MAST, mast.attachments().get(0), List.of(mast.foot(), mast.top())));
     }
     strands.add(feedLine(rigged, sweeps));
+    for (Rigged.Shapes other : rigged.feedLine().others()) {
+      double[] slack = new double[other.calm().size()];
+      double[][] states = sweep(other, null, slack);
+      int at = rigged.feedLine().held();
+      strands.add(strand(Part.FEED_LINE, at, at, states, slack, false, false));
+    }
     return strands;
   }
 

@@ -105,9 +105,10 @@ final class ReadOut {
       ropes.add(new Rigged.Rope("fall", a, still, length, id));
       return length;
     }
-    // An endless halyard, both parts made off: the tail is tied to it and cannot run through.
+    // An endless halyard, both parts made off. Should its pulley or strop part, it comes down with
+    // the wire's end, and one run of it trails beyond.
     ropes.add(new Rigged.Rope("halyard", a, still, 2 * length, id));
-    return 0;
+    return length;
   }
 
   private Rigged.Shapes still(List<Place> points) {
@@ -303,6 +304,7 @@ final class ReadOut {
     List<Place> calm = LineRun.hang(at.calm().get(0), feet, hanging, weight, 0, 0).points();
     List<Place> left = calm;
     List<Place> right = calm;
+    List<Rigged.Shapes> others = new ArrayList<>();
     if (hang.windy) {
       double[] across = across(at.calm().get(0), foot, span);
       double px = push * across[0];
@@ -310,6 +312,19 @@ final class ReadOut {
       double heavy = rigging.isIcy() ? iced : weight;
       left = LineRun.hang(at.left().get(0), feet, hanging, heavy, px, py).points();
       right = LineRun.hang(at.right().get(0), feet, hanging, heavy, -px, -py).points();
+      Place still = at.calm().get(0);
+      others.add(
+          new Rigged.Shapes(
+              calm,
+              LineRun.hang(still, feet, hanging, heavy, px, py).points(),
+              LineRun.hang(still, feet, hanging, heavy, -px, -py).points(),
+              List.of()));
+      others.add(
+          new Rigged.Shapes(
+              calm,
+              LineRun.hang(at.left().get(0), feet, hanging, heavy, -px, -py).points(),
+              LineRun.hang(at.right().get(0), feet, hanging, heavy, px, py).points(),
+              List.of()));
     }
     List<Place> frozen =
         at.iced().isEmpty()
@@ -320,6 +335,7 @@ final class ReadOut {
         at.calm().get(0),
         course.feedHeld(),
         new Rigged.Shapes(calm, left, right, frozen),
+        others,
         run,
         length,
         Math.max(0, length - run),

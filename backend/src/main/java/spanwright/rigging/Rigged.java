@@ -189,6 +189,8 @@ public record Rigged(
    * @param feedpoint where it joins
    * @param held index of the attachment that holds the feedpoint, or -1 when it hangs in a span
    * @param shapes its run from the feedpoint to the entry
+   * @param others the same run under winds that move line and feedpoint otherwise: the line blown
+   *     while the feedpoint stays, and each blown to the other side; empty without wind
    * @param runLength along that run, slack included [m]
    * @param length as chosen, or the run's length when it was left open [m]
    * @param stowed what of it is led to and fro on stand-offs near the entry [m]
@@ -199,10 +201,15 @@ public record Rigged(
       Place feedpoint,
       int held,
       Shapes shapes,
+      List<Shapes> others,
       double runLength,
       double length,
       double stowed,
-      double weightOnFeedpoint) {}
+      double weightOnFeedpoint) {
+    public FeedLine {
+      others = List.copyOf(others);
+    }
+  }
 
   /**
    * A mast to be built.
