@@ -75,7 +75,8 @@ final class Solid implements Obstacle {
           continue;
         }
         System.arraycopy(state, i, piece, 0, 6);
-        if (!exempt(strand, scene, piece)) {
+        // Rope and line may touch what holds them; wire keeps its distance there too.
+        if (strand.part == Strand.Part.WIRE || !exempt(strand, scene, piece)) {
           piece(strand, piece, strand.slack(s, i), worst, required);
         }
       }
