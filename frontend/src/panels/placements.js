@@ -123,6 +123,16 @@ export function mount(root, store, shell) {
   }
 
   /**
+   * The server's sentence speaks to whoever writes the file; an entry never drawn is said to whoever draws.
+   * @param {{path: string, message: string}} fault
+   */
+  function drawn(fault) {
+    return fault.path === 'entry' && !store.get().plan.entry
+      ? 'The station entry is not drawn. Show where the feed line comes in.'
+      : fault.message;
+  }
+
+  /**
    * @param {{path: string, message: string}[]} faults
    * @param {string} heading
    */
@@ -131,7 +141,7 @@ export function mount(root, store, shell) {
       'div',
       { class: 'search-faults' },
       html('p', {}, stateMark('foul', 'Fault'), ' ', heading),
-      html('ul', {}, ...faults.slice(0, 4).map((fault) => html('li', {}, fault.message))),
+      html('ul', {}, ...faults.slice(0, 4).map((fault) => html('li', {}, drawn(fault)))),
       faults.length > 4 ? html('p', { class: 'soft' }, `and ${faults.length - 4} more.`) : null,
       html('button', { class: 'link', type: 'button', onclick: () => shell.go('survey') }, 'To the survey'),
     );
@@ -188,7 +198,8 @@ export function mount(root, store, shell) {
           stateMark('foul', 'Failed'),
           ' ',
           html('b', {}, 'The search stopped. '),
-          search.error ?? '',
+          // The faults below say it already, each with the place to mend it.
+          search.faults?.length ? '' : (search.error ?? ''),
         ),
         search.faults?.length ? faultList(search.faults, 'What the plan still lacks:') : null,
         efforts(),
