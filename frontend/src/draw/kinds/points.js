@@ -125,7 +125,7 @@ export function labelSpot(spot, env, index) {
       id: `spots:${index}`,
       weight: 24,
       at: spot,
-      lines: [{ text: (spot[2] ?? 0) === 0 ? number(0, 1) : text }],
+      lines: [{ text: (spot[2] ?? 0) === 0 && env.units === 'm' ? number(0, 1) : text }],
       look: 'second',
       sit: 'around',
       gap: 6,
