@@ -22,6 +22,11 @@ import spanwright.rigging.Rigged;
 final class Antennas {
   private static final Pattern WIRE = Pattern.compile("wires\\[(\\d+)]");
 
+  /**
+   * Wire that hangs to the ground is solved this far over it [m]; it is foul, and a note says so.
+   */
+  private static final double LEAST_HEIGHT = 0.05;
+
   private final Catalogue catalogue;
   private final GroundSurface surface;
   private final Metal metal;
@@ -50,7 +55,10 @@ final class Antennas {
       WireKind kind = catalogue.wire(conductor.wire());
       List<Vertex> points = new ArrayList<>();
       for (Place p : conductor.shapes().calm()) {
-        points.add(new Vertex(p.x(), p.y(), p.z() - plane));
+        Vertex next = new Vertex(p.x(), p.y(), Math.max(LEAST_HEIGHT, p.z() - plane));
+        if (points.isEmpty() || points.get(points.size() - 1).distanceTo(next) > 1e-6) {
+          points.add(next);
+        }
       }
       Sheath sheath =
           kind.insulation() == null
@@ -106,6 +114,14 @@ final class Antennas {
       }
     }
     return length == 0 ? 0 : sum / length;
+  }
+
+  /** Whether some of the wire hangs lower over that plane than it can be solved. */
+  boolean isDown(Rigged rigged) {
+    double plane = plane(rigged);
+    return rigged.conductors().stream()
+        .flatMap(conductor -> conductor.shapes().calm().stream())
+        .anyMatch(p -> p.z() - plane < LEAST_HEIGHT);
   }
 
   /** Greatest and least height of the ground under the wire, above the plan's zero [m]. */

@@ -53,6 +53,11 @@ final class Notes {
   }
 
   private void addGround(Rigged rigged, List<String> notes) {
+    if (antennas.isDown(rigged)) {
+      notes.add(
+          "Some of the wire hangs to the ground, or below its mean height on a slope; the radio"
+              + " figures take that part as 0.05 m up.");
+    }
     double fall = antennas.fall(rigged);
     if (fall > LEVEL_ENOUGH) {
       notes.add(

@@ -83,14 +83,10 @@ final class RankCommand implements Callable<Integer> {
           .err()
           .println(
               planFile
-                  + (result.refusals().isEmpty()
-                      ? ": no layout could be made. Either no two places to hold a wire are far"
-                          + " enough apart for one (about 5 m): add a support, a bracket line or a"
-                          + " mast zone. Or the brief allows none of the shapes that are searched:"
-                          + " level, sloping, apex, bent, off-centre."
-                      : ": no placement is allowed on this plan. The result lists "
-                          + result.refusals().size()
-                          + " refusals, each with its cure where there is one."));
+                  + ": no placement is allowed on this plan. The result says why: "
+                  + result.refusals().size()
+                  + (result.refusals().size() == 1 ? " refusal" : " refusals")
+                  + ", with the cure where there is one.");
       return Exit.NOTHING_FEASIBLE;
     }
     return Exit.DONE;

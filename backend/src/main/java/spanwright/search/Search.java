@@ -105,11 +105,20 @@ public final class Search {
       List<Placement> ranked = search.rank(workers);
       search.say(0.98, "working out what would cure the refusals");
       List<Refusal> why = search.refused.list(search.assessor, workers, options.effort().refusals);
+      if (search.considered == 0) {
+        why = List.of(search.nothingToTry());
+      }
       double seconds = Math.round((System.nanoTime() - start) / 1e7) / 100.0;
       return search.result(ranked, why, seconds);
     } catch (Workers.Cancelled e) {
       throw new CancelledException(e);
     }
+  }
+
+  private Refusal nothingToTry() {
+    List<Double> centres = plan.brief().bands().stream().map(Band::middleMHz).toList();
+    double least = new WireLengths(centres, 1).least() + 2 * WireRoom.LEAST_TAIL;
+    return NothingToTry.refusal(plan, assessor.surface(), least);
   }
 
   private List<Placement> rank(Workers workers) {
