@@ -29,9 +29,9 @@ import { figure, set, svg } from './svg.js';
  *   the drawing's frame within the box, pixels
  */
 
-/** Layers from the ground up. */
+/** Layers from the ground up; what must be kept from an overhead line lies over every roof. */
 const LAYERS = [
-  'ground', 'grid', 'areas', 'corridors', 'canopies', 'buildings', 'zones', 'boundary', 'metal',
+  'ground', 'grid', 'areas', 'canopies', 'buildings', 'zones', 'corridors', 'boundary', 'metal',
   'lines', 'supports', 'points', 'rose', 'candidates', 'ghosts', 'placement', 'labels', 'draft',
   'handles', 'faults',
 ];

@@ -1,5 +1,6 @@
 // @ts-check
 /** Things of a plan in words: short for the drawing, full for people who listen to it. */
+import { keptDistance } from './kinds/kept.js';
 import { area, walls } from '../geometry/polygon.js';
 import { pathLength } from '../geometry/line.js';
 import { area as areaText, formatLength, lengthWithUnit } from '../units/length.js';
@@ -46,7 +47,7 @@ export function shortFigures(kind, thing, units) {
       return `masts to ${f(thing.highest)}${thing.guyRadius ? `, guys ${f(thing.guyRadius)} out` : ''}`;
     case 'overheadLines': {
       const z = (thing.path ?? []).map((/** @type {number[]} */ p) => p[2] ?? 0);
-      return `${LINE_WORDS[thing.kind] ?? thing.kind}, ${f(Math.min(...z))} to ${f(Math.max(...z))} up, kept distance ${f(thing.clearance ?? 0)}`;
+      return `${LINE_WORDS[thing.kind] ?? thing.kind}, ${f(Math.min(...z))} to ${f(Math.max(...z))} up, kept distance ${f(keptDistance(thing))}`;
     }
     case 'zones':
       return thing.rule === 'headroom' ? `headroom ${f(thing.height ?? 0)}` : ruleWords(thing, units);

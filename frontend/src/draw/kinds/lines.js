@@ -1,6 +1,7 @@
 // @ts-check
 /** Things along a path: bracket lines, overhead lines with their kept distance, metalwork. */
 import { corridor } from '../../geometry/corridor.js';
+import { keptDistance } from './kept.js';
 import { barbs, beads, zigzag } from '../../geometry/figures.js';
 import { pathLength, placeAlong } from '../../geometry/line.js';
 import { distance } from '../../geometry/vector.js';
@@ -64,7 +65,7 @@ function beside(label, a, b, off) {
 export function drawOverheadLine(line, env) {
   const path = line.path ?? [];
   const telephone = line.kind === 'telephone';
-  const kept = line.clearance ?? (telephone ? 0.6 : 3.05);
+  const kept = keptDistance(line);
   const ring = path.length > 1 ? corridor(path, kept) : [];
   return {
     layer: 'lines',
@@ -121,7 +122,7 @@ export function labelOverheadLine(line, env, index) {
     sit: 'middle',
     turn: readingTurn(a, b),
   }, a, b, 14 * env.px));
-  const kept = line.clearance ?? 0;
+  const kept = keptDistance(line);
   if (weighty && kept / env.px > 9) {
     labels.push(...beside({
       id: `kept:${line.id}`,
