@@ -3,6 +3,7 @@
 
 const KEY = 'spanwright.at-hand';
 const ASIDE = 'spanwright.seen';
+const SEARCHED = 'spanwright.searched';
 
 /** @typedef {{planId: string|null, etag: string, plan: any, unsaved: boolean, at: string|null, units: string}} AtHand */
 
@@ -42,5 +43,34 @@ export function rememberHints() {
     localStorage.setItem(ASIDE, 'hints');
   } catch {
     // A browser that keeps nothing shows them again.
+  }
+}
+
+/** @typedef {{planId: string, id: string, plan: string}} Searched the last search of this tab, and the plan it was made of */
+
+/** @param {Searched} searched */
+export function rememberSearch(searched) {
+  try {
+    sessionStorage.setItem(SEARCHED, JSON.stringify(searched));
+  } catch {
+    // Then a reload asks for the search again.
+  }
+}
+
+/** @returns {Searched|null} */
+export function recallSearch() {
+  try {
+    return JSON.parse(sessionStorage.getItem(SEARCHED) ?? 'null');
+  } catch {
+    return null;
+  }
+}
+
+/** Forgets a search that the server no longer holds. */
+export function forgetSearch() {
+  try {
+    sessionStorage.removeItem(SEARCHED);
+  } catch {
+    // Nothing is kept, so nothing is to forget.
   }
 }

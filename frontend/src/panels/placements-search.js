@@ -1,4 +1,5 @@
 // @ts-check
+import { forgetSearch, recallSearch, rememberSearch } from '../api/keep.js';
 import { scoreWords } from './placement-facts.js';
 
 /**
@@ -97,6 +98,8 @@ function follow(store, shell, id) {
       const was = before.search.found.find((one) => one.id === before.chosen);
       const kept = was && result.placements.find((/** @type {any} */ one) => sameHolds(one, was));
       patchSearch(store, { state: 'done', progress: 1, result });
+      const { planId, search } = store.get();
+      if (planId) rememberSearch({ planId, id, plan: JSON.stringify(search.planAtSearch) });
       store.set({ chosen: (kept ?? result.placements[0])?.id ?? null });
       const count = result.placements.length;
       shell.say(
@@ -149,6 +152,35 @@ async function recover(store, shell, id) {
         faults: [],
       });
     }
+  }
+}
+
+/**
+ * After a reload: the last search of this tab, while the server still holds it and the same plot is open.
+ * @param {Store} store
+ * @param {Shell} shell
+ */
+export async function regainSearch(store, shell) {
+  const searched = recallSearch();
+  const here = () => store.get().planId === searched?.planId && store.get().search.state === 'none';
+  if (!searched || !here()) return;
+  try {
+    const held = await shell.api.readSearch(searched.id);
+    if (!here() || held.state !== 'done' || !held.result) return;
+    const { plan } = store.get();
+    const same = JSON.stringify(plan) === searched.plan;
+    patchSearch(store, {
+      id: searched.id,
+      state: 'done',
+      progress: 1,
+      result: held.result,
+      found: [],
+      own: [],
+      planAtSearch: same ? plan : JSON.parse(searched.plan),
+    });
+    store.set({ chosen: held.result.placements[0]?.id ?? null });
+  } catch {
+    forgetSearch();
   }
 }
 

@@ -5,7 +5,7 @@ import { stateMark } from '../charts/marks.js';
 import { number } from '../units/figures.js';
 import { isStale, listOf, ownOf } from './placement-facts.js';
 import { ORDERS, placementRows } from './placements-list.js';
-import { cancelSearch, startSearch } from './placements-search.js';
+import { cancelSearch, startSearch, regainSearch } from './placements-search.js';
 
 /**
  * Placements, left: starting a search, its progress, the ranked list.
@@ -29,6 +29,7 @@ export function mount(root, store, shell) {
   /** @type {{effort: 'quick'|'normal'|'thorough', view: import('./placements-list.js').Order, again: boolean}} */
   const choice = { effort: 'normal', view: 'overall', again: false };
   const ask = redrawer(root, () => render(store.get()));
+  store.subscribe((state) => state.planId, () => void regainSearch(store, shell));
   // Where list and figures share a column: the list while there is nothing to look at, then the best placement.
   store.subscribe(
     (state) => state.search.state,

@@ -47,6 +47,20 @@ class KeepsWorkIT extends BrowserTest {
   }
 
   @Test
+  void a_reload_finds_the_placements_again_while_the_server_holds_them() throws IOException {
+    open(1200, 800, ColorScheme.LIGHT);
+    Surveyor hand = new Surveyor(page);
+    hand.opened();
+    hand.search();
+    String before = page.locator(".search-ended").innerText();
+    page.reload();
+    hand.opened();
+    hand.go("placements");
+    page.locator(".search-ended").waitFor();
+    assertEquals(before, page.locator(".search-ended").innerText());
+  }
+
+  @Test
   void a_server_that_stops_and_comes_back_loses_nothing() throws IOException {
     open(1200, 800, ColorScheme.LIGHT);
     Surveyor hand = new Surveyor(page);
