@@ -7,7 +7,9 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.microsoft.playwright.Download;
+import com.microsoft.playwright.Locator;
 import com.microsoft.playwright.options.ColorScheme;
+import com.microsoft.playwright.options.WaitForSelectorState;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -219,12 +221,16 @@ class DrawsAGardenIT extends BrowserTest {
     List<String> clearances = page.locator("#placement .clearances tbody tr").allInnerTexts();
     assertTrue(clearances.size() >= 3, clearances.toString());
     assertTrue(clearances.stream().allMatch(r -> r.matches("(?s).*\\d\\.\\d\\d.*")));
+    page.locator("#placement .profile svg path").nth(2).waitFor(attached());
     assertTrue(page.locator("#placement .profile svg path").count() >= 3, "launch profile");
     Set<String> bands = new HashSet<>(page.locator("#placement .gains tbody th").allInnerTexts());
     assertEquals(Set.of("40 m", "20 m", "30 m"), bands);
     assertEquals(9, page.locator("#placement .feed tbody tr").count(), "each frequency");
+    page.locator("#side-view svg path").nth(3).waitFor(attached());
     assertTrue(page.locator("#side-view svg path").count() >= 4, "side view along the wire");
+    page.locator(".plan .layer-placement path").nth(1).waitFor(attached());
     assertTrue(page.locator(".plan .layer-placement path").count() >= 2, "the wire on the plan");
+    page.locator(".plan .layer-rose path").nth(1).waitFor(attached());
     assertTrue(page.locator(".plan .layer-rose path").count() >= 2, "the reach rose");
     for (String part : List.of("#placements", "#placement", "#side-view", "#plan-box")) {
       String markup = (String) page.locator(part).evaluate("part => part.outerHTML");
@@ -350,5 +356,10 @@ class DrawsAGardenIT extends BrowserTest {
     List<Double> values = new java.util.ArrayList<>();
     point.forEach(value -> values.add(value.asDouble()));
     return values;
+  }
+
+  /** Drawn, though perhaps out of sight. */
+  private static Locator.WaitForOptions attached() {
+    return new Locator.WaitForOptions().setState(WaitForSelectorState.ATTACHED);
   }
 }

@@ -35,7 +35,7 @@ class OverheadLineIT extends BrowserTest {
     assertTrue(said.contains("No placement is allowed on this plot as it stands"), said);
     checkRefusals();
     hand.go("sheet");
-    assertTrue(page.locator(".sheet-none").isVisible(), "there is nothing to rig");
+    page.locator(".sheet-none").waitFor();
 
     hand.go("survey");
     page.locator(".plan [data-ref='overheadLines/overhead-line-1']").press("Enter");
@@ -75,7 +75,8 @@ class OverheadLineIT extends BrowserTest {
     assertTrue(words.contains("Cure: "), words);
     first.locator("button.plain").click();
     page.locator(".plan .ghost.shown").waitFor();
-    assertTrue(page.locator("#refusals li.shown").count() == 1);
+    page.locator("#refusals li.shown").first().waitFor();
+    assertEquals(1, page.locator("#refusals li.shown").count());
     for (String one : page.locator("#refusals li").allInnerTexts()) {
       assertTrue(one.contains("Cure: "), one);
     }
