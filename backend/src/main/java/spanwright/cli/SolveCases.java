@@ -174,6 +174,9 @@ final class SolveCases {
       row.putNull("powerBalance");
     }
     row.put("efficiency", solution.efficiency());
+    row.put("wireLoss", solution.wireLossShare());
+    row.put("groundLoss", solution.groundLossShare());
+    row.put("residual", solution.residual());
     solution.refinementChange().ifPresent(change -> row.put("refinementChange", change));
     ArrayNode gains = row.putArray("gains");
     for (Direction direction : read.directions()) {
@@ -195,6 +198,7 @@ final class SolveCases {
         fields.addObject().put("electric", field.electric()).put("magnetic", field.magnetic());
       }
     }
+    row.put("trusted", solution.trusted());
     ArrayNode warnings = row.putArray("warnings");
     solution.warnings().forEach(warnings::add);
     return row;

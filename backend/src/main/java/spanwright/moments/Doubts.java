@@ -5,23 +5,51 @@ import java.util.List;
 import java.util.Locale;
 import org.apache.commons.math3.complex.Complex;
 
-/** What a solution should be doubted for, in words. */
+/**
+ * What a solution should be doubted for, in words. A warning says what the figures leave out; a
+ * failing, which is also a warning, that they must not be relied on.
+ */
 final class Doubts {
   private static final double LOW_WIRE = 0.3;
   private static final double SHORT_PIECE = 6;
   private static final double CLOSE_WIRES = 6;
 
-  private Doubts() {}
+  /** A residual beyond this share of the excitation spoils the answer. */
+  private static final double RESIDUAL = 1e-6;
 
-  static List<String> about(
+  /** Power that goes in and comes out nowhere, or the other way round, as a share. */
+  private static final double UNACCOUNTED = 0.01;
+
+  /** Moving so far on a finer mesh, as a multiple of what was aimed at, spoils the answer. */
+  private static final double FAR_OFF = 5;
+
+  final List<String> warnings;
+  final List<String> failings;
+
+  Doubts(List<String> warnings, List<String> failings) {
+    this.warnings = new ArrayList<>(warnings);
+    this.failings = new ArrayList<>(failings);
+  }
+
+  /** The same so far, to be added to on its own. */
+  Doubts copy() {
+    return new Doubts(warnings, failings);
+  }
+
+  static Doubts about(
       AntennaModel model, Ground ground, Outline outline, Mesh mesh, StaticPairs statics) {
-    List<String> out = new ArrayList<>();
-    thickness(model, outline, out);
+    Doubts out = new Doubts(List.of(), List.of());
+    thickness(model, outline, out.warnings);
     if (ground.kind() == Ground.Kind.REAL) {
-      lowWires(model, mesh, out);
+      lowWires(model, mesh, out.warnings);
     }
-    neighbours(mesh, statics, out);
+    neighbours(mesh, statics, out.warnings);
     return out;
+  }
+
+  private void fail(String sentence) {
+    warnings.add(sentence);
+    failings.add(sentence);
   }
 
   private static void thickness(AntennaModel model, Outline outline, List<String> out) {
@@ -87,9 +115,9 @@ final class Doubts {
     }
   }
 
-  static void ofAnswer(Complex impedance, SymmetricSystem system, Ground ground, List<String> out) {
-    if (system.residual > 1e-6) {
-      out.add(
+  void ofAnswer(Complex impedance, SymmetricSystem system, Ground ground) {
+    if (!(system.residual <= RESIDUAL)) {
+      fail(
           String.format(
               Locale.ROOT,
               "The linear system is nearly singular (residual %.1e): do not trust this answer.",
@@ -97,9 +125,47 @@ final class Doubts {
     }
     if (ground.kind() == Ground.Kind.REAL
         && impedance.getReal() < 2e-4 * Math.abs(impedance.getImaginary())) {
-      out.add(
+      fail(
           "The wire is so short for the frequency that its resistance is lost in the reactance:"
               + " resistance, gain and efficiency are uncertain.");
     }
+  }
+
+  void ofRefinement(double change, double allowed) {
+    if (change <= allowed) {
+      return;
+    }
+    String sentence =
+        String.format(
+            Locale.ROOT,
+            "A finer mesh moves the reflection coefficient (400 ohm) by %.3f, more than the %.2f"
+                + " aimed at: %s.",
+            change,
+            allowed,
+            change > FAR_OFF * allowed
+                ? "impedance, and what follows from it, must not be relied on"
+                : "take the impedance as no better than that");
+    if (change > FAR_OFF * allowed) {
+      fail(sentence);
+    } else {
+      warnings.add(sentence);
+    }
+  }
+
+  /**
+   * @param accounted radiated and lost in the wires, over input
+   * @param soil whether the ground may take a share as well
+   */
+  static List<String> ofPower(double accounted, boolean soil) {
+    boolean closes = soil ? accounted < 1 + UNACCOUNTED : Math.abs(accounted - 1) < UNACCOUNTED;
+    return closes
+        ? List.of()
+        : List.of(
+            String.format(
+                Locale.ROOT,
+                "Power does not balance: %.1f %% of the input is radiated or lost in the wires,"
+                    + " where %s 100 %% can be. Do not trust this answer.",
+                100 * accounted,
+                soil ? "at most" : "just"));
   }
 }

@@ -1,7 +1,5 @@
 package spanwright.moments;
 
-import java.util.ArrayList;
-import java.util.List;
 import org.apache.commons.math3.complex.Complex;
 
 /**
@@ -20,7 +18,7 @@ final class PreparedModel {
   private final Mesh mesh;
   private final StaticPairs statics;
   private final SourcePoints points;
-  private final List<String> warnings;
+  private final Doubts doubts;
 
   PreparedModel(AntennaModel model, Ground ground, double highestMHz, MeshRule rule) {
     this.model = model;
@@ -38,7 +36,7 @@ final class PreparedModel {
     mesh = Mesh.of(model, outline, rule, k);
     statics = new StaticPairs(mesh);
     points = new SourcePoints(mesh);
-    warnings = Doubts.about(model, ground, outline, mesh, statics);
+    doubts = Doubts.about(model, ground, outline, mesh, statics);
   }
 
   Solution solve(double frequencyMHz, Reflection reflection) {
@@ -74,8 +72,8 @@ final class PreparedModel {
     }
     Currents currents = new Currents(mesh, system.answerRe, system.answerIm);
     FarField far = new FarField(currents, points, ground, k);
-    List<String> all = new ArrayList<>(warnings);
-    Doubts.ofAnswer(impedance, system, ground, all);
+    Doubts all = doubts.copy();
+    all.ofAnswer(impedance, system, ground);
     Solution.Found found =
         new Solution.Found(
             frequencyMHz, impedance, 0.5 * ir, currents.loss(resistance), system.residual, all);

@@ -22,18 +22,19 @@ public final class Solution {
   private final double residual;
   private final double refinementChange;
   private final List<String> warnings;
+  private final List<String> failings;
   private final List<WireSpec> wires;
   private volatile FarField.Sky sky;
   private volatile Peak peak;
 
-  /** What the solver found. */
+  /** What the solver found; doubts holds what is to be said of it. */
   record Found(
       double frequencyMHz,
       Complex impedance,
       double inputPower,
       double wireLoss,
       double residual,
-      List<String> warnings) {}
+      Doubts doubts) {}
 
   Solution(
       Found found,
@@ -48,7 +49,8 @@ public final class Solution {
     this.inputPower = found.inputPower();
     this.wireLoss = found.wireLoss();
     this.residual = found.residual();
-    this.warnings = List.copyOf(found.warnings());
+    this.warnings = List.copyOf(found.doubts().warnings);
+    this.failings = List.copyOf(found.doubts().failings);
     this.currents = currents;
     this.far = far;
     this.reflection = reflection;
@@ -59,10 +61,10 @@ public final class Solution {
   }
 
   /** The same, held against a finer mesh. */
-  Solution refined(double change, List<String> more) {
-    List<String> all = new ArrayList<>(warnings);
-    all.addAll(more);
-    Found found = new Found(frequencyMHz, impedance, inputPower, wireLoss, residual, all);
+  Solution refined(double change, double allowed) {
+    Doubts doubts = new Doubts(warnings, failings);
+    doubts.ofRefinement(change, allowed);
+    Found found = new Found(frequencyMHz, impedance, inputPower, wireLoss, residual, doubts);
     return new Solution(found, currents, far, reflection, ground, wires, change);
   }
 
@@ -89,6 +91,14 @@ public final class Solution {
   /** Lost in the wires over input, 0 to 1. */
   public double wireLossShare() {
     return wireLoss / inputPower;
+  }
+
+  /**
+   * Lost in the ground over input, 0 to 1: nothing in free space and over perfect ground; over real
+   * ground what efficiency and wire loss leave, since it is not integrated on its own.
+   */
+  public double groundLossShare() {
+    return ground.kind() == Ground.Kind.REAL ? Math.max(0, 1 - efficiency() - wireLossShare()) : 0;
   }
 
   /**
@@ -127,9 +137,43 @@ public final class Solution {
         : OptionalDouble.of(refinementChange);
   }
 
-  /** Doubts about the model or the answer, as sentences; empty when there are none. */
+  /**
+   * All doubts about the model or the answer, as sentences; empty when there are none. Those that
+   * forbid relying on the answer are among them, and alone in {@link #failings}.
+   */
   public List<String> warnings() {
-    return warnings;
+    List<String> closing = closing();
+    if (closing.isEmpty()) {
+      return warnings;
+    }
+    List<String> all = new ArrayList<>(warnings);
+    all.addAll(closing);
+    return all;
+  }
+
+  /**
+   * Why the figures of this answer must not be relied on, as sentences; empty when they may. What
+   * fails here must never be ranked as good.
+   */
+  public List<String> failings() {
+    List<String> closing = closing();
+    if (closing.isEmpty()) {
+      return failings;
+    }
+    List<String> all = new ArrayList<>(failings);
+    all.addAll(closing);
+    return all;
+  }
+
+  /** Whether nothing was found that forbids relying on the answer: no {@link #failings}. */
+  public boolean trusted() {
+    return failings().isEmpty();
+  }
+
+  /** What is wrong when the power that goes out is not the power that goes in. */
+  private List<String> closing() {
+    double accounted = (radiated() + wireLoss) / inputPower;
+    return Doubts.ofPower(accounted, ground.kind() == Ground.Kind.REAL);
   }
 
   /** Gain is intensity times this. */

@@ -3,7 +3,6 @@ package spanwright.moments;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import org.apache.commons.math3.complex.Complex;
 
@@ -89,17 +88,7 @@ public final class Solver {
             .subtract(reflectionCoefficient(other.impedance()))
             .abs();
     double allowed = aim == MeshAim.COARSE ? 0.05 : 0.01;
-    List<String> more =
-        change <= allowed
-            ? List.of()
-            : List.of(
-                String.format(
-                    Locale.ROOT,
-                    "A finer mesh moves the reflection coefficient (400 ohm) by %.3f, more than"
-                        + " the %.2f aimed at: solve with a finer mesh.",
-                    change,
-                    allowed));
-    return solution.refined(change, more);
+    return solution.refined(change, allowed);
   }
 
   private static Complex reflectionCoefficient(Complex z) {
