@@ -82,8 +82,10 @@ public final class Benchmarks {
             .forks(1)
             .warmupIterations(3)
             .warmupTime(TimeValue.milliseconds(quick ? 400 : 1000))
-            .measurementIterations(quick ? 5 : 8)
-            .measurementTime(TimeValue.milliseconds(quick ? 100 : 200))
+            .measurementIterations(quick ? 8 : 15)
+            .measurementTime(TimeValue.milliseconds(quick ? 60 : 100))
+            // compiled before it goes on, so that warming up needs no second core
+            .jvmArgsAppend("-Xbatch")
             .shouldFailOnError(true);
     if (patterns.isEmpty()) {
       options.include("spanwright.*Bench.*");
@@ -96,7 +98,7 @@ public final class Benchmarks {
       options.addProfiler(GCProfiler.class);
     }
     if (nofma) {
-      options.jvmArgsAppend("-XX:-UseFMA");
+      options.jvmArgsAppend("-Xbatch", "-XX:-UseFMA");
     }
     return options;
   }
