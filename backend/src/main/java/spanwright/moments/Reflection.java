@@ -24,6 +24,25 @@ interface Reflection {
   void ratios(double rho, double zeta, double[] out);
 
   /**
+   * The ratios of many places at once: out[m][i] is what {@link #ratios(double, double, double[])}
+   * gives at m for rhos[i], zetas[i].
+   *
+   * @param rhos horizontal distances [m]
+   * @param zetas sums of the heights [m]
+   * @param count how many
+   * @param out eight rows of at least so many values
+   */
+  default void ratios(double[] rhos, double[] zetas, int count, double[][] out) {
+    double[] one = new double[RATIOS];
+    for (int i = 0; i < count; i++) {
+      ratios(rhos[i], zetas[i], one);
+      for (int m = 0; m < RATIOS; m++) {
+        out[m][i] = one[m];
+      }
+    }
+  }
+
+  /**
    * The ratios GA, GP, GZ, F, GT (re, im in turn), then their derivatives by ρ, then by ζ.
    *
    * @param rho horizontal distance [m]
