@@ -8,13 +8,11 @@ import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
-import org.openjdk.jmh.annotations.Level;
 import org.openjdk.jmh.annotations.Mode;
 import org.openjdk.jmh.annotations.OutputTimeUnit;
 import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.Setup;
 import org.openjdk.jmh.annotations.State;
-import spanwright.moments.Solver;
 import spanwright.plan.Catalogues;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
@@ -25,6 +23,8 @@ import spanwright.rigging.Layout;
 @State(Scope.Thread)
 @OutputTimeUnit(TimeUnit.MILLISECONDS)
 public class AssessBench {
+  private static final int ROUND = 40;
+
   private Plan plan;
   private Assessor assessor;
   private int step;
@@ -34,13 +34,9 @@ public class AssessBench {
   public void prepare() {
     plan = plan("corner-plot");
     assessor = Assessor.of(plan, Catalogues.standard());
-    assessor.assess(layout(0));
-  }
-
-  /** As a server has done when the first page comes. */
-  @Setup(Level.Trial)
-  public void warm() {
-    Solver.warmUp();
+    for (int i = 0; i < ROUND; i++) {
+      assessor.assess(layout(i));
+    }
   }
 
   static Plan plan(String name) {
@@ -55,7 +51,7 @@ public class AssessBench {
 
   /** A wire over a mast on the lawn; the mast goes round in a circle, as if drawn by a mouse. */
   static Layout layout(int step) {
-    double turn = 2 * Math.PI * (step % 40) / 40;
+    double turn = 2 * Math.PI * (step % ROUND) / ROUND;
     Place top = new Place(18.5 + 0.8 * Math.cos(turn), 22.5 + 0.8 * Math.sin(turn), 9);
     return new Layout(
         "apex",
@@ -77,10 +73,12 @@ public class AssessBench {
     return assessor.assess(layout(step++));
   }
 
-  /** The first on a new plot: nothing prepared, no table filled, code warm. */
+  /**
+   * A new plot while the program has been at work for a while: nothing prepared, no table filled.
+   */
   @Benchmark
   @BenchmarkMode(Mode.AverageTime)
-  public Object firstAssess() {
+  public Object assessOnNewPlot() {
     return Assessor.of(plan, Catalogues.standard()).assess(layout(0));
   }
 }

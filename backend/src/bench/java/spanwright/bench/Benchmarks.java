@@ -8,8 +8,9 @@ import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import org.openjdk.jmh.profile.GCProfiler;
-import org.openjdk.jmh.profile.StackProfiler;
+import org.openjdk.jmh.profile.JavaFlightRecorderProfiler;
 import org.openjdk.jmh.results.RunResult;
+import org.openjdk.jmh.runner.NoBenchmarksException;
 import org.openjdk.jmh.runner.Runner;
 import org.openjdk.jmh.runner.RunnerException;
 import org.openjdk.jmh.runner.options.ChainedOptionsBuilder;
@@ -21,12 +22,15 @@ import spanwright.moments.BenchSizes;
  * Runs all benchmarks, LAPACK's zgesv before and after them, and writes {@code
  * target/performance.md}.
  *
- * <p>Arguments: {@code quick} (shorter, rougher), {@code profile} (where the time goes, by stack
- * samples), {@code allocation} (bytes per call), {@code nofma} (hardware fused multiply-add
+ * <p>Arguments: {@code quick} (shorter, rougher), {@code profile} (where the time goes, by samples
+ * of the stack), {@code allocation} (bytes per call), {@code nofma} (hardware fused multiply-add
  * switched off), {@code python=COMMAND} (a Python with NumPy and SciPy; {@code none} leaves zgesv
  * out), and anything else as a pattern for the names of the benchmarks to run.
  */
 public final class Benchmarks {
+  private static final Path PROFILES = Path.of("target", "profiles");
+  private static final String NO_FMA = "-XX:-UseFMA";
+
   private boolean quick;
   private boolean profile;
   private boolean allocation;
@@ -66,40 +70,79 @@ public final class Benchmarks {
     System.setProperty("jmh.ignoreLock", "true");
     Map<Integer, Integer> unknowns = BenchSizes.unknowns();
     Path script = Path.of("src", "bench", "zgesv.py");
+    Profiles.forget(PROFILES);
     Zgesv before = Zgesv.measure(python, script, unknowns.values());
-    Collection<RunResult> results = new Runner(options().build()).run();
+    Collection<RunResult> results = new ArrayList<>();
+    results.addAll(results(steady()));
+    results.addAll(results(chain()));
+    results.addAll(results(first()));
     Zgesv after = Zgesv.measure(python, script, unknowns.values());
     String text = new Report(results, unknowns, before, after).text();
+    if (profile) {
+      text += Profiles.text(PROFILES);
+    }
     Files.createDirectories(Path.of("target"));
     Files.writeString(Path.of("target", "performance.md"), text);
     System.out.println();
     System.out.print(text);
   }
 
-  private ChainedOptionsBuilder options() {
-    ChainedOptionsBuilder options =
-        new OptionsBuilder()
-            .forks(1)
-            .warmupIterations(3)
-            .warmupTime(TimeValue.milliseconds(quick ? 400 : 1000))
-            .measurementIterations(quick ? 8 : 15)
-            .measurementTime(TimeValue.milliseconds(quick ? 60 : 100))
-            // compiled before it goes on, so that warming up needs no second core
-            .jvmArgsAppend("-Xbatch")
-            .shouldFailOnError(true);
-    if (patterns.isEmpty()) {
-      options.include("spanwright.*Bench.*");
-    }
-    patterns.forEach(options::include);
+  /** The parts: short calls. */
+  private ChainedOptionsBuilder steady() {
+    int each = profile ? 400 : quick ? 60 : 100;
+    return warmed(options().exclude("AssessBench"), quick ? 400 : 1000)
+        .measurementIterations(quick ? 8 : 15)
+        .measurementTime(TimeValue.milliseconds(each));
+  }
+
+  /** The whole chain: more code to compile, and enough calls for a percentile. */
+  private ChainedOptionsBuilder chain() {
+    return warmed(options().exclude("\\.(?!Assess)\\w+Bench\\."), quick ? 1500 : 3000)
+        .measurementIterations(quick ? 4 : 10)
+        .measurementTime(TimeValue.milliseconds(1000));
+  }
+
+  private ChainedOptionsBuilder warmed(ChainedOptionsBuilder options, int milliseconds) {
+    options
+        .forks(1)
+        .warmupIterations(3)
+        .warmupTime(TimeValue.milliseconds(milliseconds))
+        // compiled before it goes on, so that warming up needs no second core
+        .jvmArgsAppend(nofma ? NO_FMA : "-Xbatch", "-Xbatch");
     if (profile) {
-      options.addProfiler(StackProfiler.class, "lines=false;top=12;detailLine=false");
+      options.addProfiler(JavaFlightRecorderProfiler.class, "configName=profile;dir=" + PROFILES);
     }
     if (allocation) {
       options.addProfiler(GCProfiler.class);
     }
+    return options;
+  }
+
+  /** Each in a machine of its own, just started. */
+  private ChainedOptionsBuilder first() {
+    ChainedOptionsBuilder options =
+        options().exclude("\\.(?!First)\\w+Bench\\.").forks(quick ? 1 : 3);
     if (nofma) {
-      options.jvmArgsAppend("-Xbatch", "-XX:-UseFMA");
+      options.jvmArgsAppend(NO_FMA);
     }
+    return options;
+  }
+
+  private static Collection<RunResult> results(ChainedOptionsBuilder options)
+      throws RunnerException {
+    try {
+      return new Runner(options.build()).run();
+    } catch (NoBenchmarksException none) {
+      return List.of();
+    }
+  }
+
+  private ChainedOptionsBuilder options() {
+    ChainedOptionsBuilder options = new OptionsBuilder().shouldFailOnError(true);
+    if (patterns.isEmpty()) {
+      options.include("spanwright.*Bench.*");
+    }
+    patterns.forEach(options::include);
     return options;
   }
 }

@@ -95,7 +95,7 @@ final class Report {
     if (rest.isEmpty()) {
       return;
     }
-    text.append("| | best or median | 95th percentile | unit |\n| --- | ---: | ---: | --- |\n");
+    text.append("| | time | 95th percentile | unit |\n| --- | ---: | ---: | --- |\n");
     for (RunResult result : rest) {
       String name = result.getParams().getBenchmark();
       StringBuilder with = new StringBuilder(name.substring(name.lastIndexOf('.') + 1));
