@@ -37,19 +37,21 @@ final class Boundary {
   void check(Strand strand, Obstacle.Scene scene, Tally tally) {
     switch (strand.part) {
       case WIRE, FEED_LINE, ROPE -> walk(strand, scene, tally.of("boundary", "boundary"));
-      case GUY -> foot(strand, tally);
+      case GUY -> foot(strand, tally.of("guy-in-plot", "boundary"), guyRequired);
+      case MAST -> foot(strand, tally.of("boundary", "boundary"), 0);
       default -> {
         // what stands upright at a support is where the support is
       }
     }
   }
 
-  private void foot(Strand strand, Tally tally) {
+  /** A guy's peg is its strand's last point, a mast's foot its first. */
+  private void foot(Strand strand, Tally.Worst worst, double needed) {
     double[] p = strand.states[0];
-    int end = p.length - 3;
+    int end = strand.part == Strand.Part.MAST ? 0 : p.length - 3;
     double inside = -area.signed(p[end], p[end + 1]);
     Place at = Obstacle.place(p, end);
-    tally.of("guy-in-plot", "boundary").offer(inside, guyRequired, "guy", at, edge(at));
+    worst.offer(inside, needed, strand.part.word, at, edge(at));
   }
 
   boolean allows(int edge, boolean rope) {
@@ -65,7 +67,7 @@ final class Boundary {
       for (int i = 0; i + 3 < p.length; i += 3) {
         double allowance = strand.slack(s, i);
         boolean own = rope && !still && nearOwn(strand, scene, p, i);
-        if (!own && !isDeepInside(p, i, allowance + Math.min(range, worst.spare() + required))) {
+        if (!own && !isDeepInside(p, i, allowance + worst.reach(required, range))) {
           piece(p, i, rope, allowance, strand.part.word, worst);
         }
       }

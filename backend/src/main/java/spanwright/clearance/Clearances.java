@@ -33,6 +33,7 @@ public final class Clearances {
   private static final double RANGE = 5;
 
   private final GroundSurface ground;
+  private final Lowest lowest;
   private final RuleBook rules;
   private final double margin;
   private final Rigging rigging;
@@ -46,6 +47,7 @@ public final class Clearances {
 
   private Clearances(Plan plan, Catalogue catalogue) {
     ground = GroundSurface.of(plan);
+    lowest = new Lowest(ground);
     rules = RuleBook.of(plan, catalogue);
     margin = rules.value("tight-margin");
     headroom = rules.value("headroom");
@@ -85,7 +87,7 @@ public final class Clearances {
     for (Zone each : plan.zones()) {
       switch (each.rule()) {
         case NO_WIRE -> all.add(new Volumes.NoWire(each, rules, RANGE));
-        case HEADROOM -> all.add(new Volumes.Headroom(each, ground, rules));
+        case HEADROOM -> all.add(new Volumes.Headroom(each, lowest, rules));
         case NO_MAST -> noMast.add(each);
       }
     }
@@ -172,8 +174,7 @@ public final class Clearances {
     for (int s = 0; s < strand.states.length; s++) {
       double[] state = strand.states[s];
       for (int i = 0; i + 3 < state.length; i += 3) {
-        double allowance = strand.slack(s, i);
-        Volumes.lowest(state, i, 0, 1, ground, allowance, headroom, "wire", worst);
+        lowest.offer(state, i, 0, 1, strand.slack(s, i), headroom, strand.part.word, worst);
       }
     }
   }

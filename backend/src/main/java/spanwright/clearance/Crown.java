@@ -1,5 +1,6 @@
 package spanwright.clearance;
 
+import java.util.function.IntPredicate;
 import spanwright.plan.Canopy;
 import spanwright.plan.Place;
 import spanwright.plan.Point;
@@ -8,7 +9,8 @@ import spanwright.rigging.RuleBook;
 /**
  * A tree's crown: an upright cylinder, which holds whatever round shape the crown truly has. Wire
  * keeps its distance on a calm day and stays out of the crown in the gust; the wire's ends keep
- * more. The crown of the tree that holds the wire moves with it in the gust. Ropes may touch.
+ * more. The crown of the tree that holds the wire moves with it in the gust. The feed line keeps
+ * out on a calm day, new masts and their guys always. Ropes may touch.
  */
 final class Crown implements Obstacle {
   private final String id;
@@ -20,6 +22,8 @@ final class Crown implements Obstacle {
   private final double[] box;
   private final double wire;
   private final double end;
+  private final double line;
+  private final double rigging;
   private final double range;
 
   Crown(String id, Point at, Canopy canopy, double ground, RuleBook rules, double range) {
@@ -32,6 +36,8 @@ final class Crown implements Obstacle {
     box = new double[] {x - radius, y - radius, low, x + radius, y + radius, high};
     wire = rules.value("canopy-wire");
     end = rules.value("canopy-end");
+    line = rules.value("canopy-feed-line");
+    rigging = rules.value("canopy-mast");
     this.range = range;
   }
 
@@ -42,23 +48,31 @@ final class Crown implements Obstacle {
 
   @Override
   public void check(Strand strand, Scene scene, Tally tally) {
-    if (strand.part != Strand.Part.WIRE) {
-      return;
-    }
-    Tally.Worst worst = tally.of("canopy-wire", id);
-    boolean own = isOwn(strand.from, scene) || isOwn(strand.to, scene);
-    for (int s = 0; s < strand.states.length; s++) {
-      boolean still = strand.isStill(s);
-      if (still || !own) {
-        walk(strand, s, still ? wire : 0, worst);
+    switch (strand.part) {
+      case WIRE -> {
+        Tally.Worst worst = tally.of("canopy-wire", id);
+        boolean own = isOwn(strand.from, scene) || isOwn(strand.to, scene);
+        walk(strand, strand::isStill, wire, worst);
+        if (!own) {
+          walk(strand, index -> !strand.isStill(index), 0, worst);
+        }
+        double[] calm = strand.states[strand.calm];
+        if (strand.startIsEnd) {
+          end(calm, 0, tally);
+        }
+        if (strand.endIsEnd) {
+          end(calm, calm.length - 3, tally);
+        }
       }
-    }
-    double[] calm = strand.states[strand.calm];
-    if (strand.startIsEnd) {
-      end(calm, 0, tally);
-    }
-    if (strand.endIsEnd) {
-      end(calm, calm.length - 3, tally);
+      case MAST, GUY -> walk(strand, Walk.ALL, rigging, tally.of("canopy-mast", id));
+      case FEED_LINE -> {
+        if (!isOwn(strand.from, scene)) {
+          walk(strand, strand::isStill, line, tally.of("canopy-feed-line", id));
+        }
+      }
+      default -> {
+        // ropes and what runs down a tree may touch leaves
+      }
     }
   }
 
@@ -74,25 +88,22 @@ final class Crown implements Obstacle {
     }
   }
 
-  private void walk(Strand strand, int index, double required, Tally.Worst worst) {
-    double[] state = strand.states[index];
-    if (strand.isFarther(index, box, Math.min(range, worst.spare() + required))) {
-      return;
-    }
-    for (int i = 0; i + 3 < state.length; i += 3) {
-      double allowance = strand.slack(index, i);
-      if (Obstacle.gap(state, i, box) - allowance > Math.min(range, worst.spare() + required)) {
-        continue;
-      }
-      double t = nearestShare(state, i);
-      Place at =
-          new Place(
-              state[i] + t * (state[i + 3] - state[i]),
-              state[i + 1] + t * (state[i + 4] - state[i + 1]),
-              state[i + 2] + t * (state[i + 5] - state[i + 2]));
-      double distance = signed(at.x(), at.y(), at.z()) - allowance;
-      worst.offer(distance, required, strand.part.word, at, nearest(at));
-    }
+  private void walk(Strand strand, IntPredicate which, double required, Tally.Worst worst) {
+    Walk.along(
+        strand,
+        box,
+        which,
+        () -> worst.reach(required, range),
+        (index, points, i, allowance) -> {
+          double t = nearestShare(points, i);
+          Place at =
+              new Place(
+                  points[i] + t * (points[i + 3] - points[i]),
+                  points[i + 1] + t * (points[i + 4] - points[i + 1]),
+                  points[i + 2] + t * (points[i + 5] - points[i + 2]));
+          double distance = signed(at.x(), at.y(), at.z()) - allowance;
+          worst.offer(distance, required, strand.part.word, at, nearest(at));
+        });
   }
 
   /** Where along a piece the crown is nearest: the distance to a convex body has one valley. */

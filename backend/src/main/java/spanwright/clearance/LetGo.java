@@ -16,6 +16,9 @@ import java.util.Arrays;
 final class LetGo {
   private static final double CORNER = Math.toRadians(4);
 
+  /** What an answer far beyond what is required may fall short by, as a share of what is beyond. */
+  private static final double FAR = 0.005;
+
   /** Below this way on plan the course of a span has no azimuth: it may swing all round. */
   private static final double UPRIGHT = 0.5;
 
@@ -187,7 +190,7 @@ final class LetGo {
 
     void search(double from, double to, double atFrom, double atTo, double length) {
       double lower = Math.max(0, (atFrom + atTo - length) / 2);
-      double tolerance = 0.002 + 0.04 * Math.max(0, best - required);
+      double tolerance = 0.002 + FAR * Math.max(0, best - required);
       if (lower >= best - tolerance || length < 1e-4) {
         bound = Math.min(bound, lower);
         return;
@@ -206,7 +209,7 @@ final class LetGo {
 
   /**
    * A distance no greater than that from the region to a line's segment [m], within 2 mm where it
-   * is near what is required.
+   * is near what is required and half a hundredth of what is beyond it.
    *
    * @param near offered the nearest pair found, the region's place as ours
    */

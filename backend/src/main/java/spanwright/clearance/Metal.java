@@ -18,6 +18,10 @@ final class Metal implements Obstacle {
     this.range = range;
     path = Strand.flat(ground.raise(source.path()));
     box = Space.box(path, 0, path.length / 3 - 1);
+    for (int k = 0; k < 3; k++) {
+      box[k] -= source.radius();
+      box[k + 3] += source.radius();
+    }
     required = rules.value("metalwork-wire");
   }
 
@@ -32,28 +36,22 @@ final class Metal implements Obstacle {
       return;
     }
     Tally.Worst worst = tally.of("metalwork-wire", source.id());
-    for (int s = 0; s < strand.states.length; s++) {
-      double[] state = strand.states[s];
-      if (strand.isFarther(s, box, Math.min(range, worst.spare() + required) + source.radius())) {
-        continue;
-      }
-      for (int i = 0; i + 3 < state.length; i += 3) {
-        double allowance = strand.slack(s, i) + source.radius();
-        double most = Math.min(range, worst.spare() + required) + allowance;
-        if (Obstacle.gap(state, i, box) > most) {
-          continue;
-        }
-        Space.Near near = new Space.Near();
-        for (int k = 0; k + 3 < path.length; k += 3) {
-          Space.segments(state, i, i + 3, path, k, k + 3, near);
-        }
-        worst.offer(
-            Math.max(0, near.distance() - allowance),
-            required,
-            strand.part.word,
-            new Place(near.ax, near.ay, near.az),
-            new Place(near.bx, near.by, near.bz));
-      }
-    }
+    Walk.along(
+        strand,
+        box,
+        Walk.ALL,
+        () -> worst.reach(required, range),
+        (index, points, i, allowance) -> {
+          Space.Near near = new Space.Near();
+          for (int k = 0; k + 3 < path.length; k += 3) {
+            Space.segments(points, i, i + 3, path, k, k + 3, near);
+          }
+          worst.offer(
+              Math.max(0, near.distance() - allowance - source.radius()),
+              required,
+              strand.part.word,
+              new Place(near.ax, near.ay, near.az),
+              new Place(near.bx, near.by, near.bz));
+        });
   }
 }

@@ -1,6 +1,7 @@
 package spanwright.clearance;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import spanwright.plan.Catalogue;
 import spanwright.plan.GroundSurface;
@@ -209,44 +210,49 @@ final class Overhead {
 
   // --- wire let go
 
+  /** One end that lets go: what still holds, and how near its region can be at all. */
+  private record Loss(Rigged.Span span, boolean fromFirst, double[] seen, double bound) {
+    double reach() {
+      return span.reach(fromFirst) * STRETCH;
+    }
+  }
+
   private void letGo(Line line, Rigged rigged, List<Holder> holders, List<Clearance> into) {
-    double least = Double.POSITIVE_INFINITY;
-    Space.Near nearest = new Space.Near();
-    String what = "";
+    List<Loss> losses = new ArrayList<>();
     for (Rigged.Span span : rigged.spans()) {
       double[] shape = Strand.flat(span.shapes().calm());
-      for (int end = 0; end < 2; end++) {
-        boolean fromFirst = end == 0;
+      for (boolean fromFirst : new boolean[] {true, false}) {
         double[] seen = fromFirst ? shape : backwards(shape);
-        double reach = span.reach(fromFirst) * STRETCH;
         // What lies farther than the reach from the point that holds cannot be touched.
         Space.Near direct = new Space.Near();
         for (int k = 0; k < line.segments(); k++) {
           Space.pointSegment(
               seen[0], seen[1], seen[2], line.path(), 3 * k, 3 * k + 3, true, direct);
         }
-        double bound = direct.distance() - reach;
-        if (bound >= least) {
-          continue;
-        }
-        Space.Near near = new Space.Near();
-        double found = Double.POSITIVE_INFINITY;
-        if (bound > line.kept() + FAR) {
-          found = bound;
-          near = direct;
-        } else {
-          LetGo region = new LetGo(seen, reach, half);
-          for (int k = 0; k < line.segments(); k++) {
-            found =
-                Math.min(found, region.toSegment(line.path(), 3 * k, 3 * k + 3, line.kept(), near));
-          }
-        }
-        if (found < least) {
-          least = found;
-          nearest = near;
-          Holder lost = holders.get(fromFirst ? span.to() : span.from());
-          what = "wire let go at " + lost.name();
-        }
+        double reach = span.reach(fromFirst) * STRETCH;
+        losses.add(new Loss(span, fromFirst, seen, direct.distance() - reach));
+      }
+    }
+    losses.sort(Comparator.comparingDouble(Loss::bound));
+    double least = Double.POSITIVE_INFINITY;
+    Space.Near nearest = new Space.Near();
+    String what = "";
+    for (Loss loss : losses) {
+      if (loss.bound >= least) {
+        break;
+      }
+      LetGo region = new LetGo(loss.seen, loss.reach(), half);
+      Space.Near near = new Space.Near();
+      double found = Double.POSITIVE_INFINITY;
+      for (int k = 0; k < line.segments(); k++) {
+        found = Math.min(found, region.toSegment(line.path(), 3 * k, 3 * k + 3, line.kept(), near));
+      }
+      if (found < least) {
+        least = found;
+        nearest = near;
+        what =
+            "wire let go at "
+                + holders.get(loss.fromFirst ? loss.span.to() : loss.span.from()).name();
       }
     }
     into.add(clearance("wire-let-go", line, what, nearest, least, line.kept()));

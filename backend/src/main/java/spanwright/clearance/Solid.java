@@ -1,8 +1,10 @@
 package spanwright.clearance;
 
 import java.util.List;
+import java.util.function.IntPredicate;
 import spanwright.plan.Place;
 import spanwright.rigging.Holder;
+import spanwright.rigging.PlanShapes;
 import spanwright.rigging.Roof;
 import spanwright.rigging.RuleBook;
 
@@ -13,6 +15,14 @@ final class Solid implements Obstacle {
 
   private static final double DEPTH = 50;
 
+  /** An entry this near to a building's outline is in its wall [m]. */
+  private static final double AT_ENTRY = 1;
+
+  /**
+   * A zone's base over a pitched roof is one height: a foot may lie this much under the tiles [m].
+   */
+  private static final double SUNK = 1.5;
+
   private final Roof roof;
   private final List<double[]> faces;
   private final List<double[]> faceBoxes;
@@ -20,6 +30,7 @@ final class Solid implements Obstacle {
   private final double wire;
   private final double rope;
   private final double line;
+  private final double mast;
   private final double range;
 
   Solid(Roof roof, RuleBook rules, double range) {
@@ -40,6 +51,7 @@ final class Solid implements Obstacle {
     wire = rules.value("building-wire");
     rope = rules.value("building-rope");
     line = rules.value("building-feed-line");
+    mast = rules.value("building-mast");
   }
 
   @Override
@@ -51,36 +63,82 @@ final class Solid implements Obstacle {
   public void check(Strand strand, Scene scene, Tally tally) {
     String id = roof.building().id();
     switch (strand.part) {
-      case WIRE -> walk(strand, scene, tally.of("building-wire", id), wire);
-      case ROPE, GUY -> walk(strand, scene, tally.of("building-rope", id), rope);
-      case FEED_LINE -> walk(strand, scene, tally.of("building-feed-line", id), line);
+      case WIRE -> walk(strand, scene, Walk.ALL, wire, tally.of("building-wire", id));
+      case ROPE, GUY -> walk(strand, scene, Walk.ALL, rope, tally.of("building-rope", id));
+      case FALL -> {
+        if (!scene.holders().get(strand.from).isWall()) {
+          walk(strand, scene, Walk.ALL, rope, tally.of("building-rope", id));
+        }
+      }
+      case FEED_LINE -> {
+        Tally.Worst worst = tally.of("building-feed-line", id);
+        walk(strand, scene, strand::isStill, line, worst);
+        if (!isAt(scene.entry())) {
+          walk(strand, scene, index -> !strand.isStill(index), 0, worst);
+        }
+      }
+      case MAST -> foot(strand, tally);
       default -> {
-        // masts, halyards and falls stand on or run along what holds them
+        // halyards run down what holds them
       }
     }
   }
 
-  private void walk(Strand strand, Scene scene, Tally.Worst worst, double required) {
-    double[] piece = new double[6];
-    // In the gust a line may lean on the wall it runs along.
-    boolean calmOnly = strand.part == Strand.Part.FEED_LINE;
-    for (int s = 0; s < strand.states.length; s++) {
-      double[] state = strand.states[s];
-      if (strand.isFarther(s, box, Math.min(range, worst.spare() + required))) {
-        continue;
-      }
-      for (int i = 0; i + 3 < state.length && (s == strand.calm || !calmOnly); i += 3) {
-        double most = Math.min(range, worst.spare() + required);
-        if (Obstacle.gap(state, i, box) - strand.slack(s, i) > most) {
-          continue;
-        }
-        System.arraycopy(state, i, piece, 0, 6);
-        // Rope and line may touch what holds them; wire keeps its distance there too.
-        if (strand.part == Strand.Part.WIRE || !exempt(strand, scene, piece)) {
-          piece(strand, piece, strand.slack(s, i), worst, required);
+  /**
+   * Whether this is the building the feed line goes into: in the gust it may lean on that one's
+   * wall, which the notes tell.
+   */
+  private boolean isAt(Place entry) {
+    return Space.boxes(
+                new double[] {entry.x(), entry.y(), 0, entry.x(), entry.y(), 0},
+                new double[] {box[0], box[1], 0, box[3], box[4], 0})
+            < AT_ENTRY
+        && PlanShapes.toPath(roof.building().footprint(), entry.onPlan(), true) < AT_ENTRY;
+  }
+
+  /** How deep the blown feed line is drawn into the building it goes into [m]; 0 when it is not. */
+  double leaned(Strand strand, Place entry) {
+    double most = 0;
+    if (strand.part == Strand.Part.FEED_LINE && isAt(entry)) {
+      for (int s = 0; s < strand.states.length; s++) {
+        double[] p = strand.states[s];
+        for (int i = 0; i < p.length && !strand.isStill(s); i += 3) {
+          boolean led = Obstacle.place(p, i).distance(entry) < OWN;
+          most = led ? most : Math.max(most, depth(p[i], p[i + 1], p[i + 2]));
         }
       }
     }
+    return most;
+  }
+
+  /** A mast stands beside a building or on its roof, not in it. */
+  private void foot(Strand strand, Tally tally) {
+    double[] p = strand.states[0];
+    double depth = depth(p[0], p[1], p[2]);
+    if (depth > SUNK) {
+      Place at = Obstacle.place(p, 0);
+      Place top = new Place(at.x(), at.y(), at.z() + depth);
+      tally
+          .of("building-mast", roof.building().id())
+          .offer(-depth, mast, strand.part.word, at, top);
+    }
+  }
+
+  private void walk(
+      Strand strand, Scene scene, IntPredicate which, double required, Tally.Worst worst) {
+    double[] piece = new double[6];
+    Walk.along(
+        strand,
+        box,
+        which,
+        () -> worst.reach(required, range),
+        (index, points, i, allowance) -> {
+          System.arraycopy(points, i, piece, 0, 6);
+          // Rope and line may touch what holds them; wire keeps its distance there too.
+          if (strand.part == Strand.Part.WIRE || !exempt(strand, scene, piece)) {
+            piece(strand, piece, allowance, worst, required);
+          }
+        });
   }
 
   private void piece(
@@ -94,7 +152,7 @@ final class Solid implements Obstacle {
       }
     }
     Space.Near near = new Space.Near();
-    double enough = Math.min(range, worst.spare() + required) + slack;
+    double enough = worst.reach(required, range) + slack;
     for (int i = 0; i < faces.size(); i++) {
       if (Obstacle.gap(piece, 0, faceBoxes.get(i)) < Math.min(enough, near.distance())) {
         Space.segmentTriangle(piece, 0, 3, faces.get(i), true, near);

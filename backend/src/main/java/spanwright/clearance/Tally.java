@@ -36,6 +36,11 @@ final class Tally {
       return spare;
     }
 
+    /** How near something must come to be worse than what was found, within a range [m]. */
+    double reach(double needed, double range) {
+      return Math.min(range, spare + needed);
+    }
+
     void offer(double found, double needed, String part, Place ours, Place theirs) {
       if (found - needed < spare) {
         spare = found - needed;

@@ -31,13 +31,17 @@ final class Volumes {
     return new double[] {low - slack, high + slack};
   }
 
-  /** Where people are. No wire comes into it, calm or blown; less than nothing is inside. */
+  /**
+   * Where people are. No wire comes into it, calm or blown, and no guy, rope or counterweight that
+   * somebody could walk into or be under; less than nothing is inside.
+   */
   static final class People implements Obstacle {
     private final PeopleVolume source;
     private final Area area;
     private final GroundSurface ground;
     private final double[] box;
-    private final double required;
+    private final double wire;
+    private final double rope;
     private final double range;
 
     People(PeopleVolume source, GroundSurface ground, RuleBook rules, double range) {
@@ -47,7 +51,8 @@ final class Volumes {
       area = new Area(source.area());
       double[] h = heights(area, ground);
       box = area.box(h[0] + source.from(), h[1] + source.to());
-      required = rules.value("people");
+      wire = rules.value("people");
+      rope = rules.value("people-rope");
     }
 
     @Override
@@ -57,33 +62,23 @@ final class Volumes {
 
     @Override
     public void check(Strand strand, Scene scene, Tally tally) {
-      if (strand.part != Strand.Part.WIRE) {
-        return;
-      }
-      Tally.Worst worst = tally.of("people", source.id());
-      Narrowing narrowing = new Narrowing(this::signed, ground.isLevel() ? 1 : 1.5);
-      for (int s = 0; s < strand.states.length; s++) {
-        double[] state = strand.states[s];
-        if (strand.isFarther(s, box, Math.min(range, worst.spare() + required))) {
-          continue;
-        }
-        for (int i = 0; i + 3 < state.length; i += 3) {
-          double allowance = strand.slack(s, i);
-          double most = Math.min(range, worst.spare() + required);
-          if (Obstacle.gap(state, i, box) - allowance > most) {
-            continue;
-          }
-          double least = narrowing.least(state, i, most + allowance);
-          if (least - allowance < most) {
-            Place at = new Place(narrowing.x, narrowing.y, narrowing.z);
-            worst.offer(least - allowance, required, "wire", at, near(at));
-          }
+      switch (strand.part) {
+        case WIRE -> nearest(strand, tally.of("people", source.id()), wire);
+        case ROPE, GUY, FALL -> nearest(strand, tally.of("people-rope", source.id()), rope);
+        default -> {
+          // masts and halyards stand where they stand and the line comes to the house: told in
+          // notes
         }
       }
     }
 
+    private void nearest(Strand strand, Tally.Worst worst, double required) {
+      double rate = 1 + ground.steepest();
+      leastOf(strand, box, this::signed, rate, worst, required, range, this::near);
+    }
+
     /** Distance to the volume; on a slope its floor and ceiling are those of the nearest point. */
-    private double signed(double x, double y, double z) {
+    double signed(double x, double y, double z) {
       double side = area.signed(x, y);
       double base = ground.heightAt(x, y);
       if (side > 0 && !ground.isLevel()) {
@@ -131,45 +126,64 @@ final class Volumes {
 
     @Override
     public void check(Strand strand, Scene scene, Tally tally) {
-      if (strand.part != Strand.Part.WIRE) {
-        return;
+      if (strand.part == Strand.Part.WIRE) {
+        Tally.Worst worst = tally.of("zone-no-wire", source.id());
+        Narrowing.Field field = (x, y, z) -> area.signed(x, y);
+        leastOf(strand, box, field, 1, worst, required, range, this::edge);
       }
-      Tally.Worst worst = tally.of("zone-no-wire", source.id());
-      Narrowing narrowing = new Narrowing((x, y, z) -> area.signed(x, y), 1);
-      for (int s = 0; s < strand.states.length; s++) {
-        double[] state = strand.states[s];
-        if (strand.isFarther(s, box, Math.min(range, worst.spare() + required))) {
-          continue;
-        }
-        for (int i = 0; i + 3 < state.length; i += 3) {
-          double allowance = strand.slack(s, i);
-          double most = Math.min(range, worst.spare() + required);
-          if (Obstacle.gap(state, i, box) - allowance > most) {
-            continue;
-          }
-          double least = narrowing.least(state, i, most + allowance);
-          if (least - allowance < most) {
-            Place at = new Place(narrowing.x, narrowing.y, narrowing.z);
-            double[] foot = area.footOnEdge(area.nearestEdge(at.x(), at.y()), at.x(), at.y());
-            Place edge = new Place(foot[0], foot[1], at.z());
-            worst.offer(least - allowance, required, "wire", at, edge);
-          }
-        }
-      }
+    }
+
+    private Place edge(Place at) {
+      double[] foot = area.footOnEdge(area.nearestEdge(at.x(), at.y()), at.x(), at.y());
+      return new Place(foot[0], foot[1], at.z());
     }
   }
 
-  /** A zone with a headroom: wire, rope and feed line stay above it. */
+  /** The place of the other thing that answers to a place of ours. */
+  private interface Answer {
+    Place to(Place ours);
+  }
+
+  /** Offers the least of a field of distance along a strand. */
+  private static void leastOf(
+      Strand strand,
+      double[] box,
+      Narrowing.Field field,
+      double rate,
+      Tally.Worst worst,
+      double required,
+      double range,
+      Answer theirs) {
+    Narrowing narrowing = new Narrowing(field, rate);
+    Walk.along(
+        strand,
+        box,
+        Walk.ALL,
+        () -> worst.reach(required, range),
+        (index, points, i, allowance) -> {
+          double most = worst.reach(required, range);
+          double least = narrowing.least(points, i, most + allowance);
+          if (least - allowance < most) {
+            Place at = new Place(narrowing.x, narrowing.y, narrowing.z);
+            worst.offer(least - allowance, required, strand.part.word, at, theirs.to(at));
+          }
+        });
+  }
+
+  /**
+   * A zone with a headroom: wire, rope and feed line stay above it, and no mast or guy stands in
+   * it. A halyard runs down what stands there already.
+   */
   static final class Headroom implements Obstacle {
     private final Zone source;
     private final Area area;
-    private final GroundSurface ground;
+    private final Lowest lowest;
     private final double[] box;
     private final double required;
 
-    Headroom(Zone source, GroundSurface ground, RuleBook rules) {
+    Headroom(Zone source, Lowest lowest, RuleBook rules) {
       this.source = source;
-      this.ground = ground;
+      this.lowest = lowest;
       area = new Area(source.area());
       box = area.box(-DEEP, DEEP);
       required = source.height() + rules.value("zone-headroom");
@@ -182,22 +196,16 @@ final class Volumes {
 
     @Override
     public void check(Strand strand, Scene scene, Tally tally) {
-      if (strand.part == Strand.Part.MAST || strand.part == Strand.Part.HALYARD) {
+      if (strand.part == Strand.Part.HALYARD) {
         return;
       }
       Tally.Worst worst = tally.of("zone-headroom", source.id());
-      for (int s = 0; s < strand.states.length; s++) {
-        double[] state = strand.states[s];
-        if (strand.isFarther(s, box, 0)) {
-          continue;
-        }
-        for (int i = 0; i + 3 < state.length; i += 3) {
-          double allowance = strand.slack(s, i);
-          if (Obstacle.gap(state, i, box) == 0) {
-            piece(strand, state, i, allowance, worst);
-          }
-        }
-      }
+      Walk.along(
+          strand,
+          box,
+          Walk.ALL,
+          () -> 0,
+          (index, points, i, allowance) -> piece(strand, points, i, allowance, worst));
     }
 
     private void piece(Strand strand, double[] p, int i, double allowance, Tally.Worst worst) {
@@ -208,38 +216,8 @@ final class Volumes {
             area.contains(
                 p[i] + middle * (p[i + 3] - p[i]), p[i + 1] + middle * (p[i + 4] - p[i + 1]));
         if (inside) {
-          lowest(p, i, cuts[c], cuts[c + 1], ground, allowance, required, strand.part.word, worst);
+          lowest.offer(p, i, cuts[c], cuts[c + 1], allowance, required, strand.part.word, worst);
         }
-      }
-    }
-  }
-
-  /**
-   * Offers the lowest height above the ground along a piece between two shares of it. On slopes it
-   * is sampled every decimetre and a centimetre taken off, more than a fold of the ground can hide.
-   */
-  static void lowest(
-      double[] p,
-      int i,
-      double from,
-      double to,
-      GroundSurface ground,
-      double allowance,
-      double required,
-      String what,
-      Tally.Worst worst) {
-    double length = Math.hypot(p[i + 3] - p[i], p[i + 4] - p[i + 1]) * (to - from);
-    int steps = ground.isLevel() ? 1 : Math.max(1, (int) Math.ceil(length / 0.1));
-    double hidden = ground.isLevel() ? 0 : 0.01;
-    for (int k = 0; k <= steps; k++) {
-      double t = from + (to - from) * k / steps;
-      double x = p[i] + t * (p[i + 3] - p[i]);
-      double y = p[i + 1] + t * (p[i + 4] - p[i + 1]);
-      double z = p[i + 2] + t * (p[i + 5] - p[i + 2]);
-      double base = ground.heightAt(x, y);
-      double height = z - base - allowance - hidden;
-      if (height - required < worst.spare()) {
-        worst.offer(height, required, what, new Place(x, y, z), new Place(x, y, base));
       }
     }
   }

@@ -56,6 +56,18 @@ public final class GroundSurface {
     return triangles.length == 0;
   }
 
+  /** The steepest slope there is, as rise over way on the plan; 0 where level. */
+  public double steepest() {
+    double most = 0;
+    for (double[] t : triangles) {
+      double nx = cross(t[4] - t[1], t[5] - t[2], t[7] - t[1], t[8] - t[2]);
+      double ny = cross(t[5] - t[2], t[3] - t[0], t[8] - t[2], t[6] - t[0]);
+      double nz = cross(t[3] - t[0], t[4] - t[1], t[6] - t[0], t[7] - t[1]);
+      most = Math.max(most, Math.hypot(nx, ny) / Math.abs(nz));
+    }
+    return most;
+  }
+
   /** Height of the ground above the plan's zero [m]. */
   public double heightAt(double x, double y) {
     if (triangles.length == 0) {
