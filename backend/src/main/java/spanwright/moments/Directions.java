@@ -11,12 +11,16 @@ public final class Directions {
   final double[] sinElevation;
   final double[] cosElevation;
 
-  private Directions(double[] azimuths, double[] elevations) {
-    count = azimuths.length;
+  private Directions(int count) {
+    this.count = count;
     sinAzimuth = new double[count];
     cosAzimuth = new double[count];
     sinElevation = new double[count];
     cosElevation = new double[count];
+  }
+
+  private Directions(double[] azimuths, double[] elevations) {
+    this(azimuths.length);
     for (int i = 0; i < count; i++) {
       if (!Double.isFinite(azimuths[i]) || !Double.isFinite(elevations[i])) {
         throw new ModelFault("Direction " + i + " is not a number: give azimuth and elevation.");
@@ -62,6 +66,65 @@ public final class Directions {
       elevations[i] = count == 1 ? low : low + (high - low) * i / (count - 1);
     }
     return new Directions(azimuths, elevations);
+  }
+
+  /** Directions as unit vectors. */
+  static Directions toward(double[] x, double[] y, double[] z) {
+    Directions out = new Directions(x.length);
+    for (int i = 0; i < x.length; i++) {
+      double level = Math.hypot(x[i], y[i]);
+      out.sinAzimuth[i] = level > 0 ? x[i] / level : 0;
+      out.cosAzimuth[i] = level > 0 ? y[i] / level : 1;
+      out.cosElevation[i] = level;
+      out.sinElevation[i] = z[i];
+    }
+    return out;
+  }
+
+  /**
+   * The whole sphere, or the sky only, on a Gauss rule in elevation and even steps in azimuth. The
+   * second half of the batch is the first at the opposite azimuths, in the same order.
+   *
+   * @param across azimuths, an even number
+   * @param up elevations
+   * @param azimuths filled in [rad]
+   * @param elevations filled in [rad]
+   * @param weights filled in, solid angles [sr]
+   */
+  static Directions sky(
+      int across,
+      int up,
+      boolean grounded,
+      double[] azimuths,
+      double[] elevations,
+      double[] weights) {
+    GaussRule rule = GaussRule.of(up);
+    double low = grounded ? 0 : -0.5 * Math.PI;
+    double span = 0.5 * Math.PI - low;
+    double step = 2 * Math.PI / across;
+    Directions out = new Directions(across * up);
+    for (int i = 0; i < across; i++) {
+      double azimuth = step * (i + 0.25);
+      double sine = Math.sin(azimuth);
+      double cosine = Math.cos(azimuth);
+      for (int j = 0; j < up; j++) {
+        int at = i * up + j;
+        azimuths[at] = azimuth;
+        elevations[at] = low + span * rule.nodes[j];
+        out.sinAzimuth[at] = sine;
+        out.cosAzimuth[at] = cosine;
+      }
+    }
+    for (int j = 0; j < up; j++) {
+      double sine = Math.sin(elevations[j]);
+      double cosine = Math.cos(elevations[j]);
+      for (int at = j; at < out.count; at += up) {
+        out.sinElevation[at] = sine;
+        out.cosElevation[at] = cosine;
+        weights[at] = rule.weights[j] * span * cosine * step;
+      }
+    }
+    return out;
   }
 
   /** How many. */

@@ -2,95 +2,24 @@ package spanwright.moments;
 
 /**
  * Radiation of solved currents: the direct wave and the wave reflected with Fresnel's coefficients
- * at the direction's angle, exact for the far zone above the horizon.
- *
- * <p>For each direction the vector sums of I t e^{jk r̂·r} over the points, direct and mirrored,
- * are gathered with directions in the inner loop; polarisations are made from them at the end.
+ * at the direction's angle, exact for the far zone above the horizon. {@link FarSums} adds up what
+ * the elements send.
  */
 final class FarField {
-  private final Mesh mesh;
   private final SourcePoints points;
   private final double k;
   private final Ground ground;
   private final double epsR;
   private final double epsI;
-  // current times weight times length at each point
-  private final double[] momentRe;
-  private final double[] momentIm;
+  private final Radiators elements;
 
   FarField(Currents currents, SourcePoints points, Ground ground, double k) {
-    this.mesh = currents.mesh;
     this.points = points;
     this.k = k;
     this.ground = ground;
     epsR = ground.permittivity();
     epsI = -ground.conductivity() / (k * Constants.LIGHT * Constants.EPSILON0);
-    momentRe = new double[points.count];
-    momentIm = new double[points.count];
-    for (int e = 0; e < mesh.elements; e++) {
-      int first = points.first[e];
-      int gauss = points.first[e + 1] - first;
-      double[][] shape = Shapes.weighted(gauss);
-      for (int q = 0; q < gauss; q++) {
-        for (int a = 0; a <= mesh.order[e]; a++) {
-          momentRe[first + q] += mesh.length[e] * currents.re[e][a] * shape[a][q];
-          momentIm[first + q] += mesh.length[e] * currents.im[e][a] * shape[a][q];
-        }
-      }
-    }
-  }
-
-  /** Vector sums over the points for a batch: [component·2 + (0 re, 1 im)][direction]. */
-  private double[][] sums(Directions d, boolean mirrored) {
-    int n = d.count;
-    double[][] sum = new double[6][n];
-    double[] angle = new double[n];
-    double[] sin = new double[n];
-    double[] cos = new double[n];
-    double[] partRe = new double[n];
-    double[] partIm = new double[n];
-    double sign = mirrored ? -k : k;
-    for (int e = 0; e < mesh.elements; e++) {
-      java.util.Arrays.fill(partRe, 0);
-      java.util.Arrays.fill(partIm, 0);
-      for (int i = points.first[e]; i < points.first[e + 1]; i++) {
-        phase(d, k * points.x[i], k * points.y[i], sign * points.z[i], angle);
-        SinCos.of(angle, n, sin, cos);
-        gather(momentRe[i], momentIm[i], sin, cos, partRe, partIm, n);
-      }
-      double[] t = {mesh.tx[e], mesh.ty[e], mesh.tz[e]};
-      for (int c = 0; c < 3; c++) {
-        if (t[c] != 0) {
-          axpy(t[c], partRe, sum[2 * c], n);
-          axpy(t[c], partIm, sum[2 * c + 1], n);
-        }
-      }
-    }
-    return sum;
-  }
-
-  private static void phase(Directions d, double kx, double ky, double kz, double[] angle) {
-    double[] sa = d.sinAzimuth;
-    double[] ca = d.cosAzimuth;
-    double[] se = d.sinElevation;
-    double[] ce = d.cosElevation;
-    for (int i = 0; i < d.count; i++) {
-      angle[i] = ce[i] * (kx * sa[i] + ky * ca[i]) + kz * se[i];
-    }
-  }
-
-  private static void gather(
-      double mr, double mi, double[] sin, double[] cos, double[] re, double[] im, int n) {
-    for (int i = 0; i < n; i++) {
-      re[i] += mr * cos[i] - mi * sin[i];
-      im[i] += mr * sin[i] + mi * cos[i];
-    }
-  }
-
-  private static void axpy(double factor, double[] from, double[] to, int n) {
-    for (int i = 0; i < n; i++) {
-      to[i] += factor * from[i];
-    }
+    elements = new Radiators(currents, k);
   }
 
   /**
@@ -98,39 +27,42 @@ final class FarField {
    * nothing goes below the horizon of a ground.
    */
   void intensity(Directions d, double[] horizontal, double[] vertical) {
+    intensity(d, d.count, false, horizontal, vertical);
+  }
+
+  /** The first directions of a batch and, when asked for, their antipodes behind them. */
+  private void intensity(
+      Directions d, int count, boolean both, double[] horizontal, double[] vertical) {
     boolean grounded = ground.kind() != Ground.Kind.NONE;
-    double[][] s = sums(d, false);
-    double[][] m = grounded ? sums(d, true) : null;
-    double factor = Constants.ETA0 * k * k / (32 * Math.PI * Math.PI);
+    FarSums sums = new FarSums(elements, grounded, both, count);
     double[] fresnel = new double[4];
-    for (int i = 0; i < d.count; i++) {
-      double sa = d.sinAzimuth[i];
-      double ca = d.cosAzimuth[i];
-      double se = d.sinElevation[i];
-      double ce = d.cosElevation[i];
-      double hr = ca * s[0][i] - sa * s[2][i];
-      double hi = ca * s[1][i] - sa * s[3][i];
-      double vr = ce * s[4][i] - se * (sa * s[0][i] + ca * s[2][i]);
-      double vi = ce * s[5][i] - se * (sa * s[1][i] + ca * s[3][i]);
-      if (grounded) {
-        if (se < -1e-12) {
-          horizontal[i] = 0;
-          vertical[i] = 0;
-          continue;
+    for (int from = 0; from < count; from += FarSums.BLOCK) {
+      int n = Math.min(FarSums.BLOCK, count - from);
+      sums.work(d, from, n);
+      for (int i = 0; i < n; i++) {
+        int at = from + i;
+        double se = d.sinElevation[at];
+        if (grounded) {
+          coefficients(Math.max(0, se), d.cosElevation[at], fresnel);
         }
-        coefficients(se, ce, fresnel);
-        double ir = ca * m[0][i] - sa * m[2][i];
-        double ii = ca * m[1][i] - sa * m[3][i];
-        hr += fresnel[0] * ir - fresnel[1] * ii;
-        hi += fresnel[0] * ii + fresnel[1] * ir;
-        ir = ce * m[4][i] + se * (sa * m[0][i] + ca * m[2][i]);
-        ii = ce * m[5][i] + se * (sa * m[1][i] + ca * m[3][i]);
-        vr += fresnel[2] * ir - fresnel[3] * ii;
-        vi += fresnel[2] * ii + fresnel[3] * ir;
+        boolean below = grounded && se < -1e-12;
+        horizontal[at] = below ? 0 : size(sums.sums, 0, i, fresnel);
+        vertical[at] = below ? 0 : size(sums.sums, 2, i, fresnel);
+        if (both) {
+          horizontal[count + at] = below ? 0 : size(sums.opposite, 0, i, fresnel);
+          vertical[count + at] = below ? 0 : size(sums.opposite, 2, i, fresnel);
+        }
       }
-      horizontal[i] = factor * (hr * hr + hi * hi);
-      vertical[i] = factor * (vr * vr + vi * vi);
     }
+  }
+
+  /** Intensity of one polarisation: direct wave plus coefficient times mirrored wave. */
+  private double size(double[][] sums, int at, int i, double[] fresnel) {
+    double mr = sums[4 + at][i];
+    double mi = sums[5 + at][i];
+    double re = sums[at][i] + (fresnel[at] * mr - fresnel[at + 1] * mi);
+    double im = sums[at + 1][i] + (fresnel[at] * mi + fresnel[at + 1] * mr);
+    return Constants.ETA0 * k * k / (32 * Math.PI * Math.PI) * (re * re + im * im);
   }
 
   /**
@@ -185,31 +117,21 @@ final class FarField {
     }
   }
 
-  /** Samples the whole pattern. */
+  /** Samples the whole pattern; over a ground, directions and their antipodes in one go. */
   Sky sky() {
     double reach = k * reach();
     boolean grounded = ground.kind() != Ground.Kind.NONE;
     int across = 12 + 2 * (int) Math.ceil(reach);
     int up = Math.min(60, 14 + (int) Math.ceil((grounded ? 0.8 : 1.0) * reach));
-    GaussRule rule = GaussRule.of(up);
-    double low = grounded ? 0 : -0.5 * Math.PI;
-    double span = 0.5 * Math.PI - low;
-    double[] azimuths = new double[across * up];
-    double[] elevations = new double[across * up];
-    double[] weights = new double[across * up];
-    for (int j = 0; j < up; j++) {
-      double elevation = low + span * rule.nodes[j];
-      for (int i = 0; i < across; i++) {
-        azimuths[j * across + i] = 2 * Math.PI * (i + 0.25) / across;
-        elevations[j * across + i] = elevation;
-        weights[j * across + i] =
-            rule.weights[j] * span * Math.cos(elevation) * 2 * Math.PI / across;
-      }
-    }
-    double[] horizontal = new double[across * up];
-    double[] vertical = new double[across * up];
-    intensity(Directions.of(azimuths, elevations), horizontal, vertical);
-    for (int i = 0; i < horizontal.length; i++) {
+    int count = across * up;
+    double[] azimuths = new double[count];
+    double[] elevations = new double[count];
+    double[] weights = new double[count];
+    double[] horizontal = new double[count];
+    double[] vertical = new double[count];
+    Directions all = Directions.sky(across, up, grounded, azimuths, elevations, weights);
+    intensity(all, grounded ? count / 2 : count, grounded, horizontal, vertical);
+    for (int i = 0; i < count; i++) {
       horizontal[i] += vertical[i];
     }
     return new Sky(azimuths, elevations, horizontal, weights);

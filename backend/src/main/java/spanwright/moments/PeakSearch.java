@@ -1,5 +1,8 @@
 package spanwright.moments;
 
+import java.util.ArrayList;
+import java.util.List;
+
 /**
  * Finds the greatest gain: from the best places of the sampled sky uphill, each step to the top of
  * the paraboloid through nine directions round about.
@@ -7,7 +10,10 @@ package spanwright.moments;
 final class PeakSearch {
   private static final int STARTS = 3;
 
-  /** A start must come so near to the best found [power ratio]. */
+  /** Of the grid round a place. */
+  private static final int POINTS = 9;
+
+  /** A start must come so near to the best sampled [power ratio]. */
   private static final double WORTH = 0.75;
 
   private static final double FIRST_STEP = 0.08;
@@ -24,36 +30,54 @@ final class PeakSearch {
 
   /** The peak; gain is intensity times factor. */
   Peak find(FarField.Sky sky, double factor) {
+    List<Climb> climbs = starts(sky);
+    List<Climb> going = new ArrayList<>(climbs);
+    for (int turn = 0; turn < MOST_TURNS && !going.isEmpty(); turn++) {
+      double[] f = intensities(going);
+      for (int i = 0; i < going.size(); i++) {
+        going.get(i).turn(f, POINTS * i);
+      }
+      going.removeIf(climb -> climb.step <= LAST_STEP);
+    }
+    Climb best = climbs.get(0);
+    for (Climb climb : climbs) {
+      best = climb.most > best.most * (1 + 1e-6) ? climb : best;
+    }
+    double azimuth = Math.atan2(best.top[0], best.top[1]);
+    double elevation = Math.asin(Math.max(-1, Math.min(1, best.top[2])));
+    return new Peak(
+        Gain.dbi(factor * best.most), azimuth < 0 ? azimuth + 2 * Math.PI : azimuth, elevation);
+  }
+
+  /** From the best of the sampled sky, and from others nearly as good that lie well apart. */
+  private List<Climb> starts(FarField.Sky sky) {
     double[] left = sky.intensity().clone();
-    double[] best = {-1, 0, 0};
-    for (int s = 0; s < STARTS; s++) {
+    List<Climb> climbs = new ArrayList<>();
+    double best = 0;
+    while (climbs.size() < STARTS) {
       int top = 0;
       for (int i = 1; i < left.length; i++) {
         if (left[i] > left[top] * (1 + 1e-7)) {
           top = i;
         }
       }
-      if (s > 0 && left[top] < WORTH * best[0]) {
+      if (!climbs.isEmpty() && left[top] < WORTH * best) {
         break;
       }
-      double azimuth = sky.azimuths()[top];
-      double elevation = sky.elevations()[top];
-      double[] found = climb(unit(azimuth, elevation));
-      if (found[0] > best[0] * (1 + 1e-6)) {
-        best = found;
-      }
+      best = Math.max(best, left[top]);
+      double[] start = unit(sky.azimuths()[top], sky.elevations()[top]);
+      climbs.add(new Climb(start));
       for (int i = 0; i < left.length; i++) {
-        if (near(sky.azimuths()[i], sky.elevations()[i], azimuth, elevation)) {
+        if (left[i] >= WORTH * best && near(unit(sky.azimuths()[i], sky.elevations()[i]), start)) {
           left[i] = -1;
         }
       }
     }
-    return new Peak(Gain.dbi(factor * best[0]), best[1], best[2]);
+    return climbs;
   }
 
-  private static boolean near(double a1, double e1, double a2, double e2) {
-    double cos = Math.sin(e1) * Math.sin(e2) + Math.cos(e1) * Math.cos(e2) * Math.cos(a1 - a2);
-    return cos > Math.cos(4 * FIRST_STEP);
+  private static boolean near(double[] a, double[] b) {
+    return a[0] * b[0] + a[1] * b[1] + a[2] * b[2] > Math.cos(4 * FIRST_STEP);
   }
 
   private static double[] unit(double azimuth, double elevation) {
@@ -64,44 +88,55 @@ final class PeakSearch {
     };
   }
 
-  /** From a direction uphill: intensity, azimuth, elevation. */
-  private double[] climb(double[] start) {
-    double[] here = start;
-    double[] best = {-1, 0, 0};
-    double step = FIRST_STEP;
-    for (int turn = 0; turn < MOST_TURNS && step > LAST_STEP; turn++) {
-      double[] east = east(here);
-      double[] north = cross(here, east);
-      double[] azimuths = new double[9];
-      double[] elevations = new double[9];
-      for (int i = 0; i < 9; i++) {
+  /** One way uphill. */
+  private final class Climb {
+    private double[] here;
+    private double[] east;
+    private double[] north;
+    private double step = FIRST_STEP;
+    private double[] top;
+    private double most = -1;
+
+    Climb(double[] start) {
+      here = start;
+      top = start;
+    }
+
+    /** Directions on a 3 x 3 grid round about. */
+    void look(double[] x, double[] y, double[] z, int at) {
+      east = east(here);
+      north = cross(here, east);
+      for (int i = 0; i < POINTS; i++) {
         double[] d = shifted(here, east, north, step * (i % 3 - 1), step * (i / 3 - 1));
-        azimuths[i] = Math.atan2(d[0], d[1]);
-        elevations[i] = Math.asin(Math.max(-1, Math.min(1, d[2])));
+        x[at + i] = d[0];
+        y[at + i] = d[1];
+        z[at + i] = d[2];
       }
-      double[] f = intensities(azimuths, elevations);
-      int top = 4;
-      for (int i = 0; i < 9; i++) {
-        if (f[i] > f[top]) {
-          top = i;
-        }
+    }
+
+    /** A step, given the intensities on the grid. */
+    void turn(double[] all, int at) {
+      double[] f = java.util.Arrays.copyOfRange(all, at, at + POINTS);
+      int highest = 4;
+      for (int i = 0; i < POINTS; i++) {
+        highest = f[i] > f[highest] ? i : highest;
       }
-      if (f[top] > best[0]) {
-        best = new double[] {f[top], azimuths[top], elevations[top]};
+      double u = step * (highest % 3 - 1);
+      double v = step * (highest / 3 - 1);
+      if (f[highest] > most) {
+        most = f[highest];
+        top = shifted(here, east, north, u, v);
       }
       double[] move = summit(f);
       if (move != null && Math.abs(move[0]) <= 1.5 && Math.abs(move[1]) <= 1.5) {
         here = shifted(here, east, north, step * move[0], step * move[1]);
         step *= 0.3;
-      } else if (top == 4) {
+      } else if (highest == 4) {
         step *= 0.4;
       } else {
-        here = shifted(here, east, north, step * (top % 3 - 1), step * (top / 3 - 1));
+        here = shifted(here, east, north, u, v);
       }
     }
-    double full = 2 * Math.PI;
-    best[1] = ((best[1] % full) + full) % full;
-    return best;
   }
 
   /** Top of the paraboloid through nine values on a 3 x 3 grid, in steps; null if it has none. */
@@ -148,11 +183,18 @@ final class PeakSearch {
     return out;
   }
 
-  private double[] intensities(double[] azimuths, double[] elevations) {
-    double[] horizontal = new double[azimuths.length];
-    double[] vertical = new double[azimuths.length];
-    field.intensity(Directions.of(azimuths, elevations), horizontal, vertical);
-    for (int i = 0; i < horizontal.length; i++) {
+  private double[] intensities(List<Climb> climbs) {
+    int n = POINTS * climbs.size();
+    double[] x = new double[n];
+    double[] y = new double[n];
+    double[] z = new double[n];
+    for (int i = 0; i < climbs.size(); i++) {
+      climbs.get(i).look(x, y, z, POINTS * i);
+    }
+    double[] horizontal = new double[n];
+    double[] vertical = new double[n];
+    field.intensity(Directions.toward(x, y, z), horizontal, vertical);
+    for (int i = 0; i < n; i++) {
       horizontal[i] += vertical[i];
     }
     return horizontal;
