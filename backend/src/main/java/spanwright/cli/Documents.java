@@ -10,6 +10,7 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.time.LocalDate;
 import java.util.List;
 import spanwright.plan.Json;
 import spanwright.plan.Plan;
@@ -28,7 +29,7 @@ final class Documents {
   /** A plan file, complete and without a fault. */
   static Plan plan(String name) {
     Path file = path(name);
-    PlanReader.Outcome outcome = PlanReader.read(text(file, LONGEST_CASE));
+    PlanReader.Outcome outcome = PlanReader.read(text(file, LONGEST_CASE), LocalDate.now());
     if (!outcome.faults().isEmpty()) {
       throw Failure.badInput(file, outcome.faults());
     }

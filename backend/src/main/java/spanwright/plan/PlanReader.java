@@ -3,6 +3,7 @@ package spanwright.plan;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -55,14 +56,21 @@ public final class PlanReader {
     }
   }
 
-  /** Reads a whole plan from UTF-8. */
+  /** Reads a whole plan from UTF-8, whatever the day. */
   public static Outcome read(byte[] utf8) {
-    return whole(JsonText.parse(utf8));
+    return whole(JsonText.parse(utf8), null);
   }
 
-  /** Reads a whole plan. */
+  /** Reads a whole plan, whatever the day. */
   public static Outcome read(String json) {
-    return whole(JsonText.parse(json));
+    return whole(JsonText.parse(json), null);
+  }
+
+  /**
+   * Reads a whole plan; what is dated later than today does not count as allowed, and is a fault.
+   */
+  public static Outcome read(String json, LocalDate today) {
+    return whole(JsonText.parse(json), today);
   }
 
   /** Reads a draft from UTF-8: syntax, types, sizes and unknown fields only. */
@@ -80,10 +88,11 @@ public final class PlanReader {
     return new Draft(faults.isEmpty() ? parsed.root() : null, faults);
   }
 
-  private static Outcome whole(JsonText.Parsed parsed) {
+  private static Outcome whole(JsonText.Parsed parsed, LocalDate today) {
     List<Fault> faults = checked(parsed, false);
     if (parsed.root() instanceof ObjectNode) {
       faults.addAll(SurveyChecks.faults(parsed.root()));
+      faults.addAll(ConsentChecks.faults(parsed.root(), today));
       faults.addAll(BriefChecks.faults(parsed.root()));
     }
     if (!faults.isEmpty()) {

@@ -18,6 +18,9 @@ final class SurveyChecks {
   /** An entry further outside the boundary than this is a slip [m]. */
   static final double ENTRY_OUTSIDE = 30;
 
+  /** Deeper in a crown than this nothing is hoisted past its leaves [m]. */
+  static final double IN_LEAVES = 1;
+
   /** Rounding in heights read off a tape or a screen [m]. */
   private static final double ROUNDING = 1e-9;
 
@@ -39,7 +42,9 @@ final class SurveyChecks {
     checks.things("trees", "tree").forEach(checks::crown);
     checks.things("bracketLines", "bracket line").forEach(checks::bracketLine);
     checks.things("mastZones", "mast zone").forEach(checks::mastZone);
-    checks.things("overheadLines", "overhead line").forEach(checks::overheadLine);
+    checks
+        .things("overheadLines", "overhead line")
+        .forEach(l -> OutlineChecks.path(l, "path", l.places("path"), checks.faults));
     checks.things("zones", "zone").forEach(checks::zone);
     checks.things("people", "place for people").forEach(checks::people);
     checks
@@ -209,6 +214,41 @@ final class SurveyChecks {
   private void support(Thing support) {
     reach(support);
     crown(support);
+    if (!"tree".equals(support.text("kind"))) {
+      things("supports", "support").forEach(other -> amidLeaves(support, other));
+      things("trees", "tree").forEach(other -> amidLeaves(support, other));
+    }
+  }
+
+  /**
+   * Trees stand in one another's crowns as they please; at a mast, pole or wall all of whose reach
+   * lies deep in a crown, nothing can be hoisted.
+   */
+  private void amidLeaves(Thing support, Thing tree) {
+    Thing canopy = tree.child("canopy");
+    Point at = support.point("at");
+    Point trunk = tree.point("at");
+    Double radius = canopy.number("radius");
+    Double from = canopy.number("from");
+    Double to = canopy.number("to");
+    Double lowest = support.number("lowest");
+    Double highest = support.number("highest");
+    boolean known = at != null && trunk != null && radius != null && from != null && to != null;
+    if (!known || lowest == null || highest == null || tree.path().equals(support.path())) {
+      return;
+    }
+    boolean beside = at.distance(trunk) < radius - IN_LEAVES;
+    if (beside && lowest > from + ROUNDING && highest < to - ROUNDING) {
+      say(
+          support.at("at"),
+          Wording.AMID_LEAVES,
+          support.label(),
+          lowest,
+          highest,
+          Character.toLowerCase(tree.label().charAt(0)) + tree.label().substring(1),
+          from,
+          to);
+    }
   }
 
   private void crown(Thing tree) {
@@ -261,37 +301,6 @@ final class SurveyChecks {
     }
     if (before != null && highest != null && before < highest - ROUNDING) {
       say(zone.at("consents"), Wording.CONSENTS_TOO_LOW, zone.label(), before, highest);
-    }
-  }
-
-  private void overheadLine(Thing line) {
-    OutlineChecks.path(line, "path", line.places("path"), faults);
-    String date = line.text("authorisedOn");
-    boolean dated = Dates.isDate(date);
-    if (date != null && !date.isBlank() && !dated) {
-      say(line.at("authorisedOn"), Wording.BAD_DATE, line.label(), Wording.quoted(date));
-    }
-    Double clearance = line.number("clearance");
-    String word = line.text("kind");
-    var rule = Catalogues.standard().findRule("overhead-" + (word == null ? "unknown" : word));
-    if (clearance == null || rule.isEmpty()) {
-      return;
-    }
-    double least = rule.get().defaultValue();
-    String by = line.text("authorisedBy");
-    boolean named = by != null && !by.isBlank();
-    boolean given = date != null && !date.isBlank();
-    if (clearance < least - ROUNDING && !(named && given)) {
-      String lacking = named ? "the day is" : given ? "who allowed it is" : "both are";
-      String cure = Wording.number(least) + " m or more";
-      say(
-          line.at("clearance"),
-          Wording.CLEARANCE_UNAUTHORISED,
-          line.label(),
-          clearance,
-          least,
-          lacking,
-          cure);
     }
   }
 

@@ -95,6 +95,9 @@ enum Wording {
           + " again."),
   CROWN_SWAPPED(
       "%s: the crown's foot (%s m) is above its top (%s m). Swap them, or measure again."),
+  AMID_LEAVES(
+      "%s: all of its reach (%s to %s m) lies among the leaves of %s (%s to %s m), where nothing can"
+          + " be hoisted. Correct its place or the crown, or leave it out."),
   PEOPLE_SWAPPED("%s: the foot (%s m) is not below the top (%s m). Swap them, or measure again."),
   ROOF_SWAPPED("%s: the eaves (%s m) are above the ridge (%s m). Swap them, or measure again."),
   NO_RIDGE_LINE("%s: a %s roof needs a ridge line. Add \"ridgeLine\" with its two ends."),
@@ -139,6 +142,12 @@ enum Wording {
       "%s: a kept distance of %s m is less than the %s m for a line of this kind. It counts"
           + " only with who allowed it (\"authorisedBy\") and on what day (\"authorisedOn\"); %s"
           + " missing. Ask the line's owner, or give %s."),
+  DATE_TO_COME(
+      "%s: authorisedOn is %s, which is still to come (today is %s). Give the day on which it was"
+          + " allowed; until then the full distance is kept."),
+  ROPE_NOT_AGREED(
+      "%s: it stands %s m outside the boundary and takes a rope, but nobody is named who agreed."
+          + " Ask, and put the name into \"agreedBy\"; or leave the support out."),
   BAD_DATE("%s: authorisedOn must be a date as YYYY-MM-DD, but is %s."),
 
   // brief

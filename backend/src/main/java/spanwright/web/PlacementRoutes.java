@@ -5,6 +5,7 @@ import io.javalin.config.RoutesConfig;
 import io.javalin.http.Context;
 import java.nio.charset.StandardCharsets;
 import java.time.Instant;
+import java.time.LocalDate;
 import java.time.ZoneId;
 import java.time.format.DateTimeFormatter;
 import java.util.ArrayList;
@@ -60,7 +61,7 @@ final class PlacementRoutes {
     form.finish();
     require("The request", faults);
     String text = tree.get("plan").toString();
-    PlanReader.Outcome outcome = PlanReader.read(text);
+    PlanReader.Outcome outcome = PlanReader.read(text, LocalDate.now());
     for (Fault fault : outcome.faults()) {
       String path = fault.path().isEmpty() ? "plan" : "plan." + fault.path();
       faults.add(new Fault(path, fault.message()));

@@ -3,6 +3,7 @@ package spanwright.web;
 import com.fasterxml.jackson.annotation.JsonProperty;
 import io.javalin.config.RoutesConfig;
 import io.javalin.http.Context;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Map;
 import java.util.function.Predicate;
@@ -77,7 +78,7 @@ final class PlanRoutes {
 
   private static void check(Context ctx) {
     String text = Requests.text(ctx);
-    ctx.json(Map.of("faults", PlanReader.read(text).faults()));
+    ctx.json(Map.of("faults", PlanReader.read(text, LocalDate.now()).faults()));
   }
 
   /** The body as sent, if it is a plan, or with {@code ?draft=true} the beginning of one. */
@@ -85,7 +86,9 @@ final class PlanRoutes {
     boolean draft = Requests.isOn(ctx, "draft");
     String text = Requests.text(ctx);
     List<Fault> faults =
-        draft ? PlanReader.readDraft(text).faults() : PlanReader.read(text).faults();
+        draft
+            ? PlanReader.readDraft(text).faults()
+            : PlanReader.read(text, LocalDate.now()).faults();
     if (!faults.isEmpty()) {
       throw new ProblemException(Problem.faulty("The plan", faults));
     }

@@ -2,6 +2,7 @@ package spanwright.web;
 
 import io.javalin.config.RoutesConfig;
 import io.javalin.http.Context;
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -39,7 +40,7 @@ final class SearchRoutes {
   private void start(Context ctx) {
     SavedPlan saved = PlanRoutes.existing(store, ctx.pathParam("id"));
     Search.Options options = options(ctx);
-    PlanReader.Outcome outcome = PlanReader.read(saved.json());
+    PlanReader.Outcome outcome = PlanReader.read(saved.json(), LocalDate.now());
     if (!outcome.faults().isEmpty()) {
       throw new ProblemException(Problem.faulty("The plan", outcome.faults()));
     }

@@ -8,6 +8,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.nio.charset.StandardCharsets;
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
@@ -63,6 +64,8 @@ class FaultsTest {
         }
       }
       """;
+
+  private static final LocalDate TODAY = LocalDate.of(2026, 6, 1);
 
   /** One broken plan: what is set where, and the one sentence it must give. */
   private record Case(String path, String value, String at, String message) {}
@@ -440,7 +443,33 @@ class FaultsTest {
             "overheadLines[0].authorisedOn",
             "\"2026-02-30\"",
             "Overhead line \"Service drop\": authorisedOn must be a date as YYYY-MM-DD, but is"
-                + " \"2026-02-30\"."));
+                + " \"2026-02-30\"."),
+        set(
+            "overheadLines[0].authorisedOn",
+            "\"2026-06-02\"",
+            "Overhead line \"Service drop\": authorisedOn is 2026-06-02, which is still to come"
+                + " (today is 2026-06-01). Give the day on which it was allowed; until then the"
+                + " full distance is kept."),
+        setAt(
+            "supports[1]",
+            "{\"id\": \"pole\", \"name\": \"Pole\", \"at\": [24,27], \"lowest\": 2,"
+                + " \"highest\": 6, \"ropeOnly\": true}",
+            "supports[1].agreedBy",
+            "Support \"Pole\": it stands 4 m outside the boundary and takes a rope, but nobody is"
+                + " named who agreed. Ask, and put the name into \"agreedBy\"; or leave the"
+                + " support out."),
+        setAt(
+            "supports[1]",
+            "{\"id\": \"pole\", \"name\": \"Pole\", \"at\": [3.5,25], \"lowest\": 4,"
+                + " \"highest\": 6}",
+            "supports[1].at",
+            "Support \"Pole\": all of its reach (4 to 6 m) lies among the leaves of support"
+                + " \"Oak\" (3 to 11 m), where nothing can be hoisted. Correct its place or the"
+                + " crown, or leave it out."),
+        set(
+            "brief.rules.wind",
+            "500",
+            "The brief: the wind must be between 0 and 70 m/s; found 500 m/s."));
   }
 
   private static List<Case> brief() {
@@ -529,7 +558,8 @@ class FaultsTest {
   }
 
   private static void check(Case c) throws JsonProcessingException {
-    assertEquals(List.of(new Fault(c.at(), c.message())), PlanReader.read(changed(c)).faults());
+    assertEquals(
+        List.of(new Fault(c.at(), c.message())), PlanReader.read(changed(c), TODAY).faults());
   }
 
   private static String changed(Case c) throws JsonProcessingException {
@@ -695,7 +725,7 @@ class FaultsTest {
       throws JsonProcessingException {
     for (String field : List.of("wire", "line", "rope", "exposure")) {
       Case c = set("brief." + field, "\"string\"", "");
-      List<Fault> faults = PlanReader.read(changed(c)).faults();
+      List<Fault> faults = PlanReader.read(changed(c), TODAY).faults();
       assertEquals(1, faults.size());
       assertTrue(faults.get(0).message().startsWith("The brief: there is no "), field);
       assertTrue(
@@ -785,7 +815,7 @@ class FaultsTest {
             set("brief.lineLengths", "[12, 18.5]", ""),
             set("brief.matching", "{\"network\": \"balun\"}", ""),
             set("brief.targets[0].distanceKm", "31000", ""))) { // the long way round
-      assertEquals(List.of(), PlanReader.read(changed(c)).faults(), c.toString());
+      assertEquals(List.of(), PlanReader.read(changed(c), TODAY).faults(), c.toString());
     }
   }
 
