@@ -40,10 +40,13 @@ public class AssessBench {
   }
 
   static Plan plan(String name) {
+    return PlanReader.read(json(name)).plan();
+  }
+
+  static String json(String name) {
     String resource = "/spanwright/shared/demo/" + name + ".json";
     try (InputStream in = AssessBench.class.getResourceAsStream(resource)) {
-      String json = new String(in.readAllBytes(), StandardCharsets.UTF_8);
-      return PlanReader.read(json).plan();
+      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }

@@ -16,6 +16,7 @@ import org.openjdk.jmh.runner.RunnerException;
 import org.openjdk.jmh.runner.options.ChainedOptionsBuilder;
 import org.openjdk.jmh.runner.options.OptionsBuilder;
 import org.openjdk.jmh.runner.options.TimeValue;
+import spanwright.assess.TenBands;
 import spanwright.moments.BenchSizes;
 
 /**
@@ -24,8 +25,9 @@ import spanwright.moments.BenchSizes;
  *
  * <p>Arguments: {@code quick} (shorter, rougher), {@code profile} (where the time goes, by samples
  * of the stack), {@code allocation} (bytes per call), {@code nofma} (hardware fused multiply-add
- * switched off), {@code python=COMMAND} (a Python with NumPy and SciPy; {@code none} leaves zgesv
- * out), and anything else as a pattern for the names of the benchmarks to run.
+ * switched off), {@code memory} (no timing: what ten bands take), {@code python=COMMAND} (a Python
+ * with NumPy and SciPy; {@code none} leaves zgesv out), and anything else as a pattern for the
+ * names of the benchmarks to run.
  */
 public final class Benchmarks {
   private static final Path PROFILES = Path.of("target", "profiles");
@@ -43,6 +45,10 @@ public final class Benchmarks {
   /** Runs; see the class. */
   public static void main(String[] arguments) throws RunnerException, IOException {
     Benchmarks run = new Benchmarks();
+    if (List.of(arguments).contains("memory")) {
+      System.out.print(TenBands.memory());
+      return;
+    }
     for (String argument : arguments) {
       run.take(argument);
     }

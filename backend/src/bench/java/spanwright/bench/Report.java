@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import org.openjdk.jmh.annotations.Mode;
 import org.openjdk.jmh.results.BenchmarkResult;
 import org.openjdk.jmh.results.Result;
 import org.openjdk.jmh.results.RunResult;
@@ -104,8 +105,9 @@ final class Report {
       }
       Result<?> primary = result.getPrimaryResult();
       Statistics all = primary.getStatistics();
-      boolean sampled = name.endsWith(".assess");
-      double middle = sampled ? all.getPercentile(50) : best(result);
+      boolean sampled = result.getParams().getMode() == Mode.SampleTime;
+      boolean once = result.getParams().getMode() == Mode.SingleShotTime;
+      double middle = sampled || once ? all.getPercentile(50) : best(result);
       String high = sampled ? format("%.1f", all.getPercentile(95)) : "";
       text.append(format("| %s | %.2f | %s | %s |\n", with, middle, high, primary.getScoreUnit()));
     }
