@@ -99,13 +99,10 @@ final class Strand {
   static List<Strand> of(Rigged rigged) {
     List<Strand> strands = new ArrayList<>();
     List<double[][]> sweeps = new ArrayList<>();
-    int last = rigged.spans().size() - 1;
     for (Rigged.Span span : rigged.spans()) {
       double[] slack = new double[span.shapes().calm().size()];
       double[][] states = sweep(span.shapes(), null, slack);
       sweeps.add(states);
-      boolean headFree = hasTail(rigged, span.from());
-      boolean endFree = hasTail(rigged, span.to());
       int points = span.shapes().calm().size();
       add(strands, Part.ROPE, span, states, 0, span.wireFrom(), slack, false, false);
       add(
@@ -116,8 +113,8 @@ final class Strand {
           span.wireFrom(),
           span.wireTo(),
           slack,
-          span.from() == 0 && !headFree,
-          span.to() == last + 1 && !endFree);
+          isEnd(rigged, span, true),
+          isEnd(rigged, span, false));
       add(strands, Part.ROPE, span, states, span.wireTo(), points - 1, slack, false, false);
     }
     for (Rigged.Tail tail : rigged.tails()) {
@@ -147,6 +144,18 @@ final class Strand {
       strands.add(strand(Part.FEED_LINE, at, at, states, slack, false, false));
     }
     return strands;
+  }
+
+  /** Whether a conductor ends where a span's wire does: a loop never, nor where more hangs on. */
+  private static boolean isEnd(Rigged rigged, Rigged.Span span, boolean first) {
+    if (span.conductor() == 0 && rigged.isLoop() || first && span.conductor() > 0) {
+      return false;
+    }
+    int at = first ? span.from() : span.to();
+    boolean goesOn =
+        rigged.spans().stream()
+            .anyMatch(s -> s.conductor() == span.conductor() && (first ? s.to() : s.from()) == at);
+    return !goesOn && !hasTail(rigged, at);
   }
 
   private static boolean hasTail(Rigged rigged, int attachment) {
@@ -200,7 +209,7 @@ final class Strand {
     return strand(Part.FEED_LINE, at, at, states, slack, false, false);
   }
 
-  /** The states of one thing: left to right in steps, then iced. */
+  /** The states of one thing: left to right in steps, then iced, still and in its gust. */
   private static double[][] sweep(Rigged.Shapes shapes, double[][] firsts, double[] slack) {
     double[] calm = flat(shapes.calm());
     if (shapes.left().equals(shapes.calm()) && shapes.right().equals(shapes.calm())) {
@@ -210,7 +219,7 @@ final class Strand {
     }
     double[] left = flat(shapes.left());
     double[] right = flat(shapes.right());
-    int iced = shapes.iced().isEmpty() ? 0 : 1;
+    int iced = shapes.iced().isEmpty() ? 0 : shapes.icedLeft().isEmpty() ? 1 : 3;
     double[][] states = new double[2 * STEPS + 1 + iced][];
     states[0] = left;
     states[STEPS] = calm;
@@ -224,6 +233,10 @@ final class Strand {
     }
     if (iced > 0) {
       states[2 * STEPS + 1] = flat(shapes.iced());
+    }
+    if (iced > 1) {
+      states[2 * STEPS + 2] = flat(shapes.icedLeft());
+      states[2 * STEPS + 3] = flat(shapes.icedRight());
     }
     return states;
   }
@@ -320,7 +333,7 @@ final class Strand {
 
   /** Whether a state is calm, or iced in calm air. */
   boolean isStill(int state) {
-    return state == calm || state >= sweep;
+    return state == calm || state == sweep;
   }
 
   /** How much farther than a state's piece from offset i things may be [m]; 0 on a calm day. */

@@ -299,6 +299,31 @@ final class Chain {
     return count / 3;
   }
 
+  /**
+   * The potential of the loads and the stretch, after {@link #solve}: as a function of the way from
+   * end to end its slope is the tension at the start.
+   */
+  double potential() {
+    return -energy;
+  }
+
+  /**
+   * How fast the tension at the start grows with the way from end to end, after {@link #solve}: xx,
+   * xy, xz, yy, yz, zz [N/m].
+   */
+  void stiffness(double[] into) {
+    double c00 = slope[3] * slope[5] - slope[4] * slope[4];
+    double c01 = slope[2] * slope[4] - slope[1] * slope[5];
+    double c02 = slope[1] * slope[4] - slope[2] * slope[3];
+    double det = slope[0] * c00 + slope[1] * c01 + slope[2] * c02;
+    into[0] = c00 / det;
+    into[1] = c01 / det;
+    into[2] = c02 / det;
+    into[3] = (slope[0] * slope[5] - slope[2] * slope[2]) / det;
+    into[4] = (slope[1] * slope[2] - slope[0] * slope[4]) / det;
+    into[5] = (slope[0] * slope[3] - slope[1] * slope[1]) / det;
+  }
+
   /** Tension at the beginning [N]. */
   double tensionAtStart() {
     return Math.sqrt(start[0] * start[0] + start[1] * start[1] + start[2] * start[2]);

@@ -62,6 +62,11 @@ record Materials(
     return windPressure * (diameter + (iced ? 2 * ice : 0));
   }
 
+  /** Push of a weather's wind on a metre of something round that it meets square [N/m]. */
+  double push(double diameter, Weather weather) {
+    return weather.windShare * push(diameter, weather.iced);
+  }
+
   /** Weight of a metre of something round [N/m], its ice included. */
   double weight(double kilogramsPerMetre, double diameter, boolean iced) {
     double sleeve = iced ? Practice.ICE_DENSITY * Math.PI * ice * (diameter + ice) : 0;

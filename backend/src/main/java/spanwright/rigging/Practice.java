@@ -44,8 +44,14 @@ final class Practice {
   /** A feed line stands off the wall by this much where it comes down to its entry [m]. */
   static final double STAND_OFF = 0.3;
 
-  /** A conductor point this near to an attachment is held by it [m]. */
-  static final double HELD_WITHIN = 1.0;
+  /** Wire this near to an attachment is held by it; farther off there is a rope between [m]. */
+  static final double HELD_WITHIN = 0.3;
+
+  /** The longest rope from a bend of the wire to what holds it [m]. */
+  static final double LONGEST_LIFT = 12;
+
+  /** Wire is taken to turn where it is held when it turns by more than this [rad]. */
+  static final double BEND = Math.toRadians(15);
 
   /** Ice on wires [kg/m³]: the plan format's figure. */
   static final double ICE_DENSITY = 900;

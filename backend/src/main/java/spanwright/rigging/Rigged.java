@@ -40,6 +40,15 @@ public record Rigged(
     notes = List.copyOf(notes);
   }
 
+  /** Whether the first conductor comes back to where it began: its last span closes it. */
+  public boolean isLoop() {
+    return spans.stream()
+        .filter(each -> each.conductor() == 0)
+        .reduce((first, last) -> last)
+        .map(last -> spans.size() > 1 && last.to() == spans.get(0).from())
+        .orElse(false);
+  }
+
   /**
    * One thing in its calm shape and as the weather moves it: the same number of points in each, the
    * n-th of one becoming the n-th of another.
@@ -48,13 +57,28 @@ public record Rigged(
    * @param left in the design gust blowing to the left of the span, seen from its first attachment
    * @param right in the gust blowing to the right
    * @param iced under ice without wind; empty where no ice is asked for
+   * @param icedLeft under ice, in the gust that goes with ice, blowing to the left; likewise empty
+   * @param icedRight the same gust blowing to the right; likewise empty
    */
-  public record Shapes(List<Place> calm, List<Place> left, List<Place> right, List<Place> iced) {
+  public record Shapes(
+      List<Place> calm,
+      List<Place> left,
+      List<Place> right,
+      List<Place> iced,
+      List<Place> icedLeft,
+      List<Place> icedRight) {
     public Shapes {
       calm = List.copyOf(calm);
       left = List.copyOf(left);
       right = List.copyOf(right);
       iced = List.copyOf(iced);
+      icedLeft = List.copyOf(icedLeft);
+      icedRight = List.copyOf(icedRight);
+    }
+
+    /** Shapes of which ice in the wind is not drawn. */
+    public Shapes(List<Place> calm, List<Place> left, List<Place> right, List<Place> iced) {
+      this(calm, left, right, iced, List.of(), List.of());
     }
 
     /** The part from one point to another, both included, in every shape. */
@@ -63,12 +87,23 @@ public record Rigged(
           calm.subList(from, to + 1),
           left.subList(from, to + 1),
           right.subList(from, to + 1),
-          iced.isEmpty() ? iced : iced.subList(from, to + 1));
+          cut(iced, from, to),
+          cut(icedLeft, from, to),
+          cut(icedRight, from, to));
+    }
+
+    private static List<Place> cut(List<Place> points, int from, int to) {
+      return points.isEmpty() ? points : points.subList(from, to + 1);
     }
 
     /** The shapes that the weather makes of it, calm first. */
     public List<List<Place>> all() {
-      return iced.isEmpty() ? List.of(calm, left, right) : List.of(calm, left, right, iced);
+      if (iced.isEmpty()) {
+        return List.of(calm, left, right);
+      }
+      return icedLeft.isEmpty()
+          ? List.of(calm, left, right, iced)
+          : List.of(calm, left, right, iced, icedLeft, icedRight);
     }
   }
 

@@ -13,13 +13,15 @@ final class Shortcomings {
 
   private final Hang hang;
   private final Rigging rigging;
+  private final List<Look> looks;
   private final Rigged rigged;
   private final List<Rigged.Shortcoming> all = new ArrayList<>();
   private final List<String> notes = new ArrayList<>();
 
-  Shortcomings(Hang hang, Rigged rigged) {
+  Shortcomings(Hang hang, List<Look> looks, Rigged rigged) {
     this.hang = hang;
     this.rigging = hang.rigging;
+    this.looks = looks;
     this.rigged = rigged;
   }
 
@@ -147,11 +149,9 @@ final class Shortcomings {
       return;
     }
     double rope = Double.POSITIVE_INFINITY;
-    if (a > 0) {
-      rope = Math.min(rope, rigged.spans().get(a - 1).ropeTo());
-    }
-    if (a < rigged.spans().size()) {
-      rope = Math.min(rope, rigged.spans().get(a).ropeFrom());
+    for (Rigged.Span span : rigged.spans()) {
+      rope = span.from() == a ? Math.min(rope, span.ropeFrom()) : rope;
+      rope = span.to() == a ? Math.min(rope, span.ropeTo()) : rope;
     }
     if (rope < Practice.SHORTEST_TAIL) {
       add(
@@ -170,13 +170,14 @@ final class Shortcomings {
 
   private void strength(int i) {
     Rigged.Span span = rigged.spans().get(i);
-    double share = span.greatestTension() / hang.materials.wireBreaking();
+    Materials materials = hang.materials(span.conductor());
+    double share = span.greatestTension() / materials.wireBreaking();
     double allowed = rigging.rules.value("wire-strength");
     Place middle = span.shapes().calm().get(span.shapes().calm().size() / 2);
     if (share > allowed) {
       add(
           "wire-strength",
-          hang.wire.id(),
+          hang.wire(span.conductor()).id(),
           "wire",
           middle,
           share,
@@ -187,7 +188,7 @@ final class Shortcomings {
               span.greatestTension(), 100 * share, 100 * allowed),
           null);
     }
-    double working = span.greatestTension() / hang.materials.ropeWorking();
+    double working = span.greatestTension() / materials.ropeWorking();
     double most = rigging.rules.value("rope-strength");
     if (working > most && (span.ropeFrom() > 0.01 || span.ropeTo() > 0.01)) {
       add(
@@ -199,7 +200,7 @@ final class Shortcomings {
           most,
           say(
               "The rope would carry %.0f N in the gust; its working load is %.0f N.",
-              span.greatestTension(), hang.materials.ropeWorking()),
+              span.greatestTension(), materials.ropeWorking()),
           say(
               "Take a rope with a working load of at least %.0f N.",
               Math.ceil(span.greatestTension() / most)));
@@ -207,30 +208,45 @@ final class Shortcomings {
   }
 
   private void hangs(int i) {
-    SpanStatics statics = hang.statics(i);
+    Look look = looks.get(i);
     Rigged.Span span = rigged.spans().get(i);
     Place middle = span.shapes().calm().get(span.shapes().calm().size() / 2);
-    double chord = statics.chordLength;
-    if (statics.slackerThanAsked && span.sag() > 0.25 * chord) {
-      double over = span.ropeFrom() + span.wireLength() + span.ropeTo() - chord;
+    String from = hang.holders.get(span.from()).name();
+    String to = hang.holders.get(span.to()).name();
+    // Of a loop between two supports, the lower half is meant to hang.
+    boolean meant = rigged.isLoop() && rigged.attachments().size() == 2;
+    if (look.slack() && span.sag() > 0.25 * look.chord() && !meant) {
+      boolean joined = hang.course.hangsTogether();
+      double ropes = joined ? 0 : span.ropeFrom() + span.ropeTo();
+      double over = ropes + span.wireLength() - look.chord();
       add(
           "hangs",
-          hang.holders.get(i).id(),
+          hang.holders.get(span.from()).id(),
           "wire",
           middle,
           span.sag(),
-          0.25 * chord,
+          0.25 * look.chord(),
           say(
               "The wire is %.1f m longer than the way between %s and %s; it would hang %.1f m deep.",
-              over, hang.holders.get(i).name(), hang.holders.get(i + 1).name(), span.sag()),
+              over, from, to, span.sag()),
           say("Shorten the wire by %.1f m.", over));
     }
-    if (statics.lifted) {
-      notes.add(
+    if (look.lifted()) {
+      lifted(span);
+    }
+  }
+
+  private void lifted(Rigged.Span span) {
+    for (int a : new int[] {span.from(), span.to()}) {
+      Statics.Counterweight weight = hang.statics.weight(a);
+      String note =
           say(
               "In the design gust the counterweight at %s is drawn up: tie a stop into its rope at"
                   + " the pulley, from where the span holds as if tied.",
-              hang.holders.get(statics.pullAtEnd ? i + 1 : i).name()));
+              hang.holders.get(a).name());
+      if (weight != null && weight.lifted() && !notes.contains(note)) {
+        notes.add(note);
+      }
     }
   }
 

@@ -57,9 +57,7 @@ final class SpanStatics {
   private final double dz;
   private final boolean adjustTo;
   private final double[] calmLengths = new double[4];
-  private double feedWeight;
-  private double feedPush;
-  private double iceFeedWeight;
+  private FeedLoad feedLoad = FeedLoad.NONE;
 
   double pull;
   double ropeFrom;
@@ -89,24 +87,17 @@ final class SpanStatics {
     chain.flexibility[3] = 1 / materials.ropeStiffness();
   }
 
-  /**
-   * What bears on the feedpoint of this span.
-   *
-   * @param weight in calm and gust without ice [N]
-   * @param push of the gust, iced where ice is asked for [N]
-   * @param iced weight under ice [N]
-   */
-  void setFeedLoad(double weight, double push, double iced) {
-    feedWeight = weight;
-    feedPush = push;
-    iceFeedWeight = iced;
+  /** Sets what bears on the feedpoint of this span. */
+  void setFeedLoad(FeedLoad load) {
+    feedLoad = load;
   }
 
-  private void load(boolean gust, boolean iced) {
-    double fx = gust ? sideX : 0;
-    double fy = gust ? sideY : 0;
-    double rope = materials.push(materials.ropeDiameter(), iced);
-    double wire = materials.push(materials.wireDiameter(), iced);
+  private void load(Weather weather) {
+    double fx = weather.windy() ? sideX : 0;
+    double fy = weather.windy() ? sideY : 0;
+    double rope = materials.push(materials.ropeDiameter(), weather);
+    double wire = materials.push(materials.wireDiameter(), weather);
+    boolean iced = weather.iced;
     double ropeWeight = materials.weight(materials.ropeWeight(), materials.ropeDiameter(), iced);
     double wireWeight = materials.weight(materials.wireWeight(), materials.wireDiameter(), iced);
     chain.setLoad(0, fx * rope, fy * rope, -ropeWeight);
@@ -117,7 +108,8 @@ final class SpanStatics {
     chain.setPoint(0, 0, 0, make.insulatorFrom() ? insulator : 0);
     chain.setPoint(2, 0, 0, make.insulatorTo() ? insulator : 0);
     if (make.fed()) {
-      chain.setPoint(1, fx * feedPush, fy * feedPush, iced ? -iceFeedWeight : -feedWeight);
+      double push = feedLoad.push(weather);
+      chain.setPoint(1, fx * push, fy * push, -feedLoad.weight(weather));
     }
   }
 
@@ -132,17 +124,19 @@ final class SpanStatics {
     double at = (make.ropeFrom() + make.wire()) / chordLength;
     double a = make.fed() ? Math.max(0.02, Math.min(0.98, at)) : 0.5;
     double moment =
-        even * chordLength * level / 8 + (make.fed() ? feedWeight * a * (1 - a) * level : 0);
+        even * chordLength * level / 8
+            + (make.fed() ? feedLoad.weight(Weather.CALM) * a * (1 - a) * level : 0);
     // A steep span must bear its own weight whatever its sag.
     double steep = Math.abs(dz) / chordLength;
-    double borne = 3 + 1.2 * steep * (even * chordLength + (make.fed() ? feedWeight : 0));
+    double borne =
+        3 + 1.2 * steep * (even * chordLength + (make.fed() ? feedLoad.weight(Weather.CALM) : 0));
     return Math.max(borne, moment / (share * chordLength));
   }
 
   /** Hangs it calm with the pull, letting rope out or in. */
   void calm(double wantedPull) {
     pull = wantedPull;
-    load(false, false);
+    load(Weather.CALM);
     double least = make.ropeFrom() < 0.01 && make.ropeTo() < 0.01 ? 0 : Practice.SHORTEST_TAIL;
     Tightening tightening = new Tightening(chain, dx, dy, dz);
     double slack = tightening.toPull(pull, pullAtEnd, s -> setRope(chordLength + s, pull));
@@ -223,24 +217,23 @@ final class SpanStatics {
   }
 
   private int[] parts() {
-    double wire = make.wire() + make.wireAfter();
+    return cut(wireParts, make.wire(), make.wireAfter(), chain.length[0], chain.length[3]);
+  }
+
+  /** Into how many parts each piece of a span is drawn. */
+  static int[] cut(int wireParts, double wire, double after, double ropeFrom, double ropeTo) {
+    int share = (int) Math.round(wireParts * wire / (wire + after));
     int before =
-        make.wireAfter() <= 0
-            ? wireParts
-            : make.wire() <= 0
-                ? 0
-                : Math.max(
-                    2, Math.min(wireParts - 2, (int) Math.round(wireParts * make.wire() / wire)));
-    return new int[] {
-      chain.length[0] > 0 ? 4 : 0, before, wireParts - before, chain.length[3] > 0 ? 4 : 0
-    };
+        after <= 0 ? wireParts : wire <= 0 ? 0 : Math.max(2, Math.min(wireParts - 2, share));
+    return new int[] {ropeFrom > 0 ? 4 : 0, before, wireParts - before, ropeTo > 0 ? 4 : 0};
   }
 
   /** Hangs it in the gust, or under ice alone, from its calm lengths. */
-  Solved loaded(boolean gust, boolean iced) {
+  Solved loaded(Weather weather) {
+    boolean gust = weather.windy();
     double keepFrom = ropeFrom;
     double keepTo = ropeTo;
-    load(gust, iced);
+    load(weather);
     double[] d = offset(gust);
     double chordNow = Math.sqrt(d[0] * d[0] + d[1] * d[1] + dz * dz);
     Tightening tightening = new Tightening(chain, d[0], d[1], dz);
@@ -255,8 +248,9 @@ final class SpanStatics {
       tightening.asLong(chain.totalLength() - chordNow);
     }
     Solved solved = keep(gust);
-    if (gust) {
-      weightTravel = runs ? (adjustTo ? ropeTo - keepTo : ropeFrom - keepFrom) : 0;
+    double travel = runs ? (adjustTo ? ropeTo - keepTo : ropeFrom - keepFrom) : 0;
+    if (Math.abs(travel) > Math.abs(weightTravel)) {
+      weightTravel = travel;
     }
     ropeFrom = keepFrom;
     ropeTo = keepTo;
@@ -278,48 +272,4 @@ final class SpanStatics {
     double off = force.x() * sideX + force.y() * sideY;
     return new Force(force.x() - 2 * off * sideX, force.y() - 2 * off * sideY, force.z());
   }
-
-  /** Greatest drop of points below the straight chord, measured upright [m]. */
-  double sag(List<Place> points) {
-    double level2 = dx * dx + dy * dy;
-    double most = 0;
-    for (Place each : points) {
-      double x = each.x() - make.from().x();
-      double y = each.y() - make.from().y();
-      double share = level2 < 1e-9 ? 0 : Math.max(0, Math.min(1, (x * dx + y * dy) / level2));
-      double chordHeight = level2 < 1e-9 ? Math.min(0, dz) : share * dz;
-      most = Math.max(most, make.from().z() + chordHeight - each.z());
-    }
-    return most;
-  }
-
-  /** Greatest sideways shift of points [m]. */
-  double blowOut(List<Place> points) {
-    double most = 0;
-    for (Place each : points) {
-      double off = (each.x() - make.from().x()) * sideX + (each.y() - make.from().y()) * sideY;
-      most = Math.max(most, Math.abs(off));
-    }
-    return most;
-  }
-
-  /**
-   * A solved state.
-   *
-   * @param points attachment to attachment
-   * @param wireFrom index of the first point of wire
-   * @param wireTo index of the last
-   * @param feed index of the feedpoint, where it hangs here
-   * @param onFrom force on the first attachment
-   * @param onTo force on the second
-   * @param greatest tension anywhere [N]
-   */
-  record Solved(
-      List<Place> points,
-      int wireFrom,
-      int wireTo,
-      int feed,
-      Force onFrom,
-      Force onTo,
-      double greatest) {}
 }

@@ -231,7 +231,7 @@ class RiggingTest {
     says(plan, "fraction", Plots.straight("level", 1, 1.5, WEST, EAST));
     Layout one = Plots.straight("level", 1, 0.5, WEST, EAST);
     says(plan, "two places", new Layout("level", List.of(WEST), one.conductors(), one.feed()));
-    says(plan, "one wire", new Layout("level", one.attachments(), List.of(), one.feed()));
+    says(plan, "there is none", new Layout("level", one.attachments(), List.of(), one.feed()));
     says(
         plan,
         "no wire \"gold\"",

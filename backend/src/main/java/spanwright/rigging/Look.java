@@ -1,0 +1,58 @@
+package spanwright.rigging;
+
+import java.util.ArrayList;
+import java.util.List;
+import spanwright.plan.Place;
+
+/**
+ * A span as it was hung, in every weather.
+ *
+ * @param calm in still air
+ * @param left in the gust from the right, seen from the span's first attachment
+ * @param right in the gust from the left
+ * @param ice under ice in still air, or null
+ * @param iceLeft under ice in the gust that goes with it, or null
+ * @param iceRight likewise
+ * @param sideX level, square to the span, to its left
+ * @param sideY likewise
+ * @param ropeFrom length of rope at its first end [m]
+ * @param ropeTo length of rope at its second end [m]
+ * @param tension at the end where it is set, calm [N]
+ * @param chord between what holds its wire, or its ropes [m]
+ * @param slack whether it hangs as long as it is, looser than the pull wanted
+ * @param lifted whether a weather would draw its counterweight up
+ */
+record Look(
+    Solved calm,
+    Solved left,
+    Solved right,
+    Solved ice,
+    Solved iceLeft,
+    Solved iceRight,
+    double sideX,
+    double sideY,
+    double ropeFrom,
+    double ropeTo,
+    double tension,
+    double chord,
+    boolean slack,
+    boolean lifted) {
+
+  /** Greatest tension in any weather [N]. */
+  double greatest() {
+    double most = 0;
+    for (Solved each : new Solved[] {calm, left, right, ice, iceLeft, iceRight}) {
+      most = each == null ? most : Math.max(most, each.greatest());
+    }
+    return most;
+  }
+
+  Rigged.Shapes shapes() {
+    List<List<Place>> iced = new ArrayList<>();
+    for (Solved each : new Solved[] {ice, iceLeft, iceRight}) {
+      iced.add(each == null ? List.of() : each.points());
+    }
+    return new Rigged.Shapes(
+        calm.points(), left.points(), right.points(), iced.get(0), iced.get(1), iced.get(2));
+  }
+}
