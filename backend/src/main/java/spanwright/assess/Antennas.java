@@ -15,10 +15,7 @@ import spanwright.plan.Place;
 import spanwright.plan.WireKind;
 import spanwright.rigging.Rigged;
 
-/**
- * Puts a hanging wire before the field solver: the calm shape over a level plane at the mean height
- * of the ground under it.
- */
+/** Puts a hanging wire before the field solver: the calm shape over the plane of its ground. */
 final class Antennas {
   private static final Pattern WIRE = Pattern.compile("wires\\[(\\d+)]");
 
@@ -37,25 +34,20 @@ final class Antennas {
     this.metal = metal;
   }
 
-  /** Whether the plan has metalwork to be solved with the wire. */
-  boolean hasMetal() {
-    return !metal.isEmpty();
-  }
-
   /** All the plan's metalwork. */
   Metal metal() {
     return metal;
   }
 
-  /** The wire and this much of the metalwork. */
-  AntennaModel of(Rigged rigged, Metal with) {
-    double plane = plane(rigged);
+  /** The wire and this much of the metalwork, in the frame of the plane. */
+  AntennaModel of(Rigged rigged, GroundPlane plane, Metal with) {
     List<WireSpec> wires = new ArrayList<>();
     for (Rigged.Conductor conductor : rigged.conductors()) {
       WireKind kind = catalogue.wire(conductor.wire());
       List<Vertex> points = new ArrayList<>();
       for (Place p : conductor.shapes().calm()) {
-        Vertex next = new Vertex(p.x(), p.y(), Math.max(LEAST_HEIGHT, p.z() - plane));
+        Vertex over = plane.over(p);
+        Vertex next = new Vertex(over.x(), over.y(), Math.max(LEAST_HEIGHT, over.z()));
         if (points.isEmpty() || points.get(points.size() - 1).distanceTo(next) > 1e-6) {
           points.add(next);
         }
@@ -99,42 +91,16 @@ final class Antennas {
     return blamed;
   }
 
-  /** Mean height of the ground under the wire above the plan's zero [m]. */
-  double plane(Rigged rigged) {
-    double sum = 0;
-    double length = 0;
-    for (Rigged.Conductor conductor : rigged.conductors()) {
-      List<Place> points = conductor.shapes().calm();
-      for (int i = 1; i < points.size(); i++) {
-        Place a = points.get(i - 1);
-        Place b = points.get(i);
-        double step = Math.hypot(b.x() - a.x(), b.y() - a.y()) + 1e-9;
-        sum += step * surface.heightAt((a.x() + b.x()) / 2, (a.y() + b.y()) / 2);
-        length += step;
-      }
-    }
-    return length == 0 ? 0 : sum / length;
+  /** The plane that stands for the ground under the wire. */
+  GroundPlane plane(Rigged rigged) {
+    return GroundPlane.under(
+        rigged.conductors().stream().map(conductor -> conductor.shapes().calm()).toList(), surface);
   }
 
   /** Whether some of the wire hangs lower over that plane than it can be solved. */
-  boolean isDown(Rigged rigged) {
-    double plane = plane(rigged);
+  static boolean isDown(Rigged rigged, GroundPlane plane) {
     return rigged.conductors().stream()
         .flatMap(conductor -> conductor.shapes().calm().stream())
-        .anyMatch(p -> p.z() - plane < LEAST_HEIGHT);
-  }
-
-  /** Greatest and least height of the ground under the wire, above the plan's zero [m]. */
-  double fall(Rigged rigged) {
-    double least = Double.POSITIVE_INFINITY;
-    double greatest = Double.NEGATIVE_INFINITY;
-    for (Rigged.Conductor conductor : rigged.conductors()) {
-      for (Place p : conductor.shapes().calm()) {
-        double ground = surface.heightAt(p.x(), p.y());
-        least = Math.min(least, ground);
-        greatest = Math.max(greatest, ground);
-      }
-    }
-    return Math.max(0, greatest - least);
+        .anyMatch(p -> plane.over(p).z() < LEAST_HEIGHT);
   }
 }

@@ -3,6 +3,7 @@ package spanwright.assess;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import org.apache.commons.math3.complex.Complex;
 import spanwright.clearance.Clearances;
 import spanwright.clearance.Refusal;
@@ -10,14 +11,13 @@ import spanwright.feed.FeedResult;
 import spanwright.moments.AntennaModel;
 import spanwright.moments.Ground;
 import spanwright.moments.GroundTables;
-import spanwright.moments.MeshAim;
 import spanwright.moments.ModelFault;
-import spanwright.moments.Solution;
 import spanwright.moments.Solver;
 import spanwright.path.Window;
 import spanwright.plan.Catalogue;
 import spanwright.plan.GroundSurface;
 import spanwright.plan.Plan;
+import spanwright.plan.Soil;
 import spanwright.rigging.Layout;
 import spanwright.rigging.Rigging;
 
@@ -39,9 +39,7 @@ public final class Assessor {
   private final Radio radio;
   private final Scoring scoring;
   private final Notes notes;
-  private final Ground ground;
-  private final Solver solver;
-  private final Tally tally = new Tally();
+  private final Fields fields;
 
   private Assessor(Plan plan, Catalogue catalogue, GroundTables tables) {
     this.plan = plan;
@@ -56,10 +54,10 @@ public final class Assessor {
     this.station = new Station(plan, catalogue);
     this.radio = new Radio(plan.site().planNorth());
     this.scoring = new Scoring(plan.brief());
-    this.notes = new Notes(plan, antennas);
-    this.ground =
-        Ground.real(plan.site().ground().permittivity(), plan.site().ground().conductivity());
-    this.solver = new Solver(tables);
+    this.notes = new Notes(plan);
+    Soil soil = plan.site().ground();
+    this.fields =
+        new Fields(Ground.real(soil.permittivity(), soil.conductivity()), new Solver(tables));
   }
 
   /** Prepares a plan, with ground tables of its own. */
@@ -84,7 +82,7 @@ public final class Assessor {
 
   /** Linear systems solved so far. */
   public Tally tally() {
-    return tally;
+    return fields.tally();
   }
 
   /** Catalogue id of the wire in use. */
@@ -128,11 +126,7 @@ public final class Assessor {
    */
   public void prepareTables(double reach, double highest, int threads) {
     double low = metal.isEmpty() ? 1.0 : 0.3;
-    solver.tables().prepare(frequencies(rows), ground, reach, low, highest, threads);
-  }
-
-  private static double[] frequencies(List<Row> rows) {
-    return rows.stream().mapToDouble(Row::frequencyMHz).toArray();
+    fields.prepare(rows, reach, low, highest, threads);
   }
 
   /**
@@ -158,94 +152,119 @@ public final class Assessor {
    */
   public double coarseScore(Hung hung) {
     try {
-      List<Placement.BandResult> quick =
-          rowsOf(hung, middleRows, Metal.none(), MeshAim.COARSE, false).rows();
+      GroundPlane plane = antennas.plane(hung.rigged());
+      AntennaModel model = antennas.of(hung.rigged(), plane, Metal.none());
+      Fed quick = feed(hung, fields.glance(model, plane, middleRows));
       return Scoring.total(
-          scoring.parts(quick, PlacementWriter.masts(hung.rigged()), hung.clearances()));
+          scoring.parts(quick.rows, PlacementWriter.masts(hung.rigged()), hung.clearances()));
     } catch (ModelFault fault) {
       return Double.NEGATIVE_INFINITY;
     }
   }
 
   /**
-   * One placement, the whole chain; also a foul one.
+   * One placement, the whole chain, held against a finer mesh and all; also a foul one. Works on
+   * all processors.
    *
    * @throws IllegalArgumentException with a sentence when the layout makes no sense
    */
   public Placement assess(Layout layout) {
-    return assess(hang(layout));
+    return assess(hang(layout), true, true);
   }
 
   /**
-   * A hung layout, the whole chain: full mesh, every frequency, metalwork and all.
+   * A hung layout, the whole chain: full mesh, every frequency, metalwork and all. Not held against
+   * a finer mesh: {@link #refined} does that for what is to be shown.
    *
    * @throws Unsolvable with a sentence when the field solver cannot take it as it hangs
    */
   public Placement assess(Hung hung) {
-    List<String> doubts = new ArrayList<>();
-    Solved solved = solveInFull(hung, doubts);
-    doubts.addAll(0, solved.warnings);
-    return new PlacementWriter(plan, surface, scoring)
-        .write(hung, solved.rows, solved.lineLength, notes.of(hung, rows, doubts));
+    return assess(hung, false, false);
   }
 
-  private record Solved(
-      List<Placement.BandResult> rows, double lineLength, List<String> warnings) {}
+  /**
+   * The same placement as {@link #assess(Hung)} gave, held against a finer mesh on every band's
+   * middle frequency.
+   */
+  public Placement refined(Hung hung) {
+    return assess(hung, true, false);
+  }
+
+  private Placement assess(Hung hung, boolean refine, boolean together) {
+    List<String> said = new ArrayList<>();
+    GroundPlane plane = antennas.plane(hung.rigged());
+    Solved solved = solved(hung, plane, refine, together, said);
+    Fed fed = feed(hung, solved.rows);
+    List<String> told = new ArrayList<>(Judgement.notes(solved.quality));
+    solved.warnings.stream()
+        .filter(warning -> !solved.quality.doubts().contains(warning))
+        .forEach(told::add);
+    told.addAll(said);
+    return new PlacementWriter(plan, surface, scoring)
+        .write(hung, fed.rows, fed.lineLength, notes.of(hung, plane, rows, told), solved.quality);
+  }
+
+  private record Solved(List<Fields.Seen> rows, List<String> warnings, Placement.Quality quality) {}
 
   /**
    * With all the metalwork that the field solver can take; what it cannot is named and left out.
+   *
+   * @param said is told what was left out
    */
-  private Solved solveInFull(Hung hung, List<String> doubts) {
-    Metal with = antennas.metal();
+  private Solved solved(
+      Hung hung, GroundPlane plane, boolean refine, boolean together, List<String> said) {
+    Metal metal = antennas.metal();
     while (true) {
+      Metal with = metal;
       try {
-        return rowsOf(hung, rows, with, MeshAim.FULL, true);
+        AntennaModel model = antennas.of(hung.rigged(), plane, with);
+        List<Fields.Seen> seen = fields.look(model, plane, rows, refine, together);
+        UnaryOperator<String> named = sentence -> antennas.named(sentence, hung.rigged(), with);
+        List<String> warnings =
+            seen.stream()
+                .flatMap(one -> one.solution().warnings().stream())
+                .map(named)
+                .distinct()
+                .toList();
+        return new Solved(seen, warnings, Judgement.of(seen, named));
       } catch (ModelFault fault) {
         String sentence = antennas.named(fault.getMessage(), hung.rigged(), with);
         if (with.isEmpty()) {
           throw new Unsolvable(sentence, fault);
         }
         Optional<String> piece = antennas.blamed(fault.getMessage(), hung.rigged(), with);
-        doubts.add(piece.orElse("The metalwork") + " is not in these figures. " + sentence);
-        with = piece.isPresent() ? with.without(piece.get()) : Metal.none();
+        said.add(piece.orElse("The metalwork") + " is not in these figures. " + sentence);
+        metal = piece.isPresent() ? with.without(piece.get()) : Metal.none();
       }
     }
   }
 
-  private Solved rowsOf(Hung hung, List<Row> wanted, Metal with, MeshAim aim, boolean full) {
-    AntennaModel model = antennas.of(hung.rigged(), with);
-    List<Solution> solutions = solver.solve(model, ground, frequencies(wanted), aim);
-    solutions.forEach(solution -> tally.add(solution.unknowns()));
+  private record Fed(List<Placement.BandResult> rows, double lineLength) {}
+
+  /** Down the line, whose length is chosen here where it is free, to the socket. */
+  private Fed feed(Hung hung, List<Fields.Seen> seen) {
     String line = hung.layout().feed().line() == null ? lineId() : hung.layout().feed().line();
-    double length = lineLength(hung, line, wanted, solutions);
+    double length = lineLength(hung, line, seen);
     List<Placement.BandResult> results = new ArrayList<>();
-    List<String> warnings = new ArrayList<>();
-    for (int i = 0; i < wanted.size(); i++) {
-      Row row = wanted.get(i);
-      Solution solution = solutions.get(i);
-      FeedResult feed =
-          station.run(line, length, row.band(), row.frequencyMHz(), solution.impedance());
-      results.add(radio.row(row, solution, feed, full));
-      for (String warning : solution.warnings()) {
-        String named = antennas.named(warning, hung.rigged(), with);
-        if (full && !warnings.contains(named)) {
-          warnings.add(named);
-        }
-      }
+    for (Fields.Seen one : seen) {
+      Row row = one.row();
+      FeedResult fed =
+          station.run(line, length, row.band(), row.frequencyMHz(), one.solution().impedance());
+      results.add(radio.row(row, one.solution(), one.far(), fed));
     }
-    return new Solved(results, length, warnings);
+    return new Fed(results, length);
   }
 
-  private double lineLength(Hung hung, String line, List<Row> wanted, List<Solution> solutions) {
+  private double lineLength(Hung hung, String line, List<Fields.Seen> seen) {
     Double chosen = hung.layout().feed().lineLength();
     if (chosen != null) {
       return chosen;
     }
     List<Station.Load> loads = new ArrayList<>();
-    for (int i = 0; i < wanted.size(); i++) {
-      Row row = wanted.get(i);
+    for (Fields.Seen one : seen) {
+      Row row = one.row();
       if (row.middle() && !row.band().receiveOnly()) {
-        Complex z = solutions.get(i).impedance();
+        Complex z = one.solution().impedance();
         loads.add(new Station.Load(row.band(), row.frequencyMHz(), z));
       }
     }

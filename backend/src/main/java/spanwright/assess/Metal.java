@@ -71,15 +71,13 @@ final class Metal {
     return pieces.stream().map(Piece::name).toList();
   }
 
-  /** As conductors over a ground plane at a height above the plan's zero [m]. */
-  List<WireSpec> over(double plane) {
+  /** As conductors over a ground plane. */
+  List<WireSpec> over(GroundPlane plane) {
     return pieces.stream()
         .map(
             piece ->
                 WireSpec.of(
-                    piece.path.stream()
-                        .map(p -> new Vertex(p.x(), p.y(), height(p, plane)))
-                        .toList(),
+                    piece.path.stream().map(p -> over(p, plane)).toList(),
                     piece.radius,
                     CONDUCTIVITY))
         .toList();
@@ -90,10 +88,11 @@ final class Metal {
    * there it keeps half its height above its own ground at least, so that no two pieces fall
    * together.
    */
-  private double height(Place p, double plane) {
+  private Vertex over(Place p, GroundPlane plane) {
     double aboveGround = p.z() - surface.heightAt(p.x(), p.y());
     double least = LEAST_HEIGHT + Math.max(0, aboveGround - LEAST_HEIGHT) / 2;
-    return Math.max(least, p.z() - plane);
+    Vertex there = plane.over(p);
+    return new Vertex(there.x(), there.y(), Math.max(least, there.z()));
   }
 
   private static List<Place> withoutRepeats(List<Place> path) {

@@ -22,23 +22,23 @@ final class Notes {
 
   private static final double NOISE_NEAR = 10;
 
-  /** Ground that falls by more than this under the wire makes the level plane a rough one [m]. */
-  private static final double LEVEL_ENOUGH = 0.5;
+  /** A slope is told from this on [rad], and ground that departs so far from the plane [m]. */
+  private static final double LEVEL_ENOUGH = Math.toRadians(0.5);
+
+  private static final double EVEN_ENOUGH = 0.1;
 
   private final Plan plan;
-  private final Antennas antennas;
 
-  Notes(Plan plan, Antennas antennas) {
+  Notes(Plan plan) {
     this.plan = plan;
-    this.antennas = antennas;
   }
 
-  List<String> of(Hung hung, List<Row> rows, List<String> doubts) {
+  List<String> of(Hung hung, GroundPlane plane, List<Row> rows, List<String> doubts) {
     List<String> notes = new ArrayList<>();
     hung.rigged().shortcomings().forEach(s -> notes.add(s.reason()));
     notes.addAll(doubts);
     notes.addAll(hung.rigged().notes());
-    addGround(hung.rigged(), notes);
+    addGround(hung.rigged(), plane, notes);
     addMetalRoofs(hung.rigged(), notes);
     addNoise(hung.rigged(), notes);
     for (Row row : rows) {
@@ -47,25 +47,60 @@ final class Notes {
         if (row.middle() && !note.isEmpty()) {
           notes.add(look.target().name() + " on " + row.band().name() + ": " + note);
         }
+        if (row.middle()) {
+          addUphill(row, look, plane, notes);
+        }
       }
     }
     return notes.stream().distinct().toList();
   }
 
-  private void addGround(Rigged rigged, List<String> notes) {
-    if (antennas.isDown(rigged)) {
+  private void addGround(Rigged rigged, GroundPlane plane, List<String> notes) {
+    if (Antennas.isDown(rigged, plane)) {
       notes.add(
-          "Some of the wire hangs to the ground, or below its mean height on a slope; the radio"
+          "Some of the wire hangs to the ground, or below the plane of its slope; the radio"
               + " figures take that part as 0.05 m up.");
     }
-    double fall = antennas.fall(rigged);
-    if (fall > LEVEL_ENOUGH) {
+    if (plane.slope() >= LEVEL_ENOUGH || plane.departure() >= EVEN_ENOUGH) {
+      notes.add(ground(plane));
+    }
+  }
+
+  private String ground(GroundPlane plane) {
+    String departs =
+        plane.departure() < EVEN_ENOUGH
+            ? ""
+            : String.format(
+                Locale.ROOT,
+                " True ground departs from that plane by up to %.1f m.",
+                plane.departure());
+    if (plane.slope() < LEVEL_ENOUGH) {
+      return "Reckoned over level ground at its mean height under the wire." + departs;
+    }
+    double toward = Math.toDegrees(plane.fallsToward()) + plan.site().planNorth();
+    return String.format(
+            Locale.ROOT,
+            "Reckoned over ground that falls %.0f° toward %.0f°.",
+            Math.toDegrees(plane.slope()),
+            Math.floor((toward % 360 + 360) % 360 + 0.5) % 360)
+        + departs;
+  }
+
+  /** Where the slope stands in a target's window: the plane sends nothing into itself. */
+  private void addUphill(Row row, Row.Look look, GroundPlane plane, List<String> notes) {
+    if (look.bearing() == null) {
+      return;
+    }
+    double toward = Math.toRadians(look.bearing() - plan.site().planNorth());
+    double rise = Math.toDegrees(plane.rise(toward));
+    if (rise > look.windows().scored().fromDegrees()) {
       notes.add(
           String.format(
               Locale.ROOT,
-              "The ground under the wire falls by %.1f m; the radio figures take it as level at its"
-                  + " mean height.",
-              fall));
+              "%s on %s: the ground rises %.0f° that way, and nothing is reckoned below that.",
+              look.target().name(),
+              row.band().name(),
+              rise));
     }
   }
 

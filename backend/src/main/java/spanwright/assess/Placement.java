@@ -26,6 +26,7 @@ import spanwright.plan.Place;
  * @param state the worst of everything checked
  * @param notes warnings and facts worth saying, as sentences
  * @param exposure always "RF exposure not computed" until it is
+ * @param quality how sure the radio figures are; null in documents older than it
  */
 public record Placement(
     String id,
@@ -43,7 +44,8 @@ public record Placement(
     List<NewMast> masts,
     State state,
     List<String> notes,
-    String exposure) {
+    String exposure,
+    Quality quality) {
 
   public Placement {
     scoreParts = List.copyOf(scoreParts);
@@ -75,7 +77,43 @@ public record Placement(
         masts,
         state,
         notes,
-        exposure);
+        exposure,
+        quality);
+  }
+
+  /** Whether nothing is known that forbids relying on the radio figures. */
+  public boolean reliable() {
+    return quality == null || quality.sure();
+  }
+
+  /**
+   * How sure the radio figures are.
+   *
+   * @param sure whether they may be relied on; what is not sure is never ranked as good
+   * @param doubts why not, as sentences; empty when sure
+   * @param bands what was measured on each band's middle frequency
+   */
+  public record Quality(boolean sure, List<String> doubts, List<BandQuality> bands) {
+    public Quality {
+      doubts = List.copyOf(doubts);
+      bands = List.copyOf(bands);
+    }
+  }
+
+  /**
+   * The field solver's own measures at one frequency.
+   *
+   * @param name of the band
+   * @param frequency MHz
+   * @param refinementChange how far a finer mesh moves the reflection coefficient on 400 ohm; null
+   *     while it was not tried
+   * @param residual of the linear system, over its excitation
+   */
+  public record BandQuality(
+      String name, double frequency, Double refinementChange, double residual) {
+    BandQuality refined(double change) {
+      return new BandQuality(name, frequency, change, residual);
+    }
   }
 
   /**

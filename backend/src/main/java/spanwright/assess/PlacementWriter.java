@@ -28,7 +28,11 @@ final class PlacementWriter {
   }
 
   Placement write(
-      Hung hung, List<Placement.BandResult> rows, double lineLength, List<String> notes) {
+      Hung hung,
+      List<Placement.BandResult> rows,
+      double lineLength,
+      List<String> notes,
+      Placement.Quality quality) {
     Rigged rigged = hung.rigged();
     List<Placement.NewMast> masts = masts(rigged);
     List<Placement.Attachment> attachments =
@@ -54,7 +58,8 @@ final class PlacementWriter {
         masts,
         state,
         notes,
-        EXPOSURE);
+        EXPOSURE,
+        quality);
   }
 
   private static Placement.Conductor conductor(Rigged.Conductor conductor) {

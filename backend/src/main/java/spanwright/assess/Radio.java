@@ -2,6 +2,7 @@ package spanwright.assess;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import org.apache.commons.math3.complex.Complex;
 import spanwright.clearance.State;
 import spanwright.feed.FeedResult;
@@ -28,15 +29,72 @@ final class Radio {
   }
 
   /**
-   * @param withDrawings whether the rose and profiles are wanted
+   * What a solution sends where it is wanted; it takes long, and needs no feed line.
+   *
+   * @param toward each look's gain, averaged as power over its window [dBi]
+   * @param peak gain [dBi], azimuth and elevation on the plan [rad]; null when only the score is
+   *     wanted
+   * @param drawn gains of the row's drawings, then of the profile toward the peak; null without
    */
-  Placement.BandResult row(Row row, Solution solution, FeedResult feed, boolean withDrawings) {
-    Peak peak = solution.peak();
+  record Far(double[] toward, Peak peak, double[] drawn) {}
+
+  /** What is wanted for a score, and no more. */
+  static Far glance(Row row, Solution solution, GroundPlane plane) {
+    double[] powers = solution.powerGains(plane.seen(row.sought()));
+    double[] toward = new double[row.looks().size()];
+    int from = 0;
+    for (int i = 0; i < toward.length; i++) {
+      int count = row.looks().get(i).directions().count();
+      toward[i] = decibels(mean(powers, from, count));
+      from += count;
+    }
+    return new Far(toward, null, null);
+  }
+
+  /** All that a row shows. */
+  static Far look(Row row, Solution solution, GroundPlane plane) {
+    Peak peak = peak(solution, plane);
+    solution.efficiency();
+    double[] drawn = null;
+    if (row.middle()) {
+      Directions toPeak = Directions.profile(peak.azimuth(), 0, Math.PI / 2, Rows.PROFILE);
+      drawn = solution.powerGains(plane.seen(Directions.joined(List.of(row.drawn(), toPeak))));
+    }
+    return new Far(glance(row, solution, plane).toward(), peak, drawn);
+  }
+
+  /** The peak as it is seen on the plan, of what goes up from the horizon there. */
+  private static Peak peak(Solution solution, GroundPlane plane) {
+    Peak found = solution.peak();
+    double[] seen = plane.onPlan(found.azimuth(), found.elevation());
+    if (seen[1] >= 0) {
+      return new Peak(found.dbi(), seen[0], seen[1]);
+    }
+    int across = 120;
+    int up = 60;
+    Peak best = null;
+    for (int j = 0; j < up; j++) {
+      double elevation = 0.5 * Math.PI * j / up;
+      double[] ring = solution.powerGains(plane.seen(Directions.ring(across, elevation)));
+      for (int i = 0; i < across; i++) {
+        double dbi = decibels(ring[i]);
+        if (best == null || dbi > best.dbi()) {
+          best = new Peak(dbi, 2 * Math.PI * i / across, elevation);
+        }
+      }
+    }
+    return best;
+  }
+
+  /** A row for a document; of a mere glance one that serves for scoring only. */
+  Placement.BandResult row(Row row, Solution solution, Far far, FeedResult feed) {
+    Peak peak = far.peak() == null ? new Peak(NOTHING_DBI, 0, 0) : far.peak();
     Complex z = solution.impedance();
     double losses = finite(feed.lossDb(), MOST_LOSS_DB) + unitLoss(feed.matching());
-    List<Placement.TargetResult> targets =
-        row.looks().stream().map(look -> target(look, solution, losses)).toList();
-    boolean drawn = withDrawings && row.middle();
+    List<Placement.TargetResult> targets = new ArrayList<>();
+    for (int i = 0; i < row.looks().size(); i++) {
+      targets.add(target(row.looks().get(i), far.toward()[i], losses));
+    }
     return new Placement.BandResult(
         row.band().name(),
         row.frequencyMHz(),
@@ -48,13 +106,16 @@ final class Radio {
         Rounded.hundredth(peak.dbi()),
         Rounded.tenth(Math.toDegrees(peak.elevation())),
         Rounded.tenth(bearing(peak.azimuth())) % 360,
-        Rounded.thousandth(solution.efficiency()),
-        solution.powerBalance().isPresent()
-            ? Rounded.thousandth(solution.powerBalance().getAsDouble())
-            : null,
+        far.peak() == null ? 0 : Rounded.thousandth(solution.efficiency()),
+        far.peak() == null ? null : balance(solution),
         targets,
-        drawn ? rose(row, solution) : null,
-        drawn ? profiles(row, solution, peak) : null);
+        far.drawn() == null ? null : rose(row, far.drawn()),
+        far.drawn() == null ? null : profiles(row, far.drawn(), peak));
+  }
+
+  private static Double balance(Solution solution) {
+    OptionalDouble balance = solution.powerBalance();
+    return balance.isPresent() ? Rounded.thousandth(balance.getAsDouble()) : null;
   }
 
   private double bearing(double azimuth) {
@@ -92,8 +153,7 @@ final class Radio {
         settings == null ? null : settings.capacitance());
   }
 
-  private static Placement.TargetResult target(Row.Look look, Solution solution, double losses) {
-    double gain = decibels(mean(solution.powerGains(look.directions())));
+  private static Placement.TargetResult target(Row.Look look, double gain, double losses) {
     Window scored = look.windows().scored();
     return new Placement.TargetResult(
         look.target().name(),
@@ -116,8 +176,8 @@ final class Radio {
     return List.of(Rounded.tenth(window.fromDegrees()), Rounded.tenth(window.toDegrees()));
   }
 
-  private static Placement.Rose rose(Row row, Solution solution) {
-    List<Double> gains = decibels(solution.powerGains(row.rose()));
+  private static Placement.Rose rose(Row row, double[] drawn) {
+    List<Double> gains = decibels(drawn, 0, Rows.ROSE);
     long better = gains.stream().filter(dbi -> dbi > row.roseReferenceDbi()).count();
     return new Placement.Rose(
         row.roseElevation(),
@@ -127,45 +187,39 @@ final class Radio {
         Rounded.thousandth((double) better / gains.size()));
   }
 
-  private List<Placement.Profile> profiles(Row row, Solution solution, Peak peak) {
+  private List<Placement.Profile> profiles(Row row, double[] drawn, Peak peak) {
     double step = 90.0 / (Rows.PROFILE - 1);
+    int from = Rows.ROSE;
     List<Placement.Profile> profiles = new ArrayList<>();
     for (Row.Look look : row.looks()) {
       if (look.bearing() != null) {
-        profiles.add(
-            new Placement.Profile(
-                look.target().name(),
-                look.bearing(),
-                step,
-                decibels(solution.powerGains(look.profile()))));
+        List<Double> gains = decibels(drawn, from, Rows.PROFILE);
+        profiles.add(new Placement.Profile(look.target().name(), look.bearing(), step, gains));
+        from += Rows.PROFILE;
       }
     }
-    Directions toPeak = Directions.profile(peak.azimuth(), 0, Math.PI / 2, Rows.PROFILE);
-    profiles.add(
-        new Placement.Profile(
-            "peak",
-            Rounded.tenth(bearing(peak.azimuth())) % 360,
-            step,
-            decibels(solution.powerGains(toPeak))));
+    double toward = Rounded.tenth(bearing(peak.azimuth())) % 360;
+    List<Double> gains = decibels(drawn, from, Rows.PROFILE);
+    profiles.add(new Placement.Profile("peak", toward, step, gains));
     return profiles;
   }
 
-  private static double mean(double[] powers) {
+  private static double mean(double[] powers, int from, int count) {
     double sum = 0;
-    for (double power : powers) {
-      sum += power;
+    for (int i = from; i < from + count; i++) {
+      sum += powers[i];
     }
-    return sum / powers.length;
+    return sum / count;
   }
 
   private static double decibels(double power) {
     return power > 1e-9 ? 10 * Math.log10(power) : NOTHING_DBI;
   }
 
-  private static List<Double> decibels(double[] powers) {
-    List<Double> gains = new ArrayList<>(powers.length);
-    for (double power : powers) {
-      gains.add(Rounded.hundredth(Math.max(NOTHING_DBI, decibels(power))));
+  private static List<Double> decibels(double[] powers, int from, int count) {
+    List<Double> gains = new ArrayList<>(count);
+    for (int i = from; i < from + count; i++) {
+      gains.add(Rounded.hundredth(Math.max(NOTHING_DBI, decibels(powers[i]))));
     }
     return gains;
   }

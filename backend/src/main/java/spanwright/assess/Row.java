@@ -14,7 +14,9 @@ import spanwright.plan.Target;
  * @param frequencyMHz of the row
  * @param middle whether it is the band's middle frequency
  * @param looks one for each target that counts on the band
- * @param rose directions of the reach rose, on the middle frequency only, else null
+ * @param sought directions of all looks' windows, one look after the other
+ * @param drawn directions of the reach rose and then of each look's profile; on the middle
+ *     frequency only, else null
  * @param roseElevation degrees up
  * @param roseReferenceDbi the reference at that elevation
  */
@@ -24,7 +26,8 @@ record Row(
     double frequencyMHz,
     boolean middle,
     List<Look> looks,
-    Directions rose,
+    Directions sought,
+    Directions drawn,
     double roseElevation,
     double roseReferenceDbi) {
 
@@ -37,8 +40,6 @@ record Row(
    * @param windows take-off windows
    * @param directions the scored window's directions in the solver's frame
    * @param referenceDbi of the reference vertical, averaged over the same window
-   * @param profile directions from horizon to zenith; null without a bearing and on other than the
-   *     middle frequency
    */
   record Look(
       Target target,
@@ -46,6 +47,5 @@ record Row(
       Double bearing,
       Windows windows,
       Directions directions,
-      double referenceDbi,
-      Directions profile) {}
+      double referenceDbi) {}
 }

@@ -55,7 +55,7 @@ final class Rows {
     List<Target> targets = plan.brief().targets();
     for (int t = 0; t < targets.size(); t++) {
       if (targets.get(t).countsOn(band)) {
-        looks.add(look(targets.get(t), t, frequencyMHz, middle));
+        looks.add(look(targets.get(t), t, frequencyMHz));
       }
     }
     double elevation = roseElevation(looks);
@@ -65,7 +65,8 @@ final class Rows {
         frequencyMHz,
         middle,
         List.copyOf(looks),
-        middle ? rose(elevation) : null,
+        Directions.joined(looks.stream().map(Row.Look::directions).toList()),
+        middle ? drawn(elevation, looks) : null,
         elevation,
         Rounded.hundredth(
             ReferenceVertical.gainDbi(
@@ -75,7 +76,7 @@ final class Rows {
                 soil.conductivity())));
   }
 
-  private Row.Look look(Target target, int index, double frequencyMHz, boolean middle) {
+  private Row.Look look(Target target, int index, double frequencyMHz) {
     Windows windows =
         target.isNearVertical()
             ? TakeOff.nearVertical(target.nearVerticalKm(), frequencyMHz)
@@ -89,8 +90,7 @@ final class Rows {
         bearing,
         windows,
         directions(scored, bearing),
-        ReferenceVertical.meanDbi(scored, frequencyMHz, soil.permittivity(), soil.conductivity()),
-        middle && bearing != null ? profile(bearing) : null);
+        ReferenceVertical.meanDbi(scored, frequencyMHz, soil.permittivity(), soil.conductivity()));
   }
 
   /** The solver's azimuths run from the plan's +y, whose true bearing is planNorth. */
@@ -111,6 +111,17 @@ final class Rows {
       }
     }
     return Directions.of(azimuths, ups);
+  }
+
+  private Directions drawn(double roseElevation, List<Row.Look> looks) {
+    List<Directions> all = new ArrayList<>();
+    all.add(rose(roseElevation));
+    for (Row.Look look : looks) {
+      if (look.bearing() != null) {
+        all.add(profile(look.bearing()));
+      }
+    }
+    return Directions.joined(all);
   }
 
   private Directions profile(double bearingDegrees) {

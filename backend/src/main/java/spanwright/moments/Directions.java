@@ -1,5 +1,7 @@
 package spanwright.moments;
 
+import java.util.List;
+
 /**
  * A batch of directions with their sines and cosines: made once, used for every placement and
  * frequency.
@@ -66,6 +68,34 @@ public final class Directions {
       elevations[i] = count == 1 ? low : low + (high - low) * i / (count - 1);
     }
     return new Directions(azimuths, elevations);
+  }
+
+  /** These directions as they are seen in a frame turned by a rotation matrix. */
+  public Directions turned(double[][] rotation) {
+    double[][] out = new double[3][count];
+    for (int i = 0; i < count; i++) {
+      double x = sinAzimuth[i] * cosElevation[i];
+      double y = cosAzimuth[i] * cosElevation[i];
+      double z = sinElevation[i];
+      for (int c = 0; c < 3; c++) {
+        out[c][i] = rotation[c][0] * x + rotation[c][1] * y + rotation[c][2] * z;
+      }
+    }
+    return toward(out[0], out[1], out[2]);
+  }
+
+  /** Batches one after the other. */
+  public static Directions joined(List<Directions> batches) {
+    Directions out = new Directions(batches.stream().mapToInt(Directions::count).sum());
+    int at = 0;
+    for (Directions batch : batches) {
+      System.arraycopy(batch.sinAzimuth, 0, out.sinAzimuth, at, batch.count);
+      System.arraycopy(batch.cosAzimuth, 0, out.cosAzimuth, at, batch.count);
+      System.arraycopy(batch.sinElevation, 0, out.sinElevation, at, batch.count);
+      System.arraycopy(batch.cosElevation, 0, out.cosElevation, at, batch.count);
+      at += batch.count;
+    }
+    return out;
   }
 
   /** Directions as unit vectors. */

@@ -68,6 +68,18 @@ public final class GroundSurface {
     return most;
   }
 
+  /** Whether a point lies among the spot heights, and not beyond them. */
+  public boolean covers(double x, double y) {
+    if (triangles.length > 0) {
+      for (int index : grid.near(x, y)) {
+        if (covers(triangles[index], x, y)) {
+          return true;
+        }
+      }
+    }
+    return false;
+  }
+
   /** Height of the ground above the plan's zero [m]. */
   public double heightAt(double x, double y) {
     if (triangles.length == 0) {

@@ -1,8 +1,9 @@
 package spanwright.search;
 
 import java.util.ArrayList;
-import java.util.Comparator;
+import java.util.IdentityHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.stream.IntStream;
 import spanwright.assess.Assessor;
@@ -131,10 +132,37 @@ public final class Search {
     say(0.30, free.size() + " hang free");
     prepareTables(free);
     List<Free> coarse = coarse(workers, freeByPromise(free, effort.coarse));
-    List<Placement> full = new ArrayList<>(full(workers, freeByScore(coarse, effort.full)));
-    full.sort(Comparator.comparingDouble((Placement p) -> -p.score()));
-    List<Placement> varied = Variety.choose(full, options.top());
+    List<Assessed> full = full(workers, freeByScore(coarse, effort.full));
+    List<Placement> varied = chosen(workers, full);
     return IntStream.range(0, varied.size()).mapToObj(i -> varied.get(i).ranked(i + 1)).toList();
+  }
+
+  /** A placement assessed in full, and what it was assessed from. */
+  private record Assessed(Placement placement, Hung hung) {}
+
+  /**
+   * The list to show. What is on it is held against a finer mesh first; what does not stand that is
+   * doubtful and falls behind, and what comes up in its place is tried in turn.
+   */
+  private List<Placement> chosen(Workers workers, List<Assessed> full) {
+    say(0.95, "trying the best on a finer mesh");
+    Map<Placement, Hung> untried = new IdentityHashMap<>();
+    full.forEach(one -> untried.put(one.placement, one.hung));
+    List<Placement> all = new ArrayList<>(full.stream().map(Assessed::placement).toList());
+    while (true) {
+      all.sort(Variety.BEST_FIRST);
+      List<Placement> chosen = Variety.choose(all, options.top());
+      List<Placement> next = chosen.stream().filter(untried::containsKey).toList();
+      if (next.isEmpty()) {
+        return chosen;
+      }
+      List<Placement> tried =
+          workers.map(next, one -> assessor.refined(untried.get(one)), () -> {});
+      for (int i = 0; i < next.size(); i++) {
+        untried.remove(next.get(i));
+        all.set(all.indexOf(next.get(i)), tried.get(i));
+      }
+    }
   }
 
   /** A candidate that hangs free of everything, with its coarse score once it has one. */
@@ -274,19 +302,19 @@ public final class Search {
     return scored;
   }
 
-  private List<Placement> full(Workers workers, List<Free> free) {
-    Stage stage = new Stage(0.60, 0.98, free.size(), "solving every band in full");
+  private List<Assessed> full(Workers workers, List<Free> free) {
+    Stage stage = new Stage(0.60, 0.95, free.size(), "solving every band in full");
     return workers.map(free, f -> assessed(f.hung), stage::tick).stream()
         .flatMap(Optional::stream)
         .toList();
   }
 
   /** Empty when the field solver cannot take the shape on its full mesh: then it is left aside. */
-  private Optional<Placement> assessed(Hung hung) {
+  private Optional<Assessed> assessed(Hung hung) {
     try {
       Placement placement = assessor.assess(hung);
       found(placement);
-      return Optional.of(placement);
+      return Optional.of(new Assessed(placement, hung));
     } catch (Unsolvable aside) {
       return Optional.empty();
     }

@@ -1,6 +1,7 @@
 package spanwright.search;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -11,6 +12,11 @@ import spanwright.assess.Placement;
 final class Variety {
   /** Of placements on the same supports in the same shape, as many come before any other idea. */
   private static final int PER_FAMILY = 2;
+
+  /** What is doubtful comes after everything that is sure, whatever its score. */
+  static final Comparator<Placement> BEST_FIRST =
+      Comparator.comparing((Placement p) -> !p.reliable())
+          .thenComparing(Comparator.comparingDouble(Placement::score).reversed());
 
   private static final double NEAR_PLAN = 1.5;
   private static final double NEAR_HEIGHT = 0.8;
@@ -42,7 +48,7 @@ final class Variety {
         chosen.add(placement);
       }
     }
-    chosen.sort((a, b) -> Double.compare(b.score(), a.score()));
+    chosen.sort(BEST_FIRST);
     return chosen;
   }
 

@@ -11,6 +11,8 @@ final class WholeRecord {
   /** What may be absent in a placement; everything else has to be there. */
   private static final Set<String> MAY_BE_ABSENT =
       Set.of(
+          "Placement.quality",
+          "BandQuality.refinementChange",
           "Attachment.pullLimit",
           "Attachment.kilograms",
           "NewMast.consent",
@@ -29,7 +31,8 @@ final class WholeRecord {
   static void checkNames(
       Class<? extends Record> kind, JsonNode node, String path, List<Fault> faults) {
     for (RecordComponent part : kind.getRecordComponents()) {
-      if (!node.hasNonNull(part.getName())) {
+      String name = kind.getSimpleName() + "." + part.getName();
+      if (!node.hasNonNull(part.getName()) && !MAY_BE_ABSENT.contains(name)) {
         faults.add(new Fault(at(path, part), MISSING));
       }
     }

@@ -26,10 +26,11 @@ class AntennasTest {
   private static final String RAIL =
       "{ \"id\": \"rail\", \"name\": \"Top rail\", \"path\": [[10,5,1],[20,5,1]], \"radius\": 0.02 }";
 
-  private final Plan plan = Gardens.withMetal(SLOPE, RAIL);
-  private final GroundSurface surface = GroundSurface.of(plan);
-  private final Antennas antennas = new Antennas(CATALOGUE, surface, Metal.of(plan, surface));
-  private final Rigged rigged = Rigging.of(plan, CATALOGUE).hang(span());
+  private final Plan garden = Gardens.withMetal(SLOPE, RAIL);
+  private final GroundSurface surface = GroundSurface.of(garden);
+  private final Antennas antennas = new Antennas(CATALOGUE, surface, Metal.of(garden, surface));
+  private final Rigged rigged = Rigging.of(garden, CATALOGUE).hang(span());
+  private final GroundPlane plane = antennas.plane(rigged);
 
   /** Wire from x = 6 to x = 26, where the ground rises from 0.6 m to 2.6 m. */
   private static Layout span() {
@@ -43,28 +44,39 @@ class AntennasTest {
   }
 
   @Test
-  void the_plane_lies_at_the_mean_height_of_the_ground_under_the_wire() {
-    assertEquals((0.6 + 2.6) / 2, antennas.plane(rigged), 0.02);
-    assertEquals(2.0, antennas.fall(rigged), 0.02);
+  void the_plane_is_that_of_an_evenly_sloping_garden() {
+    assertEquals(1.6, plane.heightAt(16, 15), 1e-9);
+    assertEquals(Math.atan(0.1), plane.slope(), 1e-9);
+    assertEquals(-Math.PI / 2, plane.fallsToward(), 1e-9);
+    assertEquals(0, plane.departure(), 1e-9);
   }
 
   @Test
   void the_wire_keeps_its_hanging_shape_and_stands_over_that_plane() {
-    AntennaModel model = antennas.of(rigged, Metal.none());
+    AntennaModel model = antennas.of(rigged, plane, Metal.none());
     List<Place> calm = rigged.conductors().get(0).shapes().calm();
     WireSpec wire = model.wires().get(0);
     assertEquals(1, model.wires().size());
     assertEquals(calm.size(), wire.points().size());
-    double plane = antennas.plane(rigged);
     for (int i = 0; i < calm.size(); i++) {
-      assertEquals(calm.get(i).z() - plane, wire.points().get(i).z(), 1e-9);
+      Place p = calm.get(i);
+      double upright = p.z() - plane.heightAt(p.x(), p.y());
+      assertEquals(upright * Math.cos(plane.slope()), wire.points().get(i).z(), 1e-9);
     }
-    assertTrue(wire.points().stream().anyMatch(p -> p.z() < 9 - plane - 0.05), "it sags");
+    assertEquals(length(calm), wire.length(), 1e-9);
+  }
+
+  private static double length(List<Place> path) {
+    double sum = 0;
+    for (int i = 1; i < path.size(); i++) {
+      sum += path.get(i - 1).distance(path.get(i));
+    }
+    return sum;
   }
 
   @Test
   void metal_comes_after_the_wire_and_is_called_by_its_name() {
-    AntennaModel model = antennas.of(rigged, antennas.metal());
+    AntennaModel model = antennas.of(rigged, plane, antennas.metal());
     assertEquals(2, model.wires().size());
     assertEquals(0.02, model.wires().get(1).radius());
     assertEquals(
@@ -86,7 +98,7 @@ class AntennasTest {
 
   @Test
   void wire_figures_come_from_the_catalogue() {
-    WireSpec wire = antennas.of(rigged, Metal.none()).wires().get(0);
+    WireSpec wire = antennas.of(rigged, plane, Metal.none()).wires().get(0);
     var kind = CATALOGUE.wire(rigged.conductors().get(0).wire());
     assertEquals(kind.radius(), wire.radius());
     assertEquals(kind.conductivity(), wire.conductivity());
@@ -95,7 +107,7 @@ class AntennasTest {
 
   @Test
   void what_the_solver_cannot_take_is_told_of_the_wire_and_not_of_the_solvers_numbers() {
-    Assessor assessor = Assessor.of(plan, CATALOGUE);
+    Assessor assessor = Assessor.of(garden, CATALOGUE);
     Layout fedAtItsEnd =
         new Layout(
             "level",

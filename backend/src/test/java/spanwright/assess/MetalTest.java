@@ -41,7 +41,7 @@ class MetalTest {
   void a_piece_touched_in_its_middle_is_parted_there_and_all_three_meet() {
     Metal metal = metal("", RAIL, piece("post", "[[14,5.01,0],[14,5.01,1.005]]"));
     assertEquals(List.of("Top rail", "Top rail", "post"), metal.names());
-    List<WireSpec> wires = metal.over(0);
+    List<WireSpec> wires = metal.over(GroundPlane.level(0));
     assertTrue(joined(last(wires.get(0)), first(wires.get(1))));
     assertTrue(joined(last(wires.get(0)), last(wires.get(2))));
     assertEquals(0.02, wires.get(0).radius());
@@ -51,7 +51,7 @@ class MetalTest {
   @Test
   void ends_that_touch_become_one_point_and_part_nothing() {
     Metal metal = metal("", RAIL, piece("next", "[[20.015,5,1],[28,5,1]]"));
-    List<WireSpec> wires = metal.over(0);
+    List<WireSpec> wires = metal.over(GroundPlane.level(0));
     assertEquals(2, wires.size());
     assertTrue(joined(last(wires.get(0)), first(wires.get(1))));
   }
@@ -64,7 +64,7 @@ class MetalTest {
             piece("branch", "[[14,5.01,1],[14,9,1]]"),
             RAIL,
             piece("stub", "[[14,5.02,1],[14,5.02,2]]"));
-    List<WireSpec> wires = metal.over(0);
+    List<WireSpec> wires = metal.over(GroundPlane.level(0));
     Vertex joint = last(wires.get(1));
     assertTrue(joined(joint, first(wires.get(0))), "branch on rail");
     assertTrue(joined(joint, first(wires.get(2))), "second part of the rail");
@@ -79,7 +79,8 @@ class MetalTest {
 
   @Test
   void what_ends_on_the_ground_ends_five_centimetres_above_it() {
-    WireSpec rod = metal("", piece("rod", "[[10,10,0],[10,10,2]]")).over(0).get(0);
+    WireSpec rod =
+        metal("", piece("rod", "[[10,10,0],[10,10,2]]")).over(GroundPlane.level(0)).get(0);
     assertEquals(0.05, first(rod).z(), 1e-9);
     assertEquals(2, last(rod).z(), 1e-9);
   }
@@ -99,7 +100,7 @@ class MetalTest {
                 piece("low", "[[1,5,0.3],[1,15,0.3]]"),
                 piece("high", "[[1,5,1],[1,15,1]]"),
                 piece("post", "[[2,20,0],[2,20,2]]"))
-            .over(0);
+            .over(GroundPlane.level(0));
     double low = first(wires.get(0)).z();
     double high = first(wires.get(1)).z();
     assertTrue(low >= 0.05 && high > low + 0.2, low + " and " + high);
@@ -109,7 +110,8 @@ class MetalTest {
   @Test
   void metal_on_ground_above_the_plane_stands_higher_by_the_rise() {
     String slope = "\"terrain\": { \"spots\": [[0,0,-3],[0,30,-3],[40,0,3],[40,30,3]] }";
-    WireSpec rail = metal(slope, piece("rail", "[[30,5,1],[30,15,1]]")).over(0).get(0);
+    WireSpec rail =
+        metal(slope, piece("rail", "[[30,5,1],[30,15,1]]")).over(GroundPlane.level(0)).get(0);
     assertEquals(1 + 1.5, first(rail).z(), 1e-9);
   }
 }

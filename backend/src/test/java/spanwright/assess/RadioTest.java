@@ -56,8 +56,13 @@ class RadioTest {
     return new Match(state, "the unit", null, lossDb, 1, 10, 1);
   }
 
+  private Placement.BandResult row(Row row, FeedResult feed) {
+    Radio.Far far = Radio.look(row, solution, GroundPlane.level(0));
+    return new Radio(PLAN_NORTH).row(row, solution, far, feed);
+  }
+
   private Placement.BandResult row(FeedResult feed) {
-    return new Radio(PLAN_NORTH).row(rows.get(1), solution, feed, true);
+    return row(rows.get(1), feed);
   }
 
   /** Mean power over a window, by our own dense sum. */
@@ -110,7 +115,7 @@ class RadioTest {
     FeedResult feed = feed(0, Verdict.CLEAR, match(Verdict.CLEAR, 0));
     assertEquals(Rows.ROSE, row(feed).rose().dbi().size());
     assertEquals(2, row(feed).profiles().size(), "one bearing and the peak");
-    Placement.BandResult edge = new Radio(PLAN_NORTH).row(rows.get(0), solution, feed, true);
+    Placement.BandResult edge = row(rows.get(0), feed);
     assertNull(edge.rose());
     assertNull(edge.profiles());
   }

@@ -2,6 +2,7 @@ package spanwright.search;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
@@ -12,6 +13,11 @@ import spanwright.plan.Place;
 /** A list without copies of one idea. */
 class VarietyTest {
   private static Placement placement(double score, double fraction, Placement.Attachment... on) {
+    return placement(true, score, fraction, on);
+  }
+
+  private static Placement placement(
+      boolean sure, double score, double fraction, Placement.Attachment... on) {
     return new Placement(
         "p00",
         0,
@@ -28,7 +34,8 @@ class VarietyTest {
         List.of(),
         State.CLEAR,
         List.of(),
-        "");
+        "",
+        sure ? null : new Placement.Quality(false, List.of("no"), List.of()));
   }
 
   private static Placement.Attachment at(String on, double x, double z) {
@@ -38,6 +45,20 @@ class VarietyTest {
 
   private static List<Double> chosen(int top, Placement... bestFirst) {
     return Variety.choose(List.of(bestFirst), top).stream().map(Placement::score).toList();
+  }
+
+  @Test
+  void what_is_doubtful_comes_after_everything_that_is_sure() {
+    List<Placement> all =
+        new ArrayList<>(
+            List.of(
+                placement(false, 9, 0.5, at("oak", 0, 6), at("bed", 12, 7)),
+                placement(true, 1, 0.5, at("ash", 0, 6), at("bed", 12, 7)),
+                placement(true, 2, 0.5, at("elm", 0, 6), at("bed", 12, 7))));
+    all.sort(Variety.BEST_FIRST);
+    List<Placement> chosen = Variety.choose(all, 5);
+    assertEquals(List.of(2.0, 1.0, 9.0), chosen.stream().map(Placement::score).toList());
+    assertEquals(2, Variety.choose(all, 2).stream().filter(Placement::reliable).count());
   }
 
   @Test

@@ -288,7 +288,8 @@ final class Fixture {
         List.of(new Placement.NewMast("bed", foot, MAST, 7.0, guyFeet, "planning permission")),
         State.TIGHT,
         List.of("This wire passes 3.5 m from the gutter."),
-        "RF exposure not computed");
+        "RF exposure not computed",
+        null);
   }
 
   static List<Clearance> clearances() {

@@ -52,6 +52,7 @@ class OddPlacementsTest {
         List.of(),
         State.CLEAR,
         List.of(),
+        null,
         null);
   }
 

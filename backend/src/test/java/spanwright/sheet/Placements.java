@@ -48,6 +48,7 @@ final class Placements {
         p.masts(),
         state,
         p.notes(),
-        p.exposure());
+        p.exposure(),
+        p.quality());
   }
 }

@@ -42,7 +42,8 @@ final class SomePlacements {
             List.of(),
             State.CLEAR,
             List.of(),
-            "RF exposure not computed")
+            "RF exposure not computed",
+            null)
         .ranked(rank);
   }
 
