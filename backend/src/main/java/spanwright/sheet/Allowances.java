@@ -38,10 +38,10 @@ final class Allowances {
 
   private Allowances() {}
 
-  static List<SheetModel.Allowance> list() {
+  static List<CutParts.Allowance> list() {
     return List.of(
         metres("turn back", "wire turned back, each end", TURN_BACK),
-        new SheetModel.Allowance(
+        new CutParts.Allowance(
             "trim", "wire left for trimming, share of its length", TRIM_SHARE, "share", TRADE),
         metres("least trim", "wire left for trimming, at least", TRIM_LEAST),
         metres("line end", "feed line made off, each end", LINE_END),
@@ -53,7 +53,7 @@ final class Allowances {
         metres("stand-off reach", "feed line off a wall, at least", STAND_OFF_LEAST));
   }
 
-  private static SheetModel.Allowance metres(String id, String what, double value) {
-    return new SheetModel.Allowance(id, what, value, "m", TRADE);
+  private static CutParts.Allowance metres(String id, String what, double value) {
+    return new CutParts.Allowance(id, what, value, "m", TRADE);
   }
 }

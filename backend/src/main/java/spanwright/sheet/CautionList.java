@@ -13,15 +13,15 @@ import spanwright.plan.Support;
  */
 final class CautionList {
   private final Job job;
-  private final SheetModel.Overhead overhead;
-  private final List<SheetModel.Caution> cautions = new ArrayList<>();
+  private final OverheadParts.Overhead overhead;
+  private final List<WorkParts.Caution> cautions = new ArrayList<>();
 
-  private CautionList(Job job, SheetModel.Overhead overhead) {
+  private CautionList(Job job, OverheadParts.Overhead overhead) {
     this.job = job;
     this.overhead = overhead;
   }
 
-  static List<SheetModel.Caution> of(Job job, SheetModel.Overhead overhead) {
+  static List<WorkParts.Caution> of(Job job, OverheadParts.Overhead overhead) {
     CautionList list = new CautionList(job, overhead);
     list.addOverhead();
     list.addNotClear();
@@ -32,11 +32,11 @@ final class CautionList {
   }
 
   private void press(String text) {
-    cautions.add(new SheetModel.Caution(text, true));
+    cautions.add(new WorkParts.Caution(text, true));
   }
 
   private void say(String text) {
-    cautions.add(new SheetModel.Caution(text, false));
+    cautions.add(new WorkParts.Caution(text, false));
   }
 
   private void addOverhead() {
@@ -47,7 +47,7 @@ final class CautionList {
     press(
         "Overhead lines kill without being touched. Keep wire, rope, mast, ladder and tools"
             + " outside every kept distance, also while raising and lowering.");
-    for (SheetModel.Line line : overhead.lines()) {
+    for (OverheadParts.Line line : overhead.lines()) {
       if (line.nearest() == null) {
         press(line.name() + ": no distance was computed. Do not rig.");
       } else if (OverheadList.state(line) == State.TIGHT) {

@@ -39,7 +39,7 @@ final class CsvWriter {
     section("Notes", "Text");
     model.notes().forEach(this::row);
     section("Sweep", "Band", "Frequency (MHz)", "Resistance (ohm)", "Reactance (ohm)", "Line SWR");
-    for (SheetModel.Expected e : model.sweep()) {
+    for (WorkParts.Expected e : model.sweep()) {
       row(
           e.band(),
           plain(e.frequency(), 4),
@@ -87,7 +87,7 @@ final class CsvWriter {
         "Required" + unit,
         "State",
         "Smaller distance allowed by");
-    for (SheetModel.Line l : model.overhead().lines()) {
+    for (OverheadParts.Line l : model.overhead().lines()) {
       row(
           l.name(),
           l.kind(),
@@ -107,13 +107,13 @@ final class CsvWriter {
     model.overhead().say().forEach(this::row);
   }
 
-  private String found(SheetModel.Reach reach) {
+  private String found(OverheadParts.Reach reach) {
     return reach == null
         ? ""
         : metric() ? plain(floor(reach.distance()), 2) : figures.found(reach.distance());
   }
 
-  private static String state(SheetModel.Reach reach) {
+  private static String state(OverheadParts.Reach reach) {
     return reach == null ? "" : reach.state().name().toLowerCase(Locale.ROOT);
   }
 
@@ -127,7 +127,7 @@ final class CsvWriter {
         "Turns back" + unit,
         "Trim" + unit,
         "Cut" + unit);
-    for (SheetModel.WirePiece w : model.wires()) {
+    for (CutParts.WirePiece w : model.wires()) {
       row(
           w.mark(),
           w.piece(),
@@ -137,7 +137,7 @@ final class CsvWriter {
           length(w.trim()),
           required(w.cut()));
     }
-    SheetModel.FeedLine line = model.feedLine();
+    CutParts.FeedLine line = model.feedLine();
     section(
         "Feed line",
         "Mark",
@@ -170,7 +170,7 @@ final class CsvWriter {
         "Run" + unit,
         "Knots and tail" + unit,
         "Cut" + unit);
-    for (SheetModel.Rope r : model.ropes()) {
+    for (CutParts.Rope r : model.ropes()) {
       row(
           r.mark(),
           r.kind(),
@@ -183,7 +183,7 @@ final class CsvWriter {
           metric() ? plain(r.cut(), 1) : figures.ropeCut(r.cut()));
     }
     section("Hardware", "What", "Count", "In all" + unit, "Spares", "Note");
-    for (SheetModel.Item i : model.hardware()) {
+    for (CutParts.Item i : model.hardware()) {
       row(
           i.what(),
           String.valueOf(i.count()),
@@ -206,7 +206,7 @@ final class CsvWriter {
         "May take (N)",
         "State",
         "Hang (kg)");
-    for (SheetModel.Holding h : model.attachments()) {
+    for (HangParts.Holding h : model.attachments()) {
       row(
           String.valueOf(h.point()),
           h.name(),
@@ -230,7 +230,7 @@ final class CsvWriter {
         "Height at middle" + unit,
         "Sag in gust" + unit,
         "Sideways in gust" + unit);
-    for (SheetModel.Sag s : model.sags()) {
+    for (HangParts.Sag s : model.sags()) {
       row(
           s.span(),
           length(s.level()),
@@ -245,9 +245,9 @@ final class CsvWriter {
   }
 
   private void setOut() {
-    SheetModel.SetOut s = model.setOut();
+    SetOutParts.SetOut s = model.setOut();
     section("Known points", "Letter", "What", "x (m)", "y (m)");
-    for (SheetModel.Known k : new SheetModel.Known[] {s.a(), s.b(), s.c()}) {
+    for (SetOutParts.Known k : new SetOutParts.Known[] {s.a(), s.b(), s.c()}) {
       if (k != null) {
         row(k.letter(), k.what(), plain(k.at().x(), 3), plain(k.at().y(), 3));
       }
@@ -268,7 +268,7 @@ final class CsvWriter {
         "y (m)",
         "In the way",
         "Better");
-    for (SheetModel.Mark m : s.points()) {
+    for (SetOutParts.Mark m : s.points()) {
       row(
           String.valueOf(m.number()),
           m.name(),

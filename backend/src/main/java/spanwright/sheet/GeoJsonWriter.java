@@ -109,7 +109,7 @@ final class GeoJsonWriter {
                         .put("lowest", s.lowest())
                         .put("highest", s.highest())));
     plan.trees().forEach(t -> point(t.at(), properties("tree", t.id(), t.name())));
-    for (SheetModel.Line line : model.overhead().lines()) {
+    for (OverheadParts.Line line : model.overhead().lines()) {
       plan.overheadLines().stream()
           .filter(l -> l.id().equals(line.id()))
           .forEach(
@@ -148,7 +148,7 @@ final class GeoJsonWriter {
     path(
         placement.feed().path(),
         properties("feed line", "", "").put("length", placement.feed().lineLength()));
-    for (SheetModel.Mark m : model.setOut().points()) {
+    for (SetOutParts.Mark m : model.setOut().points()) {
       point(
           m.at().onPlan(),
           properties("point", "", m.name()).put("number", m.number()).put("height", m.height()));

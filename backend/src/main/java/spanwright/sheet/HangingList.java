@@ -10,13 +10,13 @@ import spanwright.plan.Point;
 final class HangingList {
   private HangingList() {}
 
-  static List<SheetModel.Holding> holdings(Job job, SheetModel.SetOut setOut) {
+  static List<HangParts.Holding> holdings(Job job, SetOutParts.SetOut setOut) {
     double datum = setOut.a().at().z();
-    List<SheetModel.Holding> rows = new ArrayList<>();
+    List<HangParts.Holding> rows = new ArrayList<>();
     for (int i = 0; i < job.placement.attachments().size(); i++) {
       Placement.Attachment held = job.placement.attachments().get(i);
       rows.add(
-          new SheetModel.Holding(
+          new HangParts.Holding(
               i + 1,
               held.on(),
               job.holder(held),
@@ -32,21 +32,21 @@ final class HangingList {
     return rows;
   }
 
-  static List<SheetModel.Sag> sags(Job job) {
+  static List<HangParts.Sag> sags(Job job) {
     return job.placement.spans().stream()
         .filter(s -> s.points().size() >= 2)
         .map(s -> sag(job, s))
         .toList();
   }
 
-  private static SheetModel.Sag sag(Job job, Placement.Span span) {
+  private static HangParts.Sag sag(Job job, Placement.Span span) {
     Place from = span.points().get(0);
     Place to = span.points().get(span.points().size() - 1);
     Point a = from.onPlan();
     Point b = to.onPlan();
     Place middle = middle(span.points());
     double bearing = a.distance(b) < 0.01 ? 0 : job.bearing(a, b);
-    return new SheetModel.Sag(
+    return new HangParts.Sag(
         (span.from() + 1) + "–" + (span.to() + 1),
         a.distance(b),
         Math.max(0, (from.z() + to.z()) / 2 - middle.z()),

@@ -12,17 +12,14 @@ import spanwright.plan.MatchingKind;
 /** Everything to lay out on the grass before work begins, with what to bring besides. */
 final class HardwareList {
   private final Job job;
-  private final List<SheetModel.Item> items = new ArrayList<>();
+  private final List<CutParts.Item> items = new ArrayList<>();
 
   private HardwareList(Job job) {
     this.job = job;
   }
 
-  static List<SheetModel.Item> of(
-      Job job,
-      List<SheetModel.WirePiece> wires,
-      SheetModel.FeedLine line,
-      List<SheetModel.Rope> ropes) {
+  static List<CutParts.Item> of(
+      Job job, List<CutParts.WirePiece> wires, CutParts.FeedLine line, List<CutParts.Rope> ropes) {
     HardwareList list = new HardwareList(job);
     list.addLengths(wires, line, ropes);
     list.addInsulators();
@@ -37,25 +34,25 @@ final class HardwareList {
       return;
     }
     for (int i = 0; i < items.size(); i++) {
-      SheetModel.Item old = items.get(i);
+      CutParts.Item old = items.get(i);
       if (old.what().equals(what) && Objects.equals(old.note(), note)) {
-        items.set(i, new SheetModel.Item(what, old.count() + count, null, spares, note));
+        items.set(i, new CutParts.Item(what, old.count() + count, null, spares, note));
         return;
       }
     }
-    items.add(new SheetModel.Item(what, count, null, spares, note));
+    items.add(new CutParts.Item(what, count, null, spares, note));
   }
 
   /** Totals by kind, which is how wire and rope are bought. */
   private void addLengths(
-      List<SheetModel.WirePiece> wires, SheetModel.FeedLine line, List<SheetModel.Rope> ropes) {
+      List<CutParts.WirePiece> wires, CutParts.FeedLine line, List<CutParts.Rope> ropes) {
     Map<String, Double> sums = new LinkedHashMap<>();
     wires.forEach(w -> sums.merge(w.kind(), w.cut(), Double::sum));
     sums.merge(line.kind(), line.cut(), Double::sum);
     ropes.forEach(r -> sums.merge(r.kind(), r.cut(), Double::sum));
     sums.forEach(
         (kind, sum) ->
-            items.add(new SheetModel.Item(kind, 1, Math.round(sum * 100) / 100.0, 0, "in all")));
+            items.add(new CutParts.Item(kind, 1, Math.round(sum * 100) / 100.0, 0, "in all")));
   }
 
   private void addInsulators() {
@@ -85,9 +82,9 @@ final class HardwareList {
     return fraction > 0.005 && fraction < 0.995;
   }
 
-  private void addRopeWork(List<SheetModel.Rope> ropes) {
+  private void addRopeWork(List<CutParts.Rope> ropes) {
     int lifts =
-        (int) ropes.stream().map(SheetModel.Rope::over).filter(o -> o != null).distinct().count();
+        (int) ropes.stream().map(CutParts.Rope::over).filter(o -> o != null).distinct().count();
     int guys = (int) ropes.stream().filter(r -> r.mark().startsWith("G")).count();
     add("pulleys to suit the rope", lifts, lifts == 0 ? 0 : 1, null);
     add("thimbles", ropes.size() + guys, 1, null);
@@ -118,7 +115,7 @@ final class HardwareList {
     }
   }
 
-  private void addStation(SheetModel.FeedLine line) {
+  private void addStation(CutParts.FeedLine line) {
     boolean standOff = line.standOffReach() > 0;
     add(
         standOff ? "line stand-offs" : "line clips",

@@ -26,7 +26,7 @@ final class OverheadInk {
     this.pen = pen;
   }
 
-  private SheetModel.Line row(OverheadLine line) {
+  private OverheadParts.Line row(OverheadLine line) {
     return model.overhead().lines().stream()
         .filter(l -> l.id().equals(line.id()))
         .findFirst()
@@ -71,7 +71,7 @@ final class OverheadInk {
   /** The line with its zig-zag and its name along it. */
   void line(OverheadLine line) {
     boolean telephone = line.kind() == OverheadLine.Kind.TELEPHONE;
-    SheetModel.Line row = row(line);
+    OverheadParts.Line row = row(line);
     String words = row.name() + ", " + row.kind();
     List<Labels.Spot> spots = new ArrayList<>();
     for (List<double[]> piece : shown(frame.places(line.path()), 15)) {

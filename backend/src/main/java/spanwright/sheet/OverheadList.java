@@ -20,24 +20,24 @@ final class OverheadList {
 
   private OverheadList() {}
 
-  static SheetModel.Overhead of(Job job) {
+  static OverheadParts.Overhead of(Job job) {
     if (job.plan.overheadLines().isEmpty()) {
-      return new SheetModel.Overhead(
+      return new OverheadParts.Overhead(
           List.of(
               "No overhead line is on the plan: look again on site, up and to every side, before"
                   + " anything is raised. Treat every line you find as live, and stop until it is"
                   + " on the plan."),
           List.of());
     }
-    List<SheetModel.Line> lines = new ArrayList<>();
+    List<OverheadParts.Line> lines = new ArrayList<>();
     for (OverheadLine line : job.plan.overheadLines()) {
       lines.add(line(job, line));
     }
     lines.sort(
-        Comparator.comparing((SheetModel.Line l) -> !countsWhenThingsFall(l))
+        Comparator.comparing((OverheadParts.Line l) -> !countsWhenThingsFall(l))
             .thenComparingDouble(
                 l -> l.nearest() == null ? Double.NEGATIVE_INFINITY : l.nearest().distance()));
-    return new SheetModel.Overhead(
+    return new OverheadParts.Overhead(
         List.of(
             "Treat every line as live. Check these distances on site, by eye and by laser from the"
                 + " ground, never by a pole or a rope, before anything is raised. The line's owner"
@@ -45,9 +45,9 @@ final class OverheadList {
         lines);
   }
 
-  private static SheetModel.Line line(Job job, OverheadLine line) {
-    SheetModel.Reach nearest = worst(job, line.id(), Regime.AS_IT_HANGS);
-    return new SheetModel.Line(
+  private static OverheadParts.Line line(Job job, OverheadLine line) {
+    OverheadParts.Reach nearest = worst(job, line.id(), Regime.AS_IT_HANGS);
+    return new OverheadParts.Line(
         line.id(),
         job.name(line.id()),
         kind(line),
@@ -81,26 +81,26 @@ final class OverheadList {
     };
   }
 
-  private static SheetModel.Reach worst(Job job, String line, Regime regime) {
+  private static OverheadParts.Reach worst(Job job, String line, Regime regime) {
     return job.placement.clearances().stream()
         .filter(c -> c.to().equals(line) && regime(c) == regime)
         .max(
             Comparator.comparing(Clearance::state)
                 .thenComparingDouble(c -> c.required() - c.distance()))
-        .map(c -> new SheetModel.Reach(c.what(), c.distance(), c.required(), c.state()))
+        .map(c -> new OverheadParts.Reach(c.what(), c.distance(), c.required(), c.state()))
         .orElse(null);
   }
 
   /** Whether a line is asked about when wires and masts let go. */
-  static boolean countsWhenThingsFall(SheetModel.Line line) {
+  static boolean countsWhenThingsFall(OverheadParts.Line line) {
     return !line.kind().equals("telephone");
   }
 
   /** The worst state of a line over the three rules. */
-  static State state(SheetModel.Line line) {
+  static State state(OverheadParts.Line line) {
     State state = State.CLEAR;
-    for (SheetModel.Reach reach :
-        new SheetModel.Reach[] {line.nearest(), line.wireLetGo(), line.mastFalls()}) {
+    for (OverheadParts.Reach reach :
+        new OverheadParts.Reach[] {line.nearest(), line.wireLetGo(), line.mastFalls()}) {
       state = reach == null ? state : state.worse(reach.state());
     }
     return line.nearest() == null ? State.FOUL : state;

@@ -32,7 +32,7 @@ final class RigTables {
 
   Flow.Block overhead() {
     List<List<Setting.Cell>> rows = new ArrayList<>();
-    for (SheetModel.Line line : model.overhead().lines()) {
+    for (OverheadParts.Line line : model.overhead().lines()) {
       rows.add(
           List.of(
               Setting.Cell.bold(line.name()),
@@ -44,7 +44,7 @@ final class RigTables {
               falls(line, line.mastFalls(), true)));
     }
     List<String> notes = new ArrayList<>();
-    for (SheetModel.Line line : model.overhead().lines()) {
+    for (OverheadParts.Line line : model.overhead().lines()) {
       if (line.authority() != null) {
         notes.add(line.name() + ": smaller distance allowed by " + line.authority() + ".");
       }
@@ -66,19 +66,19 @@ final class RigTables {
         model.overhead().say());
   }
 
-  private String heights(SheetModel.Line line) {
+  private String heights(OverheadParts.Line line) {
     String low = figures.height(line.lowest());
     String high = figures.height(line.highest());
     return low.equals(high) ? low : low + "–" + high;
   }
 
-  private Setting.Cell nearest(SheetModel.Reach reach) {
+  private Setting.Cell nearest(OverheadParts.Reach reach) {
     return reach == null
         ? Setting.Cell.state("no figure", State.FOUL)
         : Setting.Cell.state(figures.found(reach.distance()), reach.state());
   }
 
-  private Setting.Cell falls(SheetModel.Line line, SheetModel.Reach reach, boolean both) {
+  private Setting.Cell falls(OverheadParts.Line line, OverheadParts.Reach reach, boolean both) {
     if (!OverheadList.countsWhenThingsFall(line)) {
       return Setting.Cell.of("not required");
     }
@@ -91,7 +91,7 @@ final class RigTables {
 
   Flow.Block wire() {
     List<List<Setting.Cell>> rows = new ArrayList<>();
-    for (SheetModel.WirePiece w : model.wires()) {
+    for (CutParts.WirePiece w : model.wires()) {
       rows.add(
           List.of(
               Setting.Cell.bold(w.mark()),
@@ -100,7 +100,7 @@ final class RigTables {
               Setting.Cell.of(figures.length(w.turnsBack()) + " + " + figures.length(w.trim())),
               Setting.Cell.bold(figures.cut(w.cut()))));
     }
-    SheetModel.FeedLine line = model.feedLine();
+    CutParts.FeedLine line = model.feedLine();
     rows.add(
         List.of(
             Setting.Cell.bold(line.mark()),
@@ -112,7 +112,7 @@ final class RigTables {
     notes.add(
         "Wire: "
             + model.wires().stream()
-                .map(SheetModel.WirePiece::kind)
+                .map(CutParts.WirePiece::kind)
                 .distinct()
                 .collect(Collectors.joining(", "))
             + ". Line: "
@@ -142,9 +142,9 @@ final class RigTables {
 
   Flow.Block rope() {
     List<List<Setting.Cell>> rows = new ArrayList<>();
-    List<SheetModel.Rope> guys =
+    List<CutParts.Rope> guys =
         model.ropes().stream().filter(r -> r.mark().startsWith("G")).toList();
-    for (SheetModel.Rope r : model.ropes()) {
+    for (CutParts.Rope r : model.ropes()) {
       if (guys.contains(r)) {
         continue;
       }
@@ -161,7 +161,7 @@ final class RigTables {
     List<String> notes = new ArrayList<>();
     String kinds =
         model.ropes().stream()
-            .map(SheetModel.Rope::kind)
+            .map(CutParts.Rope::kind)
             .distinct()
             .collect(Collectors.joining(", "));
     if (!kinds.isEmpty()) {
@@ -184,10 +184,10 @@ final class RigTables {
   }
 
   /** Guys cut alike from one mast share a row. */
-  private void addGuys(List<List<Setting.Cell>> rows, List<SheetModel.Rope> guys) {
+  private void addGuys(List<List<Setting.Cell>> rows, List<CutParts.Rope> guys) {
     int i = 0;
     while (i < guys.size()) {
-      SheetModel.Rope first = guys.get(i);
+      CutParts.Rope first = guys.get(i);
       int last = i;
       while (last + 1 < guys.size()
           && guys.get(last + 1).cut() == first.cut()
@@ -214,7 +214,7 @@ final class RigTables {
 
   Flow.Block attachments() {
     List<List<Setting.Cell>> rows = new ArrayList<>();
-    for (SheetModel.Holding h : model.attachments()) {
+    for (HangParts.Holding h : model.attachments()) {
       rows.add(
           List.of(
               Setting.Cell.square(h.point()),
@@ -248,7 +248,7 @@ final class RigTables {
 
   Flow.Block sags() {
     List<List<Setting.Cell>> rows = new ArrayList<>();
-    for (SheetModel.Sag s : model.sags()) {
+    for (HangParts.Sag s : model.sags()) {
       rows.add(
           List.of(
               Setting.Cell.bold(s.span()),

@@ -94,13 +94,13 @@ final class RiggingInk {
   }
 
   private void datums() {
-    List<SheetModel.Known> known = new ArrayList<>();
+    List<SetOutParts.Known> known = new ArrayList<>();
     known.add(model.setOut().a());
     known.add(model.setOut().b());
     if (model.setOut().c() != null) {
       known.add(model.setOut().c());
     }
-    for (SheetModel.Known k : known) {
+    for (SetOutParts.Known k : known) {
       double[] at = frame.at(k.at());
       Symbols.datum(pen, at[0], at[1]);
       labels.block(Labels.box(at[0], at[1] - 0.4, 3.2, 3.2, 0));
@@ -129,7 +129,7 @@ final class RiggingInk {
   }
 
   private void points() {
-    for (SheetModel.Mark mark : model.setOut().points()) {
+    for (SetOutParts.Mark mark : model.setOut().points()) {
       double[] at = frame.at(mark.at());
       labels.block(Labels.box(at[0], at[1], 1.6, 1.6, 0));
       labels.ask(0, Labels.number(at[0], at[1], mark.number()));
@@ -182,7 +182,7 @@ final class RiggingInk {
 
   /** Every distance that is not clear, and the nearest to each power line. */
   private void distances() {
-    for (SheetModel.Line line : model.overhead().lines()) {
+    for (OverheadParts.Line line : model.overhead().lines()) {
       placement.clearances().stream()
           .filter(c -> c.to().equals(line.id()))
           .filter(c -> OverheadList.regime(c) == OverheadList.Regime.AS_IT_HANGS)

@@ -14,10 +14,10 @@ import spanwright.plan.RopeKind;
 final class RopeList {
   private final Job job;
   private final List<WireList.Piece> pieces;
-  private final List<SheetModel.Rope> ropes = new ArrayList<>();
+  private final List<CutParts.Rope> ropes = new ArrayList<>();
   private int lifts;
   private double lowering;
-  private SheetModel.Rope lowered;
+  private CutParts.Rope lowered;
   private String loweredAt;
   private int guys;
 
@@ -26,7 +26,7 @@ final class RopeList {
     this.pieces = WireList.pieces(job.placement);
   }
 
-  static List<SheetModel.Rope> of(Job job) {
+  static List<CutParts.Rope> of(Job job) {
     RopeList list = new RopeList(job);
     for (int i = 0; i < job.placement.attachments().size(); i++) {
       list.addRopes(i);
@@ -122,7 +122,7 @@ final class RopeList {
       double allowance) {
     RopeKind kind = job.rope(rope);
     ropes.add(
-        new SheetModel.Rope(
+        new CutParts.Rope(
             "R" + ++lifts,
             kind.id(),
             kind.name(),
@@ -173,7 +173,7 @@ final class RopeList {
               .orElse(mast.top().distance(foot));
       double allowance = 2 * Allowances.GUY_END;
       ropes.add(
-          new SheetModel.Rope(
+          new CutParts.Rope(
               "G" + ++guys,
               kindId == null ? "" : kindId,
               kindId == null ? "guy rope" : job.rope(kindId).name(),

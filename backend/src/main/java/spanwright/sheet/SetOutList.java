@@ -31,7 +31,7 @@ final class SetOutList {
   private static final double SAME = 0.3;
 
   private final Job job;
-  private final List<SheetModel.Known> corners = new ArrayList<>();
+  private final List<SetOutParts.Known> corners = new ArrayList<>();
   private final List<String> notes = new ArrayList<>();
 
   private SetOutList(Job job) {
@@ -48,10 +48,10 @@ final class SetOutList {
   }
 
   private void addCorner(String what, Point at) {
-    corners.add(new SheetModel.Known("", what, job.onGround(at)));
+    corners.add(new SetOutParts.Known("", what, job.onGround(at)));
   }
 
-  static SheetModel.SetOut of(Job job) {
+  static SetOutParts.SetOut of(Job job) {
     return new SetOutList(job).work();
   }
 
@@ -64,18 +64,18 @@ final class SetOutList {
    */
   private record Wanted(String name, Place at, double height) {}
 
-  private SheetModel.SetOut work() {
+  private SetOutParts.SetOut work() {
     List<Wanted> wanted = wanted();
-    List<SheetModel.Known> pair = firstTwo(wanted);
-    SheetModel.Known a = pair.get(0);
-    SheetModel.Known b = pair.get(1);
-    SheetModel.Known c = third(a, b, wanted);
-    List<SheetModel.Mark> marks = new ArrayList<>();
+    List<SetOutParts.Known> pair = firstTwo(wanted);
+    SetOutParts.Known a = pair.get(0);
+    SetOutParts.Known b = pair.get(1);
+    SetOutParts.Known c = third(a, b, wanted);
+    List<SetOutParts.Mark> marks = new ArrayList<>();
     for (int i = 0; i < wanted.size(); i++) {
       marks.add(mark(i + 1, wanted.get(i), a, b, c));
     }
     addNotes(marks, c);
-    return new SheetModel.SetOut(a, b, c, marks, notes);
+    return new SetOutParts.SetOut(a, b, c, marks, notes);
   }
 
   private List<Wanted> wanted() {
@@ -110,10 +110,10 @@ final class SetOutList {
     return wanted;
   }
 
-  private List<SheetModel.Known> firstTwo(List<Wanted> wanted) {
-    List<SheetModel.Known> known = new ArrayList<>();
+  private List<SetOutParts.Known> firstTwo(List<Wanted> wanted) {
+    List<SetOutParts.Known> known = new ArrayList<>();
     for (Datum datum : job.plan.datums()) {
-      SheetModel.Known next = datum(datum, known.isEmpty() ? "A" : "B");
+      SetOutParts.Known next = datum(datum, known.isEmpty() ? "A" : "B");
       if (known.isEmpty() || apart(known.get(0), next)) {
         known.add(next);
       }
@@ -127,7 +127,7 @@ final class SetOutList {
             : "The plan has only one datum point: a corner is used as the other.");
     while (known.size() < 2) {
       String letter = known.isEmpty() ? "A" : "B";
-      SheetModel.Known best =
+      SetOutParts.Known best =
           corners.stream()
               .filter(corner -> known.isEmpty() || apart(known.get(0), corner))
               .min(Comparator.comparingDouble(corner -> cost(corner, known, wanted)))
@@ -135,18 +135,18 @@ final class SetOutList {
                   () ->
                       new IllegalArgumentException(
                           "The plan has no two known points apart: draw its boundary first."));
-      known.add(new SheetModel.Known(letter, best.what(), best.at()));
+      known.add(new SetOutParts.Known(letter, best.what(), best.at()));
     }
     return known;
   }
 
   /** Datums keep their own short name as their letter. */
-  private SheetModel.Known datum(Datum datum, String letter) {
+  private SetOutParts.Known datum(Datum datum, String letter) {
     String name = datum.name() == null ? "" : datum.name().strip();
     boolean shortName = !name.isEmpty() && name.length() <= 2;
     String what = name.isEmpty() || shortName ? "datum " + (shortName ? name : letter) : name;
     String where = cornerAt(datum.at());
-    return new SheetModel.Known(
+    return new SetOutParts.Known(
         shortName ? name : letter,
         where == null ? what : what + ", " + where,
         job.onGround(datum.at()));
@@ -155,17 +155,18 @@ final class SetOutList {
   private String cornerAt(Point at) {
     return corners.stream()
         .filter(c -> c.at().onPlan().distance(at) < 0.1)
-        .map(SheetModel.Known::what)
+        .map(SetOutParts.Known::what)
         .findFirst()
         .orElse(null);
   }
 
-  private static boolean apart(SheetModel.Known one, SheetModel.Known other) {
+  private static boolean apart(SetOutParts.Known one, SetOutParts.Known other) {
     return one.at().onPlan().distance(other.at().onPlan()) >= APART;
   }
 
   /** Longest tape, and a penalty for each point that a building hides or a flat crossing spoils. */
-  private double cost(SheetModel.Known corner, List<SheetModel.Known> known, List<Wanted> wanted) {
+  private double cost(
+      SetOutParts.Known corner, List<SetOutParts.Known> known, List<Wanted> wanted) {
     double cost = 0;
     for (Wanted w : wanted) {
       double tape = tape(corner, w.at());
@@ -179,8 +180,8 @@ final class SetOutList {
   }
 
   /** The third known point: off the line from A to B, near, and in sight of most. */
-  private SheetModel.Known third(SheetModel.Known a, SheetModel.Known b, List<Wanted> wanted) {
-    List<SheetModel.Known> from = new ArrayList<>();
+  private SetOutParts.Known third(SetOutParts.Known a, SetOutParts.Known b, List<Wanted> wanted) {
+    List<SetOutParts.Known> from = new ArrayList<>();
     for (Datum datum : job.plan.datums()) {
       from.add(datum(datum, "C"));
     }
@@ -191,11 +192,11 @@ final class SetOutList {
         .filter(c -> apart(a, c) && apart(b, c))
         .filter(c -> Math.abs(offset(a, b, c.at())) >= enough)
         .min(Comparator.comparingDouble(c -> cost(c, List.of(), wanted)))
-        .map(c -> new SheetModel.Known(letter(c, a, b), c.what(), c.at()))
+        .map(c -> new SetOutParts.Known(letter(c, a, b), c.what(), c.at()))
         .orElse(null);
   }
 
-  private static String letter(SheetModel.Known c, SheetModel.Known a, SheetModel.Known b) {
+  private static String letter(SetOutParts.Known c, SetOutParts.Known a, SetOutParts.Known b) {
     List<String> taken = List.of(a.letter(), b.letter());
     if (!c.letter().isEmpty() && !taken.contains(c.letter())) {
       return c.letter();
@@ -204,20 +205,20 @@ final class SetOutList {
   }
 
   /** Distance to the left of the line from A to B [m]. */
-  private static double offset(SheetModel.Known a, SheetModel.Known b, Place p) {
+  private static double offset(SetOutParts.Known a, SetOutParts.Known b, Place p) {
     double ux = b.at().x() - a.at().x();
     double uy = b.at().y() - a.at().y();
     return (ux * (p.y() - a.at().y()) - uy * (p.x() - a.at().x())) / Math.hypot(ux, uy);
   }
 
-  private SheetModel.Mark mark(
-      int number, Wanted w, SheetModel.Known a, SheetModel.Known b, SheetModel.Known c) {
+  private SetOutParts.Mark mark(
+      int number, Wanted w, SetOutParts.Known a, SetOutParts.Known b, SetOutParts.Known c) {
     double crossing = crossing(a.at(), b.at(), w.at());
     boolean flat = isFlat(crossing);
     String blocked = blocked(w.at(), a, b);
     double side = offset(a, b, w.at());
     double bearing = job.bearing(a.at().onPlan(), w.at().onPlan());
-    return new SheetModel.Mark(
+    return new SetOutParts.Mark(
         number,
         w.name(),
         w.at(),
@@ -234,9 +235,9 @@ final class SetOutList {
         w.height());
   }
 
-  private String blocked(Place at, SheetModel.Known a, SheetModel.Known b) {
+  private String blocked(Place at, SetOutParts.Known a, SetOutParts.Known b) {
     List<String> found = new ArrayList<>();
-    for (SheetModel.Known known : List.of(a, b)) {
+    for (SetOutParts.Known known : List.of(a, b)) {
       Building building = job.between(known.at().onPlan(), at.onPlan());
       if (building != null) {
         found.add("from " + known.letter() + " by " + job.name(building.id()));
@@ -246,9 +247,9 @@ final class SetOutList {
   }
 
   /** The pair of known points in sight that cross nearest to square, lettered points first. */
-  private SheetModel.Pair better(
-      Place at, SheetModel.Known a, SheetModel.Known b, SheetModel.Known c) {
-    List<SheetModel.Known> known = new ArrayList<>(List.of(a, b));
+  private SetOutParts.Pair better(
+      Place at, SetOutParts.Known a, SetOutParts.Known b, SetOutParts.Known c) {
+    List<SetOutParts.Known> known = new ArrayList<>(List.of(a, b));
     if (c != null) {
       known.add(c);
     }
@@ -256,12 +257,12 @@ final class SetOutList {
     corners.stream()
         .filter(k -> known.stream().limit(lettered).allMatch(l -> apart(l, k)))
         .forEach(known::add);
-    SheetModel.Pair best = null;
+    SetOutParts.Pair best = null;
     double least = Double.POSITIVE_INFINITY;
     for (int i = 0; i < known.size(); i++) {
       for (int k = Math.max(i + 1, 1); k < known.size(); k++) {
-        SheetModel.Known one = known.get(i);
-        SheetModel.Known two = known.get(k);
+        SetOutParts.Known one = known.get(i);
+        SetOutParts.Known two = known.get(k);
         double crossing = crossing(one.at(), two.at(), at);
         if (isFlat(crossing) || !inSight(one, at) || !inSight(two, at)) {
           continue;
@@ -275,22 +276,22 @@ final class SetOutList {
         if (cost < least) {
           least = cost;
           best =
-              new SheetModel.Pair(label(one), tape(one, at), label(two), tape(two, at), crossing);
+              new SetOutParts.Pair(label(one), tape(one, at), label(two), tape(two, at), crossing);
         }
       }
     }
     return best;
   }
 
-  private boolean inSight(SheetModel.Known known, Place at) {
+  private boolean inSight(SetOutParts.Known known, Place at) {
     return tape(known, at) > 0.2 && job.between(known.at().onPlan(), at.onPlan()) == null;
   }
 
-  private static String label(SheetModel.Known known) {
+  private static String label(SetOutParts.Known known) {
     return known.letter().isEmpty() ? known.what() : known.letter();
   }
 
-  private static double tape(SheetModel.Known known, Place at) {
+  private static double tape(SetOutParts.Known known, Place at) {
     return known.at().onPlan().distance(at.onPlan());
   }
 
@@ -310,7 +311,7 @@ final class SetOutList {
     return Math.toDegrees(Math.abs(Math.atan2(ax * by - ay * bx, ax * bx + ay * by)));
   }
 
-  private void addNotes(List<SheetModel.Mark> marks, SheetModel.Known c) {
+  private void addNotes(List<SetOutParts.Mark> marks, SetOutParts.Known c) {
     notes.add("Hold tapes level, and plumb down where the ground falls.");
     if (c == null) {
       notes.add(

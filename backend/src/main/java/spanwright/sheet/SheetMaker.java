@@ -23,12 +23,12 @@ final class SheetMaker {
   static SheetModel make(
       Plan plan, Catalogue catalogue, Placement placement, SheetOptions options) {
     Job job = new Job(plan, catalogue, placement, options);
-    SheetModel.Overhead overhead = OverheadList.of(job);
-    SheetModel.SetOut setOut = SetOutList.of(job);
-    List<SheetModel.WirePiece> wires = WireList.of(job);
-    SheetModel.FeedLine line = WireList.feedLine(job);
-    List<SheetModel.Rope> ropes = RopeList.of(job);
-    List<SheetModel.Sag> sags = HangingList.sags(job);
+    OverheadParts.Overhead overhead = OverheadList.of(job);
+    SetOutParts.SetOut setOut = SetOutList.of(job);
+    List<CutParts.WirePiece> wires = WireList.of(job);
+    CutParts.FeedLine line = WireList.feedLine(job);
+    List<CutParts.Rope> ropes = RopeList.of(job);
+    List<HangParts.Sag> sags = HangingList.sags(job);
     WorkOrder work = new WorkOrder(job, setOut, ropes, sags);
     return new SheetModel(
         FORMAT,
@@ -83,12 +83,12 @@ final class SheetMaker {
         options.revision());
   }
 
-  private static List<SheetModel.Expected> sweep(Job job) {
+  private static List<WorkParts.Expected> sweep(Job job) {
     return job.placement.bands().stream()
         .filter(b -> b.atStation() != null && b.atStation().size() == 2)
         .map(
             b ->
-                new SheetModel.Expected(
+                new WorkParts.Expected(
                     b.name(),
                     b.frequency(),
                     b.atStation().get(0),

@@ -123,7 +123,7 @@ final class SideObstacles {
         model.overhead().lines().stream()
             .filter(l -> l.id().equals(line.id()))
             .findFirst()
-            .map(SheetModel.Line::keep)
+            .map(OverheadParts.Line::keep)
             .orElse(null);
     for (int i = 1; i < line.path().size(); i++) {
       Place p = ground.raise(line.path().get(i - 1));

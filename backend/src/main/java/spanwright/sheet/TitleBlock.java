@@ -61,7 +61,7 @@ final class TitleBlock {
 
   private String holders() {
     return model.attachments().stream()
-        .map(SheetModel.Holding::name)
+        .map(HangParts.Holding::name)
         .collect(Collectors.joining("; "));
   }
 

@@ -63,18 +63,18 @@ final class WireList {
         .orElse(0);
   }
 
-  static List<SheetModel.WirePiece> of(Job job) {
+  static List<CutParts.WirePiece> of(Job job) {
     return pieces(job.placement).stream().map(piece -> cut(job, piece)).toList();
   }
 
-  private static SheetModel.WirePiece cut(Job job, Piece piece) {
+  private static CutParts.WirePiece cut(Job job, Piece piece) {
     Placement.Conductor conductor = job.placement.conductors().get(piece.conductor());
     WireKind kind = job.wire(conductor.wire());
     double finished = conductor.length() * (piece.to() - piece.from());
     double turnsBack = 2 * Allowances.TURN_BACK;
     double trim =
         Figures.upToCentimetre(Math.max(Allowances.TRIM_LEAST, Allowances.TRIM_SHARE * finished));
-    return new SheetModel.WirePiece(
+    return new CutParts.WirePiece(
         piece.mark(),
         describe(job, piece),
         kind.id(),
@@ -97,7 +97,7 @@ final class WireList {
     return "to " + far + ", not fed";
   }
 
-  static SheetModel.FeedLine feedLine(Job job) {
+  static CutParts.FeedLine feedLine(Job job) {
     Placement.Feed feed = job.placement.feed();
     LineKind kind = job.line(feed.line());
     double run = Job.length(feed.path());
@@ -106,7 +106,7 @@ final class WireList {
         kind.balanced()
             ? Figures.upToCentimetre(Math.max(Allowances.STAND_OFF_LEAST, 4 * kind.diameter()))
             : 0;
-    return new SheetModel.FeedLine(
+    return new CutParts.FeedLine(
         "L1",
         kind.id(),
         kind.name(),

@@ -13,13 +13,13 @@ import spanwright.clearance.Clearance;
 /** The order of work, and what to check before and after. Overhead lines come first in each. */
 final class WorkOrder {
   private final Job job;
-  private final SheetModel.SetOut setOut;
-  private final List<SheetModel.Rope> ropes;
-  private final List<SheetModel.Sag> sags;
+  private final SetOutParts.SetOut setOut;
+  private final List<CutParts.Rope> ropes;
+  private final List<HangParts.Sag> sags;
   private final List<String> steps = new ArrayList<>();
 
   WorkOrder(
-      Job job, SheetModel.SetOut setOut, List<SheetModel.Rope> ropes, List<SheetModel.Sag> sags) {
+      Job job, SetOutParts.SetOut setOut, List<CutParts.Rope> ropes, List<HangParts.Sag> sags) {
     this.job = job;
     this.setOut = setOut;
     this.ropes = ropes;
@@ -108,7 +108,7 @@ final class WorkOrder {
 
   private void ropeSteps() {
     Map<String, List<String>> same = new LinkedHashMap<>();
-    for (SheetModel.Rope rope : ropes) {
+    for (CutParts.Rope rope : ropes) {
       boolean aside = rope.from().startsWith("kept aside");
       boolean onHalyard = rope.to().startsWith("the halyard");
       if (!rope.mark().startsWith("G") && !aside && !onHalyard) {
@@ -118,7 +118,7 @@ final class WorkOrder {
     same.forEach((how, marks) -> steps.add(String.join(", ", marks) + ": " + how));
   }
 
-  private static String how(SheetModel.Rope rope) {
+  private static String how(CutParts.Rope rope) {
     if (rope.over() == null) {
       return "tie to " + rope.to() + " by ladder; one foots, one works.";
     }

@@ -27,7 +27,7 @@ final class WorkTables {
   }
 
   Flow.Block setOut() {
-    SheetModel.SetOut s = model.setOut();
+    SetOutParts.SetOut s = model.setOut();
     boolean third = s.c() != null;
     List<Setting.Column> columns =
         new ArrayList<>(
@@ -42,7 +42,7 @@ final class WorkTables {
                 Setting.Column.right("Compass from " + s.a().letter() + ", true / magnetic", 28),
                 Setting.Column.right("Height", 14)));
     List<List<Setting.Cell>> rows = new ArrayList<>();
-    for (SheetModel.Mark m : s.points()) {
+    for (SetOutParts.Mark m : s.points()) {
       rows.add(
           List.of(
               Setting.Cell.square(m.number()),
@@ -77,13 +77,13 @@ final class WorkTables {
     return Setting.table("Set-out by two tapes", columns, rows, notes, width);
   }
 
-  private static String known(SheetModel.Known known) {
+  private static String known(SetOutParts.Known known) {
     return known.letter() + ": " + known.what();
   }
 
-  private String better(SheetModel.Mark m) {
+  private String better(SetOutParts.Mark m) {
     String why = m.blocked() != null ? m.blocked() : "tapes cross flat";
-    SheetModel.Pair p = m.better();
+    SetOutParts.Pair p = m.better();
     return "Point "
         + m.number()
         + ", "
@@ -132,7 +132,7 @@ final class WorkTables {
 
   Flow.Block hardware() {
     List<List<Setting.Cell>> rows = new ArrayList<>();
-    for (SheetModel.Item i : model.hardware()) {
+    for (CutParts.Item i : model.hardware()) {
       String spares = i.spares() == 0 ? "" : " + " + i.spares();
       rows.add(
           List.of(
@@ -150,7 +150,7 @@ final class WorkTables {
 
   Flow.Block sweep() {
     List<List<Setting.Cell>> rows = new ArrayList<>();
-    for (SheetModel.Expected e : model.sweep()) {
+    for (WorkParts.Expected e : model.sweep()) {
       rows.add(
           List.of(
               Setting.Cell.of(e.band()),

@@ -17,14 +17,14 @@ class CutListTest {
   @Test
   void wire_is_cut_with_both_ends_turned_back_and_two_per_cent_to_trim() {
     // 30.20 m fed at 0.54: 16.308 and 13.892; ends 2 × 0.15; trim 2 %, up to 10 mm: 0.33 and 0.28
-    SheetModel.WirePiece w1 = model.wires().get(0);
+    CutParts.WirePiece w1 = model.wires().get(0);
     assertEquals("W1", w1.mark());
     assertEquals("feedpoint to Old ash", w1.piece());
     assertEquals(16.308, w1.finished(), EXACT);
     assertEquals(0.30, w1.turnsBack(), EXACT);
     assertEquals(0.33, w1.trim(), EXACT);
     assertEquals(16.94, w1.cut(), EXACT);
-    SheetModel.WirePiece w2 = model.wires().get(1);
+    CutParts.WirePiece w2 = model.wires().get(1);
     assertEquals(13.892, w2.finished(), EXACT);
     assertEquals(0.28, w2.trim(), EXACT);
     // 13.892 + 0.30 + 0.28 = 14.472, up to 14.48
@@ -38,7 +38,7 @@ class CutListTest {
     var short9 =
         new spanwright.assess.Placement.Conductor(
             Fixture.placement().conductors().get(0).points(), "wire", 9);
-    SheetModel.WirePiece piece =
+    CutParts.WirePiece piece =
         Sheets.of(
                 Fixture.plan(),
                 Fixture.catalogue(),
@@ -52,7 +52,7 @@ class CutListTest {
 
   @Test
   void the_feed_line_is_cut_with_its_slack_and_its_ends() {
-    SheetModel.FeedLine line = model.feedLine();
+    CutParts.FeedLine line = model.feedLine();
     // (9, 8.2, 8.5) to (9.6, 8.3, 4.0): √(0.36 + 0.01 + 20.25) = 4.5409
     // to (11, 8, 1.2): √(1.96 + 0.09 + 7.84) = 3.1448
     assertEquals(7.6857, line.run(), 1e-4);
@@ -67,7 +67,7 @@ class CutListTest {
   @Test
   void a_rope_to_a_weight_is_one_rope_and_no_longer_than_its_run_and_knots() {
     // tail 1.80 + fall 4.50 = 6.30; two knots of 0.5: 7.30, up to 7.5
-    SheetModel.Rope r1 = rope("R1");
+    CutParts.Rope r1 = rope("R1");
     assertEquals(6.30, r1.run(), EXACT);
     assertEquals(7.5, r1.cut(), EXACT);
     assertEquals("weight, 7.3 kg", r1.to());
@@ -78,7 +78,7 @@ class CutListTest {
     // up and down 7.00: 14.00 + 0.5 + 1.5
     assertEquals(16.0, rope("R2").cut(), EXACT);
     // tail 1.60 + 2 × 0.5 = 2.60, up to 3.0
-    SheetModel.Rope tail = rope("R3");
+    CutParts.Rope tail = rope("R3");
     assertEquals(3.0, tail.cut(), EXACT);
     assertNull(tail.over());
     // up and down 5.80: 11.60 + 2.0 = 13.6, up to 14.0
@@ -88,13 +88,13 @@ class CutListTest {
   @Test
   void a_line_kept_aside_brings_the_weighted_end_down_to_the_ground() {
     // twice 7.5 m less the 6.30 there is: 8.70 + 0.5 + 1.0 = 10.2, up to 10.5
-    SheetModel.Rope line = rope("R5");
+    CutParts.Rope line = rope("R5");
     assertEquals(8.70, line.run(), EXACT);
     assertEquals(10.5, line.cut(), EXACT);
     assertTrue(line.from().contains("R1"));
   }
 
-  private SheetModel.Rope rope(String mark) {
+  private CutParts.Rope rope(String mark) {
     return model.ropes().stream().filter(r -> r.mark().equals(mark)).findFirst().orElseThrow();
   }
 
@@ -102,7 +102,7 @@ class CutListTest {
   void guys_are_measured_from_head_to_peg_and_rounded_up_to_half_a_metre() {
     // √(2.5² + 7²) = 7.4330; + 2 × 0.75 = 8.933, up to 9.0
     for (String mark : List.of("G1", "G2", "G3")) {
-      SheetModel.Rope guy =
+      CutParts.Rope guy =
           model.ropes().stream().filter(r -> r.mark().equals(mark)).findFirst().orElseThrow();
       assertEquals(7.433, guy.run(), 0.003);
       assertEquals(9.0, guy.cut(), EXACT);
@@ -131,7 +131,7 @@ class CutListTest {
     assertEquals(3, count("guy pegs, 0.75 m"));
     assertEquals(9, count("line stand-offs"));
     assertEquals(1, count("weight, Old ash"));
-    SheetModel.Item rope = item("polyester, 5 mm");
+    CutParts.Item rope = item("polyester, 5 mm");
     // 7.5 + 16 + 3 + 14 + 10.5 + 3 × 9
     assertEquals(78.0, rope.length(), EXACT);
     // 16.94 + 14.48
@@ -142,13 +142,13 @@ class CutListTest {
     return item(what).count();
   }
 
-  private SheetModel.Item item(String what) {
+  private CutParts.Item item(String what) {
     return model.hardware().stream().filter(i -> i.what().equals(what)).findFirst().orElseThrow();
   }
 
   @Test
   void sag_to_sight_is_the_drop_at_mid_span() {
-    SheetModel.Sag first = model.sags().get(0);
+    HangParts.Sag first = model.sags().get(0);
     assertEquals("1–2", first.span());
     // (6, 26) to (9, 8.2): √(9 + 316.84) = 18.0510
     assertEquals(18.0510, first.level(), 1e-4);

@@ -270,7 +270,7 @@ class OddPlacementsTest {
                   List.of(held("ash", a), held("pole", b)),
                   feed,
                   List.of(new Placement.Span(0, 1, run, 0.5, 0.6, 0.7, Job.length(run), 40))));
-      double cut = model.wires().stream().mapToDouble(SheetModel.WirePiece::cut).sum();
+      double cut = model.wires().stream().mapToDouble(CutParts.WirePiece::cut).sum();
       assertTrue(cut > Job.length(run));
     }
   }

@@ -20,12 +20,12 @@ import spanwright.plan.Terrain;
 
 /** Points by two tapes, worked out again by hand and set out again from the tapes. */
 class SetOutTest {
-  private final SheetModel.SetOut setOut =
+  private final SetOutParts.SetOut setOut =
       Fixture.model(SheetOptions.Paper.A4, SheetOptions.Units.METRES).setOut();
 
   @Test
   void tapes_are_the_level_distances_from_the_datums() {
-    SheetModel.Mark ash = setOut.points().get(0);
+    SetOutParts.Mark ash = setOut.points().get(0);
     // ash (6, 26); A (4, 8): √(4 + 324); B (14, 8): √(64 + 324); C (18, 24): √(144 + 4)
     assertEquals(18.1108, ash.fromA(), 1e-4);
     assertEquals(19.6977, ash.fromB(), 1e-4);
@@ -52,7 +52,7 @@ class SetOutTest {
 
   @Test
   void points_are_numbered_attachments_first_then_guys_then_entry() {
-    List<String> names = setOut.points().stream().map(SheetModel.Mark::name).toList();
+    List<String> names = setOut.points().stream().map(SetOutParts.Mark::name).toList();
     assertEquals(
         List.of(
             "Old ash",
@@ -70,7 +70,7 @@ class SetOutTest {
 
   @Test
   void tapes_that_cross_flat_are_marked_and_a_better_pair_is_offered() {
-    SheetModel.Mark pole = setOut.points().get(1);
+    SetOutParts.Mark pole = setOut.points().get(1);
     assertTrue(pole.flat());
     assertNotNull(pole.better());
     assertTrue(pole.better().crossing() >= 30 && pole.better().crossing() <= 150);
@@ -78,7 +78,7 @@ class SetOutTest {
 
   @Test
   void every_point_can_be_found_again_from_its_tapes() {
-    for (SheetModel.Mark mark : setOut.points()) {
+    for (SetOutParts.Mark mark : setOut.points()) {
       Place a = setOut.a().at();
       Place b = setOut.b().at();
       double base = a.onPlan().distance(b.onPlan());
@@ -102,7 +102,7 @@ class SetOutTest {
 
   @Test
   void without_datums_corners_of_buildings_are_used_and_it_is_said() {
-    SheetModel.SetOut bare = model(List.of()).setOut();
+    SetOutParts.SetOut bare = model(List.of()).setOut();
     assertTrue(bare.a().what().contains("corner of"), bare.a().what());
     assertTrue(bare.b().what().contains("corner of"), bare.b().what());
     assertNotEquals(bare.a().at(), bare.b().at());
@@ -111,14 +111,14 @@ class SetOutTest {
 
   @Test
   void one_datum_is_joined_by_a_corner() {
-    SheetModel.SetOut one = model(List.of(new Datum("Gatepost", new Point(0, 0)))).setOut();
+    SetOutParts.SetOut one = model(List.of(new Datum("Gatepost", new Point(0, 0)))).setOut();
     assertTrue(one.a().what().startsWith("Gatepost"));
     assertTrue(one.notes().get(0).contains("only one datum"), one.notes().get(0));
   }
 
   @Test
   void two_datums_on_one_spot_count_as_one() {
-    SheetModel.SetOut twin =
+    SetOutParts.SetOut twin =
         model(List.of(new Datum("A", new Point(4, 8)), new Datum("B", new Point(4, 8)))).setOut();
     assertTrue(twin.a().at().onPlan().distance(twin.b().at().onPlan()) >= 1);
   }
@@ -126,9 +126,9 @@ class SetOutTest {
   @Test
   void a_building_in_the_way_of_a_tape_is_named() {
     // from (4, 0) and (20, 0), in front of the house, to the entry behind it
-    SheetModel.SetOut front =
+    SetOutParts.SetOut front =
         model(List.of(new Datum("A", new Point(4, 0)), new Datum("B", new Point(20, 0)))).setOut();
-    SheetModel.Mark pole = front.points().get(1);
+    SetOutParts.Mark pole = front.points().get(1);
     assertTrue(pole.blocked().contains("from A by House"), pole.blocked());
     assertNotNull(pole.better());
     assertNull(setOut.points().get(0).blocked());
@@ -157,7 +157,7 @@ class SetOutTest {
     for (int i = 0; i < 40; i++) {
       Datum a = new Datum("A", new Point(24 * random.nextDouble(), 30 * random.nextDouble()));
       Datum b = new Datum("B", new Point(24 * random.nextDouble(), 30 * random.nextDouble()));
-      for (SheetModel.Mark mark : model(List.of(a, b)).setOut().points()) {
+      for (SetOutParts.Mark mark : model(List.of(a, b)).setOut().points()) {
         assertTrue(Double.isFinite(mark.fromA() + mark.fromB() + mark.crossing()));
         assertTrue(mark.crossing() >= 0 && mark.crossing() <= 180);
         assertTrue(mark.bearing() >= 0 && mark.bearing() < 360);

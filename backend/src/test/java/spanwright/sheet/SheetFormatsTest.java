@@ -115,7 +115,7 @@ class SheetFormatsTest {
     assertEquals(
         "tight", json.get("overhead").get("lines").get(0).get("mastFalls").get("state").asText());
     assertFalse(Sheets.toJson(model).contains("NaN"));
-    SheetModel.Allowance trim = model.allowances().get(1);
+    CutParts.Allowance trim = model.allowances().get(1);
     assertEquals("common practice, no source", trim.source());
   }
 
