@@ -30,7 +30,7 @@ export function mount(root, store, shell) {
     const result = state.search.result;
     if (!result) return [];
     const { counts } = result;
-    const refusals = [...result.refusals].sort((a, b) => cureRank(a) - cureRank(b));
+    const refusals = [...result.refusals].sort((a, b) => (a.miss ?? 4) - (b.miss ?? 4) || cureRank(a) - cureRank(b));
     if (!refusals.length)
       return [
         html('p', { class: 'soft' }, counts.refused ? `${count(counts.refused)} refused.` : 'Nothing was refused.'),
@@ -93,13 +93,16 @@ export function mount(root, store, shell) {
         html('b', {}, `${shapeTitle(refusal.shape)}, ${names}. `),
         refusal.reason,
       ),
+      refusal.miss && refusal.lacks?.length > 1
+        ? html('p', {}, html('b', {}, `Near miss ${refusal.miss}, also: `), refusal.lacks.slice(1).join(' '))
+        : null,
       html(
         'p',
         {},
         html('b', {}, 'Cure: '),
         refusal.cure,
         ' ',
-        refusal.cured?.length
+        refusal.after || refusal.cured?.length
           ? html(
               'button',
               {
@@ -147,17 +150,18 @@ export function mount(root, store, shell) {
  * @returns {number} the lesser first
  */
 export function cureRank(refusal) {
-  if (!refusal.cured?.length) return 2;
+  if (!refusal.after && !refusal.cured?.length) return 2;
   return /\bremains?\b/.test(refusal.cure) ? 1 : 0;
 }
 
 /**
- * What `assess` reads: the refused wire laid along the cured attachments.
+ * What `assess` reads: the placement after the cure, or the refused wire laid along the cured attachments.
  * @param {any} plan
  * @param {any} catalogue
  * @param {any} refusal
  */
 export function curedLayout(plan, catalogue, refusal) {
+  if (refusal.after) return refusal.after;
   const wire = plan.brief?.wire ?? catalogue?.wires?.find((/** @type {any} */ one) => one.default)?.id;
   const line = plan.brief?.line ?? catalogue?.lines?.find((/** @type {any} */ one) => one.default)?.id;
   const [drawn] = refusal.wire;

@@ -1,8 +1,13 @@
 package spanwright.clearance;
 
 import java.util.ArrayList;
+import java.util.Collection;
+import java.util.Comparator;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Locale;
+import java.util.Set;
+import java.util.function.Function;
 import spanwright.plan.BracketLine;
 import spanwright.plan.GroundSurface;
 import spanwright.plan.Place;
@@ -20,9 +25,9 @@ import spanwright.rigging.Rigged;
  * @param direction of a move on plan [rad from east], or +1 and -1 along a bracket line; for a
  *     shorter wire or a moved feedpoint -1 at or to its first end, +1 its last, 0 at both
  * @param amount metres
- * @param wire catalogue id of another wire, or null
+ * @param other catalogue id of another wire, id of another thing to hold it, or null
  */
-record Change(Kind kind, int attachment, double direction, double amount, String wire) {
+record Change(Kind kind, int attachment, double direction, double amount, String other) {
   /** What can be changed. */
   enum Kind {
     RAISE,
@@ -31,7 +36,8 @@ record Change(Kind kind, int attachment, double direction, double amount, String
     SLIDE,
     SHORTEN,
     FEED,
-    LIGHTEN
+    LIGHTEN,
+    HOLD
   }
 
   private static final double[] STEPS = {0.25, 0.5, 1, 1.5, 2, 3, 4, 6};
@@ -66,24 +72,110 @@ record Change(Kind kind, int attachment, double direction, double amount, String
     return all;
   }
 
-  Change by(double other) {
-    return new Change(kind, attachment, direction, other, wire);
+  Change by(double much) {
+    return new Change(kind, attachment, direction, much, other);
+  }
+
+  /** Whether there is more or less of it. */
+  boolean isScaled() {
+    return kind != Kind.LIGHTEN && kind != Kind.HOLD;
+  }
+
+  /**
+   * Another thing to hold each end, the nearest first.
+   *
+   * @param all what the plan has
+   * @param most changes at most
+   */
+  static List<Change> otherHolds(
+      List<Layout.Hold> holds, Collection<Holder> all, GroundSurface ground, int most) {
+    Set<String> used = new HashSet<>();
+    holds.forEach(each -> used.add(each.on()));
+    List<Change> changes = new ArrayList<>();
+    for (int a = 0; a < holds.size(); a++) {
+      for (Holder each : all) {
+        boolean never = each.pullLimit() != null && each.pullLimit() <= 0;
+        Place to = never || used.contains(each.id()) ? null : onTo(holds.get(a).at(), each, ground);
+        if (to != null) {
+          double way = to.onPlan().distance(holds.get(a).at().onPlan());
+          changes.add(new Change(Kind.HOLD, a, 0, way, each.id()));
+        }
+      }
+    }
+    changes.sort(
+        Comparator.comparingDouble(Change::amount)
+            .thenComparingInt(Change::attachment)
+            .thenComparing(Change::other));
+    return changes.subList(0, Math.min(most, changes.size()));
+  }
+
+  /** The place on another thing that is most like the one there was, or null where it has none. */
+  private static Place onTo(Place at, Holder other, GroundSurface ground) {
+    Point to;
+    if (other.support() != null) {
+      to = other.support().at();
+    } else if (other.bracket() != null) {
+      to = nearestOn(other.bracket().path(), at.onPlan());
+    } else {
+      to = middle(other.zone().area());
+      if (!PlanShapes.contains(other.zone().area(), to.x(), to.y())) {
+        return null;
+      }
+    }
+    double above = at.z() - ground.heightAt(at.x(), at.y());
+    above = Math.max(other.lowest(), Math.min(other.highest(), above));
+    return raised(to, above, ground);
+  }
+
+  private static Point middle(List<Point> area) {
+    double x = area.stream().mapToDouble(Point::x).average().orElse(0);
+    double y = area.stream().mapToDouble(Point::y).average().orElse(0);
+    return new Point(x, y);
+  }
+
+  private static Point nearestOn(List<Point> path, Point at) {
+    Point nearest = path.get(0);
+    for (int i = 0; i + 1 < path.size(); i++) {
+      Point a = path.get(i);
+      Point b = path.get(i + 1);
+      double dx = b.x() - a.x();
+      double dy = b.y() - a.y();
+      double square = dx * dx + dy * dy;
+      double t = square == 0 ? 0 : ((at.x() - a.x()) * dx + (at.y() - a.y()) * dy) / square;
+      t = Math.max(0, Math.min(1, t));
+      Point foot = new Point(a.x() + t * dx, a.y() + t * dy);
+      nearest = foot.distance(at) < nearest.distance(at) ? foot : nearest;
+    }
+    return nearest;
   }
 
   boolean isOneOf(Change other) {
     return kind == other.kind && attachment == other.attachment && direction == other.direction;
   }
 
-  /** The attachments after the change, or null where what holds them does not allow it. */
-  List<Layout.Hold> holds(List<Layout.Hold> holds, List<Holder> holders, GroundSurface ground) {
+  /**
+   * The attachments after the change, or null where what holds them does not allow it.
+   *
+   * @param byId what the plan has to hold a wire
+   */
+  List<Layout.Hold> holds(
+      List<Layout.Hold> holds, Function<String, Holder> byId, GroundSurface ground) {
     List<Layout.Hold> changed = new ArrayList<>(holds);
+    if (kind == Kind.HOLD) {
+      Place to = onTo(holds.get(attachment).at(), byId.apply(other), ground);
+      if (to == null) {
+        return null;
+      }
+      changed.set(attachment, new Layout.Hold(other, to));
+      return changed;
+    }
     boolean stays = kind == Kind.SHORTEN || kind == Kind.LIGHTEN || kind == Kind.FEED;
     boolean moved = stays;
     for (int a = 0; a < holds.size() && !stays; a++) {
       if (attachment >= 0 && attachment != a) {
         continue;
       }
-      Place to = moved(holds.get(a).at(), holders.get(a), ground);
+      Place to = moved(holds.get(a).at(), byId.apply(holds.get(a).on()), ground);
       if (to != null) {
         changed.set(a, new Layout.Hold(holds.get(a).on(), to));
         moved = true;
@@ -145,8 +237,13 @@ record Change(Kind kind, int attachment, double direction, double amount, String
     return String.format(Locale.ROOT, "%.2f", metres).replace('-', '−');
   }
 
-  /** The change as an order. */
-  String sentence(List<Layout.Hold> to, List<Holder> holders, GroundSurface ground) {
+  /**
+   * The change as an order.
+   *
+   * @param to the attachments after it
+   */
+  String sentence(List<Layout.Hold> to, Function<String, Holder> byId, GroundSurface ground) {
+    List<Holder> holders = to.stream().map(each -> byId.apply(each.on())).toList();
     String metres = String.format(Locale.ROOT, "%.2f m", amount);
     switch (kind) {
       case RAISE, LOWER -> {
@@ -188,8 +285,16 @@ record Change(Kind kind, int attachment, double direction, double amount, String
             metres,
             holders.get(direction < 0 ? 0 : holders.size() - 1).name());
       }
+      case HOLD -> {
+        Place at = to.get(attachment).at();
+        return String.format(
+            Locale.ROOT,
+            "Hold that end at %s instead, %.2f m above the ground.",
+            holders.get(attachment).name(),
+            at.z() - ground.heightAt(at.x(), at.y()));
+      }
       default -> {
-        return "Take a lighter wire: " + wire + ".";
+        return "Take a lighter wire: " + other + ".";
       }
     }
   }
@@ -248,7 +353,8 @@ record Change(Kind kind, int attachment, double direction, double amount, String
     return new Layout(
         old.shape(),
         holds,
-        List.of(new Layout.Run(points, wire != null ? wire : old.conductors().get(0).wire())),
+        List.of(
+            new Layout.Run(points, kind == Kind.LIGHTEN ? other : old.conductors().get(0).wire())),
         new Layout.FeedChoice(0, fraction, old.feed().line(), old.feed().lineLength()));
   }
 

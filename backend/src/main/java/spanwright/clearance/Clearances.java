@@ -44,6 +44,7 @@ public final class Clearances {
   private final double headroom;
   private final Screen screen;
   private final Map<String, String> names = new HashMap<>();
+  private final List<Holder> holders;
 
   private Clearances(Plan plan, Catalogue catalogue) {
     ground = GroundSurface.of(plan);
@@ -61,6 +62,7 @@ public final class Clearances {
     }
     index.build();
     name(plan);
+    holders = Holder.all(plan).values().stream().sorted(Comparator.comparing(Holder::id)).toList();
     screen = new Screen(plan, ground, rules, overhead, boundary, rigging);
   }
 
@@ -115,6 +117,11 @@ public final class Clearances {
   String name(String id) {
     String name = names.get(id);
     return name == null || name.isBlank() ? id : name;
+  }
+
+  /** Everything of the plan that can hold a wire, by id. */
+  List<Holder> holders() {
+    return holders;
   }
 
   /** Prepares a plan: solids, crowns, zones, lines, boundary. */
@@ -216,6 +223,7 @@ public final class Clearances {
    * change that cures it, found by calculation and checked again. Empty when nothing is foul.
    */
   public List<Refusal> refuse(Layout layout, Rigged rigged, List<Clearance> clearances) {
-    return new Cures(this, rigging, ground, layout, rigged, clearances).refusals();
+    Trials trials = new Trials(this, rigging, ground, layout, rigged, clearances);
+    return new Cures(this, trials, layout, rigged, clearances).refusals();
   }
 }

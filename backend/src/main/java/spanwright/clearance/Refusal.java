@@ -19,6 +19,10 @@ import spanwright.rigging.Layout;
  * @param cure the cure as a sentence
  * @param cured the attachments that would cure it, or empty when no move of an attachment does
  * @param wire the refused wire as drawn, for a ghost
+ * @param after the placement after the cure, as {@code assess} reads it; null where nothing cures
+ *     it
+ * @param miss 1 to 3 for the nearest misses, where nothing at all is allowed; else null
+ * @param lacks everything that stands in this placement's way, as sentences, this one first
  */
 public record Refusal(
     List<String> attachments,
@@ -32,10 +36,34 @@ public record Refusal(
     String reason,
     String cure,
     List<Layout.Hold> cured,
-    List<List<Place>> wire) {
+    List<List<Place>> wire,
+    Layout after,
+    Integer miss,
+    List<String> lacks) {
   public Refusal {
     attachments = attachments == null ? List.of() : List.copyOf(attachments);
     cured = cured == null ? List.of() : List.copyOf(cured);
     wire = wire == null ? List.of() : List.copyOf(wire);
+    lacks = lacks == null ? List.of() : List.copyOf(lacks);
+  }
+
+  /** The same, as one of the nearest misses. */
+  public Refusal missing(int place) {
+    return new Refusal(
+        attachments,
+        shape,
+        rule,
+        to,
+        what,
+        at,
+        distance,
+        required,
+        reason,
+        cure,
+        cured,
+        wire,
+        after,
+        place,
+        lacks);
   }
 }

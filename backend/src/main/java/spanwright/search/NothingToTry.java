@@ -58,6 +58,9 @@ final class NothingToTry {
             ? "Allow one of those shapes in the brief."
             : "Add a support, a bracket line or a mast zone farther off, or allow a new mast.",
         List.of(),
+        List.of(),
+        null,
+        null,
         List.of());
   }
 

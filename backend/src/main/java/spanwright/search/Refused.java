@@ -27,7 +27,19 @@ final class Refused {
   /** Refusals for the same rule and thing. */
   private static final int PER_OBSTACLE = 4;
 
-  private record Kept(Hung hung, String obstacle, int fouls) {}
+  /** The nearest misses told when nothing at all is allowed. */
+  private static final int MISSES = 3;
+
+  /**
+   * One kept.
+   *
+   * @param lacks what it lacks in all: metres, or shares of what is allowed
+   */
+  private record Kept(Hung hung, String obstacle, int fouls, double lacks) {
+    boolean isNearer(Kept other) {
+      return fouls < other.fouls || fouls == other.fouls && lacks < other.lacks;
+    }
+  }
 
   private final Map<String, Kept> byIdea = new LinkedHashMap<>();
 
@@ -35,32 +47,43 @@ final class Refused {
   void offer(Candidate candidate, Hung hung) {
     Set<String> fouls = new TreeSet<>();
     String first = null;
+    double lacks = 0;
     for (Clearance clearance : hung.clearances()) {
       if (clearance.state() == State.FOUL) {
         first = first == null ? clearance.rule() + ":" + clearance.to() : first;
-        fouls.add(clearance.rule() + ":" + clearance.to());
+        if (fouls.add(clearance.rule() + ":" + clearance.to())) {
+          lacks += clearance.required() - clearance.distance();
+        }
       }
     }
     for (var shortcoming : hung.rigged().shortcomings()) {
       String what = shortcoming.rule() + ":" + shortcoming.to();
       first = first == null ? what : first;
-      fouls.add(what);
+      if (fouls.add(what)) {
+        double allowed = Math.max(1, Math.abs(shortcoming.allowed()));
+        lacks += Math.abs(shortcoming.found() - shortcoming.allowed()) / allowed;
+      }
     }
     if (first != null) {
-      Kept kept = new Kept(hung, first, fouls.size());
-      byIdea.merge(candidate.family() + "/" + first, kept, (a, b) -> b.fouls < a.fouls ? b : a);
+      Kept kept = new Kept(hung, first, fouls.size(), lacks);
+      byIdea.merge(candidate.family() + "/" + first, kept, (a, b) -> b.isNearer(a) ? b : a);
     }
   }
 
-  /** The refusals of a document, with their cures: first those that least stands in the way of. */
-  List<Refusal> list(Assessor assessor, Workers workers, int most) {
+  /**
+   * The refusals of a document, with their cures: first those that least stands in the way of.
+   *
+   * @param misses whether nothing at all is allowed, so that the nearest are told as such
+   */
+  List<Refusal> list(Assessor assessor, Workers workers, int most, boolean misses) {
     List<Kept> ordered = new ArrayList<>(byIdea.values());
-    ordered.sort(Comparator.comparingInt(Kept::fouls));
+    ordered.sort(Comparator.comparingInt(Kept::fouls).thenComparingDouble(Kept::lacks));
     Map<String, Integer> perObstacle = new HashMap<>();
     List<Kept> chosen = new ArrayList<>();
     for (Kept kept : ordered) {
-      if (chosen.size() < most
-          && perObstacle.merge(kept.obstacle, 1, Integer::sum) <= PER_OBSTACLE) {
+      boolean near = misses && chosen.size() < MISSES;
+      boolean few = perObstacle.merge(kept.obstacle, 1, Integer::sum) <= PER_OBSTACLE;
+      if (near || few && chosen.size() < most) {
         chosen.add(kept);
       }
     }
@@ -71,6 +94,7 @@ final class Refused {
     for (Optional<Refusal> refusal : found) {
       refusal
           .filter(r -> said.add(r.attachments() + r.shape() + r.rule() + r.to()))
+          .map(r -> misses && refusals.size() < MISSES ? r.missing(refusals.size() + 1) : r)
           .ifPresent(r -> refusals.add(rounded(r)));
     }
     return refusals;
@@ -89,7 +113,10 @@ final class Refused {
         r.reason(),
         r.cure(),
         r.cured().stream().map(hold -> new Layout.Hold(hold.on(), rounded(hold.at()))).toList(),
-        r.wire().stream().map(points -> points.stream().map(Refused::rounded).toList()).toList());
+        r.wire().stream().map(points -> points.stream().map(Refused::rounded).toList()).toList(),
+        r.after(),
+        r.miss(),
+        r.lacks());
   }
 
   private static Place rounded(Place p) {

@@ -105,7 +105,9 @@ public final class Search {
     try (Workers workers = new Workers(options.threads(), listener::cancelled)) {
       List<Placement> ranked = search.rank(workers);
       search.say(0.98, "working out what would cure the refusals");
-      List<Refusal> why = search.refused.list(search.assessor, workers, options.effort().refusals);
+      List<Refusal> why =
+          search.refused.list(
+              search.assessor, workers, options.effort().refusals, ranked.isEmpty());
       if (search.considered == 0) {
         why = List.of(search.nothingToTry());
       }
