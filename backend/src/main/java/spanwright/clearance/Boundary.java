@@ -49,9 +49,14 @@ final class Boundary {
   private void foot(Strand strand, Tally.Worst worst, double needed) {
     double[] p = strand.states[0];
     int end = strand.part == Strand.Part.MAST ? 0 : p.length - 3;
-    double inside = -area.signed(p[end], p[end + 1]);
+    double inside = inside(p[end], p[end + 1]);
     Place at = Obstacle.place(p, end);
     worst.offer(inside, needed, strand.part.word, at, edge(at));
+  }
+
+  /** How far inside the boundary a point is [m]; less than nothing outside. */
+  double inside(double x, double y) {
+    return -area.signed(x, y);
   }
 
   boolean allows(int edge, boolean rope) {

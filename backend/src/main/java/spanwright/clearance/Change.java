@@ -15,7 +15,6 @@ import spanwright.plan.Point;
 import spanwright.rigging.Holder;
 import spanwright.rigging.Layout;
 import spanwright.rigging.PlanShapes;
-import spanwright.rigging.Rigged;
 
 /**
  * One way to change a layout, by so much.
@@ -297,92 +296,5 @@ record Change(Kind kind, int attachment, double direction, double amount, String
         return "Take a lighter wire: " + other + ".";
       }
     }
-  }
-
-  /**
-   * The layout after the change: straight lines again, each leg of the wire as long as it hung and
-   * the ropes taking up the rest; where the way became too short, the wire is.
-   */
-  Layout layout(Rigged rigged, List<Layout.Hold> holds, double[] leastTails) {
-    int last = rigged.spans().size() - 1;
-    double trimFirst = kind != Kind.SHORTEN || direction > 0 ? 0 : direction == 0 ? 0.5 : 1;
-    double trimLast = kind != Kind.SHORTEN || direction < 0 ? 0 : direction == 0 ? 0.5 : 1;
-    List<Place> points = new ArrayList<>();
-    double total = 0;
-    double beforeFeed = -1;
-    boolean headFree = isFree(rigged, 0);
-    boolean endFree = isFree(rigged, last + 1);
-    for (int i = 0; i <= last; i++) {
-      Rigged.Span span = rigged.spans().get(i);
-      Place a = holds.get(i).at();
-      Place b = holds.get(i + 1).at();
-      double chord = a.distance(b);
-      boolean outerFrom = i == 0 && !headFree;
-      boolean outerTo = i == last && !endFree;
-      double wire =
-          span.wireLength()
-              - (i == 0 ? trimFirst * amount : 0)
-              - (i == last ? trimLast * amount : 0);
-      double ropeFrom = outerFrom ? span.ropeFrom() + trimFirst * amount : 0;
-      double least = outerTo ? Math.min(leastTails[1], span.ropeTo()) : 0;
-      if (outerFrom && !outerTo) {
-        ropeFrom = Math.max(chord - wire, Math.min(leastTails[0], span.ropeFrom()));
-      }
-      double most = chord - ropeFrom - least;
-      wire = outerFrom || outerTo ? Math.min(wire, most) : chord;
-      if (wire < 1) {
-        return null;
-      }
-      if (i == 0) {
-        tailPoint(rigged, 0, a, points, true);
-        points.add(along(a, b, ropeFrom));
-      }
-      points.add(i == last && outerTo ? along(a, b, ropeFrom + wire) : b);
-      beforeFeed = rigged.feedLine().held() == i ? total : beforeFeed;
-      total += wire;
-    }
-    tailPoint(rigged, last + 1, holds.get(last + 1).at(), points, false);
-    Layout old = rigged.layout();
-    double fraction = beforeFeed > 0 ? beforeFeed / total : forwards(rigged);
-    if (kind == Kind.FEED) {
-      fraction += direction * amount / total;
-      if (beforeFeed > 0 || fraction < 0.05 || fraction > 0.95) {
-        return null;
-      }
-    }
-    return new Layout(
-        old.shape(),
-        holds,
-        List.of(
-            new Layout.Run(points, kind == Kind.LIGHTEN ? other : old.conductors().get(0).wire())),
-        new Layout.FeedChoice(0, fraction, old.feed().line(), old.feed().lineLength()));
-  }
-
-  private static double forwards(Rigged rigged) {
-    double fraction = rigged.layout().feed().fraction();
-    Place first = rigged.conductors().get(0).shapes().calm().get(0);
-    Rigged.Span last = rigged.spans().get(rigged.spans().size() - 1);
-    boolean reversed = first.equals(last.shapes().calm().get(last.wireTo()));
-    return reversed ? 1 - fraction : fraction;
-  }
-
-  private static boolean isFree(Rigged rigged, int attachment) {
-    return rigged.tails().stream().anyMatch(each -> each.attachment() == attachment);
-  }
-
-  private static void tailPoint(
-      Rigged rigged, int attachment, Place at, List<Place> points, boolean first) {
-    for (Rigged.Tail each : rigged.tails()) {
-      if (each.attachment() == attachment) {
-        Place low = new Place(at.x(), at.y(), at.z() - each.length());
-        points.add(first ? 0 : points.size(), low);
-      }
-    }
-  }
-
-  private static Place along(Place a, Place b, double way) {
-    double t = way / a.distance(b);
-    return new Place(
-        a.x() + t * (b.x() - a.x()), a.y() + t * (b.y() - a.y()), a.z() + t * (b.z() - a.z()));
   }
 }

@@ -4,9 +4,11 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import spanwright.plan.Building;
+import spanwright.plan.Canopy;
 import spanwright.plan.GroundSurface;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
+import spanwright.plan.Point;
 import spanwright.plan.Zone;
 import spanwright.rigging.Holder;
 import spanwright.rigging.Layout;
@@ -33,6 +35,7 @@ final class Screen {
   private final List<Area> noWire = new ArrayList<>();
   private final List<double[]> noWireBoxes = new ArrayList<>();
   private final List<Area> noMast = new ArrayList<>();
+  private final List<Spot> crowns = new ArrayList<>();
   private final List<Area> high = new ArrayList<>();
   private final List<Double> heights = new ArrayList<>();
   private final double headroom;
@@ -70,10 +73,52 @@ final class Screen {
         }
       }
     }
+    plan.supports().forEach(each -> crown(each.at(), each.canopy()));
+    plan.trees().forEach(each -> crown(each.at(), each.canopy()));
     headroom = rules.value("headroom");
     reach = rules.value("support-reach");
     spacing = rules.value("mast-spacing");
     newMasts = plan.brief().newMasts();
+  }
+
+  /** A crown on the plan: where, how wide, and its height above the plan's zero. */
+  private record Spot(Point at, double radius, double from, double to) {}
+
+  private void crown(Point at, Canopy canopy) {
+    if (canopy != null) {
+      double level = ground.heightAt(at);
+      crowns.add(new Spot(at, canopy.radius(), level + canopy.from(), level + canopy.to()));
+    }
+  }
+
+  /** Whether a new mast may stand there, for all that can be seen of its foot and its length. */
+  private boolean mayStand(Holder holder, Place top) {
+    double x = top.x();
+    double y = top.y();
+    double foot = holder.footHeight(ground, x, y);
+    for (Area each : noMast) {
+      if (each.signed(x, y) < -1e-6) {
+        return false;
+      }
+    }
+    for (int i = 0; i < high.size(); i++) {
+      boolean low = foot + 1e-6 < ground.heightAt(x, y) + heights.get(i);
+      if (low && high.get(i).signed(x, y) < -1e-6) {
+        return false;
+      }
+    }
+    for (Spot each : crowns) {
+      boolean beside = each.at.distance(top.onPlan()) < each.radius - 1e-6;
+      if (beside && foot < each.to - 1e-6 && top.z() > each.from + 1e-6) {
+        return false;
+      }
+    }
+    for (Roof each : roofs) {
+      if (each.covers(x, y) && each.heightAt(x, y) - foot > Solid.SUNK + 1e-6) {
+        return false;
+      }
+    }
+    return boundary.inside(x, y) > -1e-6;
   }
 
   boolean passes(Layout layout) {
@@ -103,10 +148,8 @@ final class Screen {
       }
       if (holder.zone() != null) {
         masts += isOnEarlierMast(layout, i) ? 0 : 1;
-        for (Area each : noMast) {
-          if (each.signed(hold.at().x(), hold.at().y()) < -1e-6) {
-            return false;
-          }
+        if (!mayStand(holder, hold.at())) {
+          return false;
         }
       }
     }
@@ -174,6 +217,9 @@ final class Screen {
    * one, so what it touches is foul.
    */
   private boolean letGo(Layout layout, Overhead.Line line) {
+    if (layout.conductors().size() > 1) {
+      return true; // which of its attachments are neighbours is for the rigging to say
+    }
     for (int i = 0; i + 1 < layout.attachments().size(); i++) {
       Place a = layout.attachments().get(i).at();
       Place b = layout.attachments().get(i + 1).at();

@@ -21,7 +21,7 @@ final class Solid implements Obstacle {
   /**
    * A zone's base over a pitched roof is one height: a foot may lie this much under the tiles [m].
    */
-  private static final double SUNK = 1.5;
+  static final double SUNK = 1.5;
 
   private final Roof roof;
   private final List<double[]> faces;

@@ -178,7 +178,7 @@ final class Trials {
     try {
       for (Change change : changes) {
         List<Layout.Hold> holds = change.holds(now.attachments(), holder, ground);
-        now = holds == null ? null : change.layout(hung, holds, leastTails(holds));
+        now = holds == null ? null : Relaid.after(change, hung, holds, leastTails(holds));
         if (now == null) {
           return null;
         }
