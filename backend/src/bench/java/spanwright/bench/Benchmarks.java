@@ -25,14 +25,17 @@ import spanwright.moments.BenchSizes;
  *
  * <p>Arguments: {@code quick} (shorter, rougher), {@code profile} (where the time goes, by samples
  * of the stack), {@code allocation} (bytes per call), {@code nofma} (hardware fused multiply-add
- * switched off), {@code memory} (no timing: what ten bands take), {@code python=COMMAND} (a Python
- * with NumPy and SciPy; {@code none} leaves zgesv out), and anything else as a pattern for the
- * names of the benchmarks to run.
+ * switched off), {@code memory} (no timing: what ten bands take), {@code search} (thorough searches
+ * of the demo plots instead, on one thread), {@code python=COMMAND} (a Python with NumPy and SciPy;
+ * {@code none} leaves zgesv out), and anything else as a pattern for the names of the benchmarks to
+ * run.
  */
 public final class Benchmarks {
   private static final Path PROFILES = Path.of("target", "profiles");
+  private static final Path SCRIPT = Path.of("src", "bench", "zgesv.py");
   private static final String NO_FMA = "-XX:-UseFMA";
 
+  private boolean search;
   private boolean quick;
   private boolean profile;
   private boolean allocation;
@@ -52,11 +55,16 @@ public final class Benchmarks {
     for (String argument : arguments) {
       run.take(argument);
     }
-    run.run();
+    if (run.search) {
+      run.search();
+    } else {
+      run.run();
+    }
   }
 
   private void take(String argument) {
     switch (argument) {
+      case "search" -> search = true;
       case "quick" -> quick = true;
       case "profile" -> profile = true;
       case "allocation" -> allocation = true;
@@ -71,18 +79,25 @@ public final class Benchmarks {
     }
   }
 
+  private void search() throws IOException {
+    Profiles.forget(PROFILES);
+    System.out.print(Searches.text(python, SCRIPT, profile ? PROFILES : null));
+    if (profile) {
+      System.out.print(Profiles.text(PROFILES));
+    }
+  }
+
   private void run() throws RunnerException, IOException {
     // several may run on one machine, each on its own core
     System.setProperty("jmh.ignoreLock", "true");
     Map<Integer, Integer> unknowns = BenchSizes.unknowns();
-    Path script = Path.of("src", "bench", "zgesv.py");
     Profiles.forget(PROFILES);
-    Zgesv before = Zgesv.measure(python, script, unknowns.values());
+    Zgesv before = Zgesv.measure(python, SCRIPT, unknowns.values());
     Collection<RunResult> results = new ArrayList<>();
     results.addAll(results(steady()));
     results.addAll(results(chain()));
     results.addAll(results(first()));
-    Zgesv after = Zgesv.measure(python, script, unknowns.values());
+    Zgesv after = Zgesv.measure(python, SCRIPT, unknowns.values());
     String text = new Report(results, unknowns, before, after).text();
     if (profile) {
       text += Profiles.text(PROFILES);

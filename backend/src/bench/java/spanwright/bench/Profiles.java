@@ -15,7 +15,7 @@ import jdk.jfr.consumer.RecordingFile;
 
 /** Where the time goes: methods by how often they were found on the stack. */
 final class Profiles {
-  private static final int MOST = 16;
+  private static final int MOST = 20;
 
   private Profiles() {}
 
@@ -76,6 +76,7 @@ final class Profiles {
           .filter(f -> f.getMethod().getType().getName().startsWith("spanwright."))
           .filter(f -> !f.getMethod().getType().getName().contains("Bench"))
           .map(Samples::name)
+          .filter(method -> Character.isLetter(method.charAt(0)) && !method.contains("lambda$"))
           .distinct()
           .forEach(method -> anywhere.merge(method, 1, Integer::sum));
     }
