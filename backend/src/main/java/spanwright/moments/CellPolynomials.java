@@ -5,8 +5,8 @@ package spanwright.moments;
  * nodes to coefficients, to powers, and onto a part of the cell.
  *
  * <p>A full set has {@value #SIDE} × {@value #SIDE} terms, u^a v^b at a·{@value #SIDE} + b. A short
- * one keeps the {@value #SHORT} terms with a + b of at most {@value #DEGREE}, in the order of
- * {@link #shortTerm}.
+ * one keeps the {@value #SHORT} terms with a + b of at most {@value #DEGREE}, in the order 1, v,
+ * v², v³, u, uv, uv², u², u²v, u³.
  */
 final class CellPolynomials {
   /** Nodes, and coefficients, each way. */
@@ -24,9 +24,13 @@ final class CellPolynomials {
   /** Chebyshev's nodes, rising. */
   static final double[] NODES = new double[SIDE];
 
+  /** Weights of the values at the nodes in the polynomial's value at 1, the upper edge. */
+  static final double[] EDGE = new double[SIDE];
+
+  private static final int CACHED = 8;
+  private static final double[][][][] PARTS = new double[CACHED + 1][][][];
   private static final double[][] TO_CHEBYSHEV = new double[SIDE][SIDE];
   private static final double[][] TO_POWERS = new double[SIDE][SIDE];
-  private static final int[] SHORT_TERMS = new int[SHORT];
 
   static {
     for (int i = 0; i < SIDE; i++) {
@@ -34,6 +38,11 @@ final class CellPolynomials {
       for (int k = 0; k < SIDE; k++) {
         double angle = Math.PI * k * (SIDE - i - 0.5) / SIDE;
         TO_CHEBYSHEV[k][i] = (k == 0 ? 1.0 : 2.0) / SIDE * StrictMath.cos(angle);
+      }
+    }
+    for (int i = 0; i < SIDE; i++) {
+      for (int k = 0; k < SIDE; k++) {
+        EDGE[i] += TO_CHEBYSHEV[k][i];
       }
     }
     double[][] t = new double[SIDE][SIDE];
@@ -49,20 +58,15 @@ final class CellPolynomials {
         TO_POWERS[p][k] = t[k][p];
       }
     }
-    int n = 0;
-    for (int a = 0; a <= DEGREE; a++) {
-      for (int b = 0; a + b <= DEGREE; b++) {
-        SHORT_TERMS[n++] = a * SIDE + b;
+    for (int parts = 1; parts <= CACHED; parts++) {
+      PARTS[parts] = new double[parts][][];
+      for (int i = 0; i < parts; i++) {
+        PARTS[parts][i] = restrict(i, parts);
       }
     }
   }
 
   private CellPolynomials() {}
-
-  /** Place in a full set of the n-th term of a short one. */
-  static int shortTerm(int n) {
-    return SHORT_TERMS[n];
-  }
 
   /** Chebyshev coefficients from values at the nodes, value (i, j) at i·SIDE + j. */
   static double[] chebyshev(double[] values) {
@@ -86,6 +90,10 @@ final class CellPolynomials {
 
   /** The matrix from Chebyshev coefficients to those on part i of n equal ones. */
   static double[][] restriction(int i, int n) {
+    return n <= CACHED ? PARTS[n][i] : restrict(i, n);
+  }
+
+  private static double[][] restrict(int i, int n) {
     double[][] matrix = new double[SIDE][SIDE];
     double[][] atNodes = new double[SIDE][SIDE];
     for (int p = 0; p < SIDE; p++) {
@@ -106,28 +114,49 @@ final class CellPolynomials {
     return matrix;
   }
 
-  /** Root of the summed squares of the Chebyshev coefficients that a short set leaves out. */
-  static double leftOut(double[] chebyshev) {
-    double sum = 0;
+  /**
+   * Roots of the summed squares of the Chebyshev coefficients that a short set leaves out: of those
+   * with the higher order along u, and of the others.
+   */
+  static void leftOut(double[] chebyshev, double[] out) {
+    double alongU = 0;
+    double alongV = 0;
     for (int a = 0; a < SIDE; a++) {
       for (int b = Math.max(0, DEGREE + 1 - a); b < SIDE; b++) {
         double c = chebyshev[a * SIDE + b];
-        sum += c * c;
+        if (a > b) {
+          alongU += c * c;
+        } else {
+          alongV += c * c;
+        }
       }
     }
-    return Math.sqrt(sum);
+    out[0] = Math.sqrt(alongU);
+    out[1] = Math.sqrt(alongV);
   }
 
   /** The powers' coefficients of a short set from Chebyshev coefficients, to out[at ..]. */
-  static void shortPowers(double[] chebyshev, double[] out, int at) {
-    double[] kept = new double[TERMS];
-    for (int n = 0; n < SHORT; n++) {
-      kept[SHORT_TERMS[n]] = chebyshev[SHORT_TERMS[n]];
-    }
-    double[] powers = powers(kept);
-    for (int n = 0; n < SHORT; n++) {
-      out[at + n] = powers[SHORT_TERMS[n]];
-    }
+  static void shortPowers(double[] c, double[] out, int at) {
+    // along v, then along u: T2 = 2x² − 1, T3 = 4x³ − 3x
+    double c00 = c[0] - c[2];
+    double c01 = c[1] - 3 * c[3];
+    double c02 = 2 * c[2];
+    double c10 = c[SIDE] - c[SIDE + 2];
+    double c11 = c[SIDE + 1];
+    double c12 = 2 * c[SIDE + 2];
+    double c20 = c[2 * SIDE];
+    double c21 = c[2 * SIDE + 1];
+    double c30 = c[3 * SIDE];
+    out[at] = c00 - c20;
+    out[at + 1] = c01 - c21;
+    out[at + 2] = c02;
+    out[at + 3] = 4 * c[3];
+    out[at + 4] = c10 - 3 * c30;
+    out[at + 5] = c11;
+    out[at + 6] = c12;
+    out[at + 7] = 2 * c20;
+    out[at + 8] = 2 * c21;
+    out[at + 9] = 4 * c30;
   }
 
   /** L x Mᵀ. */

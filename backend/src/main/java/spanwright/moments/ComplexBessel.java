@@ -1,8 +1,8 @@
 package spanwright.moments;
 
 /**
- * Bessel functions J0, J1 and the two Hankel functions of orders 0 and 1 of a complex argument with
- * a non-negative real part.
+ * Bessel functions J0, J1 and Hankel functions of orders 0 and 1 of many complex arguments with
+ * non-negative real parts, in loops that run several lanes at a time.
  *
  * <p>Power series below |z| = {@value #BORDER}, Hankel's asymptotic series from there (Abramowitz
  * and Stegun, Handbook of Mathematical Functions, 9.1.10 and 9.2.7 to 9.2.10; its least term is
@@ -13,9 +13,39 @@ final class ComplexBessel {
   static final double BORDER = 12;
 
   private static final int TERMS = 18;
-  private static final double[][] COEFFICIENTS = {hankelTerms(0), hankelTerms(1)};
+  private static final int MOST = 40;
+  private static final double[][] ASYMPTOTIC = {hankelTerms(0), hankelTerms(1)};
+  private static final double[][] POWER = {seriesTerms(0), seriesTerms(1)};
 
-  private ComplexBessel() {}
+  /** J0 or H0, then J1 or H1, of each argument. */
+  final double[][] re;
+
+  final double[][] im;
+
+  private final double[] ur;
+  private final double[] ui;
+  private final double[] angle;
+  private final double[] sin;
+  private final double[] cos;
+  private final double[] frontR;
+  private final double[] frontI;
+  private final double[][] otherRe;
+  private final double[][] otherIm;
+
+  /** Room for so many arguments at a time. */
+  ComplexBessel(int room) {
+    re = new double[2][room];
+    im = new double[2][room];
+    ur = new double[room];
+    ui = new double[room];
+    angle = new double[room];
+    sin = new double[room];
+    cos = new double[room];
+    frontR = new double[room];
+    frontI = new double[room];
+    otherRe = new double[2][room];
+    otherIm = new double[2][room];
+  }
 
   private static double[] hankelTerms(int order) {
     double[] a = new double[TERMS];
@@ -27,90 +57,174 @@ final class ComplexBessel {
     return a;
   }
 
-  /** Writes Re J0, Im J0, Re J1, Im J1 of x + jy to out[at .. at + 3]. */
-  static void regular(double x, double y, double[] out, int at) {
-    double size2 = x * x + y * y;
-    if (size2 < BORDER * BORDER) {
-      series(x, y, out, at);
-      return;
+  private static double[] seriesTerms(int order) {
+    double[] a = new double[MOST];
+    a[0] = 1;
+    for (int m = 1; m < MOST; m++) {
+      a[m] = a[m - 1] / (m * (double) (m + order));
     }
-    double[] second = new double[4];
-    hankel(x, y, +1, out, at);
-    hankel(x, y, -1, second, 0);
-    for (int i = 0; i < 4; i++) {
-      out[at + i] = 0.5 * (out[at + i] + second[i]);
+    return a;
+  }
+
+  /** J0 and J1 of x + jy, count of them. */
+  void regular(double[] x, double[] y, int count) {
+    int from = 0;
+    while (from < count) {
+      boolean near = near(x[from], y[from]);
+      double most = 0;
+      boolean real = true;
+      int to = from;
+      while (to < count && near(x[to], y[to]) == near) {
+        most = Math.max(most, x[to] * x[to] + y[to] * y[to]);
+        real &= y[to] == 0;
+        to++;
+      }
+      if (near) {
+        series(x, y, from, to, most, real);
+      } else {
+        far(x, y, from, to, real);
+      }
+      from = to;
     }
   }
 
-  private static void series(double x, double y, double[] out, int at) {
-    double ur = -0.25 * (x * x - y * y);
-    double ui = -0.5 * x * y;
-    double tr = 1;
-    double ti = 0;
-    double zeroR = 1;
-    double zeroI = 0;
-    double oneR = 1;
-    double oneI = 0;
-    for (int m = 1; m < 80; m++) {
-      double scale = 1.0 / ((double) m * m);
-      double nr = (tr * ur - ti * ui) * scale;
-      ti = (tr * ui + ti * ur) * scale;
-      tr = nr;
-      zeroR += tr;
-      zeroI += ti;
-      oneR += tr / (m + 1);
-      oneI += ti / (m + 1);
-      if (Math.abs(tr) + Math.abs(ti) < 1e-18) {
-        break;
+  private static boolean near(double x, double y) {
+    return x * x + y * y < BORDER * BORDER;
+  }
+
+  /** J = (H1 + H2)/2; of a real argument the two are conjugates. */
+  private void far(double[] x, double[] y, int from, int to, boolean real) {
+    hankel(x, y, from, to, +1, re, im);
+    if (real) {
+      for (int order = 0; order < 2; order++) {
+        java.util.Arrays.fill(im[order], from, to, 0);
+      }
+      return;
+    }
+    hankel(x, y, from, to, -1, otherRe, otherIm);
+    for (int order = 0; order < 2; order++) {
+      mean(re[order], otherRe[order], from, to);
+      mean(im[order], otherIm[order], from, to);
+    }
+  }
+
+  private static void mean(double[] a, double[] b, int from, int to) {
+    for (int i = from; i < to; i++) {
+      a[i] = 0.5 * (a[i] + b[i]);
+    }
+  }
+
+  private void series(double[] x, double[] y, int from, int to, double most, boolean real) {
+    int last = 3;
+    double term = 1;
+    for (int m = 1; m < MOST - 1 && (term > 1e-17 || m < 3); m++) {
+      term *= 0.25 * most / ((double) m * m);
+      last = m + 1;
+    }
+    for (int i = from; i < to; i++) {
+      ur[i] = -0.25 * (x[i] * x[i] - y[i] * y[i]);
+      ui[i] = -0.5 * x[i] * y[i];
+    }
+    for (int order = 0; order < 2; order++) {
+      double[] r = re[order];
+      double[] s = im[order];
+      java.util.Arrays.fill(r, from, to, POWER[order][last]);
+      java.util.Arrays.fill(s, from, to, 0);
+      for (int m = last - 1; m >= 0; m--) {
+        if (real) {
+          step(r, ur, POWER[order][m], from, to);
+        } else {
+          step(r, s, ur, ui, POWER[order][m], from, to);
+        }
       }
     }
-    out[at] = zeroR;
-    out[at + 1] = zeroI;
-    out[at + 2] = 0.5 * (x * oneR - y * oneI);
-    out[at + 3] = 0.5 * (x * oneI + y * oneR);
+    double[] r = re[1];
+    double[] s = im[1];
+    for (int i = from; i < to; i++) {
+      double a = 0.5 * (x[i] * r[i] - y[i] * s[i]);
+      s[i] = 0.5 * (x[i] * s[i] + y[i] * r[i]);
+      r[i] = a;
+    }
+  }
+
+  /** One step of Horner's rule with real arguments. */
+  private static void step(double[] r, double[] u, double c, int from, int to) {
+    for (int i = from; i < to; i++) {
+      r[i] = r[i] * u[i] + c;
+    }
+  }
+
+  /** One step of Horner's rule. */
+  private static void step(
+      double[] r, double[] s, double[] u, double[] v, double c, int from, int to) {
+    for (int i = from; i < to; i++) {
+      double a = r[i] * u[i] - s[i] * v[i] + c;
+      s[i] = r[i] * v[i] + s[i] * u[i];
+      r[i] = a;
+    }
   }
 
   /**
-   * Hankel functions of the first (kind +1) or second (kind −1) kind, orders 0 and 1, for |z| of at
-   * least {@link #BORDER}.
+   * Hankel functions of the first (kind +1) or second (kind −1) kind of x + jy, for |z| of at least
+   * {@link #BORDER}.
    */
-  static void hankel(double x, double y, int kind, double[] out, int at) {
-    double size2 = x * x + y * y;
-    // 1/z turned by ±j: the step of the series
-    double qr = kind * y / size2;
-    double qi = kind * x / size2;
-    // sqrt(2/(pi z))
-    double size = Math.sqrt(size2);
-    double rootR = Math.sqrt(0.5 * (size + x));
-    double rootI = y >= 0 ? Math.sqrt(0.5 * (size - x)) : -Math.sqrt(0.5 * (size - x));
-    double factor = Math.sqrt(2 / Math.PI) / size;
-    double fr = factor * rootR;
-    double fi = -factor * rootI;
-    double grow = Math.exp(-kind * y);
-    double angle = kind * (x - Math.PI / 4);
-    double er = grow * Math.cos(angle);
-    double ei = grow * Math.sin(angle);
-    double pr = fr * er - fi * ei;
-    double pi = fr * ei + fi * er;
+  void hankel(double[] x, double[] y, int count, int kind) {
+    hankel(x, y, 0, count, kind, re, im);
+  }
+
+  private void hankel(
+      double[] x, double[] y, int from, int to, int kind, double[][] outR, double[][] outI) {
+    front(x, y, from, to, kind);
+    for (int i = from; i < to; i++) {
+      // 1/z turned by ±j: the step of the series
+      double size2 = x[i] * x[i] + y[i] * y[i];
+      ur[i] = kind * y[i] / size2;
+      ui[i] = kind * x[i] / size2;
+    }
     for (int order = 0; order < 2; order++) {
-      double[] a = COEFFICIENTS[order];
-      double sr = 0;
-      double si = 0;
-      for (int k = TERMS - 1; k >= 0; k--) {
-        double t = sr * qr - si * qi + a[k];
-        si = sr * qi + si * qr;
-        sr = t;
+      double[] r = outR[order];
+      double[] s = outI[order];
+      double[] a = ASYMPTOTIC[order];
+      java.util.Arrays.fill(r, from, to, a[TERMS - 1]);
+      java.util.Arrays.fill(s, from, to, 0);
+      for (int k = TERMS - 2; k >= 0; k--) {
+        step(r, s, ur, ui, a[k], from, to);
       }
-      double r = pr * sr - pi * si;
-      double i = pr * si + pi * sr;
-      if (order == 0) {
-        out[at] = r;
-        out[at + 1] = i;
-      } else {
-        // the further turn by −kind·pi/2
-        out[at + 2] = kind * i;
-        out[at + 3] = -kind * r;
+      for (int i = from; i < to; i++) {
+        double t = frontR[i] * r[i] - frontI[i] * s[i];
+        s[i] = frontR[i] * s[i] + frontI[i] * r[i];
+        r[i] = t;
       }
+    }
+    // the further turn by −kind·pi/2
+    double[] r = outR[1];
+    double[] s = outI[1];
+    for (int i = from; i < to; i++) {
+      double t = r[i];
+      r[i] = kind * s[i];
+      s[i] = -kind * t;
+    }
+  }
+
+  /** sqrt(2/(pi z)) e^{±j(z − pi/4)}. */
+  private void front(double[] x, double[] y, int from, int to, int kind) {
+    int count = to - from;
+    for (int i = 0; i < count; i++) {
+      angle[i] = kind * (x[from + i] - Math.PI / 4);
+    }
+    SinCos.of(angle, count, sin, cos);
+    double scale = Math.sqrt(2 / Math.PI);
+    for (int i = from; i < to; i++) {
+      double size = Math.sqrt(x[i] * x[i] + y[i] * y[i]);
+      double rootR = Math.sqrt(0.5 * (size + x[i]));
+      // (size − x)(size + x) = y²
+      double rootI = 0.5 * y[i] / rootR;
+      double factor = scale / size;
+      double grow = y[i] == 0 ? factor : factor * Math.exp(-kind * y[i]);
+      double er = grow * cos[i - from];
+      double ei = grow * sin[i - from];
+      frontR[i] = rootR * er + rootI * ei;
+      frontI[i] = rootR * ei - rootI * er;
     }
   }
 }

@@ -13,7 +13,6 @@ package spanwright.moments;
  */
 final class GroundBlock {
   private static final int MOST_SPLITS = 64;
-  private static final int[] STEPS = {1, 2, 4, 8, 16, 32, MOST_SPLITS};
 
   /** Short cells along ρ and along ζ in one length unit [1/m]. */
   final double perRho;
@@ -36,22 +35,15 @@ final class GroundBlock {
   private final double[] longCells;
 
   private GroundBlock(
-      int longAcross,
-      int longUp,
-      double wide,
-      double high,
-      double[] longCells,
-      int across,
-      int up,
-      double[] cells) {
+      int longAcross, int longUp, double wide, double high, double[] longCells, ShortCells shorts) {
     this.longAcross = longAcross;
     this.longPerRho = longAcross / wide;
     this.longPerZeta = longUp / high;
     this.longCells = longCells;
-    this.across = across;
-    this.perRho = across / wide;
-    this.perZeta = up / high;
-    this.cells = cells;
+    this.across = shorts.across();
+    this.perRho = shorts.across() / wide;
+    this.perZeta = shorts.up() / high;
+    this.cells = shorts.terms();
   }
 
   /** Memory held [bytes]. */
@@ -68,7 +60,7 @@ final class GroundBlock {
    * @param wide how long it is along ρ [m]
    * @param zeta0 where it begins [m]
    * @param high how long it is along ζ [m]
-   * @param longTolerance allowed last coefficients of the long form, against an image of size one
+   * @param longTolerance allowed error of the long form, against an image of size one
    * @param shortTolerance allowed size of what the short form leaves out
    */
   static GroundBlock make(
@@ -123,14 +115,13 @@ final class GroundBlock {
           i * CellPolynomials.TERMS,
           CellPolynomials.TERMS);
     }
-    int[] parts = parts(chebyshev, shortTolerance);
-    double[] shorts = shortCells(chebyshev, across, up, parts[0], parts[1]);
     return new GroundBlock(
-        across, up, wide, high, powers, across * parts[0], up * parts[1], shorts);
+        across, up, wide, high, powers, ShortCells.of(chebyshev, across, up, shortTolerance));
   }
 
   /**
-   * Works out one cell's Chebyshev coefficients.
+   * Works out one cell's Chebyshev coefficients, and holds them against the values along the edges,
+   * which had no part in them: last coefficients alone may be small by chance.
    *
    * @return 1 when ρ, 2 when ζ, 3 when both need shorter cells, else 0
    */
@@ -145,26 +136,28 @@ final class GroundBlock {
       double[][] chebyshev,
       int start) {
     int side = CellPolynomials.SIDE;
-    double[] rhos = new double[side];
-    double[] zetas = new double[side];
-    for (int i = 0; i < side; i++) {
-      rhos[i] = rho0 + 0.5 * wide * (1 + CellPolynomials.NODES[i]);
-      zetas[i] = zeta0 + 0.5 * high * (1 + CellPolynomials.NODES[i]);
+    int more = side + 2;
+    double[] rhos = new double[more];
+    double[] zetas = new double[more];
+    for (int i = 0; i < more; i++) {
+      double node = i == 0 ? -1 : i > side ? 1 : CellPolynomials.NODES[i - 1];
+      rhos[i] = rho0 + 0.5 * wide * (1 + node);
+      zetas[i] = zeta0 + 0.5 * high * (1 + node);
     }
-    double[] values = kernels.grid(rhos, zetas);
-    double[] back = new double[2 * CellPolynomials.TERMS];
-    for (int i = 0; i < side; i++) {
-      for (int j = 0; j < side; j++) {
+    double[] values = kernels.grid(rhos, zetas, HalfSpaceKernels.Care.TABLE);
+    double[] back = new double[2 * more * more];
+    for (int i = 0; i < more; i++) {
+      for (int j = 0; j < more; j++) {
         double r = Math.sqrt(rhos[i] * rhos[i] + zetas[j] * zetas[j]);
-        back[2 * (i * side + j)] = r * StrictMath.cos(k0 * r);
-        back[2 * (i * side + j) + 1] = r * StrictMath.sin(k0 * r);
+        back[2 * (i * more + j)] = r * Math.cos(k0 * r);
+        back[2 * (i * more + j) + 1] = r * Math.sin(k0 * r);
       }
     }
-    double lastRho = 0;
-    double lastZeta = 0;
-    double[] ratio = new double[CellPolynomials.TERMS];
+    double offRho = 0;
+    double offZeta = 0;
+    double[] ratio = new double[more * more];
     for (int m = 0; m < Reflection.ALL; m++) {
-      for (int n = 0; n < CellPolynomials.TERMS; n++) {
+      for (int n = 0; n < more * more; n++) {
         // grid order GA, GP, GZ, F, GT is the order here
         int at = (n * HalfSpaceKernels.KERNELS + m / 2) * 2;
         double re = values[at];
@@ -173,109 +166,39 @@ final class GroundBlock {
         double sin = back[2 * n + 1];
         ratio[n] = m % 2 == 0 ? re * cos - im * sin : re * sin + im * cos;
       }
-      double[] c = CellPolynomials.chebyshev(ratio);
+      double[] fitted = new double[CellPolynomials.TERMS];
+      for (int i = 0; i < side; i++) {
+        System.arraycopy(ratio, (i + 1) * more + 1, fitted, i * side, side);
+      }
+      double[] c = CellPolynomials.chebyshev(fitted);
       chebyshev[start + m] = c;
       for (int i = 0; i < side; i++) {
-        lastRho = Math.max(lastRho, Math.abs(c[(side - 1) * side + i]));
-        lastZeta = Math.max(lastZeta, Math.abs(c[i * side + side - 1]));
+        offRho = larger(offRho, c[(side - 1) * side + i], c[(side - 2) * side + i] / 12);
+        offZeta = larger(offZeta, c[i * side + side - 1], c[i * side + side - 2] / 12);
+        int row = i + 1;
+        offRho = larger(offRho, missed(ratio, row, more, -1), missed(ratio, row, more, 1));
+        offZeta =
+            larger(offZeta, missed(ratio, row * more, 1, -1), missed(ratio, row * more, 1, 1));
       }
     }
-    return (lastRho > allowed ? 1 : 0) | (lastZeta > allowed ? 2 : 0);
+    return (offRho > allowed ? 1 : 0) | (offZeta > allowed ? 2 : 0);
   }
 
-  /** Into how many parts, along ρ and ζ, long cells are cut for the short form. */
-  private static int[] parts(double[][] chebyshev, double allowed) {
-    for (int total = 1; total < MOST_SPLITS * MOST_SPLITS; total *= 2) {
-      int[] best = null;
-      double least = allowed;
-      for (int across : STEPS) {
-        int up = total / across;
-        if (up == 0 || up > MOST_SPLITS) {
-          continue;
-        }
-        if (guess(chebyshev, across, up) > 4 * allowed) {
-          continue;
-        }
-        double left = leftOut(chebyshev, across, up, least);
-        if (left <= least) {
-          least = left;
-          best = new int[] {across, up};
-        }
-      }
-      if (best != null) {
-        return best;
-      }
+  /**
+   * By how much a line of nodes misses its lower (-1) or upper (1) edge, in values from a place.
+   */
+  private static double missed(double[] values, int from, int step, int edge) {
+    int side = CellPolynomials.SIDE;
+    double off = values[from + (edge < 0 ? 0 : side + 1) * step];
+    for (int n = 0; n < side; n++) {
+      double weight = CellPolynomials.EDGE[edge < 0 ? side - 1 - n : n];
+      off -= weight * values[from + (n + 1) * step];
     }
-    return new int[] {MOST_SPLITS, MOST_SPLITS};
+    return off;
   }
 
-  /** What is left out if coefficients fall off by the parts' lengths alone: a first idea. */
-  private static double guess(double[][] chebyshev, int across, int up) {
-    double worst = 0;
-    for (int i = 0; i < chebyshev.length; i++) {
-      if (i % Reflection.ALL >= Reflection.RATIOS) {
-        continue;
-      }
-      double sum = 0;
-      double sa = 1;
-      for (int a = 0; a < CellPolynomials.SIDE; a++) {
-        double sb = sa;
-        for (int b = 0; b < CellPolynomials.SIDE; b++) {
-          if (a + b > CellPolynomials.DEGREE) {
-            double c = sb * chebyshev[i][a * CellPolynomials.SIDE + b];
-            sum += c * c;
-          }
-          sb /= up;
-        }
-        sa /= across;
-      }
-      worst = Math.max(worst, sum);
-    }
-    return Math.sqrt(worst);
-  }
-
-  /** What the short form leaves out at worst, or more than the limit as soon as that is passed. */
-  private static double leftOut(double[][] chebyshev, int across, int up, double limit) {
-    double worst = 0;
-    for (int px = 0; px < across; px++) {
-      double[][] rx = CellPolynomials.restriction(px, across);
-      for (int py = 0; py < up; py++) {
-        double[][] ry = CellPolynomials.restriction(py, up);
-        for (int i = 0; i < chebyshev.length; i++) {
-          if (i % Reflection.ALL < Reflection.RATIOS) {
-            worst =
-                Math.max(
-                    worst, CellPolynomials.leftOut(CellPolynomials.onPart(chebyshev[i], rx, ry)));
-            if (worst > limit) {
-              return worst;
-            }
-          }
-        }
-      }
-    }
-    return worst;
-  }
-
-  private static double[] shortCells(
-      double[][] chebyshev, int longAcross, int longUp, int partsAcross, int partsUp) {
-    int across = longAcross * partsAcross;
-    int up = longUp * partsUp;
-    int size = CellPolynomials.SHORT * Reflection.RATIOS;
-    double[] cells = new double[across * up * size];
-    for (int ix = 0; ix < across; ix++) {
-      double[][] rx = CellPolynomials.restriction(ix % partsAcross, partsAcross);
-      for (int iy = 0; iy < up; iy++) {
-        double[][] ry = CellPolynomials.restriction(iy % partsUp, partsUp);
-        int from = (iy / partsUp * longAcross + ix / partsAcross) * Reflection.ALL;
-        for (int m = 0; m < Reflection.RATIOS; m++) {
-          CellPolynomials.shortPowers(
-              CellPolynomials.onPart(chebyshev[from + m], rx, ry),
-              cells,
-              (iy * across + ix) * size + m * CellPolynomials.SHORT);
-        }
-      }
-    }
-    return cells;
+  private static double larger(double a, double b, double c) {
+    return Math.max(a, Math.max(Math.abs(b), Math.abs(c)));
   }
 
   /**

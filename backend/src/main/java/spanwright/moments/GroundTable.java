@@ -1,5 +1,7 @@
 package spanwright.moments;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.concurrent.atomic.AtomicLong;
 
 /**
@@ -24,11 +26,14 @@ final class GroundTable implements Reflection {
   /** Greatest horizontal distance [m]. */
   private static final double FARTHEST = 10_000;
 
-  /** Allowed last coefficients of the long form, against an image of size one. */
-  private static final double LONG_TOLERANCE = 3e-5;
+  /** Allowed error of the long form, against an image of size one. */
+  private static final double LONG_TOLERANCE = 4e-5;
 
   /** Allowed size of what the short form leaves out. */
   private static final double SHORT_TOLERANCE = 5e-5;
+
+  /** Beyond this distance more is allowed in proportion: little is left of the image [m]. */
+  private static final double NEIGHBOURHOOD = 128;
 
   private final HalfSpaceKernels kernels;
   private final double k0;
@@ -36,8 +41,20 @@ final class GroundTable implements Reflection {
   private final GroundBlock[] blocks = new GroundBlock[1024];
   private final Object[] locks = new Object[LOCKS];
   private final AtomicLong bytes = new AtomicLong();
+  private final Runnable grown;
 
+  /** A table that nobody keeps account of. */
   GroundTable(Ground ground, double frequencyMHz) {
+    this(ground, frequencyMHz, () -> {});
+  }
+
+  /**
+   * A table.
+   *
+   * @param grown called after each block that was added, with no lock held
+   */
+  GroundTable(Ground ground, double frequencyMHz, Runnable grown) {
+    this.grown = grown;
     kernels = HalfSpaceKernels.of(ground, frequencyMHz);
     k0 = Constants.waveNumber(frequencyMHz);
     for (int i = 0; i < LOCKS; i++) {
@@ -57,15 +74,25 @@ final class GroundTable implements Reflection {
 
   /** Fills every block that touches this part of the plane. */
   void fill(double rhoMax, double zetaMin, double zetaMax) {
+    missing(rhoMax, zetaMin, zetaMax).forEach(Runnable::run);
+  }
+
+  /** The work still to be done on this part of the plane, one piece a block, in any order. */
+  List<Runnable> missing(double rhoMax, double zetaMin, double zetaMax) {
     check(rhoMax, zetaMin);
     check(rhoMax, zetaMax);
+    List<Runnable> work = new ArrayList<>();
     int top = Math.getExponent(zetaMax);
     for (int e = Math.getExponent(zetaMin); e <= top; e++) {
       double edge = Math.scalb(1.0, e);
       for (double from = edge; from <= rhoMax + edge; from *= 2) {
-        block(from - edge, edge);
+        double rho = from - edge;
+        if (blocks[index(rho, edge)] == null) {
+          work.add(() -> block(rho, edge));
+        }
       }
     }
+    return work;
   }
 
   private static void check(double rho, double zeta) {
@@ -89,22 +116,39 @@ final class GroundTable implements Reflection {
   /** The block of a place, worked out if it is not there. */
   private GroundBlock block(double rho, double zeta) {
     check(rho, zeta);
-    int e = Math.getExponent(zeta);
-    double edge = Math.scalb(1.0, e);
-    int j = Math.getExponent(rho + edge) - e;
-    int index = (e - LOW) * ACROSS + j;
-    synchronized (locks[index % LOCKS]) {
-      GroundBlock found = blocks[index];
-      if (found == null) {
-        double wide = Math.scalb(edge, j);
-        found =
-            GroundBlock.make(
-                kernels, k0, wide - edge, wide, edge, edge, LONG_TOLERANCE, SHORT_TOLERANCE);
-        bytes.addAndGet(found.bytes());
-        blocks[index] = found;
-      }
+    int index = index(rho, zeta);
+    GroundBlock found = blocks[index];
+    if (found != null) {
       return found;
     }
+    synchronized (locks[index % LOCKS]) {
+      found = blocks[index];
+      if (found != null) {
+        return found;
+      }
+      double edge = Math.scalb(1.0, Math.getExponent(zeta));
+      double wide = Math.scalb(1.0, Math.getExponent(rho + edge));
+      double more = Math.max(1, (wide - edge) / NEIGHBOURHOOD);
+      found =
+          GroundBlock.make(
+              kernels,
+              k0,
+              wide - edge,
+              wide,
+              edge,
+              edge,
+              LONG_TOLERANCE * more,
+              SHORT_TOLERANCE * more);
+      bytes.addAndGet(found.bytes());
+      blocks[index] = found;
+    }
+    grown.run();
+    return found;
+  }
+
+  private static int index(double rho, double zeta) {
+    int e = Math.getExponent(zeta);
+    return (e - LOW) * ACROSS + Math.getExponent(rho + Math.scalb(1.0, e)) - e;
   }
 
   @Override

@@ -1,8 +1,11 @@
 package spanwright.moments;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.concurrent.atomic.AtomicInteger;
+import java.util.concurrent.atomic.AtomicReference;
 
 /**
  * The half-space kernels of every (frequency, soil) in use, shared by candidates and threads:
@@ -16,13 +19,16 @@ public final class GroundTables {
   private final Map<Key, GroundTable> tables = new LinkedHashMap<>(16, 0.75f, true);
 
   /**
-   * Tables that together stay under 128 MiB; one plot's table of one frequency is 0.05 to 0.4 MB.
+   * Tables that together stay under 128 MiB; one plot's table of one frequency is 0.1 to 0.6 MB.
    */
   public GroundTables() {
     this(128L << 20);
   }
 
-  /** Tables that together stay under so many bytes; the one unused longest goes first. */
+  /**
+   * Tables that together stay under so many bytes; the one unused longest goes first. Only the
+   * table that is being filled may go beyond it on its own.
+   */
   public GroundTables(long bytes) {
     this.limit = bytes;
   }
@@ -38,7 +44,7 @@ public final class GroundTables {
 
   /**
    * Fills the tables of these frequencies and this ground for a plot, in parallel, so that the
-   * first solutions need not wait.
+   * first solutions need not wait. What is there already costs next to nothing.
    *
    * @param frequenciesMHz the frequencies, those wanted first in front
    * @param ground real ground; any other needs no table
@@ -62,22 +68,37 @@ public final class GroundTables {
               + reach
               + " m apart: heights must be above 0 and in order.");
     }
+    List<Runnable> work = new ArrayList<>();
+    for (double frequencyMHz : frequenciesMHz) {
+      work.addAll(table(ground, frequencyMHz).missing(reach, 2 * low, 2 * high));
+    }
+    if (!work.isEmpty()) {
+      share(work, threads);
+    }
+  }
+
+  /** Does all the work on so many threads, this one among them. */
+  private static void share(List<Runnable> work, int threads) {
     AtomicInteger next = new AtomicInteger();
-    Runnable work =
+    AtomicReference<RuntimeException> fault = new AtomicReference<>();
+    Runnable some =
         () -> {
-          for (int i = next.getAndIncrement();
-              i < frequenciesMHz.length;
-              i = next.getAndIncrement()) {
-            table(ground, frequenciesMHz[i]).fill(reach, 2 * low, 2 * high);
+          try {
+            for (int i = next.getAndIncrement(); i < work.size(); i = next.getAndIncrement()) {
+              work.get(i).run();
+            }
+          } catch (RuntimeException e) {
+            fault.compareAndSet(null, e);
+            next.set(work.size());
           }
         };
-    Thread[] helpers = new Thread[Math.max(0, Math.min(threads, frequenciesMHz.length) - 1)];
+    Thread[] helpers = new Thread[Math.max(0, Math.min(threads, work.size()) - 1)];
     for (int i = 0; i < helpers.length; i++) {
-      helpers[i] = new Thread(work, "ground-table-" + i);
+      helpers[i] = new Thread(some, "ground-table-" + i);
       helpers[i].setDaemon(true);
       helpers[i].start();
     }
-    work.run();
+    some.run();
     for (Thread helper : helpers) {
       try {
         helper.join();
@@ -85,6 +106,9 @@ public final class GroundTables {
         Thread.currentThread().interrupt();
         return;
       }
+    }
+    if (fault.get() != null) {
+      throw fault.get();
     }
   }
 
@@ -101,18 +125,22 @@ public final class GroundTables {
     Key key = new Key(frequencyMHz, ground.permittivity(), ground.conductivity());
     GroundTable found = tables.get(key);
     if (found == null) {
-      found = new GroundTable(ground, frequencyMHz);
-      long held = 0;
-      for (GroundTable table : tables.values()) {
-        held += table.bytes();
-      }
-      var oldest = tables.entrySet().iterator();
-      while (held > limit && oldest.hasNext()) {
-        held -= oldest.next().getValue().bytes();
-        oldest.remove();
-      }
+      found = new GroundTable(ground, frequencyMHz, () -> grown(key));
       tables.put(key, found);
     }
     return found;
+  }
+
+  /** Lets go of what was unused longest, but not of what has just grown. */
+  private synchronized void grown(Key key) {
+    long held = bytes();
+    var oldest = tables.entrySet().iterator();
+    while (held > limit && oldest.hasNext()) {
+      var entry = oldest.next();
+      if (!entry.getKey().equals(key)) {
+        held -= entry.getValue().bytes();
+        oldest.remove();
+      }
+    }
   }
 }
