@@ -10,10 +10,18 @@ import spanwright.published.PublishedChecks;
 
 /** All of solve-cases.json, on the 'full' mesh. */
 public class IndependentSolverCasesTest extends PublishedChecks {
-  private static final String SOURCE =
-      "an independent Galerkin mixed-potential solver, extrapolated to zero segment length"
-          + " (solve-cases.json; no publication)";
   private static final double WEAKEST_DB = 20;
+
+  /** The file of cases, beside this class. */
+  String resource() {
+    return "solve-cases.json";
+  }
+
+  /** Where its values come from. */
+  String source() {
+    return "an independent Galerkin mixed-potential solver, extrapolated to zero segment length"
+        + " (solve-cases.json; no publication)";
+  }
 
   @Override
   public String heading() {
@@ -31,7 +39,7 @@ public class IndependentSolverCasesTest extends PublishedChecks {
   public List<Check> checks() {
     Solver solver = new Solver();
     List<Check> checks = new ArrayList<>();
-    for (SolveCase one : SolveCase.all()) {
+    for (SolveCase one : SolveCase.all(resource())) {
       Solution found = solver.solve(one.model(), one.ground(), one.frequencyMHz(), MeshAim.FULL);
       impedance(one, found, checks);
       gains(one, found, checks);
@@ -43,7 +51,7 @@ public class IndependentSolverCasesTest extends PublishedChecks {
               0.1,
               2,
               "dBi",
-              SOURCE));
+              source()));
       checks.add(
           Check.within(
               one.id() + ": efficiency",
@@ -52,7 +60,7 @@ public class IndependentSolverCasesTest extends PublishedChecks {
               0.01,
               3,
               "",
-              SOURCE));
+              source()));
       if (one.asked().has("fieldPoints")) {
         fields(one, found, checks);
       }
@@ -60,7 +68,7 @@ public class IndependentSolverCasesTest extends PublishedChecks {
     return checks;
   }
 
-  private static void impedance(SolveCase one, Solution found, List<Check> checks) {
+  private void impedance(SolveCase one, Solution found, List<Check> checks) {
     Complex z = one.impedance();
     Complex expected = SolveCase.reflection(z);
     double stated = SolveCase.reflection(z.add(one.uncertainty())).subtract(expected).abs();
@@ -72,14 +80,14 @@ public class IndependentSolverCasesTest extends PublishedChecks {
             String.format(Locale.ROOT, "%s, coefficient off by %.3f", ohms(found.impedance()), off),
             String.format(Locale.ROOT, "coefficient (400 ohm) within %.4f", 0.02 + stated),
             off <= 0.02 + stated,
-            SOURCE));
+            source()));
   }
 
   private static String ohms(Complex z) {
     return String.format(Locale.ROOT, "%.1f %+.1fj ohm", z.getReal(), z.getImaginary());
   }
 
-  private static void gains(SolveCase one, Solution found, List<Check> checks) {
+  private void gains(SolveCase one, Solution found, List<Check> checks) {
     double floor = one.expected().get("peak").get("dbi").asDouble() - WEAKEST_DB;
     double worst = 0;
     int compared = 0;
@@ -110,10 +118,10 @@ public class IndependentSolverCasesTest extends PublishedChecks {
             String.format(Locale.ROOT, "at most %.2f dB off", worst),
             "±0.15 dB",
             worst <= 0.15 && compared > 0,
-            SOURCE));
+            source()));
   }
 
-  private static void fields(SolveCase one, Solution found, List<Check> checks) {
+  private void fields(SolveCase one, Solution found, List<Check> checks) {
     List<NearField> fields =
         found.fields(
             SolveCase.points(one.asked().get("fieldPoints")), one.asked().get("power").asDouble());
@@ -131,6 +139,6 @@ public class IndependentSolverCasesTest extends PublishedChecks {
             String.format(Locale.ROOT, "at most %.1f %% off", 100 * worst),
             "±3 %",
             worst <= 0.03 && !fields.isEmpty(),
-            SOURCE));
+            source()));
   }
 }

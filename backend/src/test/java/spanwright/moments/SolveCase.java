@@ -9,7 +9,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.apache.commons.math3.complex.Complex;
 
-/** One case of solve-cases.json with what is expected of it. */
+/** One case of a file of cases with what is expected of it. */
 record SolveCase(
     String id,
     AntennaModel model,
@@ -18,9 +18,14 @@ record SolveCase(
     JsonNode asked,
     JsonNode expected) {
 
-  /** All cases of the file, in its order. */
+  /** All cases of solve-cases.json, in its order. */
   static List<SolveCase> all() {
-    try (InputStream in = SolveCase.class.getResourceAsStream("solve-cases.json")) {
+    return all("solve-cases.json");
+  }
+
+  /** All cases of a file beside this class, in its order. */
+  static List<SolveCase> all(String resource) {
+    try (InputStream in = SolveCase.class.getResourceAsStream(resource)) {
       List<SolveCase> cases = new ArrayList<>();
       for (JsonNode node : new ObjectMapper().readTree(in).get("cases")) {
         JsonNode asked = node.get("case");
