@@ -18,7 +18,34 @@ import { formatLength } from '../units/length.js';
 export function listOf(state) {
   const { result, found } = state.search;
   if (result) return result.placements;
-  return [...found].sort((a, b) => b.score - a.score);
+  return [...found].sort(bestFirst);
+}
+
+/**
+ * @param {any} placement
+ * @returns {string[]} why its radio figures are not to be relied on; empty when nothing says so
+ */
+export function doubtsOf(placement) {
+  return placement.quality?.doubts ?? [];
+}
+
+/**
+ * What is doubtful comes after everything that is not.
+ * @param {any} a
+ * @param {any} b
+ * @returns {number}
+ */
+export function doubtfulLast(a, b) {
+  return Number(doubtsOf(a).length > 0) - Number(doubtsOf(b).length > 0);
+}
+
+/**
+ * @param {any} a
+ * @param {any} b
+ * @returns {number}
+ */
+export function bestFirst(a, b) {
+  return doubtfulLast(a, b) || b.score - a.score;
 }
 
 /**

@@ -11,6 +11,7 @@ import {
   concerns,
   distanceFigure,
   distanceWords,
+  doubtsOf,
   hangsOn,
   isStale,
   listOf,
@@ -143,6 +144,9 @@ export function mount(root, store, shell) {
         isStale(state) ? html('span', { class: 'tight' }, stateMark('tight'), ' plan changed since') : null,
       ),
       html('h2', {}, scoreWords(placement.score)),
+      ...doubtsOf(placement).map((words) =>
+        html('p', { class: 'consent' }, stateMark('tight', 'Doubtful'), ` The radio figures are not to be relied on. ${words}`),
+      ),
       html(
         'ul',
         { class: 'concerns' },

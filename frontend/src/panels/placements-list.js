@@ -6,7 +6,10 @@ import { thumbnail } from '../charts/thumbnail.js';
 import { signed } from '../units/figures.js';
 import {
   bandSummaries,
+  bestFirst,
   distanceWords,
+  doubtfulLast,
+  doubtsOf,
   hangsOn,
   listOf,
   nearestConcern,
@@ -86,6 +89,9 @@ function row(state, placement, rank, choose) {
               ` ${short(concern.words)}`,
             )
           : null,
+        doubtsOf(placement).length
+          ? html('span', { class: 'row-state' }, stateMark('tight'), ' ', html('b', { class: 'tight' }, 'figures doubtful'))
+          : null,
         html('span', { class: 'soft' }, toBuild(placement)),
       ),
       html(
@@ -123,11 +129,11 @@ function ordered(state, view) {
       const bands = bandSummaries(plan, placement);
       return (bands.find((band) => band.name === state.chosenBand) ?? bands[0])?.over ?? 0;
     };
-    return [...list].sort((a, b) => over(b) - over(a));
+    return [...list].sort((a, b) => doubtfulLast(a, b) || over(b) - over(a));
   }
   if (view === 'least to build') {
     const work = (/** @type {any} */ placement) => placement.masts.length * 10 + placement.ropes.length;
-    return [...list].sort((a, b) => work(a) - work(b) || b.score - a.score);
+    return [...list].sort((a, b) => doubtfulLast(a, b) || work(a) - work(b) || bestFirst(a, b));
   }
   return list;
 }

@@ -1,6 +1,6 @@
 // @ts-check
 import { forgetSearch, recallSearch, rememberSearch } from '../api/keep.js';
-import { scoreWords } from './placement-facts.js';
+import { bestFirst, scoreWords } from './placement-facts.js';
 
 /**
  * Starting, following and stopping a search. Everything known of it is in `state.search`.
@@ -203,7 +203,7 @@ export async function cancelSearch(store, shell) {
   const { id } = store.get().search;
   following.get(store)?.();
   patchSearch(store, { state: 'cancelled' });
-  const best = [...store.get().search.found].sort((a, b) => b.score - a.score)[0];
+  const best = [...store.get().search.found].sort(bestFirst)[0];
   if (best && !store.get().chosen) store.set({ chosen: best.id });
   shell.say('Search cancelled.');
   if (!id) return;

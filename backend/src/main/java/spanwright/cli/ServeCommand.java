@@ -9,7 +9,7 @@ import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
-import spanwright.moments.Solver;
+import spanwright.assess.WarmUp;
 import spanwright.store.DataFolder;
 import spanwright.store.PlanStore;
 import spanwright.web.WebServer;
@@ -73,7 +73,7 @@ final class ServeCommand implements Callable<Integer> {
 
   /** The first search then starts at full speed; the page is not kept waiting for it. */
   private static void warmUp() {
-    Thread thread = new Thread(Solver::warmUp, "warm-up");
+    Thread thread = new Thread(WarmUp::run, "warm-up");
     thread.setDaemon(true);
     thread.setPriority(Thread.MIN_PRIORITY);
     thread.start();

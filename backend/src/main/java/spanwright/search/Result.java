@@ -1,8 +1,12 @@
 package spanwright.search;
 
+import java.util.ArrayList;
 import java.util.List;
 import spanwright.assess.Placement;
+import spanwright.assess.ReferenceGains;
 import spanwright.clearance.Refusal;
+import spanwright.plan.Band;
+import spanwright.plan.Plan;
 
 /**
  * A result document, as {@code rank} prints it.
@@ -57,7 +61,21 @@ public record Result(
    * @param what in words
    * @param bands its gains
    */
-  public record Reference(String what, List<ReferenceBand> bands) {}
+  public record Reference(String what, List<ReferenceBand> bands) {
+    /** On the bands and the soil of a plan. */
+    static Reference of(Plan plan) {
+      List<ReferenceBand> bands = new ArrayList<>();
+      for (Band band : plan.brief().bands()) {
+        List<ReferenceGain> gains = new ArrayList<>();
+        for (int elevation = 1; elevation <= 89; elevation += 2) {
+          double dbi = ReferenceGains.dbi(band, plan.site().ground(), elevation);
+          gains.add(new ReferenceGain(elevation, dbi));
+        }
+        bands.add(new ReferenceBand(band.name(), gains));
+      }
+      return new Reference(ReferenceGains.WHAT, bands);
+    }
+  }
 
   /**
    * The reference on one band.

@@ -9,9 +9,9 @@ import java.util.stream.IntStream;
 import spanwright.assess.Assessor;
 import spanwright.assess.Hung;
 import spanwright.assess.Placement;
-import spanwright.assess.ReferenceGains;
 import spanwright.assess.Unsolvable;
 import spanwright.clearance.Refusal;
+import spanwright.moments.GroundTables;
 import spanwright.plan.Band;
 import spanwright.plan.Catalogue;
 import spanwright.plan.Place;
@@ -86,12 +86,13 @@ public final class Search {
     }
   }
 
-  private Search(Plan plan, Catalogue catalogue, Options options, Listener listener) {
+  private Search(
+      Plan plan, Catalogue catalogue, GroundTables tables, Options options, Listener listener) {
     this.plan = plan;
     this.catalogue = catalogue;
     this.options = options;
     this.listener = listener;
-    this.assessor = Assessor.of(plan, catalogue);
+    this.assessor = Assessor.of(plan, catalogue, tables);
   }
 
   /**
@@ -100,8 +101,18 @@ public final class Search {
    * @throws CancelledException when the listener said to stop
    */
   public static Result run(Plan plan, Catalogue catalogue, Options options, Listener listener) {
+    return run(plan, catalogue, new GroundTables(), options, listener);
+  }
+
+  /**
+   * Searches and ranks on ground tables shared with others.
+   *
+   * @throws CancelledException when the listener said to stop
+   */
+  public static Result run(
+      Plan plan, Catalogue catalogue, GroundTables tables, Options options, Listener listener) {
     long start = System.nanoTime();
-    Search search = new Search(plan, catalogue, options, listener);
+    Search search = new Search(plan, catalogue, tables, options, listener);
     try (Workers workers = new Workers(options.threads(), listener::cancelled)) {
       List<Placement> ranked = search.rank(workers);
       search.say(0.98, "working out what would cure the refusals");
@@ -373,20 +384,7 @@ public final class Search {
         seconds,
         options.threads(),
         ranked,
-        reference(),
+        Result.Reference.of(plan),
         why);
-  }
-
-  private Result.Reference reference() {
-    List<Result.ReferenceBand> bands = new ArrayList<>();
-    for (Band band : plan.brief().bands()) {
-      List<Result.ReferenceGain> gains = new ArrayList<>();
-      for (int elevation = 1; elevation <= 89; elevation += 2) {
-        double dbi = ReferenceGains.dbi(band, plan.site().ground(), elevation);
-        gains.add(new Result.ReferenceGain(elevation, dbi));
-      }
-      bands.add(new Result.ReferenceBand(band.name(), gains));
-    }
-    return new Result.Reference(ReferenceGains.WHAT, bands);
   }
 }

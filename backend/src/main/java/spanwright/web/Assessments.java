@@ -34,8 +34,10 @@ final class Assessments implements AutoCloseable {
             return thread;
           });
 
+  private record Prepared(Plan plan, Assessor assessor) {}
+
   /** By the plan's text, last used last. */
-  private final Map<String, Assessor> prepared = new LinkedHashMap<>(8, 0.75f, true);
+  private final Map<String, Prepared> prepared = new LinkedHashMap<>(8, 0.75f, true);
 
   Assessments(Engine engine) {
     this.engine = engine;
@@ -90,17 +92,25 @@ final class Assessments implements AutoCloseable {
         });
   }
 
+  /** The plan of this text when it was assessed on lately: it need not be read again; or null. */
+  Plan known(String text) {
+    synchronized (prepared) {
+      Prepared known = prepared.get(text);
+      return known == null ? null : known.plan;
+    }
+  }
+
   private Assessor prepared(String text, Plan plan) {
     synchronized (prepared) {
-      Assessor known = prepared.get(text);
+      Prepared known = prepared.get(text);
       if (known == null) {
-        known = engine.prepare(plan);
+        known = new Prepared(plan, engine.prepare(plan));
         prepared.put(text, known);
         if (prepared.size() > PREPARED) {
           prepared.remove(prepared.keySet().iterator().next());
         }
       }
-      return known;
+      return known.assessor;
     }
   }
 

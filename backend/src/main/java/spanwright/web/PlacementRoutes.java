@@ -52,7 +52,7 @@ final class PlacementRoutes {
   /** A plan and a placement on it, as both routes with a body take them. */
   private record Asked(String text, Plan plan, JsonNode placement, PlacementReader reader) {}
 
-  private static Asked asked(Context ctx) {
+  private Asked asked(Context ctx) {
     List<Fault> faults = new ArrayList<>();
     JsonNode tree = Requests.tree(ctx);
     Form form = Form.of(tree, faults);
@@ -61,6 +61,11 @@ final class PlacementRoutes {
     form.finish();
     require("The request", faults);
     String text = tree.get("plan").toString();
+    Plan known = assessments.known(text);
+    if (known != null) {
+      return new Asked(
+          text, known, tree.get("placement"), new PlacementReader(known, Catalogues.standard()));
+    }
     PlanReader.Outcome outcome = PlanReader.read(text, LocalDate.now());
     for (Fault fault : outcome.faults()) {
       String path = fault.path().isEmpty() ? "plan" : "plan." + fault.path();
