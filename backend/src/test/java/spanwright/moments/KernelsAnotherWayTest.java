@@ -8,9 +8,9 @@ import org.junit.jupiter.api.Test;
 
 /**
  * The kernels at random places against a quadrature that shares no line with theirs: another path
- * (an arch, then a straight way slanting up or down where the exponential still decays), another
- * rule (tanh-sinh on the arch, trapezes of a doubled number until nothing moves), Bessel functions
- * by Bessel's integral, and the reflection coefficients in their textbook form.
+ * (half an ellipse over the branch points, then the real axis), another rule (double exponential,
+ * doubled until nothing moves), Bessel functions by Bessel's integral, and the reflection
+ * coefficients in their textbook form.
  */
 class KernelsAnotherWayTest {
   private static final double TOLERANCE = 1e-6;
