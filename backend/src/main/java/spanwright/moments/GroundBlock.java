@@ -145,27 +145,11 @@ final class GroundBlock {
       zetas[i] = zeta0 + 0.5 * high * (1 + node);
     }
     double[] values = kernels.grid(rhos, zetas, HalfSpaceKernels.Care.TABLE);
-    double[] back = new double[2 * more * more];
-    for (int i = 0; i < more; i++) {
-      for (int j = 0; j < more; j++) {
-        double r = Math.sqrt(rhos[i] * rhos[i] + zetas[j] * zetas[j]);
-        back[2 * (i * more + j)] = r * Math.cos(k0 * r);
-        back[2 * (i * more + j) + 1] = r * Math.sin(k0 * r);
-      }
-    }
+    double[] back = turnedBack(k0, rhos, zetas);
     double offRho = 0;
     double offZeta = 0;
-    double[] ratio = new double[more * more];
     for (int m = 0; m < Reflection.ALL; m++) {
-      for (int n = 0; n < more * more; n++) {
-        // grid order GA, GP, GZ, F, GT is the order here
-        int at = (n * HalfSpaceKernels.KERNELS + m / 2) * 2;
-        double re = values[at];
-        double im = values[at + 1];
-        double cos = back[2 * n];
-        double sin = back[2 * n + 1];
-        ratio[n] = m % 2 == 0 ? re * cos - im * sin : re * sin + im * cos;
-      }
+      double[] ratio = ratio(values, back, m);
       double[] fitted = new double[CellPolynomials.TERMS];
       for (int i = 0; i < side; i++) {
         System.arraycopy(ratio, (i + 1) * more + 1, fitted, i * side, side);
@@ -182,6 +166,35 @@ final class GroundBlock {
       }
     }
     return (offRho > allowed ? 1 : 0) | (offZeta > allowed ? 2 : 0);
+  }
+
+  /** R e^{jk0R} of each place, re and im in turn: kernels times this are ratios. */
+  private static double[] turnedBack(double k0, double[] rhos, double[] zetas) {
+    double[] back = new double[2 * rhos.length * zetas.length];
+    int at = 0;
+    for (double rho : rhos) {
+      for (double zeta : zetas) {
+        double r = Math.sqrt(rho * rho + zeta * zeta);
+        back[at++] = r * Math.cos(k0 * r);
+        back[at++] = r * Math.sin(k0 * r);
+      }
+    }
+    return back;
+  }
+
+  /** Component m of the ratios, in their order, from what the kernels' grid gives. */
+  private static double[] ratio(double[] values, double[] back, int m) {
+    double[] ratio = new double[back.length / 2];
+    for (int n = 0; n < ratio.length; n++) {
+      // grid order GA, GP, GZ, F, GT is the order here
+      int at = (n * HalfSpaceKernels.KERNELS + m / 2) * 2;
+      double re = values[at];
+      double im = values[at + 1];
+      double cos = back[2 * n];
+      double sin = back[2 * n + 1];
+      ratio[n] = m % 2 == 0 ? re * cos - im * sin : re * sin + im * cos;
+    }
+    return ratio;
   }
 
   /**
