@@ -18,13 +18,13 @@ final class JoinedModel {
   final double leastOut;
   final double mostOut;
 
-  private final Hang hang;
-  private final Course course;
-  private final int holds;
-  private final int[] node;
-  private final Chain[] chains;
-  private final Net net;
-  private final SpanStatics[] shells;
+  final Hang hang;
+  final Course course;
+  final int holds;
+  final int[] node;
+  final Chain[] chains;
+  final Net net;
+  final SpanStatics[] shells;
   private final double[] drawnRope;
   private final double[] rope;
   private final double[] stretch;
@@ -195,6 +195,16 @@ final class JoinedModel {
     }
   }
 
+  /** Greatest share of its length by which a wire's stretch differs from that taken. */
+  double stretchedOtherwise() {
+    double most = 0;
+    for (int c = 0; c < shells.length; c++) {
+      double tension = (chains[c].tensionAtStart() + chains[c].tensionAtEnd()) / 2;
+      most = Math.max(most, Math.abs(tension - stretch[c]) * chains[c].flexibility[1]);
+    }
+    return most;
+  }
+
   private void lengths() {
     for (int i = 0; i < shells.length; i++) {
       Course.Stretch each = course.spans().get(i);
@@ -346,138 +356,5 @@ final class JoinedModel {
   /** The chain with an attachment's rope in it. */
   private int chainOf(int a) {
     return node[a] >= holds ? shells.length + node[a] - holds : course.at(a)[0];
-  }
-
-  // --- reading out
-
-  State state(Weather weather) {
-    int spans = shells.length;
-    List<List<Place>> ropes = new ArrayList<>();
-    Force[] on = new Force[holds];
-    double[] ropeTension = new double[holds];
-    Place[] corner = new Place[holds];
-    for (int a = 0; a < holds; a++) {
-      on[a] = Force.NONE;
-      ropes.add(List.of());
-      if (node[a] >= holds) {
-        int c = spans + node[a] - holds;
-        ropes.set(a, sample(c, a, new int[] {4}));
-        on[a] = forceAtStart(c);
-        ropeTension[a] = chains[c].tensionAtStart();
-        corner[a] = ropes.get(a).get(4);
-      }
-    }
-    Solved[] solved = new Solved[spans];
-    double[] greatest = new double[spans];
-    for (int i = 0; i < spans; i++) {
-      Course.Stretch each = course.spans().get(i);
-      solved[i] = solved(i, ropes.get(each.fromHold()), ropes.get(each.toHold()));
-      greatest[i] = solved[i].greatest();
-      for (int a : new int[] {each.fromHold(), each.toHold()}) {
-        if (node[a] < holds) {
-          boolean start = each.fromHold() == a;
-          on[a] = on[a].plus(start ? solved[i].onFrom() : solved[i].onTo());
-          ropeTension[a] = start ? chains[i].tensionAtStart() : chains[i].tensionAtEnd();
-        } else {
-          greatest[i] = Math.max(greatest[i], chains[spans + node[a] - holds].greatestTension());
-        }
-      }
-    }
-    return new State(solved, greatest, on, ropeTension, corner, weather);
-  }
-
-  private Force forceAtStart(int c) {
-    return new Force(chains[c].start[0], chains[c].start[1], chains[c].start[2]);
-  }
-
-  private List<Place> sample(int c, int from, int[] parts) {
-    int sum = 1;
-    for (int each : parts) {
-      sum += each;
-    }
-    double[] xyz = new double[3 * sum];
-    int count = chains[c].sample(parts, xyz);
-    List<Place> points = new ArrayList<>(count);
-    for (int i = 0; i < count; i++) {
-      points.add(
-          new Place(
-              net.at[3 * from] + xyz[3 * i],
-              net.at[3 * from + 1] + xyz[3 * i + 1],
-              net.at[3 * from + 2] + xyz[3 * i + 2]));
-    }
-    return points;
-  }
-
-  private Solved solved(int i, List<Place> ropeFrom, List<Place> ropeTo) {
-    Course.Stretch each = course.spans().get(i);
-    Chain chain = chains[i];
-    SpanStatics.Make make = shells[i].make;
-    int[] parts =
-        SpanStatics.cut(
-            hang.wireParts(i), make.wire(), make.wireAfter(), chain.length[0], chain.length[3]);
-    List<Place> own = sample(i, node[each.fromHold()], parts);
-    int end = 3 * node[each.toHold()];
-    own.set(own.size() - 1, new Place(net.at[end], net.at[end + 1], net.at[end + 2]));
-    List<Place> points = new ArrayList<>();
-    points.addAll(ropeFrom.isEmpty() ? List.of() : ropeFrom.subList(0, ropeFrom.size() - 1));
-    int before = points.size();
-    points.addAll(own);
-    int after = points.size();
-    for (int k = ropeTo.size() - 2; k >= 0; k--) {
-      points.add(ropeTo.get(k));
-    }
-    double[] last = chain.end();
-    return new Solved(
-        points,
-        before + parts[0],
-        after - 1 - parts[3],
-        before + parts[0] + parts[1],
-        forceAtStart(i),
-        new Force(-last[0], -last[1], -last[2]),
-        chain.greatestTension());
-  }
-
-  /**
-   * Everything in one weather.
-   *
-   * @param spans as they hang
-   * @param greatest tension in each span, its bends' ropes included [N]
-   * @param onAttachment force of wire and rope on each attachment
-   * @param ropeTension at each attachment [N]
-   * @param corner bends held by ropes; null where there is none
-   * @param weather that it hangs in
-   */
-  record State(
-      Solved[] spans,
-      double[] greatest,
-      Force[] onAttachment,
-      double[] ropeTension,
-      Place[] corner,
-      Weather weather) {
-    Solved solved(int i) {
-      return spans[i];
-    }
-
-    private Place first(int i) {
-      return spans[i].points().get(spans[i].wireFrom());
-    }
-
-    private Place last(int i) {
-      return spans[i].points().get(spans[i].wireTo());
-    }
-
-    double chord(int i) {
-      return first(i).distance(last(i));
-    }
-
-    /** Level, square to a span's wire, to its left. */
-    double[] side(int i) {
-      double dx = last(i).x() - first(i).x();
-      double dy = last(i).y() - first(i).y();
-      double level = Math.hypot(dx, dy);
-      return level < 0.02 * chord(i) || level < 1e-6
-          ? new double[] {0, 1}
-          : new double[] {-dy / level, dx / level};
-    }
   }
 }

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.function.DoubleUnaryOperator;
 import org.apache.commons.math3.analysis.solvers.AllowedSolution;
 import org.apache.commons.math3.analysis.solvers.BracketingNthOrderBrentSolver;
-import spanwright.plan.Place;
 
 /**
  * Spans whose wire is held at bends by ropes, closed loops among them: all of it hangs together.
@@ -25,10 +24,11 @@ final class JoinedSpans implements Statics {
   private final Hang hang;
   private final Course course;
   private final JoinedModel model;
+  private final JoinedReader reader;
   private final List<double[]> winds = new ArrayList<>();
-  private final List<List<JoinedModel.State>> states = new ArrayList<>();
+  private final List<List<JoinedState>> states = new ArrayList<>();
   private final int weightAt;
-  private JoinedModel.State calm;
+  private JoinedState calm;
   private double letOut;
   private double pull;
   private double weight;
@@ -41,6 +41,7 @@ final class JoinedSpans implements Statics {
     this.hang = hang;
     course = hang.course;
     model = new JoinedModel(hang);
+    reader = new JoinedReader(model);
     weightAt = weightAt();
   }
 
@@ -78,21 +79,32 @@ final class JoinedSpans implements Statics {
     }
     wanted = tightest > 0 ? Math.min(wanted, tightest) : wanted;
     pull = Math.max(floor, wanted);
+    double best = 0;
+    double bestPull = pull;
     for (int attempt = 0; attempt <= TRIES; attempt++) {
       solve();
-      double factor = attempt < TRIES && hang.windy ? factor() : 1;
+      double factor = hang.windy ? factor() : 1;
+      if (factor > best) {
+        best = factor;
+        bestPull = pull;
+      }
       if (factor >= 1 || slack || pull <= floor * (1 + 1e-9)) {
-        return;
+        break;
       }
       pull = Math.max(floor, pull * Math.max(0.5, factor * factor));
+    }
+    // A lighter weight may be drawn up where a heavier one held: the best of what was tried stands.
+    if (best < 1 && bestPull != pull) {
+      pull = bestPull;
+      solve();
     }
   }
 
   /** By how much the pull is too great for what must hold; 1 or more when everything holds. */
   private double factor() {
     double factor = 1;
-    for (List<JoinedModel.State> each : states) {
-      for (JoinedModel.State state : each) {
+    for (List<JoinedState> each : states) {
+      for (JoinedState state : each) {
         for (int i = 0; i < course.spans().size(); i++) {
           factor = Math.min(factor, hang.allowed(i) / state.greatest()[i]);
         }
@@ -116,12 +128,14 @@ final class JoinedSpans implements Statics {
     up = 0;
     down = 0;
     model.begin();
-    // The second time the wire's own tension says by how much it is stretched.
-    for (int pass = 0; pass < 2; pass++) {
-      model.stretchBy(pass == 0 ? pull : Double.NaN);
+    // From the second time on the wire's own tension says by how much it is stretched.
+    model.stretchBy(pull);
+    tighten();
+    for (int pass = 0; pass < 8 && model.stretchedOtherwise() > 2e-6; pass++) {
+      model.stretchBy(Double.NaN);
       tighten();
     }
-    calm = model.state(Weather.CALM);
+    calm = reader.state();
     weight = weightAt < 0 ? 0 : calm.ropeTension()[weightAt];
     winds.clear();
     states.clear();
@@ -182,15 +196,15 @@ final class JoinedSpans implements Statics {
       letOut = atLow > 0 ? low : high;
     } else if (high > low) {
       letOut =
-          new BracketingNthOrderBrentSolver(1e-12, 1e-9, 1e-7 * target, 3)
+          new BracketingNthOrderBrentSolver(1e-10, 1e-8, 1e-5 * target, 3)
               .solve(60, excess::applyAsDouble, low, high, AllowedSolution.ANY_SIDE);
     }
     pull = slack ? model.calm(letOut) : pull;
     model.calm(letOut);
   }
 
-  private List<JoinedModel.State> weather(Weather weather) {
-    List<JoinedModel.State> found = new ArrayList<>();
+  private List<JoinedState> weather(Weather weather) {
+    List<JoinedState> found = new ArrayList<>();
     List<double[]> blowing = weather.windy() ? winds : List.of(new double[] {0, 0});
     for (double[] wind : blowing) {
       model.restore();
@@ -198,7 +212,7 @@ final class JoinedSpans implements Statics {
       if (weightAt >= 0) {
         run();
       }
-      found.add(model.state(weather));
+      found.add(reader.state());
     }
     return found;
   }
@@ -222,7 +236,7 @@ final class JoinedSpans implements Statics {
       double atNext = excess.applyAsDouble(next);
       if (atNext >= 0 == runsOut) {
         double found =
-            new BracketingNthOrderBrentSolver(1e-9, 1e-6, 1e-6 * target, 3)
+            new BracketingNthOrderBrentSolver(1e-8, 1e-6, 1e-4 * target, 3)
                 .solve(
                     60,
                     excess::applyAsDouble,
@@ -269,7 +283,7 @@ final class JoinedSpans implements Statics {
         side[1],
         model.ropeAt(stretch.fromHold(), i),
         model.ropeAt(stretch.toHold(), i),
-        calm.greatest()[i],
+        calm.solved(i).greatest(),
         calm.chord(i),
         slack,
         lifted);
@@ -297,7 +311,7 @@ final class JoinedSpans implements Statics {
     return on(a, calm, Weather.CALM);
   }
 
-  private Force on(int a, JoinedModel.State state, Weather weather) {
+  private Force on(int a, JoinedState state, Weather weather) {
     Force sum = hang.hungOn(a, weather).plus(state.onAttachment()[a]);
     return a == weightAt ? sum.plus(new Force(0, 0, -weight)) : sum;
   }
@@ -317,10 +331,5 @@ final class JoinedSpans implements Statics {
       }
     }
     return worst;
-  }
-
-  /** The bends as they hang in still air. */
-  Place corner(int attachment) {
-    return calm.corner()[attachment];
   }
 }

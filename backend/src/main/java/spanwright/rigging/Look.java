@@ -2,6 +2,7 @@ package spanwright.rigging;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.ToDoubleFunction;
 import spanwright.plan.Place;
 
 /**
@@ -38,11 +39,20 @@ record Look(
     boolean slack,
     boolean lifted) {
 
-  /** Greatest tension in any weather [N]. */
+  /** Greatest tension of the wire in any weather [N]. */
   double greatest() {
+    return most(Solved::greatest);
+  }
+
+  /** Greatest tension of a rope that holds it in any weather [N]. */
+  double greatestRope() {
+    return most(Solved::greatestRope);
+  }
+
+  private double most(ToDoubleFunction<Solved> of) {
     double most = 0;
     for (Solved each : new Solved[] {calm, left, right, ice, iceLeft, iceRight}) {
-      most = each == null ? most : Math.max(most, each.greatest());
+      most = each == null ? most : Math.max(most, of.applyAsDouble(each));
     }
     return most;
   }

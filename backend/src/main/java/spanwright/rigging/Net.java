@@ -15,7 +15,7 @@ import org.apache.commons.math3.linear.NonPositiveDefiniteMatrixException;
  */
 final class Net {
   private static final int STEPS = 200;
-  private static final double BALANCED = 1e-9;
+  private static final double BALANCED = 1e-8;
 
   /** Added to each free node's stiffness, of its size, so that a slack node has one too. */
   private static final double SOFT = 1e-12;

@@ -41,7 +41,7 @@ final class Polyline {
 
   /** Whether it comes back to where it began. */
   boolean isClosed() {
-    return points.size() > 2 && first().distance(last()) <= CLOSED;
+    return points.size() > 3 && first().distance(last()) <= CLOSED;
   }
 
   /** The position nearest to a place, between two positions. */

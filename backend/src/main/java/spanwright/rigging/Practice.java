@@ -11,6 +11,18 @@ final class Practice {
   /** A centre piece: insulator, strain relief and the first hand of line [kg]. */
   static final double CENTRE_WEIGHT = 0.2;
 
+  /** A small end insulator breaks at this [N]. */
+  static final double INSULATOR_BREAKING = 1800;
+
+  /** A knot leaves this share of a rope's strength. */
+  static final double KNOT = 0.5;
+
+  /** A weak link parts at this share of what the weakest of the rest holds. */
+  static final double WEAK_LINK = 2.0 / 3;
+
+  /** A weak link must hold this many times what the weather asks of it. */
+  static final double LINK_MARGIN = 1.5;
+
   /** Calm tension is kept under this share of the wire's breaking strength. */
   static final double CALM_SHARE = 0.15;
 

@@ -74,11 +74,21 @@ final class ReadOut {
               weight != null ? "weight" : tied ? "tied" : "centre",
               weight == null ? null : Double.valueOf(weight.pull() / Hanging.GRAVITY),
               travel,
+              weight == null ? 0 : weight.up(),
+              weight == null ? 0 : weight.down(),
+              weight == null ? null : Double.valueOf(ropeAt(a) - weight.down()),
               hang.statics.calm(a),
               hang.statics.worst(a),
               hang.holders.get(a).pullLimit()));
     }
     return attachments;
+  }
+
+  /** Rope between an attachment and the wire's end or bend [m]. */
+  private double ropeAt(int a) {
+    int i = course.at(a)[0];
+    boolean first = course.spans().get(i).fromHold() == a;
+    return first ? looks.get(i).ropeFrom() : looks.get(i).ropeTo();
   }
 
   /** The rope from an attachment down to where it is made off; what of it could run out. */
@@ -133,7 +143,6 @@ final class ReadOut {
     Course.Stretch stretch = course.spans().get(i);
     Look look = looks.get(i);
     Materials materials = hang.materials(stretch.conductor());
-    double greatest = look.greatest();
     double sagInWind = Math.max(sag(look.left()), sag(look.right()));
     return new Rigged.Span(
         stretch.fromHold(),
@@ -151,9 +160,8 @@ final class ReadOut {
         beyond[stretch.fromHold()] + hang.tailLength(stretch.fromHold()),
         beyond[stretch.toHold()] + hang.tailLength(stretch.toHold()),
         look.tension(),
-        greatest,
-        materials.wireBreaking() / greatest,
-        materials.ropeBreaking() / greatest);
+        look.greatest(),
+        Strength.of(look, materials));
   }
 
   /** Below the line between attachments, or between the bends that ropes hold. */

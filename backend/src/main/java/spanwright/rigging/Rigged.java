@@ -127,6 +127,11 @@ public record Rigged(
    * @param kilograms to hang there, or null when it is not a weight
    * @param weightTravel how far the counterweight moves between calm and gust [m], up positive; 0
    *     when it is none
+   * @param weightUp how far the weather and swaying trees may lift the counterweight [m]; 0 when it
+   *     is none
+   * @param weightDown how far they may let it down [m]
+   * @param slackAtPulley rope left between the wire's end and the pulley when the weight is at its
+   *     lowest [m], or null when it is no weight
    * @param pull whole force on it in calm air: spans, line, and the counterweight's own pull on its
    *     pulley
    * @param pullInWind whole force on it in the worse gust
@@ -139,6 +144,9 @@ public record Rigged(
       String held,
       Double kilograms,
       double weightTravel,
+      double weightUp,
+      double weightDown,
+      Double slackAtPulley,
       Force pull,
       Force pullInWind,
       Double pullLimit) {}
@@ -161,9 +169,8 @@ public record Rigged(
    * @param freeFrom rope beyond the first attachment that would come free with it [m]
    * @param freeTo rope beyond the second attachment that would come free with it [m]
    * @param tension at the end where it is set, calm [N]
-   * @param greatestTension anywhere in it, calm or in the gust [N]
-   * @param wireMargin breaking strength of the wire over the greatest tension
-   * @param ropeMargin breaking strength of the rope over the greatest tension
+   * @param greatestTension of its wire in any weather [N]
+   * @param strength how far it is from parting
    */
   public record Span(
       int from,
@@ -182,8 +189,7 @@ public record Rigged(
       double freeTo,
       double tension,
       double greatestTension,
-      double wireMargin,
-      double ropeMargin) {
+      Strength strength) {
     /** The wire of it, without the ropes. */
     public Shapes wire() {
       return shapes.part(wireFrom, wireTo);

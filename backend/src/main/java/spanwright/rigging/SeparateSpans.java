@@ -115,13 +115,29 @@ final class SeparateSpans implements Statics {
       }
       pulls[i] = Math.max(floors[i], wanted);
     }
-    for (int attempt = 0; attempt < TRIES; attempt++) {
-      solve();
-      if (!windy || !letOut()) {
-        return;
-      }
-    }
     solve();
+    if (!windy) {
+      return;
+    }
+    double best = 0;
+    double[] bestPulls = pulls.clone();
+    for (int attempt = 0; attempt <= TRIES; attempt++) {
+      double[] factor = factors();
+      double least = java.util.Arrays.stream(factor).min().orElse(1);
+      if (least > best) {
+        best = least;
+        System.arraycopy(pulls, 0, bestPulls, 0, pulls.length);
+      }
+      if (attempt == TRIES || !letOut(factor)) {
+        break;
+      }
+      solve();
+    }
+    // A lighter weight may be drawn up where a heavier one held: the best of what was tried stands.
+    if (best < 1 && !java.util.Arrays.equals(bestPulls, pulls)) {
+      System.arraycopy(bestPulls, 0, pulls, 0, pulls.length);
+      solve();
+    }
   }
 
   /**
@@ -209,9 +225,8 @@ final class SeparateSpans implements Statics {
     return states[weather.ordinal()][i];
   }
 
-  /** Lets spans out where something does not hold; false when nothing was or could be let out. */
-  private boolean letOut() {
-    boolean changed = false;
+  /** By how much each span's pull is too great for what must hold; 1 where all of it holds. */
+  private double[] factors() {
     double[] factor = new double[pulls.length];
     java.util.Arrays.fill(factor, 1);
     for (int i = 0; i < pulls.length; i++) {
@@ -231,6 +246,12 @@ final class SeparateSpans implements Statics {
         }
       }
     }
+    return factor;
+  }
+
+  /** Lets spans out where something does not hold; false when nothing was or could be let out. */
+  private boolean letOut(double[] factor) {
+    boolean changed = false;
     for (int i = 0; i < pulls.length; i++) {
       boolean room = pulls[i] > floors[i] * (1 + 1e-9) && !spans.get(i).slackerThanAsked;
       if (factor[i] < 1 && room) {

@@ -30,6 +30,7 @@ final class Shortcomings {
       reach(a);
       pull(a);
       ropeOnly(a);
+      weight(a);
     }
     for (int i = 0; i < rigged.spans().size(); i++) {
       strength(i);
@@ -188,7 +189,8 @@ final class Shortcomings {
               span.greatestTension(), 100 * share, 100 * allowed),
           null);
     }
-    double working = span.greatestTension() / materials.ropeWorking();
+    double rope = looks.get(i).greatestRope();
+    double working = rope / materials.ropeWorking();
     double most = rigging.rules.value("rope-strength");
     if (working > most && (span.ropeFrom() > 0.01 || span.ropeTo() > 0.01)) {
       add(
@@ -200,10 +202,8 @@ final class Shortcomings {
           most,
           say(
               "The rope would carry %.0f N in the gust; its working load is %.0f N.",
-              span.greatestTension(), materials.ropeWorking()),
-          say(
-              "Take a rope with a working load of at least %.0f N.",
-              Math.ceil(span.greatestTension() / most)));
+              rope, materials.ropeWorking()),
+          say("Take a rope with a working load of at least %.0f N.", Math.ceil(rope / most)));
     }
   }
 
@@ -227,12 +227,35 @@ final class Shortcomings {
           span.sag(),
           0.25 * look.chord(),
           say(
-              "The wire is %.1f m longer than the way between %s and %s; it would hang %.1f m deep.",
+              "The wire is %.1f m longer than the way between %s and %s; it would hang %.1f m"
+                  + " deep.",
               over, from, to, span.sag()),
           say("Shorten the wire by %.1f m.", over));
     }
     if (look.lifted()) {
       lifted(span);
+    }
+  }
+
+  /** What a counterweight needs to be hung right. */
+  private void weight(int a) {
+    Rigged.Attachment at = rigged.attachments().get(a);
+    if (at.kilograms() == null) {
+      return;
+    }
+    String name = hang.holders.get(a).name();
+    if (at.slackAtPulley() < Practice.SHORTEST_TAIL) {
+      notes.add(
+          say(
+              "As %s sways, the wire's end comes up to the pulley there: %.1f m more rope between"
+                  + " them would let the weight go down its whole way.",
+              name, Practice.SHORTEST_TAIL - at.slackAtPulley()));
+    }
+    if (at.weightDown() > Practice.WEIGHT_HEIGHT - 0.3) {
+      notes.add(
+          say(
+              "The weight at %s goes down %.1f m in the gust: hang it %.1f m above the ground.",
+              name, at.weightDown(), at.weightDown() + 0.3));
     }
   }
 

@@ -12,7 +12,8 @@ import spanwright.plan.Place;
  * @param feed index of the feedpoint, where it hangs here
  * @param onFrom force on the first attachment
  * @param onTo force on the second
- * @param greatest tension anywhere [N]
+ * @param greatest tension of wire, and of rope in line with it [N]
+ * @param greatestRope tension of any rope that holds it, those at bends among them [N]
  */
 record Solved(
     List<Place> points,
@@ -21,11 +22,12 @@ record Solved(
     int feed,
     Force onFrom,
     Force onTo,
-    double greatest) {
+    double greatest,
+    double greatestRope) {
 
   /** The same with other points and forces. */
   Solved with(List<Place> others, Force from, Force to) {
-    return new Solved(others, wireFrom, wireTo, feed, from, to, greatest);
+    return new Solved(others, wireFrom, wireTo, feed, from, to, greatest, greatestRope);
   }
 
   /** Greatest drop of the points below a straight line from end to end, measured upright [m]. */

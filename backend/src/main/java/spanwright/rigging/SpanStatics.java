@@ -202,6 +202,7 @@ final class SpanStatics {
         parts[0] + parts[1],
         new Force(chain.start[0], chain.start[1], chain.start[2]),
         new Force(-end[0], -end[1], -end[2]),
+        chain.greatestTension(),
         chain.greatestTension());
   }
 

@@ -7,6 +7,9 @@ import spanwright.plan.Place;
 
 /** Reads the wires out of a hang: free ends, and each conductor from end to end. */
 final class WireOut {
+  /** Points nearer than this are one for the field solver [m]. */
+  private static final double JOINED = 2e-3;
+
   private final Hang hang;
   private final Course course;
   private final List<Look> looks;
@@ -117,7 +120,7 @@ final class WireOut {
       List<Place> more = part.all().get(state);
       boolean joined =
           !points.isEmpty()
-              && (points.get(points.size() - 1).distance(more.get(0)) < 1e-6 || course.loop());
+              && (points.get(points.size() - 1).distance(more.get(0)) < JOINED || course.loop());
       points.addAll(joined ? more.subList(1, more.size()) : more);
     }
     if (c > 0) {
