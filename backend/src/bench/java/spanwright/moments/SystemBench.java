@@ -62,10 +62,10 @@ public class SystemBench {
     Complex[] right = new Complex[n];
     for (int i = 0; i < n; i++) {
       for (int j = 0; j <= i; j++) {
-        commons[i][j] = new Complex(system.re[i][j], system.im[i][j]);
+        commons[i][j] = new Complex(system.re(i, j), system.im(i, j));
         commons[j][i] = commons[i][j];
-        ejmlMatrix.set(i, j, system.re[i][j], system.im[i][j]);
-        ejmlMatrix.set(j, i, system.re[i][j], system.im[i][j]);
+        ejmlMatrix.set(i, j, system.re(i, j), system.im(i, j));
+        ejmlMatrix.set(j, i, system.re(i, j), system.im(i, j));
       }
       right[i] = new Complex(pieces.mesh().excitation[i]);
       ejmlRight.set(i, 0, pieces.mesh().excitation[i], 0);

@@ -11,8 +11,8 @@ final class PivotedLu {
     double[][] ai = new double[n][n];
     for (int i = 0; i < n; i++) {
       for (int j = 0; j <= i; j++) {
-        ar[i][j] = system.re[i][j];
-        ai[i][j] = system.im[i][j];
+        ar[i][j] = system.re(i, j);
+        ai[i][j] = system.im(i, j);
         ar[j][i] = ar[i][j];
         ai[j][i] = ai[i][j];
       }

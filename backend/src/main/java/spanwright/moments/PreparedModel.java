@@ -18,9 +18,19 @@ final class PreparedModel {
   private final Mesh mesh;
   private final StaticPairs statics;
   private final SourcePoints points;
+  private final Sightlines sightlines;
+  private final RatioRows ratioRows;
   private final Doubts doubts;
 
   PreparedModel(AntennaModel model, Ground ground, double highestMHz, MeshRule rule) {
+    this(model, ground, highestMHz, rule, false);
+  }
+
+  /**
+   * @param several whether it will be solved at more than one frequency
+   */
+  PreparedModel(
+      AntennaModel model, Ground ground, double highestMHz, MeshRule rule, boolean several) {
     this.model = model;
     this.ground = ground;
     double k = Constants.waveNumber(highestMHz);
@@ -36,13 +46,19 @@ final class PreparedModel {
     mesh = Mesh.of(model, outline, rule, k);
     statics = new StaticPairs(mesh);
     points = new SourcePoints(mesh);
+    boolean grounded = ground.kind() != Ground.Kind.NONE;
+    sightlines = new Sightlines(mesh, points, statics, grounded, several);
+    ratioRows = grounded ? new RatioRows(mesh, points) : null;
     doubts = Doubts.about(model, ground, outline, mesh, statics);
   }
 
   Solution solve(double frequencyMHz, Reflection reflection) {
     double k = Constants.waveNumber(frequencyMHz);
-    MatrixFill fill = new MatrixFill(mesh, statics, points, reflection, k);
-    SymmetricSystem system = fill.fields();
+    FillWork work = FillWork.mine();
+    SymmetricSystem system = work.system(mesh.unknowns);
+    MatrixFill fill =
+        new MatrixFill(mesh, statics, points, sightlines, ratioRows, reflection, k, system, work);
+    fill.fields();
     int wires = model.wires().size();
     Complex[] internal = new Complex[wires];
     double[] resistance = new double[wires];

@@ -58,8 +58,10 @@ public final class Solver {
     Map<Double, Solution> solved = new HashMap<>();
     int top = rising.length - 1;
     while (top >= 0) {
-      PreparedModel prepared = new PreparedModel(model, ground, rising[top], MeshRule.of(aim));
       double least = rising[top] / SAME_MESH;
+      boolean several = top > 0 && rising[top - 1] >= least;
+      PreparedModel prepared =
+          new PreparedModel(model, ground, rising[top], MeshRule.of(aim), several);
       for (; top >= 0 && rising[top] >= least; top--) {
         double f = rising[top];
         solved.computeIfAbsent(f, x -> prepared.solve(x, tables.reflection(ground, x)));

@@ -20,6 +20,8 @@ final class StaticPairs {
   /** Elements nearer than this part of the longer one's length are close. */
   static final double CLOSE = 0.35;
 
+  private static final double[][][] SHAPE_TAYLOR = taylor(Shapes.POWERS);
+  private static final double[][][] SLOPE_TAYLOR = taylor(Shapes.SLOPE_POWERS);
   private static final int OUTER = 16;
   private static final double[] GRADED = new double[OUTER];
   private static final double[] GRADED_WEIGHT = new double[OUTER];
@@ -62,6 +64,8 @@ final class StaticPairs {
   private final double[] place = new double[2];
   private final double[] inner0 = new double[Shapes.MOST + 1];
   private final double[] inner2 = new double[Shapes.MOST + 1];
+  private final double[] outerShape = new double[Shapes.MOST + 1];
+  private final double[] outerSlope = new double[Shapes.MOST + 1];
 
   StaticPairs(Mesh mesh) {
     this.mesh = mesh;
@@ -208,52 +212,74 @@ final class StaticPairs {
       off2 = ox * ox + oy * oy + oz * oz + pair.radius2;
     }
     double tau = along / hi;
-    powers(tau, Math.max(off2 / (hi * hi), 1e-20));
+    powers(tau, Math.max(off2 / (hi * hi), 1e-20), Math.max(1, mesh.order[inner]));
     int mo = mesh.order[outer];
     int mi = mesh.order[inner];
     int columns = turned ? mo + 1 : mi + 1;
+    for (int a = 0; a <= mo; a++) {
+      outerShape[a] = weight * Shapes.at(Shapes.POWERS[a], t);
+      outerSlope[a] = weight * Shapes.at(Shapes.SLOPE_POWERS[a], t);
+    }
     for (int b = 0; b <= mi; b++) {
       double shape0 = 0;
       double shape2 = 0;
       double slope0 = 0;
       double slope2 = 0;
-      double[] p = Shapes.POWERS[b];
-      double[] d = Shapes.SLOPE_POWERS[b];
-      for (int m = 0; m <= Math.max(1, b); m++) {
-        double c = taylor(p, m, tau);
-        double s = taylor(d, m, tau);
+      int degree = Math.max(1, b);
+      for (int m = 0; m <= degree; m++) {
+        double c = horner(SHAPE_TAYLOR[b][m], degree - m, tau);
         shape0 += c * inner0[m];
         shape2 += c * inner2[m];
-        slope0 += s * inner0[m];
-        slope2 += s * inner2[m];
       }
+      for (int m = 0; m < degree; m++) {
+        double c = horner(SLOPE_TAYLOR[b][m], degree - 1 - m, tau);
+        slope0 += c * inner0[m];
+        slope2 += c * inner2[m];
+      }
+      shape0 *= ho;
+      shape2 *= ho * hi * hi;
+      slope0 /= hi;
+      slope2 *= hi;
       for (int a = 0; a <= mo; a++) {
         int at = turned ? b * columns + a : a * columns + b;
-        double shape = weight * Shapes.at(Shapes.POWERS[a], t);
-        double slope = weight * Shapes.at(Shapes.SLOPE_POWERS[a], t);
-        pair.current0[at] += shape * shape0 * ho;
-        pair.current2[at] += shape * shape2 * ho * hi * hi;
-        pair.charge0[at] += slope * slope0 / hi;
-        pair.charge2[at] += slope * slope2 * hi;
+        pair.current0[at] += outerShape[a] * shape0;
+        pair.current2[at] += outerShape[a] * shape2;
+        pair.charge0[at] += outerSlope[a] * slope0;
+        pair.charge2[at] += outerSlope[a] * slope2;
       }
     }
   }
 
-  /** m-th derivative at tau over m!. */
-  private static double taylor(double[] p, int m, double tau) {
-    double sum = 0;
-    for (int n = p.length - 1; n >= m; n--) {
-      double choose = 1;
-      for (int i = 0; i < m; i++) {
-        choose = choose * (n - i) / (i + 1);
-      }
-      sum = sum * tau + choose * p[n];
+  private static double horner(double[] p, int degree, double tau) {
+    double sum = p[degree];
+    for (int n = degree - 1; n >= 0; n--) {
+      sum = sum * tau + p[n];
     }
     return sum;
   }
 
+  /** For each polynomial and m, the m-th derivative over m! as a polynomial. */
+  private static double[][][] taylor(double[][] polynomials) {
+    double[][][] out = new double[polynomials.length][][];
+    for (int b = 0; b < polynomials.length; b++) {
+      double[] p = polynomials[b];
+      out[b] = new double[p.length][];
+      for (int m = 0; m < p.length; m++) {
+        out[b][m] = new double[p.length - m];
+        for (int n = m; n < p.length; n++) {
+          double choose = 1;
+          for (int i = 0; i < m; i++) {
+            choose = choose * (n - i) / (i + 1);
+          }
+          out[b][m][n - m] = choose * p[n];
+        }
+      }
+    }
+    return out;
+  }
+
   /** Integrals of v^m/r and v^m·r over v = −tau .. 1 − tau, r = √(v² + delta²). */
-  private void powers(double tau, double delta2) {
+  private void powers(double tau, double delta2, int most) {
     double v0 = -tau;
     double v1 = 1 - tau;
     double r0 = Math.sqrt(v0 * v0 + delta2);
@@ -271,7 +297,7 @@ final class StaticPairs {
     inner2[1] = (c1 - c0) / 3;
     double p0 = v0;
     double p1 = v1;
-    for (int m = 2; m <= Shapes.MOST; m++) {
+    for (int m = 2; m <= most; m++) {
       inner0[m] = (p1 * r1 - p0 * r0 - (m - 1) * delta2 * inner0[m - 2]) / m;
       inner2[m] = (p1 * c1 - p0 * c0 - (m - 1) * delta2 * inner2[m - 2]) / (m + 2);
       p0 *= v0;

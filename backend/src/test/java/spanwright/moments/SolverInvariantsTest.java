@@ -279,10 +279,9 @@ class SolverInvariantsTest {
         b[i] = random.nextGaussian();
         right.set(i, 0, b[i], 0);
         for (int j = 0; j <= i; j++) {
-          system.re[i][j] = random.nextGaussian();
-          system.im[i][j] = random.nextGaussian();
-          matrix.set(i, j, system.re[i][j], system.im[i][j]);
-          matrix.set(j, i, system.re[i][j], system.im[i][j]);
+          system.set(i, j, random.nextGaussian(), random.nextGaussian());
+          matrix.set(i, j, system.re(i, j), system.im(i, j));
+          matrix.set(j, i, system.re(i, j), system.im(i, j));
         }
       }
       ZMatrixRMaj x = new ZMatrixRMaj(n, 1);
@@ -302,7 +301,7 @@ class SolverInvariantsTest {
   @Test
   void a_system_that_needs_pivots_gets_them() {
     SymmetricSystem system = new SymmetricSystem(2);
-    system.re[1][0] = 1;
+    system.set(1, 0, 1, 0);
     system.solve(new double[] {2, 3});
     assertTrue(system.pivoted);
     assertEquals(3, system.answerRe[0], 1e-15);
