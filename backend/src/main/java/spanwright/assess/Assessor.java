@@ -200,6 +200,7 @@ public final class Assessor {
         .filter(warning -> !solved.quality.doubts().contains(warning))
         .forEach(told::add);
     told.addAll(said);
+    told.addAll(clearances.notes(hung.rigged()));
     return new PlacementWriter(plan, surface, scoring)
         .write(hung, fed.rows, fed.lineLength, notes.of(hung, plane, rows, told), solved.quality);
   }

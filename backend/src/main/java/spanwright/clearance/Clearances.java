@@ -45,6 +45,7 @@ public final class Clearances {
   private final Screen screen;
   private final Map<String, String> names = new HashMap<>();
   private final List<Holder> holders;
+  private final Advice advice;
 
   private Clearances(Plan plan, Catalogue catalogue) {
     ground = GroundSurface.of(plan);
@@ -61,9 +62,16 @@ public final class Clearances {
       index.insert(new Envelope(box[0], box[3], box[1], box[4]), each);
     }
     index.build();
+    List<Solid> solids = kindOf(obstacles, Solid.class);
+    List<Volumes.People> people = kindOf(obstacles, Volumes.People.class);
+    advice = new Advice(plan, overhead, this, solids, people, rules, rigging.entry());
     name(plan);
     holders = Holder.all(plan).values().stream().sorted(Comparator.comparing(Holder::id)).toList();
     screen = new Screen(plan, ground, rules, overhead, boundary, rigging);
+  }
+
+  private static <T> List<T> kindOf(List<Obstacle> all, Class<T> kind) {
+    return all.stream().filter(kind::isInstance).map(kind::cast).toList();
   }
 
   private List<Obstacle> obstacles(Plan plan) {
@@ -208,6 +216,14 @@ public final class Clearances {
         }
       }
     }
+  }
+
+  /**
+   * What refuses nothing and must be known all the same, as sentences: whom to speak with before
+   * working near a line, what was allowed by whom, what comes where people are.
+   */
+  public List<String> notes(Rigged rigged) {
+    return advice.of(Strand.of(rigged));
   }
 
   /**

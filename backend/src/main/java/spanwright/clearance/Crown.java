@@ -102,7 +102,9 @@ final class Crown implements Obstacle {
                   points[i + 1] + t * (points[i + 4] - points[i + 1]),
                   points[i + 2] + t * (points[i + 5] - points[i + 2]));
           double distance = signed(at.x(), at.y(), at.z()) - allowance;
-          worst.offer(distance, required, strand.part.word, at, nearest(at));
+          if (distance < range) {
+            worst.offer(distance, required, strand.part.word, at, nearest(at));
+          }
         });
   }
 

@@ -46,12 +46,12 @@ final class Metal implements Obstacle {
           for (int k = 0; k + 3 < path.length; k += 3) {
             Space.segments(points, i, i + 3, path, k, k + 3, near);
           }
-          worst.offer(
-              Math.max(0, near.distance() - allowance - source.radius()),
-              required,
-              strand.part.word,
-              new Place(near.ax, near.ay, near.az),
-              new Place(near.bx, near.by, near.bz));
+          double distance = Math.max(0, near.distance() - allowance - source.radius());
+          if (distance < range) {
+            Place at = new Place(near.ax, near.ay, near.az);
+            Place toAt = new Place(near.bx, near.by, near.bz);
+            worst.offer(distance, required, strand.part.word, at, toAt);
+          }
         });
   }
 }

@@ -96,6 +96,10 @@ final class Solid implements Obstacle {
         && PlanShapes.toPath(roof.building().footprint(), entry.onPlan(), true) < AT_ENTRY;
   }
 
+  String id() {
+    return roof.building().id();
+  }
+
   /** How deep the blown feed line is drawn into the building it goes into [m]; 0 when it is not. */
   double leaned(Strand strand, Place entry) {
     double most = 0;

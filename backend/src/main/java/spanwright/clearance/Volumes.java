@@ -77,6 +77,26 @@ final class Volumes {
       leastOf(strand, box, this::signed, rate, worst, required, range, this::near);
     }
 
+    String id() {
+      return source.id();
+    }
+
+    /** Whether some of a strand on a calm day is inside. */
+    boolean holds(Strand strand) {
+      double[] p = strand.states[strand.calm];
+      for (int i = 0; i + 3 < p.length; i += 3) {
+        for (int k = 0; k <= 8; k++) {
+          double t = k / 8.0;
+          double x = p[i] + t * (p[i + 3] - p[i]);
+          double y = p[i + 1] + t * (p[i + 4] - p[i + 1]);
+          if (signed(x, y, p[i + 2] + t * (p[i + 5] - p[i + 2])) < 0) {
+            return true;
+          }
+        }
+      }
+      return false;
+    }
+
     /** Distance to the volume; on a slope its floor and ceiling are those of the nearest point. */
     double signed(double x, double y, double z) {
       double side = area.signed(x, y);

@@ -30,6 +30,10 @@ final class RandomPlots {
   }
 
   static Plan plan(Random random) {
+    return Plots.plan(json(random, 2));
+  }
+
+  static String json(Random random, double guyRadius) {
     double hx = between(random, 8, 42);
     double hy = between(random, 8, 42);
     String house =
@@ -73,7 +77,8 @@ final class RandomPlots {
             .with(
                 "mastZones",
                 """
-                [ { "id": "lawn", "name": "Lawn", "area": [[14,14],[48,14],[48,54],[14,54]], "highest": 8, "guyRadius": 2 } ]""")
+                [ { "id": "lawn", "name": "Lawn", "area": [[14,14],[48,14],[48,54],[14,54]], "highest": 8, "guyRadius": %.1f } ]"""
+                    .formatted(guyRadius))
             .with("overheadLines", lines(random))
             .with("buildings", house)
             .with("trees", trees)
@@ -83,7 +88,7 @@ final class RandomPlots {
     if (random.nextInt(3) > 0) {
       plots.terrain(terrain(random));
     }
-    return plots.plan();
+    return plots.json();
   }
 
   private static String terrain(Random random) {

@@ -59,11 +59,24 @@ public final class Plots {
 
   /** Reads the plan; a fault in a test's plan fails the test. */
   public Plan plan() {
+    return plan(json());
+  }
+
+  /** Reads a plan; a fault in it fails the test. */
+  public static Plan plan(String json) {
+    PlanReader.Outcome outcome = PlanReader.read(json);
+    if (outcome.plan() == null) {
+      throw new IllegalStateException(outcome.faults().toString());
+    }
+    return outcome.plan();
+  }
+
+  /** The plan as JSON. */
+  public String json() {
     String rest = parts.isEmpty() ? "" : String.join(",\n", parts) + ",";
-    String json =
-        String.format(
-            Locale.ROOT,
-            """
+    return String.format(
+        Locale.ROOT,
+        """
             { "format": "spanwright-plan/1", "title": "Test plot",
               "site": { "planNorth": 0 %s },
               "boundary": [[0,0],[60,0],[60,60],[0,60]],
@@ -74,16 +87,11 @@ public final class Plots {
                 "targets": [ { "name": "Far", "bearing": 90, "distanceKm": 3000 } ],
                 "newMasts": %d, "rules": { %s } } }
             """,
-            terrain,
-            rest,
-            entry,
-            newMasts,
-            rules);
-    PlanReader.Outcome outcome = PlanReader.read(json);
-    if (outcome.plan() == null) {
-      throw new IllegalStateException(outcome.faults().toString());
-    }
-    return outcome.plan();
+        terrain,
+        rest,
+        entry,
+        newMasts,
+        rules);
   }
 
   /**
