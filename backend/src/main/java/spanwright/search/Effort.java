@@ -10,7 +10,7 @@ import java.util.Optional;
 public enum Effort {
   QUICK(6, 1, 2, 4_000, 1_600, 100, 16, 10),
   NORMAL(14, 2, 3, 16_000, 8_000, 800, 120, 24),
-  THOROUGH(30, 3, 5, 60_000, 24_000, 3_000, 1_000, 40);
+  THOROUGH(30, 3, 5, 60_000, 24_000, 3_000, 1_050, 40);
 
   /** Places tried in each mast zone, and along each bracket line a third of that. */
   final int mastPlaces;
