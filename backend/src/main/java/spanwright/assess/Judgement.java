@@ -1,5 +1,7 @@
 package spanwright.assess;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -51,10 +53,10 @@ final class Judgement {
   private static String doubt(String band, double change) {
     return String.format(
         Locale.ROOT,
-        "On %s a finer mesh moves the reflection coefficient (400 ohm) by %.3f; up to %.2f is"
+        "On %s a finer mesh moves the reflection coefficient (400 ohm) by %s; up to %s is"
             + " good.",
         band,
-        change,
+        rounded(change),
         MOST_CHANGE);
   }
 
@@ -68,7 +70,7 @@ final class Judgement {
 
   /** Three digits. */
   private static double rounded(double value) {
-    return new java.math.BigDecimal(value).round(new java.math.MathContext(3)).doubleValue();
+    return new BigDecimal(value).round(new MathContext(3)).doubleValue();
   }
 
   /** What is said in a placement's notes. */

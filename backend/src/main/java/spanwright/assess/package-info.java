@@ -5,8 +5,8 @@
  * take-off windows ({@code path}).
  *
  * <p>Frame: metres, plan frame, z above the plan's zero; azimuths from true north; elevations up;
- * decibels over an isotropic radiator. The solver's ground is the plane through the ground
- * under the wire, tilted as that is ({@code GroundPlane}).
+ * decibels over an isotropic radiator. The solver's ground is the plane through the ground under
+ * the wire, tilted as that is ({@code GroundPlane}).
  *
  * <p>Delivered gain is the gain toward the target, averaged as power over its scored take-off
  * window (and over all azimuths for near-vertical cover), less line loss and matching loss. The
