@@ -145,6 +145,10 @@ public record Placement(
    * @param state the pulls against the limit; clear when not known
    * @param held "weight", "tied" or "centre"
    * @param kilograms to hang there, or null when it is not a weight
+   * @param weightUp how far the weather and swaying trees may lift the weight [m], or null
+   * @param weightDown how far they may let it down [m], or null
+   * @param slackAtPulley rope left between the wire's end and the pulley when the weight is at its
+   *     lowest [m], or null
    */
   public record Attachment(
       String on,
@@ -155,7 +159,36 @@ public record Placement(
       Double pullLimit,
       State state,
       String held,
-      Double kilograms) {}
+      Double kilograms,
+      Double weightUp,
+      Double weightDown,
+      Double slackAtPulley) {
+    /** A holding point without a counterweight's travel. */
+    public Attachment(
+        String on,
+        Place at,
+        double aboveGround,
+        double pull,
+        double pullInWind,
+        Double pullLimit,
+        State state,
+        String held,
+        Double kilograms) {
+      this(
+          on,
+          at,
+          aboveGround,
+          pull,
+          pullInWind,
+          pullLimit,
+          state,
+          held,
+          kilograms,
+          null,
+          null,
+          null);
+    }
+  }
 
   /**
    * Feedpoint and feed line.
@@ -180,7 +213,9 @@ public record Placement(
    * @param sagInWind likewise in the gust [m]
    * @param blowOut greatest sideways shift in the gust [m]
    * @param wireLength finished length of the wire in it [m]
-   * @param tension at its end, calm [N]
+   * @param tension at the end where it is set, calm [N]: the pull to rig it with
+   * @param greatestTension of its wire in any weather [N], or null when not known
+   * @param strength margins, or null when not known
    */
   public record Span(
       int from,
@@ -190,7 +225,35 @@ public record Placement(
       double sagInWind,
       double blowOut,
       double wireLength,
-      double tension) {}
+      double tension,
+      Double greatestTension,
+      SpanStrength strength) {
+    /** A span without its margins. */
+    public Span(
+        int from,
+        int to,
+        List<Place> points,
+        double sag,
+        double sagInWind,
+        double blowOut,
+        double wireLength,
+        double tension) {
+      this(from, to, points, sag, sagInWind, blowOut, wireLength, tension, null, null);
+    }
+  }
+
+  /**
+   * How far a span is from parting: what each part breaks at, over the greatest tension on it in
+   * any weather. Half of a rope's strength goes to its knots.
+   *
+   * @param wire margin of the wire
+   * @param rope margin of the rope, or null where none holds the span
+   * @param insulator margin of the end insulators, likewise
+   * @param partsFirst "wire", "rope" or "insulator"
+   * @param weakLink what a link let into the rope should part at [N], or null where none fits
+   */
+  public record SpanStrength(
+      double wire, Double rope, Double insulator, String partsFirst, Double weakLink) {}
 
   /**
    * A rope.

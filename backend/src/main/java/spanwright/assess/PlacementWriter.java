@@ -9,6 +9,7 @@ import spanwright.plan.Place;
 import spanwright.plan.Plan;
 import spanwright.rigging.Force;
 import spanwright.rigging.Rigged;
+import spanwright.rigging.Strength;
 
 /** Writes what was found as an element of a result document. */
 final class PlacementWriter {
@@ -87,7 +88,10 @@ final class PlacementWriter {
         limit,
         state,
         attachment.held(),
-        attachment.kilograms() == null ? null : Rounded.hundredth(attachment.kilograms()));
+        attachment.kilograms() == null ? null : Rounded.hundredth(attachment.kilograms()),
+        attachment.kilograms() == null ? null : Rounded.hundredth(attachment.weightUp()),
+        attachment.kilograms() == null ? null : Rounded.hundredth(attachment.weightDown()),
+        attachment.slackAtPulley() == null ? null : Rounded.hundredth(attachment.slackAtPulley()));
   }
 
   private static double size(Force force) {
@@ -114,7 +118,22 @@ final class PlacementWriter {
         Rounded.thousandth(span.sagInWind()),
         Rounded.thousandth(span.blowOut()),
         Rounded.thousandth(span.wireLength()),
-        Rounded.tenth(span.tension()));
+        Rounded.tenth(span.tension()),
+        Rounded.tenth(span.greatestTension()),
+        strength(span.strength()));
+  }
+
+  private static Placement.SpanStrength strength(Strength strength) {
+    return new Placement.SpanStrength(
+        Rounded.hundredth(strength.wire().margin()),
+        margin(strength.rope()),
+        margin(strength.insulator()),
+        strength.partsFirst(),
+        strength.weakLink() == null ? null : Rounded.tenth(strength.weakLink()));
+  }
+
+  private static Double margin(Strength.Part part) {
+    return part == null ? null : Rounded.hundredth(part.margin());
   }
 
   private static Placement.RopeRun rope(Rigged.Rope rope) {

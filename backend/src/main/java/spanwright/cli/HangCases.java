@@ -33,10 +33,16 @@ final class HangCases {
             load,
             form.number("pull", SMALLEST, 1e6, "N"),
             form.word(
-                "held", Map.of("weight", HangCase.Held.WEIGHT, "tied", HangCase.Held.TIED), null),
+                "held",
+                Map.of(
+                    "weight", HangCase.Held.WEIGHT,
+                    "tied", HangCase.Held.TIED,
+                    "spring", HangCase.Held.SPRING),
+                null),
             form.number("wind", 0, 100, "m/s", null),
             form.number("drag", 0, 10, "", null),
-            form.number("air", 0, 10, "kg/m³", null));
+            form.number("air", 0, 10, "kg/m³", null),
+            form.number("spring", 1e-3, 1e9, "N/m", null));
     form.finish();
     return new Read(hangCase, faults);
   }

@@ -1,5 +1,6 @@
 package spanwright.rigging;
 
+import com.fasterxml.jackson.annotation.JsonCreator;
 import com.fasterxml.jackson.annotation.JsonProperty;
 import spanwright.plan.Place;
 
@@ -15,6 +16,7 @@ import spanwright.plan.Place;
  * @param wind level, square to the span [m/s]; null is calm
  * @param drag coefficient; null is 1.2
  * @param air density [kg/m³]; null is 1.25
+ * @param spring newtons for each metre that the wire draws out of it; of a spring alone
  */
 public record HangCase(
     Place from,
@@ -25,17 +27,33 @@ public record HangCase(
     Held held,
     Double wind,
     Double drag,
-    Double air) {
+    Double air,
+    Double spring) {
   /** Drag coefficient of a round wire where a case says none. */
   public static final double DRAG = 1.2;
 
   /** Density of air where a case says none [kg/m³]. */
   public static final double AIR = 1.25;
 
+  @JsonCreator
   public HangCase {
     wind = wind == null ? Double.valueOf(0) : wind;
     drag = drag == null ? Double.valueOf(DRAG) : drag;
     air = air == null ? Double.valueOf(AIR) : air;
+  }
+
+  /** A wire held by a weight or a tie. */
+  public HangCase(
+      Place from,
+      Place to,
+      Wire wire,
+      Load load,
+      Double pull,
+      Held held,
+      Double wind,
+      Double drag,
+      Double air) {
+    this(from, to, wire, load, pull, held, wind, drag, air, null);
   }
 
   /**
@@ -62,6 +80,9 @@ public record HangCase(
     WEIGHT,
     /** Made fast: the wire's unstretched length stays. */
     @JsonProperty("tied")
-    TIED
+    TIED,
+    /** Over a pulley to a spring: its pull grows as the wire draws it out. */
+    @JsonProperty("spring")
+    SPRING
   }
 }

@@ -3,6 +3,9 @@ package spanwright.rigging;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import org.apache.commons.math3.analysis.UnivariateFunction;
+import org.apache.commons.math3.analysis.solvers.AllowedSolution;
+import org.apache.commons.math3.analysis.solvers.BracketingNthOrderBrentSolver;
 import spanwright.plan.Place;
 
 /**
@@ -100,25 +103,64 @@ public final class Hanging {
         }
         return;
       }
+      boolean holds =
+          given.held() == HangCase.Held.SPRING ? spring(first) : run(given.pull(), first);
+      if (!holds) {
+        throw new IllegalArgumentException(
+            String.format(
+                Locale.ROOT,
+                given.held() == HangCase.Held.SPRING
+                    ? "wind: a spring set to %.1f N (pull) cannot hold this wire in %.1f m/s. Use a"
+                        + " stiffer spring or a tie."
+                    : "wind: a counterweight of %.1f N (pull) cannot hold this wire in %.1f m/s."
+                        + " Use a heavier weight or a tie.",
+                given.pull(),
+                given.wind()));
+      }
+    }
+
+    /** Lets the wire run over the pulley until it pulls so much there; false when it never does. */
+    private boolean run(double pull, double first) {
       double stretch = stretchUnderPull();
       double slack =
           tightening.toPull(
-              given.pull(),
+              pull,
               true,
               s -> {
                 double rest = (chord + s) / (1 + stretch) - first;
                 chain.length[0] = rest > 0 ? first : first + rest;
                 chain.length[1] = Math.max(0, rest);
               });
-      if (Double.isNaN(slack)) {
-        throw new IllegalArgumentException(
-            String.format(
-                Locale.ROOT,
-                "wind: a counterweight of %.1f N (pull) cannot hold this wire in %.1f m/s. Use a"
-                    + " heavier weight or a tie.",
-                given.pull(),
-                given.wind()));
+      return !Double.isNaN(slack);
+    }
+
+    /**
+     * Lets the wire draw the spring out: its pull is that of still air and so much more for each
+     * metre that has run over the pulley. With more pull less wire runs, so there is one answer.
+     */
+    private boolean spring(double first) {
+      double whole = chain.totalLength();
+      UnivariateFunction over =
+          pull ->
+              run(pull, first)
+                  ? pull - given.pull() - given.spring() * (chain.totalLength() - whole)
+                  : -pull;
+      double low = given.pull();
+      if (over.value(low) >= 0) {
+        return run(low, first);
       }
+      double high = 2 * low;
+      while (over.value(high) < 0) {
+        low = high;
+        high *= 2;
+        if (high > 1e9) {
+          return false;
+        }
+      }
+      double pull =
+          new BracketingNthOrderBrentSolver(1e-12, 1e-9, 1e-9 * given.pull(), 5)
+              .solve(200, over, low, high, AllowedSolution.ANY_SIDE);
+      return run(pull, first);
     }
 
     private String tooSlack() {
@@ -214,7 +256,12 @@ public final class Hanging {
         number("wire.stiffness", given.wire().stiffness(), 1e-3, 1e12, "N");
       }
       number("pull", given.pull(), 1e-6, 1e9, "N");
-      require(given.held() != null, "held: is missing. Say \"weight\" or \"tied\".");
+      require(given.held() != null, "held: is missing. Say \"weight\", \"tied\" or \"spring\".");
+      if (given.held() == HangCase.Held.SPRING) {
+        number("spring", given.spring(), 1e-3, 1e9, "N/m");
+      } else {
+        require(given.spring() == null, "spring: holds nothing here. Say \"spring\" in held.");
+      }
       number("wind", given.wind(), 0, 100, "m/s");
       number("drag", given.drag(), 0, 10, "");
       number("air", given.air(), 0, 10, "kg/m³");

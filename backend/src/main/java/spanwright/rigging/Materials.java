@@ -32,6 +32,8 @@ record Materials(
     double ice) {
 
   static Materials of(WireKind wire, RopeKind rope, double wind, double iceMillimetres) {
+    within("wind", wind, 100, "m/s");
+    within("ice", iceMillimetres, 100, "mm");
     double radius = wire.insulation() == null ? wire.radius() : wire.insulation().radius();
     return new Materials(
         positive(wire.weight(), "wire", wire.id(), "weight"),
@@ -45,6 +47,17 @@ record Materials(
         rope.breaking() * positive(rope.workingShare(), "rope", rope.id(), "working share"),
         0.5 * HangCase.AIR * wind * wind * HangCase.DRAG,
         iceMillimetres / 1000);
+  }
+
+  private static void within(String what, double value, double most, String unit) {
+    CourseReader.require(
+        value >= 0 && value <= most,
+        "brief.rules.%s: is %.4g %s; it must lie between 0 and %.0f. Give the design figure of the"
+            + " place.",
+        what,
+        value,
+        unit,
+        most);
   }
 
   private static double positive(double value, String kind, String id, String what) {

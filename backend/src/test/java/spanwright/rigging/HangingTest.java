@@ -146,6 +146,39 @@ class HangingTest {
   }
 
   @Test
+  void a_spring_holds_between_a_weight_and_a_tie() {
+    Place a = new Place(0, 0, 8);
+    Place b = new Place(20, 0, 7);
+    double weight = held(a, b, HangCase.Held.WEIGHT, null);
+    double tied = held(a, b, HangCase.Held.TIED, null);
+    double before = weight;
+    for (double spring : new double[] {0.01, 10, 100, 1000, 1e5, 1e8}) {
+      double pull = held(a, b, HangCase.Held.SPRING, spring);
+      assertTrue(pull >= before - 1e-6, "the stiffer the spring, the more it pulls");
+      before = pull;
+    }
+    assertEquals(weight, held(a, b, HangCase.Held.SPRING, 1e-3), 1e-3);
+    assertEquals(tied, held(a, b, HangCase.Held.SPRING, 1e9), 1e-2 * tied);
+    HangCase soft =
+        new HangCase(a, b, WIRE, null, 80.0, HangCase.Held.SPRING, 25.0, null, null, 200.0);
+    HangAnswer answer = Hanging.solve(soft);
+    double drawn = answer.inWind().length() - answer.calm().length();
+    assertEquals(80 + 200 * drawn, answer.inWind().pullTo().size(), 2);
+    says("spring: is missing", spring(null, HangCase.Held.SPRING));
+    says("spring: holds nothing", spring(5.0, HangCase.Held.TIED));
+  }
+
+  private static HangCase spring(Double spring, HangCase.Held held) {
+    return new HangCase(
+        new Place(0, 0, 8), new Place(20, 0, 7), WIRE, null, 80.0, held, 25.0, null, null, spring);
+  }
+
+  private static double held(Place a, Place b, HangCase.Held held, Double spring) {
+    HangCase given = new HangCase(a, b, WIRE, null, 80.0, held, 25.0, null, null, spring);
+    return Hanging.solve(given).inWind().pullTo().size();
+  }
+
+  @Test
   void what_cannot_hang_is_told_in_a_sentence() {
     Place a = new Place(0, 0, 8);
     Place b = new Place(20, 0, 7);
