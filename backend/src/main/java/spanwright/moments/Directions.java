@@ -102,7 +102,7 @@ public final class Directions {
   static Directions toward(double[] x, double[] y, double[] z) {
     Directions out = new Directions(x.length);
     for (int i = 0; i < x.length; i++) {
-      double level = Math.hypot(x[i], y[i]);
+      double level = Math.sqrt(x[i] * x[i] + y[i] * y[i]);
       out.sinAzimuth[i] = level > 0 ? x[i] / level : 0;
       out.cosAzimuth[i] = level > 0 ? y[i] / level : 1;
       out.cosElevation[i] = level;

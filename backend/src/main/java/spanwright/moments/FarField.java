@@ -84,7 +84,7 @@ final class FarField {
   /** Fresnel's coefficients of a ground of complex relative permittivity epsR + j epsI. */
   static void fresnel(double epsR, double epsI, double se, double ce, double[] out) {
     double ur = epsR - ce * ce;
-    double size = Math.hypot(ur, epsI);
+    double size = Math.sqrt(ur * ur + epsI * epsI);
     double nr = Math.sqrt(0.5 * (size + ur));
     double ni = epsI <= 0 ? -Math.sqrt(Math.max(0, 0.5 * (size - ur))) : 0;
     divide(se - nr, -ni, se + nr, ni, out, 0);
