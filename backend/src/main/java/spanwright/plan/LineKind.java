@@ -16,6 +16,7 @@ import java.util.Map;
  * @param balanced true for two-wire line
  * @param weight kg/m
  * @param diameter overall width that wind sees [m]
+ * @param spacing of the two wires of a balanced line, middle to middle [m]; null for others
  * @param peakVolts stands; 0 when not known
  * @param isDefault taken when the brief names none
  * @param sources field name to where its value comes from
@@ -30,6 +31,7 @@ public record LineKind(
     boolean balanced,
     double weight,
     double diameter,
+    Double spacing,
     double peakVolts,
     @JsonProperty("default") @JsonInclude(JsonInclude.Include.NON_DEFAULT) boolean isDefault,
     Map<String, String> sources) {}

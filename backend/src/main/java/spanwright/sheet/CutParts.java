@@ -44,8 +44,12 @@ public final class CutParts {
    * @param finished electrical length, feedpoint to entry [m]
    * @param madeOff for its two ends [m]
    * @param cut length, to 10 mm upward [m]
+   * @param spacing of its two wires [m], or null
    * @param standOffs number
    * @param standOffReach how far they hold it off [m]
+   * @param standOffsAt along the line from the entry, one for each stand-off [m]
+   * @param nearestMetal name of the metal on the plan nearest to it, or null
+   * @param metalDistance to it [m], or null
    * @param notes how it runs, as sentences
    */
   public record FeedLine(
@@ -57,10 +61,15 @@ public final class CutParts {
       double finished,
       double madeOff,
       double cut,
+      Double spacing,
       int standOffs,
       double standOffReach,
+      List<Double> standOffsAt,
+      String nearestMetal,
+      Double metalDistance,
       List<String> notes) {
     public FeedLine {
+      standOffsAt = List.copyOf(standOffsAt);
       notes = List.copyOf(notes);
     }
   }

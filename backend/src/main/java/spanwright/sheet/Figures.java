@@ -47,6 +47,26 @@ final class Figures {
     return unbroken(length(metres) + suffix());
   }
 
+  /** A sag to sight: to 10 mm in millimetres, or to the half inch. */
+  String sight(double metres) {
+    return feet ? say(metres) : unbroken(whole(Math.round(metres * 100) * 10) + " mm");
+  }
+
+  /** The weight of a mass, rounded up [N]. */
+  static String newtons(double kilograms) {
+    return whole(Math.ceil(kilograms * 9.80665 - CRUMB));
+  }
+
+  /** A coordinate of the plan for an axis, in metres or whole feet. */
+  String axis(double metres) {
+    return whole(feet ? metres / FOOT : metres);
+  }
+
+  /** Metres in one unit of an axis. */
+  double axisUnit() {
+    return feet ? FOOT : 1;
+  }
+
   /** A height to the nearest 0.1 m or inch. */
   String height(double metres) {
     return feet ? halfInches(2 * Math.round(metres / INCH)) : fixed(metres, 1);

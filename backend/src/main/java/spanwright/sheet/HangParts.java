@@ -22,6 +22,7 @@ public final class HangParts {
    * @param pullInWind in the design gust [N]
    * @param mayTake [N], or null when not known and so not checked
    * @param state pulls against what it may take
+   * @param method how wire or rope gets up there, in words
    * @param kilograms to hang, or null
    */
   public record Holding(
@@ -35,6 +36,7 @@ public final class HangParts {
       double pullInWind,
       Double mayTake,
       State state,
+      String method,
       Double kilograms) {}
 
   /**

@@ -27,9 +27,24 @@ final class HangingList {
               held.pullInWind(),
               held.pullLimit(),
               held.state(),
+              method(job, held),
               held.kilograms()));
     }
     return rows;
+  }
+
+  /** How it gets up there, by what holds it. */
+  private static String method(Job job, Placement.Attachment held) {
+    if (job.isTree(held.on())) {
+      return "throw line, from the ground";
+    }
+    if (job.zone(held.on()).isPresent()) {
+      return "rigged on the mast before it is raised";
+    }
+    if (job.isBracket(held.on())) {
+      return "bracket, by ladder";
+    }
+    return "pulley or ring, by ladder";
   }
 
   static List<HangParts.Sag> sags(Job job) {

@@ -97,7 +97,10 @@ final class HardwareList {
             "weight, " + job.holder(held),
             1,
             0,
-            Figures.kilograms(held.kilograms()) + " kg, filled and weighed on site");
+            Figures.kilograms(held.kilograms())
+                + " kg ("
+                + Figures.newtons(held.kilograms())
+                + " N), filled and weighed on site");
       }
     }
     add("cleats", Math.max(0, lifts - weights), 0, null);
@@ -121,7 +124,7 @@ final class HardwareList {
         standOff ? "line stand-offs" : "line clips",
         line.standOffs(),
         1,
-        standOff ? job.figures.say(line.standOffReach()) + " reach" : null);
+        standOff ? job.figures.sayCut(line.standOffReach()) + " reach" : null);
     add("arrester or earthing switch, at the entry", 1, 0, null);
     add("earth rod with clamp and conductor", 1, 0, "as the local code asks");
     String unit = matchingUnit();

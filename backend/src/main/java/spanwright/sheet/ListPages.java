@@ -13,13 +13,11 @@ final class ListPages {
   private static final double GAP = 3.2;
 
   private final SheetModel model;
-  private final Figures figures;
   private final double width;
   private final double half;
 
   private ListPages(SheetModel model) {
     this.model = model;
-    this.figures = new Figures(model.options().units());
     this.width = model.options().paper().width() - 2 * MARGIN;
     this.half = (width - GUTTER) / 2;
   }
@@ -34,38 +32,74 @@ final class ListPages {
     double bottom = model.options().paper().height() - FOOT - 6;
     Flow flow = new Flow(MARGIN, width, top, TOP + 9, bottom);
     flow.pages().get(0).addAll(head.inks());
-    RigTables rig = new RigTables(model, width, half);
-    WorkTables work = new WorkTables(model, width, half);
-    flow.add(rig.overhead());
+    RigTables rig = new RigTables(model);
+    WorkTables work = new WorkTables(model);
+    flow.add(wide(rig.overhead()));
     flow.gap(GAP);
-    List<Flow.Block> left = new ArrayList<>(List.of(rig.wire()));
-    List<Flow.Block> right = new ArrayList<>(List.of(rig.rope()));
-    (height(left) < height(right) ? left : right).add(rig.sags());
+    if (!work.changes().isEmpty()) {
+      flow.add(wide(work.changes()));
+      flow.gap(GAP);
+    }
+    List<Flow.Block> left = new ArrayList<>(List.of(narrow(rig.wire())));
+    List<Flow.Block> right = new ArrayList<>(List.of(narrow(rig.rope())));
+    (height(left) < height(right) ? left : right).add(narrow(rig.sags()));
     flow.pair(left, right, GUTTER, GAP);
     flow.gap(GAP);
-    flow.add(rig.attachments());
+    flow.add(wide(rig.attachments()));
     flow.gap(GAP);
-    flow.add(work.setOut());
+    flow.add(wide(work.setOut()));
     flow.gap(GAP);
-    left = new ArrayList<>(List.of(work.order(), work.hardware()));
-    right = new ArrayList<>(List.of(work.cautions()));
-    for (Flow.Block block :
+    left = new ArrayList<>(List.of(narrow(work.people()), narrow(work.order())));
+    right = new ArrayList<>(List.of(narrow(work.cautions())));
+    for (ListPart part :
         List.of(
+            work.hardware(),
+            work.alternatives(),
             work.checks("Checks before", model.before()),
             work.checks("Checks after", model.after()),
+            work.inspections(),
             work.sweep(),
             work.notes())) {
-      if (block.strips().isEmpty()) {
+      if (part.isEmpty()) {
         continue;
       }
-      (height(left) < height(right) ? left : right).add(block);
+      (height(left) < height(right) ? left : right).add(narrow(part));
     }
     flow.pair(left, right, GUTTER, GAP);
+    flow.gap(GAP);
+    flow.add(wide(work.measures()));
     List<Pen> pages = flow.pages();
     for (int i = 1; i < pages.size(); i++) {
       runningHead(pages.get(i));
     }
     return pages;
+  }
+
+  private Flow.Block wide(ListPart part) {
+    return Setting.block(part, width);
+  }
+
+  private Flow.Block narrow(ListPart part) {
+    return Setting.block(part, half);
+  }
+
+  /** What stands at the right of the head, as it reads. */
+  static List<String> headLines(SheetModel model) {
+    SheetModel.Head head = model.head();
+    Figures figures = new Figures(model.options().units());
+    List<String> lines = new ArrayList<>();
+    lines.add(head.name() + ", " + figures.say(head.wireLength()) + " of wire");
+    lines.add(
+        "Revision "
+            + head.revision()
+            + (head.date() == null ? ", not yet issued" : ", " + head.date())
+            + (head.savedAt() == null ? "" : "; plan as saved " + head.savedAt()));
+    lines.add("Place: " + head.place());
+    lines.add(String.join(", ", head.bands()) + "; " + Figures.whole(head.power()) + " W");
+    lines.add(
+        (figures.unit().equals("m") ? "Metres." : "Feet and inches.")
+            + " Heights above ground at that spot.");
+    return lines;
   }
 
   private static double height(List<Flow.Block> blocks) {
@@ -76,16 +110,9 @@ final class ListPages {
     SheetModel.Head head = model.head();
     double side = 72;
     List<String> right = new ArrayList<>();
-    right.add(head.name() + ", " + figures.say(head.wireLength()) + " of wire");
-    right.addAll(
-        Setting.wrap(
-            String.join(", ", head.bands()) + "; " + Figures.whole(head.power()) + " W",
-            side,
-            Setting.TEXT,
-            false));
-    right.add(
-        (figures.unit().equals("m") ? "Metres." : "Feet and inches.")
-            + " Heights above ground at that spot.");
+    for (String line : headLines(model)) {
+      right.addAll(Setting.wrap(line, side, Setting.TEXT, right.isEmpty()));
+    }
     double size = 21;
     List<String> title = Setting.wrap(head.title(), width - side - 6, size, true);
     while (title.size() > 2 && size > 11) {
@@ -93,7 +120,7 @@ final class ListPages {
       title = Setting.wrap(head.title(), width - side - 6, size, true);
     }
     double y = TOP + 3.2;
-    pen.text(MARGIN, y, "Rigging list", Setting.TEXT, Ink.Anchor.START, false);
+    pen.text(MARGIN, y, "Rigging list, job", Setting.TEXT, Ink.Anchor.START, false);
     for (String line : title.subList(0, Math.min(4, title.size()))) {
       y += size * Letters.POINT * 1.08;
       pen.text(MARGIN, y, line, size, Ink.Anchor.START, true);

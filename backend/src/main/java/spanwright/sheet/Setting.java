@@ -14,118 +14,43 @@ final class Setting {
   private static final double GREY = 0.68;
   private static final double RULE = 0.35;
 
-  /**
-   * A column of a table.
-   *
-   * @param heading over it
-   * @param width in millimetres; 0 takes what is left
-   * @param right whether figures end at its right edge
-   */
-  record Column(String heading, double width, boolean right) {
-    static Column left(String heading, double width) {
-      return new Column(heading, width, false);
-    }
-
-    static Column right(String heading, double width) {
-      return new Column(heading, width, true);
-    }
-  }
-
-  /**
-   * A cell.
-   *
-   * @param text as it reads
-   * @param bold heavy
-   * @param mark a state drawn after the text, or null
-   * @param square whether the text stands in a black square
-   */
-  record Cell(String text, boolean bold, State mark, boolean square) {
-    static Cell of(String text) {
-      return new Cell(text, false, null, false);
-    }
-
-    static Cell bold(String text) {
-      return new Cell(text, true, null, false);
-    }
-
-    static Cell square(int number) {
-      return new Cell(String.valueOf(number), true, null, true);
-    }
-
-    static Cell state(String text, State mark) {
-      return new Cell(text, mark != null && mark != State.CLEAR, mark, false);
-    }
-  }
-
   private Setting() {}
 
-  /** A table with its title, its rows ruled off. */
-  static Flow.Block table(
-      String title, List<Column> columns, List<List<Cell>> rows, List<String> notes, double width) {
-    return table(title, columns, rows, notes, width, false, List.of());
-  }
-
-  /** A table with its title and sentences before its rows. */
-  static Flow.Block table(
-      String title,
-      List<Column> columns,
-      List<List<Cell>> rows,
-      List<String> notes,
-      double width,
-      boolean boxed,
-      List<String> before) {
-    double inner = boxed ? width - 2 * Flow.BOX : width;
+  /** A part of the list, its rows ruled off. */
+  static Flow.Block block(ListPart part, double width) {
+    List<ListPart.Column> columns = part.columns();
+    double inner = part.boxed() ? width - 2 * Flow.BOX : width;
     double[] widths = widths(columns, inner);
     List<Flow.Strip> head = new ArrayList<>();
     List<Flow.Strip> again = new ArrayList<>();
-    head.add(title(title));
-    again.add(title(title + ", continued"));
-    before.forEach(line -> head.addAll(sentence(line, inner, TEXT, false)));
-    if (columns.stream().anyMatch(c -> !c.heading().isEmpty()) && !rows.isEmpty()) {
+    head.add(title(part.title()));
+    again.add(title(part.title() + ", continued"));
+    part.before().forEach(line -> head.addAll(sentence(line, inner, TEXT, false)));
+    if (columns.stream().anyMatch(c -> !c.heading().isEmpty()) && !part.rows().isEmpty()) {
       head.add(headings(columns, widths, inner));
       again.add(headings(columns, widths, inner));
     }
     List<Flow.Strip> strips = new ArrayList<>();
-    for (List<Cell> row : rows) {
-      strips.add(row(columns, widths, row, inner));
-    }
-    notes.forEach(note -> strips.addAll(sentence(note, inner, TEXT - 0.5, false)));
-    return new Flow.Block(head, again, strips, rows.size(), boxed);
+    part.rows().forEach(row -> strips.add(row(columns, widths, row, inner)));
+    part.items().forEach(item -> strips.add(item(item, inner)));
+    int rows = strips.size();
+    part.notes().forEach(note -> strips.addAll(sentence(note, inner, TEXT - 0.5, false)));
+    return new Flow.Block(head, again, strips, rows, part.boxed());
   }
-
-  /** Sentences, each with a tick box, a mark or nothing before it. */
-  static Flow.Block list(String title, List<Item> items, double width) {
-    List<Flow.Strip> strips = new ArrayList<>();
-    for (Item item : items) {
-      strips.add(item(item, width));
-    }
-    return new Flow.Block(
-        List.of(title(title)), List.of(title(title + ", continued")), strips, strips.size(), false);
-  }
-
-  /**
-   * An item of a list.
-   *
-   * @param number before it, or empty
-   * @param box whether it has a tick box
-   * @param pressing whether it has a mark
-   * @param text a sentence
-   */
-  record Item(String number, boolean box, boolean pressing, String text) {}
 
   private static Flow.Strip title(String title) {
     return new Flow.Strip(
         6.2, (pen, x, y) -> pen.text(x, y + 4.2, title, TITLE, Ink.Anchor.START, true));
   }
 
-  private static double[] widths(List<Column> columns, double width) {
-    double fixed = columns.stream().mapToDouble(Column::width).sum();
+  private static double[] widths(List<ListPart.Column> columns, double width) {
+    double fixed = columns.stream().mapToDouble(ListPart.Column::width).sum();
     long open = columns.stream().filter(c -> c.width() == 0).count();
     double rest = open == 0 ? 0 : Math.max(12, (width - fixed) / open);
     return columns.stream().mapToDouble(c -> c.width() == 0 ? rest : c.width()).toArray();
   }
 
-  private static Flow.Strip headings(List<Column> columns, double[] widths, double width) {
+  private static Flow.Strip headings(List<ListPart.Column> columns, double[] widths, double width) {
     List<List<String>> lines = new ArrayList<>();
     int most = 1;
     for (int i = 0; i < columns.size(); i++) {
@@ -157,7 +82,7 @@ final class Setting {
   }
 
   private static Flow.Strip row(
-      List<Column> columns, double[] widths, List<Cell> cells, double width) {
+      List<ListPart.Column> columns, double[] widths, List<ListPart.Cell> cells, double width) {
     List<List<String>> lines = new ArrayList<>();
     int most = 1;
     for (int i = 0; i < cells.size(); i++) {
@@ -178,7 +103,7 @@ final class Setting {
         });
   }
 
-  private static double marks(Cell cell) {
+  private static double marks(ListPart.Cell cell) {
     return cell.mark() == null
         ? 0
         : 4.2 + Letters.width(word(cell.mark()), TEXT, cell.bold(), false);
@@ -189,7 +114,13 @@ final class Setting {
   }
 
   private static void cell(
-      Pen pen, double x, double y, double width, boolean right, Cell cell, List<String> lines) {
+      Pen pen,
+      double x,
+      double y,
+      double width,
+      boolean right,
+      ListPart.Cell cell,
+      List<String> lines) {
     if (cell.square()) {
       Symbols.number(pen, x + 2.1, y + 2.55, cell.text());
       return;
@@ -215,7 +146,7 @@ final class Setting {
     }
   }
 
-  private static Flow.Strip item(Item item, double width) {
+  private static Flow.Strip item(ListPart.Item item, double width) {
     double indent = (item.number().isEmpty() ? 0 : 6) + (item.box() ? 5.5 : 0);
     indent = Math.max(indent, 5);
     List<String> lines = wrap(item.text(), width - indent, TEXT, false);

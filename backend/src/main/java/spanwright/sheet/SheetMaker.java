@@ -21,15 +21,21 @@ final class SheetMaker {
   private SheetMaker() {}
 
   static SheetModel make(
-      Plan plan, Catalogue catalogue, Placement placement, SheetOptions options) {
+      Plan plan,
+      Catalogue catalogue,
+      Placement placement,
+      SheetOptions options,
+      List<Placement> others) {
     Job job = new Job(plan, catalogue, placement, options);
     OverheadParts.Overhead overhead = OverheadList.of(job);
     SetOutParts.SetOut setOut = SetOutList.of(job);
     List<CutParts.WirePiece> wires = WireList.of(job);
-    CutParts.FeedLine line = WireList.feedLine(job);
+    CutParts.FeedLine line = LineRun.of(job);
     List<CutParts.Rope> ropes = RopeList.of(job);
     List<HangParts.Sag> sags = HangingList.sags(job);
     WorkOrder work = new WorkOrder(job, setOut, ropes, sags);
+    List<WorkParts.Alternative> alternatives = ConsentList.of(job, others);
+    MeasureList measures = new MeasureList(job, overhead, setOut, sags);
     return new SheetModel(
         FORMAT,
         options,
@@ -48,6 +54,11 @@ final class SheetMaker {
         work.after(),
         CautionList.of(job, overhead),
         placement.notes(),
+        alternatives,
+        ConsentList.say(job, alternatives),
+        work.people(),
+        measures.list(),
+        MeasureList.inspections(options.date()),
         Allowances.list(),
         DECIDES,
         new SheetModel.Source(plan, catalogue, placement));
@@ -80,7 +91,11 @@ final class SheetMaker {
             : null,
         weather,
         options.savedAt(),
-        options.revision());
+        place(job.plan),
+        options.revision(),
+        options.date(),
+        null,
+        List.of());
   }
 
   private static List<WorkParts.Expected> sweep(Job job) {
@@ -96,5 +111,21 @@ final class SheetMaker {
                     b.lineSwr(),
                     b.matching() == null ? null : b.matching().state()))
         .toList();
+  }
+
+  /** Coordinates to about a metre, or that there are none. */
+  private static String place(Plan plan) {
+    Double latitude = plan.site().latitude();
+    Double longitude = plan.site().longitude();
+    if (latitude == null || longitude == null) {
+      return "no coordinates in the survey";
+    }
+    return Figures.fixed(Math.abs(latitude), 5)
+        + "° "
+        + (latitude < 0 ? "S" : "N")
+        + ", "
+        + Figures.fixed(Math.abs(longitude), 5)
+        + "° "
+        + (longitude < 0 ? "W" : "E");
   }
 }

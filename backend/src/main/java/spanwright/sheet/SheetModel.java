@@ -1,6 +1,7 @@
 package spanwright.sheet;
 
 import com.fasterxml.jackson.annotation.JsonIgnore;
+import com.fasterxml.jackson.annotation.JsonProperty;
 import java.util.List;
 import spanwright.assess.Placement;
 import spanwright.clearance.State;
@@ -28,6 +29,11 @@ import spanwright.plan.Plan;
  * @param after checks when all hangs
  * @param cautions for this site
  * @param notes what else was found worth saying about the placement, as sentences
+ * @param alternatives what consents buy, side by side, the best first
+ * @param alternativesSay what they come to, as sentences
+ * @param people needed, as sentences
+ * @param measures to take and write down, before and after
+ * @param inspections when to look at it again
  * @param allowances what the cut lengths have been given
  * @param decides who has the last word
  * @param source what it was made from; left out of JSON
@@ -50,6 +56,11 @@ public record SheetModel(
     List<String> after,
     List<WorkParts.Caution> cautions,
     List<String> notes,
+    List<WorkParts.Alternative> alternatives,
+    List<String> alternativesSay,
+    List<String> people,
+    List<WorkParts.Measure> measures,
+    List<WorkParts.Inspection> inspections,
     List<CutParts.Allowance> allowances,
     String decides,
     @JsonIgnore Source source) {
@@ -66,7 +77,59 @@ public record SheetModel(
     after = List.copyOf(after);
     cautions = List.copyOf(cautions);
     notes = List.copyOf(notes);
+    alternatives = List.copyOf(alternatives);
+    alternativesSay = List.copyOf(alternativesSay);
+    people = List.copyOf(people);
+    measures = List.copyOf(measures);
+    inspections = List.copyOf(inspections);
     allowances = List.copyOf(allowances);
+  }
+
+  /** The list as it reads, part by part, every figure rounded and in the units asked for. */
+  @JsonProperty
+  public List<ListPart> printed() {
+    return ListPart.of(this);
+  }
+
+  /** The lines at the right of the list's head, as they read. */
+  @JsonProperty
+  public List<String> headLines() {
+    return ListPages.headLines(this);
+  }
+
+  /** What the sheet says in plain pairs, to hold a later one against; left out of no format. */
+  @JsonProperty
+  public List<Issued.Fact> facts() {
+    return Facts.of(this);
+  }
+
+  SheetModel revised(String revision, String date, String since, List<String> changes) {
+    return new SheetModel(
+        format,
+        options,
+        head.revised(revision, date, since, changes),
+        overhead,
+        wires,
+        feedLine,
+        ropes,
+        hardware,
+        attachments,
+        sags,
+        setOut,
+        sweep,
+        order,
+        before,
+        after,
+        cautions,
+        notes,
+        alternatives,
+        alternativesSay,
+        people,
+        measures,
+        MeasureList.inspections(date),
+        allowances,
+        decides,
+        source);
   }
 
   /**
@@ -97,7 +160,11 @@ public record SheetModel(
    * @param verdict a sentence when the placement must not be rigged, or null
    * @param weather limits while working and in design, as sentences
    * @param savedAt when the plan was saved, or null
+   * @param place where the plot lies, as it reads
    * @param revision letter
+   * @param date when the revision was issued, or null when it has not been
+   * @param since the revision it is held against, or null for the first
+   * @param changes what it changes against that one, as sentences
    */
   public record Head(
       String title,
@@ -111,10 +178,35 @@ public record SheetModel(
       String verdict,
       List<String> weather,
       String savedAt,
-      String revision) {
+      String place,
+      String revision,
+      String date,
+      String since,
+      List<String> changes) {
     public Head {
+      changes = List.copyOf(changes);
       bands = List.copyOf(bands);
       weather = List.copyOf(weather);
+    }
+
+    Head revised(String letter, String on, String from, List<String> what) {
+      return new Head(
+          title,
+          placement,
+          name,
+          shape,
+          wireLength,
+          bands,
+          power,
+          state,
+          verdict,
+          weather,
+          savedAt,
+          place,
+          letter,
+          on,
+          from,
+          what);
     }
   }
 }

@@ -11,8 +11,9 @@ import java.util.Locale;
  * @param savedAt when the plan was saved, as it shall read ("2026-05-14 14:58"), or null when it is
  *     not known
  * @param revision letter of the sheet, "A" for the first
+ * @param date the sheet is issued on ("2026-05-14"), or null when it is not
  */
-public record SheetOptions(Paper paper, Units units, String savedAt, String revision) {
+public record SheetOptions(Paper paper, Units units, String savedAt, String revision, String date) {
 
   public SheetOptions {
     paper = paper == null ? Paper.A4 : paper;
@@ -22,7 +23,7 @@ public record SheetOptions(Paper paper, Units units, String savedAt, String revi
 
   /** A first revision. */
   public SheetOptions(Paper paper, Units units, String savedAt) {
-    this(paper, units, savedAt, "A");
+    this(paper, units, savedAt, "A", null);
   }
 
   /** A4, metres, no time. */

@@ -1,6 +1,7 @@
 package spanwright.sheet;
 
 import com.fasterxml.jackson.core.JsonProcessingException;
+import java.util.List;
 import spanwright.assess.Placement;
 import spanwright.plan.Catalogue;
 import spanwright.plan.Json;
@@ -22,7 +23,34 @@ public final class Sheets {
    */
   public static SheetModel of(
       Plan plan, Catalogue catalogue, Placement placement, SheetOptions options) {
-    return SheetMaker.make(plan, catalogue, placement, options);
+    return of(plan, catalogue, placement, options, List.of(), List.of());
+  }
+
+  /**
+   * Works a sheet out, as the revision it is.
+   *
+   * @param plan the survey and the brief, complete
+   * @param catalogue what the placement's ids refer to
+   * @param placement as assessed on that plan
+   * @param options paper, units, times
+   * @param others placements of the same search, to say what consents buy; may be empty
+   * @param issued sheets issued before of this plot, in order; may be empty
+   * @throws IllegalArgumentException with a sentence for people when the placement does not belong
+   *     to the plan
+   */
+  public static SheetModel of(
+      Plan plan,
+      Catalogue catalogue,
+      Placement placement,
+      SheetOptions options,
+      List<Placement> others,
+      List<Issued> issued) {
+    return Revisions.revise(SheetMaker.make(plan, catalogue, placement, options, others), issued);
+  }
+
+  /** What to keep of a sheet when it is handed out on a day. */
+  public static Issued issue(SheetModel model, String date) {
+    return new Issued(model.head().revision(), date, model.head().placement(), Facts.of(model));
   }
 
   /** The whole sheet as PDF: list, then drawing. */

@@ -5,7 +5,6 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.stream.IntStream;
 import spanwright.assess.Placement;
-import spanwright.plan.LineKind;
 import spanwright.plan.Place;
 import spanwright.plan.WireKind;
 
@@ -97,74 +96,6 @@ final class WireList {
     return "to " + far + ", not fed";
   }
 
-  static CutParts.FeedLine feedLine(Job job) {
-    Placement.Feed feed = job.placement.feed();
-    LineKind kind = job.line(feed.line());
-    double run = Job.length(feed.path());
-    double madeOff = 2 * Allowances.LINE_END;
-    double reach =
-        kind.balanced()
-            ? Figures.upToCentimetre(Math.max(Allowances.STAND_OFF_LEAST, 4 * kind.diameter()))
-            : 0;
-    return new CutParts.FeedLine(
-        "L1",
-        kind.id(),
-        kind.name(),
-        run,
-        feed.lineLength() - run,
-        feed.lineLength(),
-        madeOff,
-        Figures.upToCentimetre(feed.lineLength() + madeOff),
-        standOffs(job),
-        reach,
-        lineNotes(job, kind, reach, feed.lineLength() - run));
-  }
-
-  /** One at the entry, and one for each metre that the line runs close to a building. */
-  private static int standOffs(Job job) {
-    List<Place> path = job.placement.feed().path();
-    double close = 0;
-    for (int i = 1; i < path.size(); i++) {
-      Place a = path.get(i - 1);
-      Place b = path.get(i);
-      int steps = Math.max(1, (int) Math.ceil(a.distance(b) / 0.1));
-      for (int k = 0; k < steps; k++) {
-        double t = (k + 0.5) / steps;
-        double x = a.x() + t * (b.x() - a.x());
-        double y = a.y() + t * (b.y() - a.y());
-        if (Sight.nearBuilding(job.plan, x, y)) {
-          close += a.distance(b) / steps;
-        }
-      }
-    }
-    return 1 + (int) Math.ceil(close / Allowances.STAND_OFF_EVERY - 1e-6);
-  }
-
-  private static List<String> lineNotes(Job job, LineKind kind, double reach, double slack) {
-    List<String> notes = new ArrayList<>();
-    if (kind.balanced()) {
-      notes.add(
-          "Stand-offs hold the line "
-              + job.figures.say(reach)
-              + " off walls, and farther off metal: four times its width at least.");
-    } else {
-      notes.add("Clip the line to the wall; bend it no tighter than ten times its thickness.");
-    }
-    if (slack < -0.005) {
-      notes.add(
-          "The line is "
-              + job.figures.say(-slack)
-              + " shorter than its run. Do not cut: choose a longer line and assess again.");
-    } else {
-      notes.add(
-          "Lead the slack, "
-              + job.figures.say(slack)
-              + ", in wide bends clear of metal; do not coil it. A drip loop hangs below the"
-              + " entry.");
-    }
-    return notes;
-  }
-
   /** Part of a run, between two shares of its length. */
   static List<Place> part(List<Place> run, double from, double to) {
     double whole = Job.length(run);
@@ -181,7 +112,8 @@ final class WireList {
     return out;
   }
 
-  private static Place at(List<Place> run, double along) {
+  /** The place so far along a run. */
+  static Place at(List<Place> run, double along) {
     double left = along;
     for (int i = 1; i < run.size(); i++) {
       Place a = run.get(i - 1);

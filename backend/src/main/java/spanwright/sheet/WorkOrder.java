@@ -160,9 +160,28 @@ final class WorkOrder {
     }
     String each =
         sags.stream()
-            .map(s -> s.span() + ": " + job.figures.say(s.middle()))
+            .map(s -> s.span() + ": " + job.figures.sight(s.middle()))
             .collect(Collectors.joining(", "));
     steps.add("Sight the sag at mid-span: " + each + ". Tied ends: take up or let out to suit.");
+  }
+
+  /** How many hands, and where: as the steps need them. */
+  List<String> people() {
+    int masts =
+        job.placement.masts().stream()
+            .mapToInt(m -> m.guyFeet().isEmpty() ? 3 : m.guyFeet().size() + 1)
+            .max()
+            .orElse(0);
+    int hoist = job.placement.attachments().size();
+    int people = Math.max(2, Math.max(masts, hoist));
+    List<String> say = new ArrayList<>();
+    say.add(
+        people
+            + " people: one on each point while hoisting"
+            + (masts > 0 ? ", and for the mast one on each guy or line and one at its foot" : "")
+            + ".");
+    say.add("One of them only watches: the overhead lines, the mast, the people.");
+    return say;
   }
 
   List<String> before() {

@@ -9,52 +9,42 @@ import java.util.stream.IntStream;
 final class WorkTables {
   private final SheetModel model;
   private final Figures figures;
-  private final double width;
-  private final double half;
 
-  /**
-   * Begins.
-   *
-   * @param model what to say
-   * @param width of the page between its margins
-   * @param half of a column
-   */
-  WorkTables(SheetModel model, double width, double half) {
+  WorkTables(SheetModel model) {
     this.model = model;
     this.figures = new Figures(model.options().units());
-    this.width = width;
-    this.half = half;
   }
 
-  Flow.Block setOut() {
+  ListPart setOut() {
     SetOutParts.SetOut s = model.setOut();
     boolean third = s.c() != null;
-    List<Setting.Column> columns =
+    List<ListPart.Column> columns =
         new ArrayList<>(
             List.of(
-                Setting.Column.left("", 7),
-                Setting.Column.left("Point", 0),
-                Setting.Column.right("From " + s.a().letter(), 17),
-                Setting.Column.right("From " + s.b().letter(), 17),
-                Setting.Column.right("Side", 12),
-                Setting.Column.right(third ? "Check, from " + s.c().letter() : "Check", 21),
-                Setting.Column.right("Tapes cross at", 20),
-                Setting.Column.right("Compass from " + s.a().letter() + ", true / magnetic", 28),
-                Setting.Column.right("Height", 14)));
-    List<List<Setting.Cell>> rows = new ArrayList<>();
+                ListPart.Column.left("", 7),
+                ListPart.Column.left("Point", 0),
+                ListPart.Column.right("From " + s.a().letter(), 17),
+                ListPart.Column.right("From " + s.b().letter(), 17),
+                ListPart.Column.right("Side", 12),
+                ListPart.Column.right(third ? "Check, from " + s.c().letter() : "Check", 21),
+                ListPart.Column.right("Tapes cross at", 20),
+                ListPart.Column.right("Compass from " + s.a().letter() + ", true / magnetic", 28),
+                ListPart.Column.right("Height", 14)));
+    List<List<ListPart.Cell>> rows = new ArrayList<>();
     for (SetOutParts.Mark m : s.points()) {
       rows.add(
           List.of(
-              Setting.Cell.square(m.number()),
-              Setting.Cell.of(m.name()),
-              Setting.Cell.bold(figures.length(m.fromA())),
-              Setting.Cell.bold(figures.length(m.fromB())),
-              Setting.Cell.of(m.side()),
-              Setting.Cell.of(m.check() == null ? "–" : figures.length(m.check())),
-              new Setting.Cell(
+              ListPart.Cell.square(m.number()),
+              ListPart.Cell.of(m.name()),
+              ListPart.Cell.bold(figures.length(m.fromA())),
+              ListPart.Cell.bold(figures.length(m.fromB())),
+              ListPart.Cell.of(m.side()),
+              ListPart.Cell.of(m.check() == null ? "–" : figures.length(m.check())),
+              new ListPart.Cell(
                   Figures.degrees(m.crossing()) + (m.flat() ? " flat" : ""), m.flat(), null, false),
-              Setting.Cell.of(Figures.bearing(m.bearing()) + " / " + Figures.bearing(m.magnetic())),
-              Setting.Cell.of(figures.height(m.height()))));
+              ListPart.Cell.of(
+                  Figures.bearing(m.bearing()) + " / " + Figures.bearing(m.magnetic())),
+              ListPart.Cell.of(figures.height(m.height()))));
     }
     List<String> notes = new ArrayList<>();
     notes.add(known(s.a()) + "; " + known(s.b()) + (third ? "; " + known(s.c()) : "") + ".");
@@ -74,7 +64,7 @@ final class WorkTables {
                 + " to "
                 + s.b().letter()
                 + "."));
-    return Setting.table("Set-out by two tapes", columns, rows, notes, width);
+    return ListPart.table("Set-out by two tapes", columns, rows, notes);
   }
 
   private static String known(SetOutParts.Known known) {
@@ -103,72 +93,144 @@ final class WorkTables {
                 + ".");
   }
 
-  Flow.Block order() {
-    List<Setting.Item> items =
+  ListPart order() {
+    List<ListPart.Item> items =
         IntStream.range(0, model.order().size())
             .mapToObj(
-                i -> new Setting.Item(String.valueOf(i + 1), true, false, model.order().get(i)))
+                i -> new ListPart.Item(String.valueOf(i + 1), true, false, model.order().get(i)))
             .toList();
-    return Setting.list("Order of work", items, half);
+    return ListPart.list("Order of work", items);
   }
 
-  Flow.Block checks(String title, List<String> checks) {
-    return Setting.list(
-        title, checks.stream().map(c -> new Setting.Item("", true, false, c)).toList(), half);
+  ListPart checks(String title, List<String> checks) {
+    return ListPart.list(
+        title, checks.stream().map(c -> new ListPart.Item("", true, false, c)).toList());
   }
 
-  Flow.Block cautions() {
-    List<Setting.Item> items = new ArrayList<>();
-    model.cautions().forEach(c -> items.add(new Setting.Item("", false, c.pressing(), c.text())));
-    items.add(new Setting.Item("", false, false, model.decides()));
-    return Setting.list("Cautions for this site", items, half);
+  ListPart cautions() {
+    List<ListPart.Item> items = new ArrayList<>();
+    model.cautions().forEach(c -> items.add(new ListPart.Item("", false, c.pressing(), c.text())));
+    items.add(new ListPart.Item("", false, false, model.decides()));
+    return ListPart.list("Cautions for this site", items);
   }
 
-  Flow.Block notes() {
-    List<Setting.Item> items =
-        model.notes().stream().map(n -> new Setting.Item("", false, false, n)).toList();
-    return Setting.list("Notes", items, half);
+  ListPart people() {
+    return ListPart.list(
+        "People",
+        model.people().stream().map(p -> new ListPart.Item("", false, false, p)).toList());
   }
 
-  Flow.Block hardware() {
-    List<List<Setting.Cell>> rows = new ArrayList<>();
+  /** Figure expected, and a place to write what was found. */
+  ListPart measures() {
+    List<List<ListPart.Cell>> rows = new ArrayList<>();
+    for (WorkParts.Measure m : model.measures()) {
+      rows.add(
+          List.of(
+              ListPart.Cell.of(m.when()),
+              ListPart.Cell.of(m.what()),
+              ListPart.Cell.bold(m.expect()),
+              ListPart.Cell.of("__________")));
+    }
+    return ListPart.table(
+        "Measure and write down",
+        List.of(
+            ListPart.Column.left("When", 13),
+            ListPart.Column.left("What", 0),
+            ListPart.Column.right("Expect", 24),
+            ListPart.Column.right("Found", 24)),
+        rows,
+        List.of());
+  }
+
+  ListPart inspections() {
+    return ListPart.list(
+        "Look again",
+        model.inspections().stream()
+            .map(i -> new ListPart.Item("", true, false, capital(i.when()) + ": " + i.what() + "."))
+            .toList());
+  }
+
+  private static String capital(String text) {
+    return Character.toUpperCase(text.charAt(0)) + text.substring(1);
+  }
+
+  ListPart alternatives() {
+    List<List<ListPart.Cell>> rows = new ArrayList<>();
+    for (WorkParts.Alternative a : model.alternatives()) {
+      String masts =
+          a.mastHeights().isEmpty()
+              ? "none"
+              : a.mastHeights().stream().map(figures::height).collect(Collectors.joining(" + "));
+      String which = a.placement() + ", " + a.shape() + (a.here() ? ", this sheet" : "");
+      rows.add(
+          List.of(
+              new ListPart.Cell(a.needs(), a.here(), null, false),
+              ListPart.Cell.of(masts),
+              ListPart.Cell.of(which),
+              ListPart.Cell.bold((a.score() >= 0 ? "+" : "") + Figures.fixed(a.score(), 1))));
+    }
+    return ListPart.table(
+        "What the consents buy",
+        List.of(
+            ListPart.Column.left("Needs", 0),
+            ListPart.Column.right("New mast", 17),
+            ListPart.Column.right("Placement", 30),
+            ListPart.Column.right("dB", 11)),
+        rows,
+        model.alternativesSay());
+  }
+
+  ListPart changes() {
+    String title =
+        model.head().since() == null ? "Changes" : "Changed since revision " + model.head().since();
+    return ListPart.list(
+        title,
+        model.head().changes().stream().map(c -> new ListPart.Item("", false, false, c)).toList());
+  }
+
+  ListPart notes() {
+    List<ListPart.Item> items =
+        model.notes().stream().map(n -> new ListPart.Item("", false, false, n)).toList();
+    return ListPart.list("Notes", items);
+  }
+
+  ListPart hardware() {
+    List<List<ListPart.Cell>> rows = new ArrayList<>();
     for (CutParts.Item i : model.hardware()) {
       String spares = i.spares() == 0 ? "" : " + " + i.spares();
       rows.add(
           List.of(
-              Setting.Cell.bold(
+              ListPart.Cell.bold(
                   i.length() == null ? i.count() + spares : figures.sayCut(i.length())),
-              Setting.Cell.of(i.what() + (i.note() == null ? "" : ", " + i.note()))));
+              ListPart.Cell.of(i.what() + (i.note() == null ? "" : ", " + i.note()))));
     }
-    return Setting.table(
+    return ListPart.table(
         "Hardware, with spares",
-        List.of(Setting.Column.left("", 17), Setting.Column.left("", 0)),
+        List.of(ListPart.Column.left("", 17), ListPart.Column.left("", 0)),
         rows,
-        List.of(),
-        half);
+        List.of());
   }
 
-  Flow.Block sweep() {
-    List<List<Setting.Cell>> rows = new ArrayList<>();
+  ListPart sweep() {
+    List<List<ListPart.Cell>> rows = new ArrayList<>();
     for (WorkParts.Expected e : model.sweep()) {
       rows.add(
           List.of(
-              Setting.Cell.of(e.band()),
-              Setting.Cell.of(Figures.fixed(e.frequency(), 3)),
-              Setting.Cell.of(Figures.impedance(e.resistance(), e.reactance())),
-              Setting.Cell.of(Figures.fixed(e.lineSwr(), e.lineSwr() < 100 ? 1 : 0)),
-              e.match() == null ? Setting.Cell.of("–") : Setting.Cell.state("", e.match())));
+              ListPart.Cell.of(e.band()),
+              ListPart.Cell.of(Figures.fixed(e.frequency(), 3)),
+              ListPart.Cell.of(Figures.impedance(e.resistance(), e.reactance())),
+              ListPart.Cell.of(Figures.fixed(e.lineSwr(), e.lineSwr() < 100 ? 1 : 0)),
+              e.match() == null ? ListPart.Cell.of("–") : ListPart.Cell.state("", e.match())));
     }
-    return Setting.table(
+    return ListPart.table(
         "What the sweep should find, at the entry",
         List.of(
-            Setting.Column.left("Band", 0),
-            Setting.Column.right("MHz", 13),
-            Setting.Column.right("Impedance", 27),
-            Setting.Column.right("Line SWR", 15),
-            Setting.Column.right("Match", 18)),
+            ListPart.Column.left("Band", 0),
+            ListPart.Column.right("MHz", 13),
+            ListPart.Column.right("Impedance", 27),
+            ListPart.Column.right("Line SWR", 15),
+            ListPart.Column.right("Match", 18)),
         rows,
-        List.of(),
-        half);
+        List.of());
   }
 }

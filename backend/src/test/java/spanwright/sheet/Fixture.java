@@ -211,6 +211,7 @@ final class Fixture {
                 true,
                 0.06,
                 0.025,
+                0.025,
                 5000,
                 true,
                 Map.of())),
