@@ -203,7 +203,7 @@ export function mount(root, store, shell) {
         if (/** @type {any} */ (problem).status !== 404) throw problem;
       }
     }
-    return shell.api.sheet(planOf(state), placement, type, options);
+    return shell.api.sheet(planOf(state), placement, type, { ...options, ...(state.search.id ? { search: state.search.id } : {}) });
   }
 
   /**
@@ -309,7 +309,7 @@ export function mount(root, store, shell) {
     return html(
       'div',
       { class: `sheet-pages paper-${choice.paper.toLowerCase()}` },
-      sheetList(loaded.model, state.units),
+      sheetList(loaded.model),
       loaded.drawing
         ? html(
             'div',

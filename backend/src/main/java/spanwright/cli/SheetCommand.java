@@ -80,10 +80,15 @@ final class SheetCommand implements Callable<Integer> {
     SheetOptions options = options();
     Path file = Documents.path(resultFile);
     Placement placement = placement(plan, file);
-    SheetModel model =
-        CaseCommand.reckon(file, () -> Sheets.of(plan, Catalogues.standard(), placement, options));
     Path folder = folder();
-    String stem = "sheet-" + placement.id().replaceAll("[^A-Za-z0-9]+", "-");
+    IssuedSheets issued = IssuedSheets.in(folder);
+    List<Placement> others = others(plan, file);
+    SheetModel model =
+        CaseCommand.reckon(
+            file,
+            () ->
+                Sheets.of(plan, Catalogues.standard(), placement, options, others, issued.list()));
+    String stem = issued.stem(model);
     write(folder, stem + ".pdf", Sheets.toPdf(model));
     write(folder, stem + ".csv", Sheets.toCsv(model).getBytes(StandardCharsets.UTF_8));
     write(folder, stem + ".json", Sheets.toJson(model).getBytes(StandardCharsets.UTF_8));
@@ -93,6 +98,7 @@ final class SheetCommand implements Callable<Integer> {
     } catch (NoCoordinatesException e) {
       console.err().println("No GeoJSON is written: " + e.getMessage());
     }
+    issued.keep(Sheets.issue(model, options.date()));
     return Exit.DONE;
   }
 
@@ -110,7 +116,8 @@ final class SheetCommand implements Callable<Integer> {
       // The sheet then shows no time.
     }
     try {
-      return SheetOptions.of(paper, units, saved);
+      SheetOptions options = SheetOptions.of(paper, units, saved);
+      return saved == null ? options : options.on(saved.substring(0, 10));
     } catch (IllegalArgumentException e) {
       throw new ParameterException(spec.commandLine(), e.getMessage());
     }
@@ -138,6 +145,21 @@ final class SheetCommand implements Callable<Integer> {
     }
     String has = ids.isEmpty() ? "It has none." : "It has " + String.join(", ", ids) + ".";
     throw Failure.badInput(file + ": there is no placement " + placementId + ". " + has);
+  }
+
+  /** Every placement of the result that can be read, to say what consents buy. */
+  private static List<Placement> others(Plan plan, Path file) {
+    JsonNode placements = Documents.tree(file, Documents.LONGEST_RESULT).path("placements");
+    PlacementReader reader = new PlacementReader(plan, Catalogues.standard());
+    List<Placement> others = new ArrayList<>();
+    for (JsonNode each : placements) {
+      List<Fault> faults = new ArrayList<>();
+      Placement other = reader.whole(each, "placements", faults);
+      if (faults.isEmpty() && other != null) {
+        others.add(other);
+      }
+    }
+    return others;
   }
 
   private Path folder() {

@@ -33,6 +33,7 @@ final class DrawingPage {
   private final Plan plan;
   private final Placement placement;
   private final GroundSurface ground;
+  private final Figures figures;
   private final double left;
   private final double width;
   private final double titleTop;
@@ -43,6 +44,7 @@ final class DrawingPage {
     this.model = model;
     this.plan = model.source().plan();
     this.placement = model.source().placement();
+    this.figures = new Figures(model.options().units());
     this.ground = GroundSurface.of(plan);
     this.left = ListPages.MARGIN + RULER;
     this.width = model.options().paper().width() - ListPages.MARGIN - left;
@@ -185,19 +187,19 @@ final class DrawingPage {
         new Ink.Window(frame.left(), frame.top(), frame.width(), frame.height(), inside.inks()));
   }
 
-  /** Coordinates of the plan, outside the frame on the left and at the foot, in metres. */
-  private static void rulers(Pen pen, Frame frame, double step) {
+  /** Coordinates of the plan, outside the frame on the left and at the foot, in its units. */
+  private void rulers(Pen pen, Frame frame, double step) {
     double foot = frame.top() + frame.height();
     for (double x = Math.ceil(frame.x0() / step) * step;
         frame.x(x) <= frame.left() + frame.width();
         x += step) {
       pen.line(frame.x(x), foot, frame.x(x), foot + 1.2, 0.25, 1);
-      pen.text(frame.x(x), foot + 3.8, Figures.whole(x), 7, Ink.Anchor.MIDDLE, false, 0.8);
+      pen.text(frame.x(x), foot + 3.8, figures.axis(x), 7, Ink.Anchor.MIDDLE, false, 0.8);
     }
     for (double y = Math.ceil(frame.y0() / step) * step; frame.y(y) >= frame.top(); y += step) {
       pen.line(frame.left() - 1.2, frame.y(y), frame.left(), frame.y(y), 0.25, 1);
       pen.text(
-          frame.left() - 1.8, frame.y(y) + 0.9, Figures.whole(y), 7, Ink.Anchor.END, false, 0.8);
+          frame.left() - 1.8, frame.y(y) + 0.9, figures.axis(y), 7, Ink.Anchor.END, false, 0.8);
     }
   }
 
@@ -227,7 +229,9 @@ final class DrawingPage {
         top - 2.2,
         "1 : "
             + Figures.whole(scale)
-            + ", heights true, from the plan's zero at the edge,"
+            + ", heights true, "
+            + (figures.unit().equals("m") ? "metres" : "feet")
+            + " from the plan's zero at the edge,"
             + " above the ground at the points",
         7.5,
         Ink.Anchor.END,

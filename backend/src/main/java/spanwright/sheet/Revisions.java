@@ -20,7 +20,8 @@ final class Revisions {
     Issued last = issued.get(issued.size() - 1);
     List<String> changes = Facts.changes(last.facts(), Facts.of(model));
     if (!changes.isEmpty()) {
-      return model.revised(after(last.revision()), null, last.revision(), changes);
+      return model.revised(
+          after(last.revision()), model.options().date(), last.revision(), changes);
     }
     if (issued.size() == 1) {
       return model.revised(last.revision(), last.date(), null, List.of());

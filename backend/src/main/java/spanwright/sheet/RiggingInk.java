@@ -46,21 +46,27 @@ final class RiggingInk {
     for (Placement.RopeRun rope : placement.ropes()) {
       List<double[]> path = frame.places(rope.points());
       pen.path(path, 1.1, 0);
-      pen.path(path, 0.35, 1);
+      pen.path(path, 0.35, 1, 1.8, 0.9);
       labels.avoid(path, 2);
     }
   }
 
   private void feedLine() {
     List<double[]> path = frame.places(placement.feed().path());
-    pen.path(path, 1.2, 0);
-    pen.path(path, 0.4, 1, 1.3, 0.7);
+    twin(pen, path);
     labels.avoid(path, 3);
     if (path.size() > 1) {
       double[] m = SurveyInk.along(path, 0.5);
       String text = model.feedLine().mark() + " " + figures.length(model.feedLine().finished());
       labels.ask(35, Labels.around(m[0], m[1], text, SurveyInk.BODY, true, 1.2));
     }
+  }
+
+  /** The feed line: two thin lines side by side, told from every other kind without colour. */
+  static void twin(Pen pen, List<double[]> path) {
+    pen.path(path, 1.6, 0);
+    pen.path(path, 1.0, 1);
+    pen.path(path, 0.5, 0);
   }
 
   private void wires() {

@@ -21,6 +21,11 @@ public record SheetOptions(Paper paper, Units units, String savedAt, String revi
     revision = revision == null || revision.isBlank() ? "A" : revision;
   }
 
+  /** The same, issued on a day ("2026-05-14"). */
+  public SheetOptions on(String day) {
+    return new SheetOptions(paper, units, savedAt, revision, day);
+  }
+
   /** A first revision. */
   public SheetOptions(Paper paper, Units units, String savedAt) {
     this(paper, units, savedAt, "A", null);

@@ -1,8 +1,10 @@
 package spanwright.sheet;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import spanwright.assess.Placement;
+import spanwright.clearance.Clearance;
 import spanwright.plan.GroundSurface;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
@@ -128,13 +130,14 @@ final class SideInk {
   }
 
   private void axis() {
-    double step = frame.mm(5) >= 9 ? 5 : frame.mm(10) >= 9 ? 10 : 50;
+    double unit = figures.axisUnit();
+    double step = unit * (frame.mm(5 * unit) >= 9 ? 5 : frame.mm(10 * unit) >= 9 ? 10 : 50);
     double top = frame.metres(frame.height()) + frame.y0();
     for (double z = Math.ceil(frame.y0() / step) * step; z < top; z += step) {
       double y = frame.y(z);
       pen.line(frame.left() - 1.5, y, frame.left(), y, 0.25, 1);
       pen.line(frame.left(), y, frame.left() + frame.width(), y, 0.1, 0.2);
-      pen.text(frame.left() - 2.2, y + 0.9, Figures.whole(z), 7, Ink.Anchor.END, false, 0.8);
+      pen.text(frame.left() - 2.2, y + 0.9, figures.axis(z), 7, Ink.Anchor.END, false, 0.8);
     }
   }
 
@@ -182,7 +185,7 @@ final class SideInk {
       foot = mast.foot().z();
       for (Place guy : mast.guyFeet()) {
         double along = leg.along(guy.onPlan());
-        pen.line(x, frame.y(mast.top().z()), frame.x(along), frame.y(guy.z()), 0.25, 1);
+        pen.line(x, frame.y(mast.top().z()), frame.x(along), frame.y(guy.z()), 0.25, 1, 1.8, 0.9);
       }
     }
     if (stands) {
@@ -204,7 +207,7 @@ final class SideInk {
         double aside = path.isEmpty() ? 0 : 0.9;
         path.add(new double[] {frame.x(leg.along(p.onPlan())) + aside, frame.y(p.z())});
       }
-      pen.path(path, 0.3, 1);
+      pen.path(path, 0.3, 1, 1.8, 0.9);
       if (rope.what().equals("fall")) {
         double[] end = path.get(path.size() - 1);
         pen.rect(end[0] - 1, end[1], 2, 2.4, 0.3, 1, 0);
@@ -226,8 +229,7 @@ final class SideInk {
       for (Place p : placement.feed().path()) {
         path.add(new double[] {frame.x(leg.along(p.onPlan())), frame.y(p.z())});
       }
-      pen.path(path, 1.1, 0);
-      pen.path(path, 0.4, 1, 1.3, 0.7);
+      RiggingInk.twin(pen, path);
     }
   }
 
@@ -236,7 +238,7 @@ final class SideInk {
     for (Place p : leg.span().points()) {
       run.add(new double[] {frame.x(leg.along(p.onPlan())), frame.y(p.z())});
     }
-    pen.path(run, 0.35, 1);
+    pen.path(run, 0.35, 1, 1.8, 0.9);
     for (Placement.Conductor conductor : placement.conductors()) {
       List<double[]> wire = new ArrayList<>();
       for (Place p : conductor.points()) {
@@ -260,6 +262,26 @@ final class SideInk {
       pen.rect(frame.x(s) - 1, frame.y(feed.z()) - 1, 2, 2, 0.4, 0, 1);
     }
     dimensions(leg, run);
+    nearest(leg);
+  }
+
+  /** The distance to whatever stands nearest to this span, with its name. */
+  private void nearest(Leg leg) {
+    placement.clearances().stream()
+        .filter(c -> c.at() != null && c.toAt() != null && !c.to().equals("boundary"))
+        .filter(c -> OverheadList.regime(c) == OverheadList.Regime.AS_IT_HANGS)
+        .filter(c -> Math.abs(leg.aside(c.at().onPlan())) < 2)
+        .filter(c -> leg.along(c.at().onPlan()) >= leg.start() - 0.5)
+        .filter(c -> leg.along(c.at().onPlan()) <= leg.start() + leg.length() + 0.5)
+        .min(Comparator.comparingDouble(Clearance::distance))
+        .ifPresent(
+            c ->
+                labels.ask(
+                    24,
+                    Dimensions.between(
+                        new double[] {frame.x(leg.along(c.at().onPlan())), frame.y(c.at().z())},
+                        new double[] {frame.x(leg.along(c.toAt().onPlan())), frame.y(c.toAt().z())},
+                        figures.found(c.distance()) + " to " + model.source().name(c.to()))));
   }
 
   private void dimensions(Leg leg, List<double[]> run) {

@@ -62,13 +62,14 @@ final class SurveyInk {
 
   /** Metres between grid lines: 12 mm of paper at least. */
   double gridStep() {
+    double unit = figures.axisUnit();
     double step = 1;
     for (double next : new double[] {5, 10, 20, 50, 100, 200, 500, 1000, 5000, 20000, 100000}) {
-      if (frame.mm(step) < 12) {
+      if (frame.mm(step * unit) < 12) {
         step = next;
       }
     }
-    return step;
+    return step * unit;
   }
 
   private double right() {

@@ -145,8 +145,8 @@ final class TitleBlock {
   private static void sample(Pen pen, int which, double x, double y) {
     switch (which) {
       case 0 -> pen.line(x, y, x + 9, y, 0.8, 1);
-      case 1 -> pen.line(x, y, x + 9, y, 0.35, 1);
-      case 2 -> pen.line(x, y, x + 9, y, 0.4, 1, 1.3, 0.7);
+      case 1 -> pen.line(x, y, x + 9, y, 0.35, 1, 1.8, 0.9);
+      case 2 -> RiggingInk.twin(pen, List.of(new double[] {x, y}, new double[] {x + 9, y}));
       case 3 -> pen.line(x, y, x + 9, y, 0.4, 1, 4, 1, 0.6, 1);
       case 4 ->
           pen.path(Symbols.zigZag(List.of(new double[] {x, y}, new double[] {x + 9, y})), 0.5, 1);

@@ -120,7 +120,7 @@ final class PlacementRoutes {
                                 ? "The search is still running. Its sheets are there when it is"
                                     + " done."
                                 : "The search has no placement of that id.")));
-    write(ctx, type, job.plan(), placement, job.savedAt());
+    write(ctx, type, job.plan(), placement, job);
   }
 
   private void sheetOfBody(Context ctx) {
@@ -129,7 +129,15 @@ final class PlacementRoutes {
     List<Fault> faults = new ArrayList<>();
     Placement placement = asked.reader().whole(asked.placement(), "placement", faults);
     require("The placement", faults);
-    write(ctx, type, asked.plan(), placement, null);
+    write(ctx, type, asked.plan(), placement, madeFrom(ctx, asked.plan()));
+  }
+
+  /** The search a placement made by hand goes back to, if the server holds it and its plan. */
+  private SearchJob madeFrom(Context ctx, Plan plan) {
+    String id = ctx.queryParam("search");
+    return id == null
+        ? null
+        : searches.find(id).filter(job -> job.plan().equals(plan)).orElse(null);
   }
 
   private static String type(Context ctx) {
@@ -142,10 +150,12 @@ final class PlacementRoutes {
   }
 
   private static void write(
-      Context ctx, String type, Plan plan, Placement placement, Instant savedAt) {
-    SheetOptions options = options(ctx, savedAt);
+      Context ctx, String type, Plan plan, Placement placement, SearchJob job) {
+    SheetOptions options = options(ctx, job == null ? null : job.savedAt());
+    List<Placement> others = job == null ? List.of() : job.placements();
     try {
-      SheetModel model = Sheets.of(plan, Catalogues.standard(), placement, options);
+      SheetModel model =
+          Sheets.of(plan, Catalogues.standard(), placement, options, others, List.of());
       byte[] bytes = bytes(type, model);
       ctx.contentType(TYPES.get(type));
       ctx.header("Cache-Control", "no-store");

@@ -98,6 +98,11 @@ final class SearchJob implements Search.Listener {
     return state;
   }
 
+  /** Every placement of the result; none while the search is not done. */
+  synchronized List<Placement> placements() {
+    return result == null ? List.of() : result.placements();
+  }
+
   /** The placement of that id in the result, if the search is done and has it. */
   synchronized Optional<Placement> placement(String placementId) {
     return result == null
