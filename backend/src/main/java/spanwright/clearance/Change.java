@@ -288,7 +288,8 @@ record Change(Kind kind, int attachment, double direction, double amount, String
         Place at = to.get(attachment).at();
         return String.format(
             Locale.ROOT,
-            "Hold that end at %s instead, %.2f m above the ground.",
+            "Hold the wire's %s at %s instead, %.2f m above the ground.",
+            attachment == 0 ? "first end" : attachment == to.size() - 1 ? "last end" : "bend",
             holders.get(attachment).name(),
             at.z() - ground.heightAt(at.x(), at.y()));
       }

@@ -3,6 +3,8 @@ package spanwright.clearance;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import org.locationtech.jts.geom.Envelope;
+import org.locationtech.jts.index.strtree.STRtree;
 import spanwright.plan.Building;
 import spanwright.plan.Canopy;
 import spanwright.plan.GroundSurface;
@@ -31,7 +33,7 @@ final class Screen {
   private final Overhead overhead;
   private final Boundary boundary;
   private final Map<String, Holder> holders;
-  private final List<Roof> roofs = new ArrayList<>();
+  private final STRtree roofs = new STRtree();
   private final List<Area> noWire = new ArrayList<>();
   private final List<double[]> noWireBoxes = new ArrayList<>();
   private final List<Area> noMast = new ArrayList<>();
@@ -57,8 +59,11 @@ final class Screen {
     this.rigging = rigging;
     holders = Holder.all(plan);
     for (Building each : plan.buildings()) {
-      roofs.add(Roof.of(each, ground));
+      Roof roof = Roof.of(each, ground);
+      double[] box = new Area(each.footprint()).box(0, 0);
+      roofs.insert(new Envelope(box[0], box[3], box[1], box[4]), roof);
     }
+    roofs.build();
     for (Zone each : plan.zones()) {
       Area area = new Area(each.area());
       switch (each.rule()) {
@@ -113,7 +118,7 @@ final class Screen {
         return false;
       }
     }
-    for (Roof each : roofs) {
+    for (Roof each : roofsAt(new Envelope(x, x, y, y))) {
       if (each.covers(x, y) && each.heightAt(x, y) - foot > Solid.SUNK + 1e-6) {
         return false;
       }
@@ -294,18 +299,33 @@ final class Screen {
     return true;
   }
 
+  @SuppressWarnings("unchecked")
+  private List<Roof> roofsAt(Envelope where) {
+    return roofs.query(where);
+  }
+
   private boolean piece(Place a, Place b) {
     if (boundary.signed(a.x(), a.y(), b.x(), b.y(), false) < -LITTLE) {
       return false;
     }
     double length = a.distance(b);
     int steps = (int) Math.max(2, Math.ceil(length / 0.75));
+    double lowest = Math.min(a.z(), b.z());
+    List<Roof> under = new ArrayList<>();
+    for (Roof each : roofsAt(new Envelope(a.x(), b.x(), a.y(), b.y()))) {
+      if (lowest < each.top() - LITTLE) {
+        under.add(each);
+      }
+    }
+    if (under.isEmpty() && noWire.isEmpty() && high.isEmpty()) {
+      return true;
+    }
     for (int k = 0; k <= steps; k++) {
       double t = (double) k / steps;
       double x = a.x() + t * (b.x() - a.x());
       double y = a.y() + t * (b.y() - a.y());
       double z = a.z() + t * (b.z() - a.z());
-      for (Roof each : roofs) {
+      for (Roof each : under) {
         if (z < each.top() - LITTLE && each.covers(x, y) && z < each.heightAt(x, y) - LITTLE) {
           return false;
         }
