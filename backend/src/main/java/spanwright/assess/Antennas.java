@@ -24,6 +24,9 @@ final class Antennas {
    */
   private static final double LEAST_HEIGHT = 0.05;
 
+  /** A gap's middle stays this far from where wires are joined [m]. */
+  private static final double LEAST_FROM_JOINT = 0.1;
+
   private final Catalogue catalogue;
   private final GroundSurface surface;
   private final Metal metal;
@@ -61,7 +64,16 @@ final class Antennas {
     }
     wires.addAll(with.over(plane));
     var feed = rigged.layout().feed();
-    return AntennaModel.of(wires, feed.conductor(), feed.fraction());
+    return AntennaModel.of(wires, feed.conductor(), fraction(rigged));
+  }
+
+  /** A feedpoint where return wires meet the wire's end is a gap in the wire just beside them. */
+  private static double fraction(Rigged rigged) {
+    double fraction = rigged.layout().feed().fraction();
+    double length = rigged.conductors().get(rigged.layout().feed().conductor()).length();
+    double least = LEAST_FROM_JOINT / length;
+    boolean joined = rigged.conductors().size() > 1 && length > 4 * LEAST_FROM_JOINT;
+    return joined ? Math.max(least, Math.min(1 - least, fraction)) : fraction;
   }
 
   /**
