@@ -139,6 +139,21 @@ public final class Assessor {
     return new Hung(layout, rigged, clearances.check(rigged));
   }
 
+  /**
+   * As {@link #hang}, told only what is foul or tight: enough to know whether it is allowed.
+   *
+   * @throws IllegalArgumentException with a sentence when the layout makes no sense
+   */
+  public Hung hangClosely(Layout layout) {
+    var rigged = rigging.hang(layout);
+    return new Hung(layout, rigged, clearances.checkClosely(rigged));
+  }
+
+  /** The same hung layout with every distance worth telling. */
+  public Hung told(Hung hung) {
+    return new Hung(hung.layout(), hung.rigged(), clearances.check(hung.rigged()));
+  }
+
   /** Why a hung layout is not allowed, with cures; empty when it is. */
   public List<Refusal> refuse(Hung hung) {
     return clearances.refuse(hung.layout(), hung.rigged(), hung.clearances());

@@ -18,9 +18,8 @@ final class Boundary {
   private final BoundaryRule.Overhang[] allows;
   private final double required;
   private final double guyRequired;
-  private final double range;
 
-  Boundary(Plan plan, RuleBook rules, double range) {
+  Boundary(Plan plan, RuleBook rules) {
     area = new Area(plan.boundary());
     allows = new BoundaryRule.Overhang[plan.boundary().size()];
     java.util.Arrays.fill(allows, BoundaryRule.Overhang.NONE);
@@ -31,7 +30,6 @@ final class Boundary {
     }
     required = rules.value("boundary");
     guyRequired = rules.value("guy-in-plot");
-    this.range = range;
   }
 
   void check(Strand strand, Obstacle.Scene scene, Tally tally) {
@@ -72,7 +70,7 @@ final class Boundary {
       for (int i = 0; i + 3 < p.length; i += 3) {
         double allowance = strand.slack(s, i);
         boolean own = rope && !still && nearOwn(strand, scene, p, i);
-        if (!own && !isDeepInside(p, i, allowance + worst.reach(required, range))) {
+        if (!own && !isDeepInside(p, i, allowance + worst.reach(required))) {
           piece(p, i, rope, allowance, strand.part.word, worst);
         }
       }
@@ -102,7 +100,7 @@ final class Boundary {
     double found = signed(p[i], p[i + 1], p[i + 3], p[i + 4], rope) - allowance;
     // Standing on the line is not beyond it.
     found = found < 0 && found > -ROUNDING ? 0 : found;
-    if (found < range && found - required < worst.spare()) {
+    if (found < worst.range(required) && found - required < worst.spare()) {
       boolean first =
           toForbidden(p[i], p[i + 1], rope) <= toForbidden(p[i + 3], p[i + 4], rope)
               == area.contains(p[i], p[i + 1]);

@@ -55,7 +55,7 @@ public final class Clearances {
     headroom = rules.value("headroom");
     rigging = Rigging.of(plan, catalogue);
     overhead = new Overhead(plan, catalogue, ground, rules);
-    boundary = new Boundary(plan, rules, RANGE);
+    boundary = new Boundary(plan, rules);
     List<Obstacle> obstacles = obstacles(plan);
     for (Obstacle each : obstacles) {
       double[] box = each.box();
@@ -77,32 +77,32 @@ public final class Clearances {
   private List<Obstacle> obstacles(Plan plan) {
     List<Obstacle> all = new ArrayList<>();
     for (Building each : plan.buildings()) {
-      all.add(new Solid(Roof.of(each, ground), rules, RANGE));
+      all.add(new Solid(Roof.of(each, ground), rules));
     }
     for (Support each : plan.supports()) {
       if (each.canopy() != null) {
         double level = ground.heightAt(each.at());
-        all.add(new Crown(each.id(), each.at(), each.canopy(), level, rules, RANGE));
+        all.add(new Crown(each.id(), each.at(), each.canopy(), level, rules));
       }
     }
     for (Tree each : plan.trees()) {
       if (each.canopy() != null) {
         double level = ground.heightAt(each.at());
-        all.add(new Crown(each.id(), each.at(), each.canopy(), level, rules, RANGE));
+        all.add(new Crown(each.id(), each.at(), each.canopy(), level, rules));
       }
     }
     for (PeopleVolume each : plan.people()) {
-      all.add(new Volumes.People(each, ground, rules, RANGE));
+      all.add(new Volumes.People(each, ground, rules));
     }
     for (Zone each : plan.zones()) {
       switch (each.rule()) {
-        case NO_WIRE -> all.add(new Volumes.NoWire(each, rules, RANGE));
+        case NO_WIRE -> all.add(new Volumes.NoWire(each, rules));
         case HEADROOM -> all.add(new Volumes.Headroom(each, lowest, rules));
         case NO_MAST -> noMast.add(each);
       }
     }
     for (Metalwork each : plan.metalwork()) {
-      all.add(new Metal(each, ground, rules, RANGE));
+      all.add(new Metal(each, ground, rules));
     }
     return all;
   }
@@ -143,11 +143,23 @@ public final class Clearances {
    * are more than a few metres beyond what is required.
    */
   public List<Clearance> check(Rigged rigged) {
+    return check(rigged, RANGE);
+  }
+
+  /**
+   * What is foul or tight, and every overhead line: as {@link #check}, without looking at what is
+   * clear by more. For a search, that only wants to know what is allowed.
+   */
+  public List<Clearance> checkClosely(Rigged rigged) {
+    return check(rigged, 0);
+  }
+
+  private List<Clearance> check(Rigged rigged, double range) {
     List<Strand> strands = Strand.of(rigged);
     List<Holder> holders = holders(rigged);
     List<Place> at = rigged.attachments().stream().map(Rigged.Attachment::at).toList();
     Obstacle.Scene scene = new Obstacle.Scene(holders, at, rigging.entry());
-    Tally tally = new Tally(margin);
+    Tally tally = new Tally(margin, range);
     for (Strand strand : strands) {
       height(strand, tally);
       boundary.check(strand, scene, tally);
@@ -155,7 +167,7 @@ public final class Clearances {
         each.check(strand, scene, tally);
       }
     }
-    masts(rigged, tally);
+    masts(rigged, range, tally);
     List<Clearance> all = new ArrayList<>(tally.clearances());
     overhead.check(rigged, strands, holders, ground, all);
     all.sort(
@@ -194,12 +206,12 @@ public final class Clearances {
     }
   }
 
-  private void masts(Rigged rigged, Tally tally) {
+  private void masts(Rigged rigged, double range, Tally tally) {
     for (Rigged.Mast mast : rigged.masts()) {
       for (Zone each : noMast) {
         Area area = new Area(each.area());
         double away = area.signed(mast.foot().x(), mast.foot().y());
-        if (away < RANGE) {
+        if (away < range) {
           double[] edge =
               area.footOnEdge(
                   area.nearestEdge(mast.foot().x(), mast.foot().y()),

@@ -24,9 +24,8 @@ final class Crown implements Obstacle {
   private final double end;
   private final double line;
   private final double rigging;
-  private final double range;
 
-  Crown(String id, Point at, Canopy canopy, double ground, RuleBook rules, double range) {
+  Crown(String id, Point at, Canopy canopy, double ground, RuleBook rules) {
     this.id = id;
     x = at.x();
     y = at.y();
@@ -38,7 +37,6 @@ final class Crown implements Obstacle {
     end = rules.value("canopy-end");
     line = rules.value("canopy-feed-line");
     rigging = rules.value("canopy-mast");
-    this.range = range;
   }
 
   @Override
@@ -82,9 +80,10 @@ final class Crown implements Obstacle {
 
   private void end(double[] points, int i, Tally tally) {
     double distance = signed(points[i], points[i + 1], points[i + 2]);
-    if (distance < range) {
+    Tally.Worst worst = tally.of("canopy-end", id);
+    if (distance < worst.range(end)) {
       Place at = Obstacle.place(points, i);
-      tally.of("canopy-end", id).offer(distance, end, "wire's end", at, nearest(at));
+      worst.offer(distance, end, "wire's end", at, nearest(at));
     }
   }
 
@@ -93,7 +92,7 @@ final class Crown implements Obstacle {
         strand,
         box,
         which,
-        () -> worst.reach(required, range),
+        () -> worst.reach(required),
         (index, points, i, allowance) -> {
           double t = nearestShare(points, i);
           Place at =
@@ -102,7 +101,7 @@ final class Crown implements Obstacle {
                   points[i + 1] + t * (points[i + 4] - points[i + 1]),
                   points[i + 2] + t * (points[i + 5] - points[i + 2]));
           double distance = signed(at.x(), at.y(), at.z()) - allowance;
-          if (distance < range) {
+          if (distance < worst.range(required)) {
             worst.offer(distance, required, strand.part.word, at, nearest(at));
           }
         });

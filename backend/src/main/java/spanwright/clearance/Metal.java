@@ -11,11 +11,9 @@ final class Metal implements Obstacle {
   private final double[] path;
   private final double[] box;
   private final double required;
-  private final double range;
 
-  Metal(Metalwork source, GroundSurface ground, RuleBook rules, double range) {
+  Metal(Metalwork source, GroundSurface ground, RuleBook rules) {
     this.source = source;
-    this.range = range;
     path = Strand.flat(ground.raise(source.path()));
     box = Space.box(path, 0, path.length / 3 - 1);
     for (int k = 0; k < 3; k++) {
@@ -40,14 +38,14 @@ final class Metal implements Obstacle {
         strand,
         box,
         Walk.ALL,
-        () -> worst.reach(required, range),
+        () -> worst.reach(required),
         (index, points, i, allowance) -> {
           Space.Near near = new Space.Near();
           for (int k = 0; k + 3 < path.length; k += 3) {
             Space.segments(points, i, i + 3, path, k, k + 3, near);
           }
           double distance = Math.max(0, near.distance() - allowance - source.radius());
-          if (distance < range) {
+          if (distance < worst.range(required)) {
             Place at = new Place(near.ax, near.ay, near.az);
             Place toAt = new Place(near.bx, near.by, near.bz);
             worst.offer(distance, required, strand.part.word, at, toAt);

@@ -31,11 +31,9 @@ final class Solid implements Obstacle {
   private final double rope;
   private final double line;
   private final double mast;
-  private final double range;
 
-  Solid(Roof roof, RuleBook rules, double range) {
+  Solid(Roof roof, RuleBook rules) {
     this.roof = roof;
-    this.range = range;
     double[] outline = Space.emptyBox();
     roof.building()
         .footprint()
@@ -135,7 +133,7 @@ final class Solid implements Obstacle {
         strand,
         box,
         which,
-        () -> worst.reach(required, range),
+        () -> worst.reach(required),
         (index, points, i, allowance) -> {
           System.arraycopy(points, i, piece, 0, 6);
           // Rope and line may touch what holds them; wire keeps its distance there too.
@@ -156,7 +154,7 @@ final class Solid implements Obstacle {
       }
     }
     Space.Near near = new Space.Near();
-    double enough = worst.reach(required, range) + slack;
+    double enough = worst.reach(required) + slack;
     for (int i = 0; i < faces.size(); i++) {
       if (Obstacle.gap(piece, 0, faceBoxes.get(i)) < Math.min(enough, near.distance())) {
         Space.segmentTriangle(piece, 0, 3, faces.get(i), true, near);

@@ -10,13 +10,16 @@ import spanwright.plan.Place;
 final class Tally {
   private final Map<String, Worst> all = new LinkedHashMap<>();
   private final double margin;
+  private final double range;
 
-  Tally(double margin) {
+  /** One that keeps what is foul or tight, and beyond that what lies within a range [m]. */
+  Tally(double margin, double range) {
     this.margin = margin;
+    this.range = range;
   }
 
   /** The worst place of one rule against one thing. */
-  static final class Worst {
+  final class Worst {
     private final String rule;
     private final String to;
     private String what = "";
@@ -36,9 +39,14 @@ final class Tally {
       return spare;
     }
 
-    /** How near something must come to be worse than what was found, within a range [m]. */
-    double reach(double needed, double range) {
-      return Math.min(range, spare + needed);
+    /** How near something must come to be told of at all [m]. */
+    double range(double needed) {
+      return Math.max(range, needed + margin);
+    }
+
+    /** How near something must come to be worse than what was found [m]. */
+    double reach(double needed) {
+      return Math.min(range(needed), spare + needed);
     }
 
     void offer(double found, double needed, String part, Place ours, Place theirs) {

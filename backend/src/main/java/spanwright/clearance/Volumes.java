@@ -42,12 +42,10 @@ final class Volumes {
     private final double[] box;
     private final double wire;
     private final double rope;
-    private final double range;
 
-    People(PeopleVolume source, GroundSurface ground, RuleBook rules, double range) {
+    People(PeopleVolume source, GroundSurface ground, RuleBook rules) {
       this.source = source;
       this.ground = ground;
-      this.range = range;
       area = new Area(source.area());
       double[] h = heights(area, ground);
       box = area.box(h[0] + source.from(), h[1] + source.to());
@@ -74,7 +72,7 @@ final class Volumes {
 
     private void nearest(Strand strand, Tally.Worst worst, double required) {
       double rate = 1 + ground.steepest();
-      leastOf(strand, box, this::signed, rate, worst, required, range, this::near);
+      leastOf(strand, box, this::signed, rate, worst, required, this::near);
     }
 
     String id() {
@@ -129,11 +127,9 @@ final class Volumes {
     private final Area area;
     private final double[] box;
     private final double required;
-    private final double range;
 
-    NoWire(Zone source, RuleBook rules, double range) {
+    NoWire(Zone source, RuleBook rules) {
       this.source = source;
-      this.range = range;
       area = new Area(source.area());
       box = area.box(-DEEP, DEEP);
       required = rules.value("zone-no-wire");
@@ -149,7 +145,7 @@ final class Volumes {
       if (strand.part == Strand.Part.WIRE) {
         Tally.Worst worst = tally.of("zone-no-wire", source.id());
         Narrowing.Field field = (x, y, z) -> area.signed(x, y);
-        leastOf(strand, box, field, 1, worst, required, range, this::edge);
+        leastOf(strand, box, field, 1, worst, required, this::edge);
       }
     }
 
@@ -172,16 +168,15 @@ final class Volumes {
       double rate,
       Tally.Worst worst,
       double required,
-      double range,
       Answer theirs) {
     Narrowing narrowing = new Narrowing(field, rate);
     Walk.along(
         strand,
         box,
         Walk.ALL,
-        () -> worst.reach(required, range),
+        () -> worst.reach(required),
         (index, points, i, allowance) -> {
-          double most = worst.reach(required, range);
+          double most = worst.reach(required);
           double least = narrowing.least(points, i, most + allowance);
           if (least - allowance < most) {
             Place at = new Place(narrowing.x, narrowing.y, narrowing.z);

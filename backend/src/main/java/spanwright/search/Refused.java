@@ -88,7 +88,10 @@ final class Refused {
       }
     }
     List<Optional<Refusal>> found =
-        workers.map(chosen, kept -> assessor.refuse(kept.hung).stream().findFirst(), () -> {});
+        workers.map(
+            chosen,
+            kept -> assessor.refuse(assessor.told(kept.hung)).stream().findFirst(),
+            () -> {});
     Set<String> said = new HashSet<>();
     List<Refusal> refusals = new ArrayList<>();
     for (Optional<Refusal> refusal : found) {

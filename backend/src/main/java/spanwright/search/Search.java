@@ -277,7 +277,7 @@ public final class Search {
   /** Empty when the layout cannot be hung at all, so that there is nothing to measure. */
   private Optional<Hung> hangOne(Candidate candidate) {
     try {
-      return Optional.of(assessor.hang(candidate.layout()));
+      return Optional.of(assessor.hangClosely(candidate.layout()));
     } catch (IllegalArgumentException impossible) {
       return Optional.empty();
     }
@@ -317,7 +317,7 @@ public final class Search {
 
   private List<Assessed> full(Workers workers, List<Free> free) {
     Stage stage = new Stage(0.60, 0.95, free.size(), "solving every band in full");
-    return workers.map(free, f -> assessed(f.hung), stage::tick).stream()
+    return workers.map(free, f -> assessed(assessor.told(f.hung)), stage::tick).stream()
         .flatMap(Optional::stream)
         .toList();
   }
