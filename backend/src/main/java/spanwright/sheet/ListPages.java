@@ -36,10 +36,6 @@ final class ListPages {
     WorkTables work = new WorkTables(model);
     flow.add(wide(rig.overhead()));
     flow.gap(GAP);
-    if (!work.changes().isEmpty()) {
-      flow.add(wide(work.changes()));
-      flow.gap(GAP);
-    }
     List<Flow.Block> left = new ArrayList<>(List.of(narrow(rig.wire())));
     List<Flow.Block> right = new ArrayList<>(List.of(narrow(rig.rope())));
     (height(left) < height(right) ? left : right).add(narrow(rig.sags()));
@@ -68,6 +64,10 @@ final class ListPages {
     flow.pair(left, right, GUTTER, GAP);
     flow.gap(GAP);
     flow.add(wide(work.measures()));
+    if (!work.changes().isEmpty()) {
+      flow.gap(GAP);
+      flow.add(wide(work.changes()));
+    }
     List<Pen> pages = flow.pages();
     for (int i = 1; i < pages.size(); i++) {
       runningHead(pages.get(i));
@@ -134,6 +134,14 @@ final class ListPages {
     pen.line(MARGIN, y, MARGIN + width, y, 0.6, 1);
     y += 1.2;
     List<String> under = new ArrayList<>(head.weather());
+    if (head.since() != null) {
+      under.add(
+          "What revision "
+              + head.revision()
+              + " changes against "
+              + head.since()
+              + " stands at the end of the list.");
+    }
     if (head.verdict() != null) {
       Symbols.state(pen, MARGIN + 1.6, y + 2.5, 3, State.FOUL);
       pen.text(MARGIN + 5, y + 3.6, head.verdict(), 11, Ink.Anchor.START, true);

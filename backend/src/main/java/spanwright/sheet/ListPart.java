@@ -66,7 +66,6 @@ public record ListPart(
         new ArrayList<>(
             List.of(
                 rig.overhead(),
-                work.changes(),
                 rig.wire(),
                 rig.rope(),
                 rig.sags(),
@@ -82,7 +81,8 @@ public record ListPart(
                 work.checks("Checks after", model.after()),
                 work.inspections(),
                 work.sweep(),
-                work.notes()));
+                work.notes(),
+                work.changes()));
     parts.removeIf(ListPart::isEmpty);
     return List.copyOf(parts);
   }

@@ -270,6 +270,7 @@ final class SideInk {
     placement.clearances().stream()
         .filter(c -> c.at() != null && c.toAt() != null && !c.to().equals("boundary"))
         .filter(c -> OverheadList.regime(c) == OverheadList.Regime.AS_IT_HANGS)
+        .filter(c -> c.what() != null && c.what().startsWith("wire"))
         .filter(c -> Math.abs(leg.aside(c.at().onPlan())) < 2)
         .filter(c -> leg.along(c.at().onPlan()) >= leg.start() - 0.5)
         .filter(c -> leg.along(c.at().onPlan()) <= leg.start() + leg.length() + 0.5)
