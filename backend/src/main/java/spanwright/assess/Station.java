@@ -70,6 +70,9 @@ final class Station {
     for (double length : lengths(shortest)) {
       double cost = 0;
       for (Load load : loads) {
+        if (cost >= least) {
+          break; // every band adds to it
+        }
         FeedResult result = run(lineId, length, load.band(), load.frequencyMHz(), load.impedance());
         cost += load.band().weight() * cost(result);
       }

@@ -169,7 +169,7 @@ public final class Clearances {
     }
     masts(rigged, range, tally);
     List<Clearance> all = new ArrayList<>(tally.clearances());
-    overhead.check(rigged, strands, holders, ground, all);
+    overhead.check(rigged, strands, holders, ground, range < RANGE, all);
     all.sort(
         Comparator.comparing(Clearance::state)
             .reversed()

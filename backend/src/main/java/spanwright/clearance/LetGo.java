@@ -103,8 +103,10 @@ final class LetGo {
 
   /** Distance from a point to the region [m]; 0 inside. */
   double distance(double x, double y, double z) {
-    double away = Math.hypot(x - px, y - py);
-    double turn = away == 0 ? 0 : Math.abs(wrapped(Math.atan2(y - py, x - px) - course));
+    double dx = x - px;
+    double dy = y - py;
+    double away = Math.sqrt(dx * dx + dy * dy);
+    double turn = away == 0 ? 0 : Math.abs(wrapped(Math.atan2(dy, dx) - course));
     double beyond = Math.max(0, turn - half);
     double along = away * Math.cos(beyond);
     double across = away * Math.sin(Math.min(beyond, Math.PI / 2));
@@ -161,15 +163,17 @@ final class LetGo {
     final int a;
     final int b;
     final double required;
+    final double enough;
     final Space.Near near;
     double best = Double.POSITIVE_INFINITY;
     double bound = Double.POSITIVE_INFINITY;
 
-    Along(double[] line, int a, int b, double required, Space.Near near) {
+    Along(double[] line, int a, int b, double required, double enough, Space.Near near) {
       this.line = line;
       this.a = a;
       this.b = b;
       this.required = required;
+      this.enough = enough;
       this.near = near;
     }
 
@@ -191,7 +195,7 @@ final class LetGo {
     void search(double from, double to, double atFrom, double atTo, double length) {
       double lower = Math.max(0, (atFrom + atTo - length) / 2);
       double tolerance = 0.002 + FAR * Math.max(0, best - required);
-      if (lower >= best - tolerance || length < 1e-4) {
+      if (lower >= Math.min(best - tolerance, enough) || length < 1e-4) {
         bound = Math.min(bound, lower);
         return;
       }
@@ -211,10 +215,11 @@ final class LetGo {
    * A distance no greater than that from the region to a line's segment [m], within 2 mm where it
    * is near what is required and half a hundredth of what is beyond it.
    *
+   * @param enough what lies farther need not be told apart [m]
    * @param near offered the nearest pair found, the region's place as ours
    */
-  double toSegment(double[] line, int a, int b, double required, Space.Near near) {
-    Along along = new Along(line, a, b, required, near);
+  double toSegment(double[] line, int a, int b, double required, double enough, Space.Near near) {
+    Along along = new Along(line, a, b, required, enough, near);
     double dx = line[b] - line[a];
     double dy = line[b + 1] - line[a + 1];
     double dz = line[b + 2] - line[a + 2];

@@ -77,17 +77,23 @@ final class Overhead {
     return fallShare;
   }
 
-  /** Every clearance to every line: one of the first rule at least, however far. */
+  /**
+   * Every clearance to every line: one of the first rule at least, however far.
+   *
+   * @param closely whether a distance that is clear need only be told to be so
+   */
   void check(
       Rigged rigged,
       List<Strand> strands,
       List<Holder> holders,
       GroundSurface ground,
+      boolean closely,
       List<Clearance> into) {
     for (Line line : lines) {
       into.add(keptDistance(line, strands));
       if (!line.isTelephone()) {
-        letGo(line, rigged, holders, into);
+        double enough = closely ? line.kept() + margin : Double.POSITIVE_INFINITY;
+        letGo(line, rigged, holders, enough, into);
         mastLetGo(line, rigged, holders, ground, into);
       }
     }
@@ -217,7 +223,8 @@ final class Overhead {
     }
   }
 
-  private void letGo(Line line, Rigged rigged, List<Holder> holders, List<Clearance> into) {
+  private void letGo(
+      Line line, Rigged rigged, List<Holder> holders, double enough, List<Clearance> into) {
     List<Loss> losses = new ArrayList<>();
     for (Rigged.Span span : rigged.spans()) {
       double[] shape = Strand.flat(span.shapes().calm());
@@ -245,7 +252,9 @@ final class Overhead {
       Space.Near near = new Space.Near();
       double found = Double.POSITIVE_INFINITY;
       for (int k = 0; k < line.segments(); k++) {
-        found = Math.min(found, region.toSegment(line.path(), 3 * k, 3 * k + 3, line.kept(), near));
+        double most = Math.min(enough, Math.min(least, found));
+        double here = region.toSegment(line.path(), 3 * k, 3 * k + 3, line.kept(), most, near);
+        found = Math.min(found, here);
       }
       if (found < least) {
         least = found;

@@ -17,7 +17,7 @@ final class PeakSearch {
   private static final double WORTH = 0.75;
 
   private static final double FIRST_STEP = 0.08;
-  private static final double LAST_STEP = 2e-3;
+  private static final double LAST_STEP = 5e-3;
   private static final int MOST_TURNS = 24;
 
   private final FarField field;

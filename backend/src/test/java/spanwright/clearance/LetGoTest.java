@@ -76,7 +76,7 @@ class LetGoTest {
         line[k] = k % 3 == 2 ? 3 + 12 * random.nextDouble() : 60 * random.nextDouble() - 30;
       }
       Space.Near told = new Space.Near();
-      double found = region.toSegment(line, 0, 3, 3.05, told);
+      double found = region.toSegment(line, 0, 3, 3.05, Double.POSITIVE_INFINITY, told);
       double sampled = Double.POSITIVE_INFINITY;
       int n = 36;
       for (int a = 0; a <= n; a++) {
@@ -104,13 +104,13 @@ class LetGoTest {
     // straight on, beyond the reach: the level top of the region ends at 22 m
     for (double x = 10; x < 40; x += 0.5) {
       double[] line = {x, -5, 7.5, x, 5, 7.5};
-      double found = region.toSegment(line, 0, 3, 3, new Space.Near());
+      double found = region.toSegment(line, 0, 3, 3, Double.POSITIVE_INFINITY, new Space.Near());
       assertEquals(Math.max(0, x - 22), found, 0.02 + 0.04 * Math.max(0, x - 25), "x " + x);
     }
     // above: the old shape turned is the ceiling
     for (double z = 7; z < 20; z += 0.5) {
       double[] line = {19.9, -3, z, 19.9, 3, z};
-      double found = region.toSegment(line, 0, 3, 3, new Space.Near());
+      double found = region.toSegment(line, 0, 3, 3, Double.POSITIVE_INFINITY, new Space.Near());
       assertEquals(Math.max(0, z - 8), found, 0.02 + 0.04 * Math.max(0, z - 11), "z " + z);
     }
     // to the side: beyond 30 degrees
@@ -119,13 +119,14 @@ class LetGoTest {
       double x = 15 * Math.cos(angle);
       double y = 15 * Math.sin(angle);
       double[] line = {x, y, 5, x, y, 5.1};
-      double found = region.toSegment(line, 0, 3, 3, new Space.Near());
+      double found = region.toSegment(line, 0, 3, 3, Double.POSITIVE_INFINITY, new Space.Near());
       double expected = turn <= 30 ? 0 : turn >= 120 ? 15 : 15 * Math.sin(angle - HALF);
       assertEquals(expected, found, 0.05 + 0.04 * Math.max(0, expected - 3), "turn " + turn);
     }
     // behind the point that holds
     double[] behind = {-4, 0, 5, -4, 0.1, 5};
-    assertEquals(4, region.toSegment(behind, 0, 3, 3, new Space.Near()), 0.06);
+    assertEquals(
+        4, region.toSegment(behind, 0, 3, 3, Double.POSITIVE_INFINITY, new Space.Near()), 0.06);
   }
 
   @Test

@@ -181,7 +181,7 @@ class OverheadRegimesTest {
     double[] shape = Strand.flat(closing.shapes().calm());
     LetGo region = new LetGo(shape, closing.reach(true), Math.toRadians(30));
     double[] path = {11, 27.5, 6, 19, 27.5, 6};
-    double alone = region.toSegment(path, 0, 3, 3.05, new Space.Near());
+    double alone = region.toSegment(path, 0, 3, 3.05, Double.POSITIVE_INFINITY, new Space.Near());
     assertTrue(told.distance() <= alone + 1e-9, told + " but " + alone);
     assertEquals(State.FOUL, told.state());
   }
