@@ -9,7 +9,13 @@ final class Crossings {
 
   private Crossings() {}
 
-  static void refuse(List<Outline.Piece> pieces, AntennaModel model) {
+  /**
+   * Refuses what crosses.
+   *
+   * @param within how near pieces must come to be told [m]
+   * @return least distance between pieces that do not meet, where less than that; else infinite [m]
+   */
+  static double refuse(List<Outline.Piece> pieces, AntennaModel model, double within) {
     int n = pieces.size();
     double[][] line = new double[n][];
     for (int i = 0; i < n; i++) {
@@ -26,23 +32,26 @@ final class Crossings {
             length
           };
     }
-    double[] at = new double[2];
+    double least = Double.POSITIVE_INFINITY;
     for (int i = 0; i < n; i++) {
       for (int j = i + 1; j < n; j++) {
-        pair(pieces.get(i), line[i], pieces.get(j), line[j], model, at);
+        double apart = pair(pieces.get(i), line[i], pieces.get(j), line[j], model, within);
+        least = apart < within ? Math.min(least, apart) : least;
       }
     }
+    return least;
   }
 
-  private static void pair(
-      Outline.Piece p, double[] a, Outline.Piece q, double[] b, AntennaModel model, double[] at) {
+  /** Distance of two pieces that do not meet, or infinite where it does not matter. */
+  private static double pair(
+      Outline.Piece p, double[] a, Outline.Piece q, double[] b, AntennaModel model, double within) {
     double need = model.wires().get(p.wire()).radius() + model.wires().get(q.wire()).radius();
     double dx = a[0] + 0.5 * a[6] * a[3] - b[0] - 0.5 * b[6] * b[3];
     double dy = a[1] + 0.5 * a[6] * a[4] - b[1] - 0.5 * b[6] * b[4];
     double dz = a[2] + 0.5 * a[6] * a[5] - b[2] - 0.5 * b[6] * b[5];
-    double reach = 0.5 * (a[6] + b[6]) + need;
+    double reach = 0.5 * (a[6] + b[6]) + Math.max(need, within);
     if (dx * dx + dy * dy + dz * dz > reach * reach) {
-      return;
+      return Double.POSITIVE_INFINITY;
     }
     boolean headA = p.nodeA() == q.nodeA() || p.nodeA() == q.nodeB();
     boolean tailA = p.nodeB() == q.nodeA() || p.nodeB() == q.nodeB();
@@ -60,8 +69,9 @@ final class Crossings {
                 + place(headA ? p.a() : p.b())
                 + ": open the angle between them.");
       }
-      return;
+      return Double.POSITIVE_INFINITY;
     }
+    double[] at = new double[2];
     double d2 =
         Segments.squared(
             a[0], a[1], a[2], a[3], a[4], a[5], a[6], b[0], b[1], b[2], b[3], b[4], b[5], b[6], at);
@@ -77,6 +87,7 @@ final class Crossings {
               + String.format(java.util.Locale.ROOT, "%.4f", need)
               + " m. Move one, or end a wire at the crossing.");
     }
+    return Math.sqrt(d2);
   }
 
   private static String names(Outline.Piece p, Outline.Piece q) {

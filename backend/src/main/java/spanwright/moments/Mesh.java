@@ -44,7 +44,7 @@ final class Mesh {
   /** The applied field tested with each unknown, for one volt across the feed. */
   final double[] excitation;
 
-  private Mesh(List<double[]> rows, List<int[]> ids, int nodes, AntennaModel model) {
+  Mesh(List<double[]> rows, List<int[]> ids, int nodes, AntennaModel model) {
     elements = rows.size();
     x = column(rows, 0);
     y = column(rows, 1);
@@ -127,216 +127,56 @@ final class Mesh {
     return count;
   }
 
+  /** The part of the gap, at its middle, over which the field is spread. */
+  private static final double FIELD = 0.1;
+
+  /** And no less than so many radii: the thin-wire equation knows nothing shorter. */
+  private static final double FIELD_RADII = 4;
+
+  private static final int FIELD_POINTS = 4;
+
   /**
-   * One volt across the middle of the gap. The field is taken to act at a point: spread over the
-   * gap's width it would also have to charge that length of wire, which no centre piece has, and
-   * whose few tenths of a picofarad move only impedances of thousands of ohms.
+   * One volt across the feed. The field is spread evenly over the middle tenth of the gap: all at
+   * one point, the charge on the two edges, and with it the susceptance, would grow for ever as the
+   * mesh gets finer, the faster the thicker the wire; over the whole gap, the field would have to
+   * do without the charge of that length of wire.
    */
   double[] excite(AntennaModel model) {
     double[] out = new double[unknowns];
-    double feed = model.feedFraction() * model.wires().get(model.feedWire()).length();
-    for (int e = 0; e < elements; e++) {
-      if (wire[e] == model.feedWire() && feed <= arcB[e] + 1e-12) {
-        double t = Math.max(0, Math.min(1, (feed - arcA[e]) / (arcB[e] - arcA[e])));
-        for (int i = 0; i < slotShape[e].length; i++) {
-          out[slotUnknown[e][i]] += slotSign[e][i] * Shapes.at(Shapes.POWERS[slotShape[e][i]], t);
-        }
-        break;
-      }
+    WireSpec fed = model.wires().get(model.feedWire());
+    double total = fed.length();
+    double feed = model.feedFraction() * total;
+    double width = Math.max(FIELD * model.gap(), FIELD_RADII * fed.radius());
+    spread(model.feedWire(), feed, width, out);
+    if (ModelCheck.closed(fed)) {
+      spread(model.feedWire(), feed + total, width, out);
+      spread(model.feedWire(), feed - total, width, out);
     }
     return out;
+  }
+
+  /** Adds the mean of each unknown's current over a stretch of a wire, by arc length. */
+  private void spread(int fedWire, double middle, double width, double[] out) {
+    GaussRule rule = GaussRule.of(FIELD_POINTS);
+    for (int e = 0; e < elements; e++) {
+      double from = Math.max(arcA[e], middle - 0.5 * width);
+      double to = Math.min(arcB[e], middle + 0.5 * width);
+      if (wire[e] != fedWire || to <= from) {
+        continue;
+      }
+      for (int q = 0; q < FIELD_POINTS; q++) {
+        double t = (from + (to - from) * rule.nodes[q] - arcA[e]) / (arcB[e] - arcA[e]);
+        double weight = rule.weights[q] * (to - from) / width;
+        for (int i = 0; i < slotShape[e].length; i++) {
+          double shape = Shapes.at(Shapes.POWERS[slotShape[e][i]], t);
+          out[slotUnknown[e][i]] += weight * slotSign[e][i] * shape;
+        }
+      }
+    }
   }
 
   /** Makes the mesh of an outline for a wave number [1/m]. */
   static Mesh of(AntennaModel model, Outline outline, MeshRule rule, double waveNumber) {
     return new Mesher(model, outline, rule, waveNumber).make();
-  }
-
-  /** Places the nodes. */
-  private static final class Mesher {
-    private static final int MOST_ELEMENTS = 600;
-    private static final int STEPS = 48;
-
-    /** Elements are at least so many radii long. */
-    private static final double LEAST_RADII = 3;
-
-    private final AntennaModel model;
-    private final Outline outline;
-    private final MeshRule rule;
-    private final double k;
-    private final List<double[]> rows = new ArrayList<>();
-    private final List<int[]> ids = new ArrayList<>();
-    private int nodes;
-
-    Mesher(AntennaModel model, Outline outline, MeshRule rule, double k) {
-      this.model = model;
-      this.outline = outline;
-      this.rule = rule;
-      this.k = k;
-      nodes = outline.degree.length;
-    }
-
-    Mesh make() {
-      double total = model.wires().get(model.feedWire()).length();
-      double feed = model.feedFraction() * total;
-      refuseJunction(feed);
-      boolean closed = ModelCheck.closed(model.wires().get(model.feedWire()));
-      for (int p = 0; p < outline.pieces.size(); p++) {
-        Outline.Piece piece = outline.pieces.get(p);
-        List<double[]> anchors = new ArrayList<>();
-        anchors.add(new double[] {piece.arcA(), pace(piece, p, piece.nodeA())});
-        anchors.add(new double[] {piece.arcB(), pace(piece, p, piece.nodeB())});
-        double cut = Double.NaN;
-        if (piece.wire() == model.feedWire()) {
-          double pace = Math.max(rule.feed() / k, 0.5 * model.gap());
-          anchors.add(new double[] {feed, pace});
-          if (closed) {
-            anchors.add(new double[] {feed + total, pace});
-            anchors.add(new double[] {feed - total, pace});
-          }
-          double clear = 0.02 * (piece.arcB() - piece.arcA());
-          if (feed > piece.arcA() + clear && feed < piece.arcB() - clear) {
-            cut = feed;
-          }
-        }
-        if (Double.isNaN(cut)) {
-          stretch(p, piece, piece.arcA(), piece.arcB(), piece.nodeA(), piece.nodeB(), anchors);
-        } else {
-          int middle = nodes++;
-          stretch(p, piece, piece.arcA(), cut, piece.nodeA(), middle, anchors);
-          stretch(p, piece, cut, piece.arcB(), middle, piece.nodeB(), anchors);
-        }
-        if (rows.size() > MOST_ELEMENTS) {
-          throw new ModelFault(
-              "The wires are too long in wavelengths to solve: "
-                  + ModelCheck.name(piece.wire())
-                  + " takes the count of elements beyond "
-                  + MOST_ELEMENTS
-                  + ". Shorten it, leave out wires, or lower the frequency.");
-        }
-      }
-      return new Mesh(rows, ids, nodes, model);
-    }
-
-    /** A feed where three wires meet would not say which of them it is in. */
-    private void refuseJunction(double feed) {
-      for (Outline.Piece piece : outline.pieces) {
-        if (piece.wire() != model.feedWire()) {
-          continue;
-        }
-        double reach = 0.5 * model.gap();
-        boolean a = outline.degree[piece.nodeA()] > 2 && Math.abs(piece.arcA() - feed) < reach;
-        boolean b = outline.degree[piece.nodeB()] > 2 && Math.abs(piece.arcB() - feed) < reach;
-        if (a || b) {
-          throw new ModelFault(
-              "The feed on "
-                  + ModelCheck.name(model.feedWire())
-                  + " lies where three wires meet: move it at least "
-                  + reach
-                  + " m along the wire it is in.");
-        }
-      }
-    }
-
-    /** Length of the element beside a node. */
-    private double pace(Outline.Piece piece, int index, int node) {
-      if (outline.degree[node] == 1) {
-        // the charge at an open end crowds into a few radii: thick wires need shorter ends
-        double thickness = k * model.wires().get(piece.wire()).radius();
-        return rule.end() / k / (1 + thickness / 0.004);
-      }
-      if (outline.degree[node] > 2) {
-        return rule.bend() / k;
-      }
-      for (int q = 0; q < outline.pieces.size(); q++) {
-        Outline.Piece other = outline.pieces.get(q);
-        if (q != index && (other.nodeA() == node || other.nodeB() == node)) {
-          double cos = Math.abs(cosine(piece, other));
-          double radii =
-              model.wires().get(piece.wire()).radius() / model.wires().get(other.wire()).radius();
-          if (cos > 0.985 && radii > 0.8 && radii < 1.25) {
-            return rule.longest() / k;
-          }
-        }
-      }
-      return rule.bend() / k;
-    }
-
-    private static double cosine(Outline.Piece p, Outline.Piece q) {
-      return ((p.b().x() - p.a().x()) * (q.b().x() - q.a().x())
-              + (p.b().y() - p.a().y()) * (q.b().y() - q.a().y())
-              + (p.b().z() - p.a().z()) * (q.b().z() - q.a().z()))
-          / (p.length() * q.length());
-    }
-
-    /** Elements from arc to arc of a piece, their lengths following the anchors. */
-    private void stretch(
-        int index,
-        Outline.Piece piece,
-        double from,
-        double to,
-        int nodeFrom,
-        int nodeTo,
-        List<double[]> anchors) {
-      double[] sum = new double[STEPS + 1];
-      for (int i = 0; i < STEPS; i++) {
-        double at = from + (to - from) * (i + 0.5) / STEPS;
-        sum[i + 1] = sum[i] + (to - from) / STEPS / size(piece, at, anchors);
-      }
-      double least = LEAST_RADII * model.wires().get(piece.wire()).radius();
-      int count = (int) Math.min(Math.ceil(sum[STEPS] - 0.05), Math.floor((to - from) / least));
-      count = Math.max(1, count);
-      int node = nodeFrom;
-      double arc = from;
-      int step = 0;
-      for (int i = 1; i <= count; i++) {
-        double next = to;
-        int nodeNext = nodeTo;
-        if (i < count) {
-          double want = sum[STEPS] * i / count;
-          while (sum[step + 1] < want) {
-            step++;
-          }
-          double part = (want - sum[step]) / (sum[step + 1] - sum[step]);
-          next = from + (to - from) * (step + part) / STEPS;
-          nodeNext = nodes++;
-        }
-        element(index, piece, arc, next, node, nodeNext);
-        arc = next;
-        node = nodeNext;
-      }
-    }
-
-    private double size(Outline.Piece piece, double at, List<double[]> anchors) {
-      double size = rule.longest() / k;
-      for (double[] anchor : anchors) {
-        size = Math.min(size, anchor[1] + rule.growth() * Math.abs(at - anchor[0]));
-      }
-      return Math.max(size, LEAST_RADII * model.wires().get(piece.wire()).radius());
-    }
-
-    private void element(
-        int index, Outline.Piece piece, double arcA, double arcB, int nodeA, int nodeB) {
-      double span = piece.arcB() - piece.arcA();
-      double t = (arcA - piece.arcA()) / span;
-      Vertex a = piece.a();
-      Vertex b = piece.b();
-      double whole = piece.length();
-      double length = whole * (arcB - arcA) / span;
-      rows.add(
-          new double[] {
-            a.x() + t * (b.x() - a.x()),
-            a.y() + t * (b.y() - a.y()),
-            a.z() + t * (b.z() - a.z()),
-            (b.x() - a.x()) / whole,
-            (b.y() - a.y()) / whole,
-            (b.z() - a.z()) / whole,
-            length,
-            arcA,
-            arcB,
-            model.wires().get(piece.wire()).radius()
-          });
-      ids.add(new int[] {piece.wire(), rule.order(k * length), index, nodeA, nodeB});
-    }
   }
 }

@@ -5,8 +5,10 @@ import java.util.List;
 
 /**
  * The wires as few straight pieces between numbered nodes: many short pieces of a hanging shape are
- * drawn together where none of its points strays by more than a tolerance, ends of wires that
- * coincide become one node, and an end that touches another wire's path makes a node there.
+ * drawn together where none of its points strays by more than a tolerance, and the places where the
+ * pieces meet are set out so that each piece runs through the middle of what it stands for; ends of
+ * wires that coincide become one node, and an end that touches another wire's path makes a node
+ * there.
  */
 final class Outline {
   /**
@@ -41,17 +43,26 @@ final class Outline {
   private final double tolerance;
   private final List<Vertex> joints = new ArrayList<>();
   private int nodes;
+  private boolean thinned;
 
   private Outline(AntennaModel model, double tolerance) {
     this.model = model;
     this.tolerance = tolerance;
   }
 
+  /** Wires side by side are drawn within this part of what lies between them. */
+  private static final double STRAY_OF_SPACING = 0.1;
+
   /** The outline of a model that {@link ModelCheck} has passed. */
   static Outline of(AntennaModel model, double tolerance) {
     Outline outline = new Outline(model, tolerance);
     outline.draw();
-    Crossings.refuse(outline.pieces, model);
+    double apart = Crossings.refuse(outline.pieces, model, tolerance / STRAY_OF_SPACING);
+    if (outline.thinned && STRAY_OF_SPACING * apart < tolerance) {
+      outline = new Outline(model, STRAY_OF_SPACING * apart);
+      outline.draw();
+      Crossings.refuse(outline.pieces, model, 0);
+    }
     return outline;
   }
 
@@ -107,20 +118,87 @@ final class Outline {
         thin(path, fixed.get(f - 1), fixed.get(f), keep);
       }
     }
-    Stop before = null;
-    int nodeBefore = -1;
+    pieces(w, path, keep);
+  }
+
+  /** Makes the pieces between the stops that are kept. */
+  private void pieces(int w, List<Stop> path, boolean[] keep) {
+    int count = 0;
+    for (boolean kept : keep) {
+      count += kept ? 1 : 0;
+    }
+    thinned |= count < path.size();
+    int[] stops = new int[count];
+    count = 0;
     for (int i = 0; i < path.size(); i++) {
-      if (!keep[i]) {
-        continue;
+      if (keep[i]) {
+        stops[count++] = i;
       }
-      Stop here = path.get(i);
+    }
+    Vertex[] at = count < path.size() ? centred(path, stops) : places(path, stops);
+    int nodeBefore = path.get(0).node;
+    for (int i = 1; i < count; i++) {
+      Stop before = path.get(stops[i - 1]);
+      Stop here = path.get(stops[i]);
       int node = here.node >= 0 ? here.node : nodes++;
-      if (before != null) {
-        pieces.add(new Piece(w, before.at, here.at, before.arc, here.arc, nodeBefore, node));
-      }
-      before = here;
+      pieces.add(new Piece(w, at[i - 1], at[i], before.arc, here.arc, nodeBefore, node));
       nodeBefore = node;
     }
+  }
+
+  private static Vertex[] places(List<Stop> path, int[] stops) {
+    Vertex[] at = new Vertex[stops.length];
+    for (int i = 0; i < stops.length; i++) {
+      at[i] = path.get(stops[i]).at;
+    }
+    return at;
+  }
+
+  /**
+   * The places of the stops, moved so that the pieces between them stray to both sides alike: a
+   * chord lies all on one side of a curve, and would bring a hanging wire higher and shorter than
+   * it is. A piece whose two ends are free asks each to move by its mean distance from the curve,
+   * one with a single free end by twice that; a stop takes the mean of what it is asked.
+   */
+  private static Vertex[] centred(List<Stop> path, int[] stops) {
+    Vertex[] at = places(path, stops);
+    Vertex[] out = at.clone();
+    int n = stops.length - 1;
+    double[][] wanted = new double[n + 1][3];
+    for (int c = 0; c < n; c++) {
+      double[] mean = stray(path, stops[c], stops[c + 1]);
+      boolean freeA = path.get(stops[c]).node < 0;
+      boolean freeB = path.get(stops[c + 1]).node < 0;
+      double share = freeA && freeB ? 0.5 : 1;
+      for (int axis = 0; axis < 3; axis++) {
+        wanted[c][axis] += share * mean[axis];
+        wanted[c + 1][axis] += share * mean[axis];
+      }
+    }
+    for (int i = 1; i < n; i++) {
+      if (path.get(stops[i]).node < 0) {
+        Vertex p = at[i];
+        out[i] = new Vertex(p.x() + wanted[i][0], p.y() + wanted[i][1], p.z() + wanted[i][2]);
+      }
+    }
+    return out;
+  }
+
+  /** Mean of path less chord, by arc length, between two stops. */
+  private static double[] stray(List<Stop> path, int from, int to) {
+    Stop a = path.get(from);
+    Stop b = path.get(to);
+    double span = b.arc - a.arc;
+    double[] mean = new double[3];
+    for (int i = from + 1; i < to; i++) {
+      Stop p = path.get(i);
+      double weight = 0.5 * (path.get(i + 1).arc - path.get(i - 1).arc) / span;
+      double t = (p.arc - a.arc) / span;
+      mean[0] += weight * (p.at.x() - a.at.x() - t * (b.at.x() - a.at.x()));
+      mean[1] += weight * (p.at.y() - a.at.y() - t * (b.at.y() - a.at.y()));
+      mean[2] += weight * (p.at.z() - a.at.z() - t * (b.at.z() - a.at.z()));
+    }
+    return mean;
   }
 
   private int findJoint(Vertex p) {

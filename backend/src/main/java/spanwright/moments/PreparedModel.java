@@ -7,12 +7,6 @@ import org.apache.commons.math3.complex.Complex;
  * frequency, worked out once.
  */
 final class PreparedModel {
-  /** Points may stray from an element by this part of a wavelength. */
-  private static final double STRAY = 1.0 / 800;
-
-  /** And by this part of the lowest height. */
-  private static final double STRAY_OF_HEIGHT = 0.02;
-
   private final AntennaModel model;
   private final Ground ground;
   private final Mesh mesh;
@@ -34,15 +28,7 @@ final class PreparedModel {
     this.model = model;
     this.ground = ground;
     double k = Constants.waveNumber(highestMHz);
-    double stray = 2 * Math.PI / k * STRAY;
-    if (ground.kind() != Ground.Kind.NONE) {
-      for (WireSpec wire : model.wires()) {
-        for (Vertex p : wire.points()) {
-          stray = Math.min(stray, STRAY_OF_HEIGHT * p.z());
-        }
-      }
-    }
-    Outline outline = Outline.of(model, stray);
+    Outline outline = Outline.of(model, rule.tolerance(model, ground, k));
     mesh = Mesh.of(model, outline, rule, k);
     statics = new StaticPairs(mesh);
     points = new SourcePoints(mesh);

@@ -49,7 +49,7 @@ class SolverTest {
     }
     Solution hung = solve(fed(WireSpec.of(points, 0.001, WireSpec.COPPER)));
     Solution straight = solve(fed(wire(v(-10, 0, 8), v(10, 2, 8))));
-    assertTrue(hung.unknowns() < straight.unknowns() * 1.7, hung.unknowns() + " unknowns");
+    assertTrue(hung.unknowns() < 1.5 * straight.unknowns(), hung.unknowns() + " unknowns");
     List<Vertex> half = new ArrayList<>();
     for (int i = 0; i < points.size(); i += 1) {
       half.add(points.get(i));
@@ -165,7 +165,7 @@ class SolverTest {
             .anyMatch(
                 s ->
                     Math.abs(s.fraction() - 0.5) < 1e-9
-                        && s.current().subtract(admittance).abs() < 1e-9));
+                        && s.current().subtract(admittance).abs() < 5e-3 * admittance.abs()));
   }
 
   @Test
