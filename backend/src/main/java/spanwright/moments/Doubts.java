@@ -115,6 +115,25 @@ final class Doubts {
     }
   }
 
+  /**
+   * A thick wire's feed: how wide its field is taken decides the susceptance. The size is what
+   * doubling that width moved on whole waves of 5 to 30 mm at 28.5 MHz, where it is worst.
+   */
+  void ofFeed(AntennaModel model, double frequencyMHz) {
+    double radius = model.wires().get(model.feedWire()).radius();
+    double move = 3 * radius * frequencyMHz / 28.5;
+    if (move >= 0.015) {
+      warnings.add(
+          String.format(
+              Locale.ROOT,
+              "%s is fed and %.3f m in radius: where its impedance is high the reflection"
+                  + " coefficient (400 ohm) hangs on the form of the feed, by up to %.2f.",
+              ModelCheck.name(model.feedWire()),
+              radius,
+              Math.min(move, 0.2)));
+    }
+  }
+
   void ofAnswer(Complex impedance, SymmetricSystem system, Ground ground) {
     if (!(system.residual <= RESIDUAL)) {
       fail(

@@ -44,7 +44,7 @@ record MeshRule(
   static MeshRule of(MeshAim aim) {
     return switch (aim) {
       case COARSE -> new MeshRule(2.8, 0.15, 0.1, 0.15, 8, 3, 6, 1, 1.0 / 400);
-      case FULL -> new MeshRule(2.4, 0.04, 0.025, 0.05, 4, 1.9, 3, 0.5, 1.0 / 1000);
+      case FULL -> new MeshRule(2.5, 0.04, 0.025, 0.05, 2, 1.6, 2.5, 0.5, 1.0 / 1000);
       case FINE -> new MeshRule(1.4, 0.02, 0.012, 0.025, 1.6, 1, 1.2, 0.3, 1.0 / 2000);
     };
   }

@@ -15,10 +15,10 @@ final class Mesher {
 
   /**
    * Elements are at least so many radii long. What varies along a wire within a few radii the
-   * reduced kernel gets wrong, more so the finer the mesh: a third order on ten radii is as far as
+   * reduced kernel gets wrong, more so the finer the mesh: a third order on six radii is as far as
    * it may be asked.
    */
-  private static final double LEAST_RADII = 10;
+  private static final double LEAST_RADII = 6;
 
   /** And so many outer radii of insulation, whose share of the charge's field is taken as local. */
   private static final double LEAST_SHEATH_RADII = 10;

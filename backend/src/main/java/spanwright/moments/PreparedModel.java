@@ -75,6 +75,7 @@ final class PreparedModel {
     Currents currents = new Currents(mesh, system.answerRe, system.answerIm);
     FarField far = new FarField(currents, points, ground, k);
     Doubts all = doubts.copy();
+    all.ofFeed(model, frequencyMHz);
     all.ofAnswer(impedance, system, ground);
     Solution.Found found =
         new Solution.Found(

@@ -1,6 +1,7 @@
 package spanwright.moments;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
@@ -349,6 +350,59 @@ class SolverInvariantsTest {
       compare(best, solver.solve(model, SOIL, f, MeshAim.FULL), directions, 0.01, 0.05);
       compare(best, solver.solve(model, SOIL, f, MeshAim.COARSE), directions, 0.05, 0.3);
     }
+  }
+
+  @Test
+  void thick_fed_wires_stand_still_on_finer_meshes() {
+    for (double radius : new double[] {0.005, 0.01, 0.03}) {
+      AntennaModel model =
+          AntennaModel.of(
+              List.of(WireSpec.perfect(List.of(v(-5.1, 0, 9), v(5.1, 0, 9)), radius)), 0, 0.5);
+      Solution found = solver.solveAndRefine(model, SOIL, 28.5, MeshAim.FULL);
+      assertTrue(found.refinementChange().orElseThrow() < 0.012, "radius " + radius);
+      assertTrue(found.trusted());
+      assertTrue(found.warnings().get(0).contains("form of the feed"), found.warnings().toString());
+    }
+  }
+
+  @Test
+  void hanging_wires_side_by_side_keep_their_spacing() {
+    List<WireSpec> wires = new ArrayList<>();
+    for (int w = 0; w < 2; w++) {
+      List<Vertex> points = new ArrayList<>();
+      int n = 40 + 17 * w;
+      for (int i = 0; i <= n; i++) {
+        double t = (double) i / n;
+        points.add(v(-20 + 40 * t, 0.05 * w, 9 - 6 * t * (1 - t)));
+      }
+      wires.add(WireSpec.of(points, 0.001, 5.8e7));
+    }
+    AntennaModel model = AntennaModel.of(wires, 0, 0.5);
+    Outline coarse = Outline.of(model, 0.2);
+    Outline fine = Outline.of(model, 0.001);
+    assertTrue(coarse.pieces.size() < fine.pieces.size());
+    Complex a = solver.solve(model, SOIL, 1.85, MeshAim.COARSE).impedance();
+    Complex b = solver.solve(model, SOIL, 1.85, MeshAim.FINE).impedance();
+    assertEquals(0, SolveCase.reflection(a).subtract(SolveCase.reflection(b)).abs(), 0.02);
+  }
+
+  @Test
+  void the_shares_of_power_add_up_and_what_fails_is_not_trusted() {
+    Solution soil = solver.solve(awkward(p -> p, 5.8e7), SOIL, 7.1, MeshAim.FULL);
+    assertEquals(1, soil.efficiency() + soil.wireLossShare() + soil.groundLossShare(), 1e-12);
+    assertTrue(soil.groundLossShare() > 0.1 && soil.trusted());
+    Solution free = solver.solve(awkward(p -> p, 5.8e7), Ground.none(), 7.1, MeshAim.FULL);
+    assertEquals(0, free.groundLossShare());
+    AntennaModel stub =
+        AntennaModel.of(List.of(WireSpec.perfect(List.of(v(0, 0, 5), v(1, 0, 5)), 0.001)), 0, 0.5);
+    Solution lost = solver.solve(stub, SOIL, 1.8, MeshAim.FULL);
+    assertFalse(lost.trusted());
+    assertTrue(lost.warnings().containsAll(lost.failings()));
+    assertFalse(soil.refined(0.2, 0.01).trusted());
+    assertTrue(soil.refined(0.02, 0.01).trusted());
+    assertFalse(Doubts.ofPower(1.02, true).isEmpty());
+    assertTrue(Doubts.ofPower(0.6, true).isEmpty());
+    assertFalse(Doubts.ofPower(0.98, false).isEmpty());
   }
 
   private static void compare(
