@@ -1,24 +1,14 @@
 package spanwright.store;
 
 import com.fasterxml.jackson.core.JsonProcessingException;
-import com.fasterxml.jackson.databind.JsonNode;
 import java.io.IOException;
-import java.nio.ByteBuffer;
-import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.DirectoryStream;
 import java.nio.file.Files;
-import java.nio.file.LinkOption;
 import java.nio.file.Path;
-import java.security.MessageDigest;
-import java.security.NoSuchAlgorithmException;
 import java.time.Instant;
-import java.time.ZoneOffset;
-import java.time.format.DateTimeFormatter;
-import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.Comparator;
-import java.util.HexFormat;
 import java.util.List;
 import java.util.Optional;
 import java.util.TreeSet;
@@ -30,17 +20,12 @@ import spanwright.plan.Json;
  * comparing a version and writing the next are one step.
  */
 public final class PlanStore implements AutoCloseable {
-  private static final String ENDING = ".json";
-
-  /** Anything longer was not written by this program. */
-  private static final long LONGEST_FILE = 32L << 20;
-
-  private static final DateTimeFormatter STAMP =
-      DateTimeFormatter.ofPattern("yyyyMMdd'T'HHmmss'Z'").withZone(ZoneOffset.UTC);
+  private static final String ENDING = JsonFile.ENDING;
 
   private final Path folder;
   private final FolderLock lock;
   private final List<String> notices = new ArrayList<>();
+  private final IssuedRecords issued = new IssuedRecords(this);
 
   private PlanStore(Path folder, FolderLock lock) {
     this.folder = folder;
@@ -68,6 +53,7 @@ public final class PlanStore implements AutoCloseable {
     PlanStore store = new PlanStore(whole, FolderLock.take(whole));
     try {
       store.clearTemporaries();
+      store.ids().forEach(store.issued::look);
       store.list();
     } catch (RuntimeException e) {
       store.close();
@@ -84,6 +70,11 @@ public final class PlanStore implements AutoCloseable {
   /** What people should know about the folder: files set aside, files that cannot be read. */
   public synchronized List<String> notices() {
     return List.copyOf(notices);
+  }
+
+  /** The records of sheets issued, one beside each plan. */
+  public IssuedRecords issued() {
+    return issued;
   }
 
   /** Every plan that opens, latest save first. */
@@ -138,7 +129,7 @@ public final class PlanStore implements AutoCloseable {
     }
     requireVersion(old.get(), accepted);
     try {
-      aside(id, "deleted");
+      JsonFile.setAside(file(id), "deleted");
       return true;
     } catch (IOException e) {
       throw refused("deleted", id, e);
@@ -160,15 +151,15 @@ public final class PlanStore implements AutoCloseable {
     Path target = file(id);
     try {
       byte[] bytes = json.getBytes(StandardCharsets.UTF_8);
-      Instant time = nextTime(old);
+      Instant time = JsonFile.timeAfter(old == null ? null : old.savedAt());
       Path fresh = Disk.writeBeside(target, bytes, time);
       if (old != null) {
         keepBefore(id, old);
       }
       Disk.rename(fresh, target);
       // Asked back, since a disk may keep times more coarsely than they were given.
-      Instant kept = timeOf(target);
-      return new SavedPlan(id, json, version(bytes, kept), kept);
+      Instant kept = JsonFile.timeOf(target);
+      return new SavedPlan(id, json, JsonFile.version(bytes, kept), kept);
     } catch (IOException e) {
       throw refused("saved", id, e);
     }
@@ -178,15 +169,6 @@ public final class PlanStore implements AutoCloseable {
     Path before = before(id);
     byte[] bytes = old.json().getBytes(StandardCharsets.UTF_8);
     Disk.rename(Disk.writeBeside(before, bytes, old.savedAt()), before);
-  }
-
-  /** The file's own time is part of the version, so it rises even when the clock does not. */
-  private static Instant nextTime(SavedPlan old) {
-    Instant now = Instant.now().truncatedTo(ChronoUnit.MILLIS);
-    if (old == null || now.isAfter(old.savedAt())) {
-      return now;
-    }
-    return old.savedAt().truncatedTo(ChronoUnit.MILLIS).plusMillis(1);
   }
 
   /** The plan of a sound id; a damaged file is set aside and the save before takes its place. */
@@ -200,7 +182,7 @@ public final class PlanStore implements AutoCloseable {
       if (plan.isPresent()) {
         return plan;
       }
-      Path named = aside(id, "damaged");
+      Path named = JsonFile.setAside(path, "damaged");
       boolean restored = restore(id);
       notice(
           "The saved plan "
@@ -229,26 +211,9 @@ public final class PlanStore implements AutoCloseable {
     return true;
   }
 
-  /** Empty when the bytes are not one JSON object in UTF-8. */
   private static Optional<SavedPlan> read(String id, Path path) throws IOException {
-    if (Files.size(path) > LONGEST_FILE) {
-      return Optional.empty();
-    }
-    byte[] bytes = Files.readAllBytes(path);
-    Instant time = timeOf(path);
-    try {
-      String json = StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
-      JsonNode tree = Json.mapper().readTree(json);
-      return tree.isObject()
-          ? Optional.of(new SavedPlan(id, json, version(bytes, time), time))
-          : Optional.empty();
-    } catch (CharacterCodingException | JsonProcessingException e) {
-      return Optional.empty();
-    }
-  }
-
-  private static Instant timeOf(Path path) throws IOException {
-    return Files.getLastModifiedTime(path).toInstant().truncatedTo(ChronoUnit.MILLIS);
+    return JsonFile.read(path)
+        .map(file -> new SavedPlan(id, file.json(), file.version(), file.savedAt()));
   }
 
   private static String titleOf(String json, String otherwise) {
@@ -257,17 +222,6 @@ public final class PlanStore implements AutoCloseable {
       return title.isEmpty() ? otherwise : title;
     } catch (JsonProcessingException e) {
       return otherwise;
-    }
-  }
-
-  private static String version(byte[] bytes, Instant time) {
-    try {
-      byte[] digest = MessageDigest.getInstance("SHA-256").digest(bytes);
-      return HexFormat.of().formatHex(digest, 0, 8)
-          + "-"
-          + Long.toString(time.toEpochMilli(), Character.MAX_RADIX);
-    } catch (NoSuchAlgorithmException e) {
-      throw new IllegalStateException("every Java has SHA-256", e);
     }
   }
 
@@ -310,16 +264,6 @@ public final class PlanStore implements AutoCloseable {
     }
   }
 
-  private Path aside(String id, String why) throws IOException {
-    String stem = id + "." + why + "-" + STAMP.format(Instant.now());
-    Path named = folder.resolve(stem + ENDING);
-    for (int n = 2; Files.exists(named, LinkOption.NOFOLLOW_LINKS); n++) {
-      named = folder.resolve(stem + "-" + n + ENDING);
-    }
-    Disk.rename(file(id), named);
-    return named;
-  }
-
   /** What a crash left behind in the middle of a write was never a save. */
   private void clearTemporaries() {
     for (String name : names("*" + ENDING + Disk.TEMPORARY)) {
@@ -331,16 +275,19 @@ public final class PlanStore implements AutoCloseable {
     }
   }
 
-  private void notice(String sentence) {
+  void notice(String sentence) {
     if (!notices.contains(sentence)) {
       notices.add(sentence);
     }
   }
 
   private StoreTrouble refused(String what, String id, IOException e) {
+    return trouble("The plan " + id, what, e);
+  }
+
+  StoreTrouble trouble(String thing, String what, IOException e) {
     return new StoreTrouble(
-        "The plan "
-            + id
+        thing
             + " could not be "
             + what
             + " in "

@@ -17,11 +17,16 @@
  *       second program out.
  *   <li><b>Ids never become paths unchecked.</b> Only {@code a-z}, {@code 0-9} and single hyphens,
  *       at most 64 characters.
+ *   <li><b>A sheet that was issued stays issued.</b> The record of the sheets handed out of a plan
+ *       lies beside it as {@code ID.issued.json}, with a copy of the same, {@code
+ *       ID.issued-copy.json}. It only grows, outlives its plan, and the copy takes its place when
+ *       it is damaged, so that no letter is given twice.
  * </ul>
  *
  * <p>What it does not do: judge plans (drafts are kept too; {@code web} checks what it lets in),
  * merge edits, or keep more than one save before the present one.
  *
- * <p>Front door: {@link spanwright.store.PlanStore}.
+ * <p>Front door: {@link spanwright.store.PlanStore}; {@link spanwright.store.IssuedRecords} through
+ * it.
  */
 package spanwright.store;
