@@ -32,6 +32,12 @@ final class Mesher {
   /** Bends of less than this need nothing: its cosine. */
   private static final double GENTLE = 0.985;
 
+  /** Pieces whose cosine is greater run side by side rather than crosswise. */
+  private static final double CROSSWISE = 0.9;
+
+  /** Length of the element where wires pass crosswise, over how far apart they are. */
+  private static final double CROSSING = 1.5;
+
   /** An element longer than this part of its distance from an anchor lies in its graded part. */
   private static final double GRADED = 0.8;
 
@@ -194,7 +200,31 @@ final class Mesher {
         anchors.add(new Anchor(arc, Math.max(spot.pace, apart), rule.bendGrowth()));
       }
     }
+    addCrossings(p, piece, reach, anchors);
     return anchors;
+  }
+
+  /** Where another piece passes by crosswise, charge gathers on both: short elements there too. */
+  private void addCrossings(int p, Outline.Piece piece, double reach, List<Anchor> anchors) {
+    double[] place = new double[2];
+    for (int q = 0; q < outline.pieces.size(); q++) {
+      Outline.Piece other = outline.pieces.get(q);
+      boolean joined =
+          other.nodeA() == piece.nodeA()
+              || other.nodeA() == piece.nodeB()
+              || other.nodeB() == piece.nodeA()
+              || other.nodeB() == piece.nodeB();
+      if (q == p || joined || Math.abs(cosine(piece, other)) > CROSSWISE) {
+        continue;
+      }
+      double apart = Math.sqrt(Outline.squared(piece, other, place));
+      double at = place[0] / piece.length();
+      double beyond = place[1] / other.length();
+      if (apart < reach && at > 0 && at < 1 && beyond > 0 && beyond < 1) {
+        double arc = piece.arcA() + at * (piece.arcB() - piece.arcA());
+        anchors.add(new Anchor(arc, Math.max(CROSSING * apart, rule.end() / k), rule.bendGrowth()));
+      }
+    }
   }
 
   private double growth(int node) {

@@ -292,4 +292,28 @@ final class Outline {
     t = Math.max(0, Math.min(1, t));
     return p.distanceTo(new Vertex(a.x() + t * dx, a.y() + t * dy, a.z() + t * dz));
   }
+
+  /** Squared distance of two pieces [m²]; writes how far along each the nearest places lie [m]. */
+  static double squared(Piece p, Piece q, double[] place) {
+    double lp = p.length();
+    double lq = q.length();
+    Vertex a = p.a();
+    Vertex b = q.a();
+    return Segments.squared(
+        a.x(),
+        a.y(),
+        a.z(),
+        (p.b().x() - a.x()) / lp,
+        (p.b().y() - a.y()) / lp,
+        (p.b().z() - a.z()) / lp,
+        lp,
+        b.x(),
+        b.y(),
+        b.z(),
+        (q.b().x() - b.x()) / lq,
+        (q.b().y() - b.y()) / lq,
+        (q.b().z() - b.z()) / lq,
+        lq,
+        place);
+  }
 }
