@@ -192,6 +192,9 @@ record Change(Kind kind, int attachment, double direction, double amount, String
         return fits ? new Place(at.x(), at.y(), at.z() + wanted - above) : null;
       }
       case MOVE -> {
+        if (holder.zone() == null) {
+          return null; // another hold took it off its mast zone
+        }
         Point to =
             new Point(at.x() + amount * Math.cos(direction), at.y() + amount * Math.sin(direction));
         return PlanShapes.contains(holder.zone().area(), to.x(), to.y())
@@ -199,7 +202,7 @@ record Change(Kind kind, int attachment, double direction, double amount, String
             : null;
       }
       case SLIDE -> {
-        Point to = slid(holder.bracket(), at.onPlan());
+        Point to = holder.bracket() == null ? null : slid(holder.bracket(), at.onPlan());
         return to == null ? null : raised(to, above, ground);
       }
       default -> {

@@ -11,7 +11,9 @@ import java.util.Set;
 import org.junit.jupiter.api.Test;
 import spanwright.plan.Catalogue;
 import spanwright.plan.Catalogues;
+import spanwright.plan.GroundSurface;
 import spanwright.plan.Plan;
+import spanwright.rigging.Holder;
 import spanwright.rigging.Layout;
 import spanwright.rigging.Plots;
 import spanwright.rigging.Rigged;
@@ -101,6 +103,21 @@ class CuresTest {
             Plots.hold("east", 45, 30, other > 6 ? other - less : other));
     Rigged hung = found.rigging().hang(almost);
     assertFalse(Trials.fouls(hung, found.clearances().check(hung)).isEmpty());
+  }
+
+  @Test
+  void a_move_within_a_zone_or_along_a_wall_falls_away_once_another_hold_took_the_end_off_it() {
+    String pole =
+        """
+        [ { "id": "west", "kind": "other", "at": [15, 30], "lowest": 2, "highest": 10 },
+          { "id": "east", "kind": "other", "at": [45, 30], "lowest": 2, "highest": 10 } ]""";
+    Plan plan = Plots.bare().with("supports", pole).plan();
+    GroundSurface level = GroundSurface.of(plan);
+    List<Layout.Hold> holds = List.of(Plots.hold("west", 15, 30, 8), Plots.hold("east", 45, 30, 8));
+    for (Change.Kind kind : List.of(Change.Kind.MOVE, Change.Kind.SLIDE)) {
+      Change change = new Change(kind, 1, 1, 0.5, null);
+      assertNull(change.holds(holds, Holder.all(plan)::get, level), kind.toString());
+    }
   }
 
   @Test
