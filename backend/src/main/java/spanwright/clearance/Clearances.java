@@ -32,10 +32,29 @@ public final class Clearances {
   /** Things farther away than this beyond what is required are not worth a line [m]. */
   private static final double RANGE = 5;
 
+  /** Rules held against things that are looked up by their place; a brief may set them wide. */
+  private static final List<String> BY_PLACE =
+      List.of(
+          "people",
+          "people-rope",
+          "zone-no-wire",
+          "building-wire",
+          "building-rope",
+          "building-feed-line",
+          "canopy-wire",
+          "canopy-end",
+          "canopy-feed-line",
+          "canopy-mast",
+          "metalwork-wire");
+
   private final GroundSurface ground;
   private final Lowest lowest;
   private final RuleBook rules;
   private final double margin;
+
+  /** Nothing farther than this can be foul, tight or worth a line [m]. */
+  private final double farthest;
+
   private final Rigging rigging;
   private final Overhead overhead;
   private final Boundary boundary;
@@ -52,6 +71,8 @@ public final class Clearances {
     lowest = new Lowest(ground);
     rules = RuleBook.of(plan, catalogue);
     margin = rules.value("tight-margin");
+    double widest = BY_PLACE.stream().mapToDouble(rules::value).max().orElse(0);
+    farthest = Math.max(RANGE, widest + margin);
     headroom = rules.value("headroom");
     rigging = Rigging.of(plan, catalogue);
     overhead = new Overhead(plan, catalogue, ground, rules);
@@ -167,7 +188,7 @@ public final class Clearances {
         each.check(strand, scene, tally);
       }
     }
-    masts(rigged, range, tally);
+    masts(rigged, tally);
     List<Clearance> all = new ArrayList<>(tally.clearances());
     overhead.check(rigged, strands, holders, ground, range < RANGE, all);
     all.sort(
@@ -181,7 +202,7 @@ public final class Clearances {
   private List<Obstacle> near(Strand strand) {
     double[] box = strand.box;
     Envelope where = new Envelope(box[0], box[3], box[1], box[4]);
-    where.expandBy(RANGE);
+    where.expandBy(farthest + strand.mostSlack);
     return index.query(where);
   }
 
@@ -206,25 +227,21 @@ public final class Clearances {
     }
   }
 
-  private void masts(Rigged rigged, double range, Tally tally) {
+  private void masts(Rigged rigged, Tally tally) {
+    double required = rules.value("zone-no-mast");
     for (Rigged.Mast mast : rigged.masts()) {
       for (Zone each : noMast) {
         Area area = new Area(each.area());
         double away = area.signed(mast.foot().x(), mast.foot().y());
-        if (away < range) {
+        Tally.Worst worst = tally.of("zone-no-mast", each.id());
+        if (away < worst.range(required)) {
           double[] edge =
               area.footOnEdge(
                   area.nearestEdge(mast.foot().x(), mast.foot().y()),
                   mast.foot().x(),
                   mast.foot().y());
-          tally
-              .of("zone-no-mast", each.id())
-              .offer(
-                  away,
-                  rules.value("zone-no-mast"),
-                  "mast",
-                  mast.foot(),
-                  new Place(edge[0], edge[1], mast.foot().z()));
+          Place theirs = new Place(edge[0], edge[1], mast.foot().z());
+          worst.offer(away, required, "mast", mast.foot(), theirs);
         }
       }
     }

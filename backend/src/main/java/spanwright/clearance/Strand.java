@@ -44,7 +44,10 @@ final class Strand {
   final int calm;
   final int sweep;
   private final double[] slack;
-  private final double mostSlack;
+
+  /** The most that is taken off any distance for what the states leave open [m]. */
+  final double mostSlack;
+
   final double[] box;
   private final double[][] boxes;
 

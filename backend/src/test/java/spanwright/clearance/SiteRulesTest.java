@@ -42,6 +42,42 @@ class SiteRulesTest {
   }
 
   @Test
+  void a_rule_set_wide_is_looked_for_as_wide() {
+    Layout layout =
+        Plots.straight(
+            "level", 2, 0.5, Plots.hold("west", 15, 30, 9), Plots.hold("new", 45, 30, 9));
+    Plan plan =
+        Plots.bare()
+            .poles("")
+            .with(
+                "buildings",
+                """
+                [ { "id": "shed", "name": "Shed", "footprint": [[25,38],[35,38],[35,44],[25,44]],
+                    "eaves": 9, "ridge": 9, "roof": "flat" } ]""")
+            .with(
+                "mastZones",
+                """
+                [ { "id": "new", "name": "Bed", "area": [[40,25],[50,25],[50,35],[40,35]], "highest": 10 } ]""")
+            .with(
+                "zones",
+                """
+                [ { "id": "lawn", "name": "Lawn", "rule": "no-mast", "area": [[51.5,20],[58,20],[58,40],[51.5,40]] } ]""")
+            .rules(
+                "\"wind\": 20, \"ice\": 0, \"overrides\": { \"building-wire\": 12, \"zone-no-mast\": 9 }")
+            .plan();
+    Rigged rigged = Rigging.hang(plan, Catalogues.standard(), layout);
+    Clearances clearances = Clearances.of(plan, Catalogues.standard());
+    for (List<Clearance> all : List.of(clearances.check(rigged), clearances.checkClosely(rigged))) {
+      Clearance shed = find(all, "building-wire").orElseThrow();
+      assertEquals(State.FOUL, shed.state(), shed.toString());
+      assertTrue(shed.distance() > 5, shed.toString());
+      Clearance lawn = find(all, "zone-no-mast").orElseThrow();
+      assertEquals(State.FOUL, lawn.state(), lawn.toString());
+      assertEquals(6.5, lawn.distance(), 1e-9);
+    }
+  }
+
+  @Test
   void headroom_follows_the_sloping_ground() {
     Plan level = Plots.bare().poles("").plan();
     Clearance flat = get(level, LEVEL, "headroom");
