@@ -251,9 +251,16 @@ public record Placement(
    * @param insulator margin of the end insulators, likewise
    * @param partsFirst "wire", "rope" or "insulator"
    * @param weakLink what a link let into the rope should part at [N], or null where none fits
+   * @param weather in which its wire is drawn hardest: "still air", "gust", "ice" or "ice and
+   *     gust"; null in documents older than it
    */
   public record SpanStrength(
-      double wire, Double rope, Double insulator, String partsFirst, Double weakLink) {}
+      double wire,
+      Double rope,
+      Double insulator,
+      String partsFirst,
+      Double weakLink,
+      String weather) {}
 
   /**
    * A rope.

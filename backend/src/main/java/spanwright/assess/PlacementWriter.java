@@ -129,7 +129,8 @@ final class PlacementWriter {
         margin(strength.rope()),
         margin(strength.insulator()),
         strength.partsFirst(),
-        strength.weakLink() == null ? null : Rounded.tenth(strength.weakLink()));
+        strength.weakLink() == null ? null : Rounded.tenth(strength.weakLink()),
+        strength.weather());
   }
 
   private static Double margin(Strength.Part part) {

@@ -44,6 +44,24 @@ record Look(
     return most(Solved::greatest);
   }
 
+  /** The weather in which its wire is drawn hardest, in words. */
+  String governing() {
+    Solved[] each = {calm, left, right, ice, iceLeft, iceRight};
+    Weather[] weathers = {
+      Weather.CALM, Weather.GUST, Weather.GUST, Weather.ICE, Weather.ICY_GUST, Weather.ICY_GUST
+    };
+    Weather worst = Weather.CALM;
+    double most = 0;
+    for (int i = 0; i < each.length; i++) {
+      // a weather that adds less than a thousandth is not what it is chosen by
+      if (each[i] != null && each[i].greatest() > most * 1.001) {
+        most = each[i].greatest();
+        worst = weathers[i];
+      }
+    }
+    return worst.words;
+  }
+
   /** Greatest tension of a rope that holds it in any weather [N]. */
   double greatestRope() {
     return most(Solved::greatestRope);

@@ -10,8 +10,10 @@ package spanwright.rigging;
  * @param partsFirst "wire", "rope" or "insulator": that with the least margin
  * @param weakLink what a link let into the rope should part at, so that it goes before anything
  *     else and still holds the weather [N]; null where there is no room for one, or no rope
+ * @param weather in which the wire is drawn hardest: "still air", "gust", "ice" or "ice and gust"
  */
-public record Strength(Part wire, Part rope, Part insulator, String partsFirst, Double weakLink) {
+public record Strength(
+    Part wire, Part rope, Part insulator, String partsFirst, Double weakLink, String weather) {
   /**
    * One part of a span.
    *
@@ -34,7 +36,7 @@ public record Strength(Part wire, Part rope, Part insulator, String partsFirst, 
   static Strength of(Look look, Materials materials) {
     Part wire = new Part(look.calm().greatest(), look.greatest(), materials.wireBreaking());
     if (look.ropeFrom() < 0.01 && look.ropeTo() < 0.01) {
-      return new Strength(wire, null, null, "wire", null);
+      return new Strength(wire, null, null, "wire", null, look.governing());
     }
     double calm = look.calm().greatestRope();
     double worst = look.greatestRope();
@@ -50,6 +52,6 @@ public record Strength(Part wire, Part rope, Part insulator, String partsFirst, 
     double weakest = Math.min(wire.holds(), Math.min(rope.holds(), insulator.holds()));
     double link = Practice.WEAK_LINK * weakest;
     boolean room = link >= Practice.LINK_MARGIN * Math.max(worst, wire.worst());
-    return new Strength(wire, rope, insulator, first, room ? link : null);
+    return new Strength(wire, rope, insulator, first, room ? link : null, look.governing());
   }
 }

@@ -7,22 +7,26 @@ package spanwright.rigging;
  */
 enum Weather {
   /** Still air. */
-  CALM(0, false),
+  CALM(0, false, "still air"),
   /** The design gust on the bare wire. */
-  GUST(1, false),
+  GUST(1, false, "gust"),
   /** Ice in still air. */
-  ICE(0, true),
+  ICE(0, true, "ice"),
   /** Ice, and the gust with the share of its pressure that goes with it. */
-  ICY_GUST(0.4, true);
+  ICY_GUST(0.4, true, "ice and gust");
 
   /** Share of the design gust's pressure. */
   final double windShare;
 
   final boolean iced;
 
-  Weather(double windShare, boolean iced) {
+  /** As it reads. */
+  final String words;
+
+  Weather(double windShare, boolean iced, String words) {
     this.windShare = windShare;
     this.iced = iced;
+    this.words = words;
   }
 
   boolean windy() {

@@ -84,6 +84,11 @@ final class Figures {
         : fixed(Math.floor(metres * 100 + CRUMB) / 100, 2);
   }
 
+  /** A distance found in a sentence, with its unit. */
+  String sayFound(double metres) {
+    return unbroken(found(metres) + suffix());
+  }
+
   /** A distance required: never less than it is. */
   String required(double metres) {
     return feet

@@ -24,6 +24,11 @@ public final class HangParts {
    * @param state pulls against what it may take
    * @param method how wire or rope gets up there, in words
    * @param kilograms to hang, or null
+   * @param margin what it may take over the greater of its pulls, or null when not known
+   * @param weightUp how far weather and swaying trees may lift the weight [m], or null
+   * @param weightDown how far they may let it down [m], or null
+   * @param slackAtPulley rope left between the wire's end and the pulley when the weight is at its
+   *     lowest [m], or null
    */
   public record Holding(
       int point,
@@ -37,7 +42,38 @@ public final class HangParts {
       Double mayTake,
       State state,
       String method,
-      Double kilograms) {}
+      Double kilograms,
+      Double margin,
+      Double weightUp,
+      Double weightDown,
+      Double slackAtPulley) {}
+
+  /**
+   * How far a span is from parting: what breaks a part, over the greatest tension on it in any
+   * weather. Knots take half of a rope.
+   *
+   * @param span "1–2", the point numbers of its ends
+   * @param set tension to rig it with, calm [N]
+   * @param worst tension of its wire in any weather [N], or null when not known
+   * @param weather that governs, in words, or null when not known
+   * @param wire margin
+   * @param rope margin of the rope with its knots, or null where none holds it
+   * @param insulator margin, likewise
+   * @param support the lesser margin of the points it hangs from, or null when not known
+   * @param partsFirst "wire", "rope" or "insulator"
+   * @param weakLink what a link let into its rope should part at [N], or null where none fits
+   */
+  public record Margins(
+      String span,
+      double set,
+      Double worst,
+      String weather,
+      double wire,
+      Double rope,
+      Double insulator,
+      Double support,
+      String partsFirst,
+      Double weakLink) {}
 
   /**
    * The sag to sight in one span.

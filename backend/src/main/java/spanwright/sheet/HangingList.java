@@ -2,6 +2,8 @@ package spanwright.sheet;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Objects;
+import java.util.stream.Stream;
 import spanwright.assess.Placement;
 import spanwright.plan.Place;
 import spanwright.plan.Point;
@@ -28,9 +30,52 @@ final class HangingList {
               held.pullLimit(),
               held.state(),
               method(job, held),
-              held.kilograms()));
+              held.kilograms(),
+              margin(held),
+              held.weightUp(),
+              held.weightDown(),
+              held.slackAtPulley()));
     }
     return rows;
+  }
+
+  private static Double margin(Placement.Attachment held) {
+    double worst = Math.max(held.pull(), held.pullInWind());
+    return held.pullLimit() == null || worst < 0.1 ? null : held.pullLimit() / worst;
+  }
+
+  /** Spans that the placement tells the strength of. */
+  static List<HangParts.Margins> margins(Job job) {
+    return job.placement.spans().stream()
+        .filter(s -> s.strength() != null)
+        .map(s -> margins(job, s))
+        .toList();
+  }
+
+  private static HangParts.Margins margins(Job job, Placement.Span span) {
+    Double support =
+        Stream.of(span.from(), span.to())
+            .map(i -> margin(job.placement.attachments().get(i)))
+            .filter(Objects::nonNull)
+            .min(Double::compare)
+            .orElse(null);
+    Placement.SpanStrength strength = span.strength();
+    return new HangParts.Margins(
+        name(span),
+        span.tension(),
+        span.greatestTension(),
+        strength.weather(),
+        strength.wire(),
+        strength.rope(),
+        strength.insulator(),
+        support,
+        strength.partsFirst(),
+        strength.weakLink());
+  }
+
+  /** "1–2": the numbers of its ends. */
+  static String name(Placement.Span span) {
+    return (span.from() + 1) + "–" + (span.to() + 1);
   }
 
   /** How it gets up there, by what holds it. */
@@ -62,7 +107,7 @@ final class HangingList {
     Place middle = middle(span.points());
     double bearing = a.distance(b) < 0.01 ? 0 : job.bearing(a, b);
     return new HangParts.Sag(
-        (span.from() + 1) + "–" + (span.to() + 1),
+        name(span),
         a.distance(b),
         Math.max(0, (from.z() + to.z()) / 2 - middle.z()),
         span.sag(),

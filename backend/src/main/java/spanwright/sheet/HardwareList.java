@@ -57,8 +57,16 @@ final class HardwareList {
 
   private void addInsulators() {
     int ends = 0;
-    for (WireList.Piece piece : WireList.pieces(job.placement)) {
-      ends += piece.loop() ? 0 : 1;
+    int along = 0;
+    List<WireList.Piece> pieces = WireList.pieces(job.placement);
+    for (WireList.Piece piece : pieces) {
+      ends += piece.loop() || piece.free() > 0 ? 0 : 1;
+      along += piece.free() > 0 ? 1 : 0;
+    }
+    if (pieces.stream().anyMatch(WireList.Piece::loop)) {
+      along +=
+          (int)
+              job.placement.attachments().stream().filter(a -> !"centre".equals(a.held())).count();
     }
     add("end insulators, 100 mm", ends, 1, null);
     long held = job.placement.attachments().stream().filter(a -> "centre".equals(a.held())).count();
@@ -74,7 +82,7 @@ final class HardwareList {
         1,
         0,
         null);
-    add("insulators the wire runs through", (int) held - (feedHeld ? 1 : 0), 0, null);
+    add("insulators the wire runs through", (int) held - (feedHeld ? 1 : 0) + along, 0, null);
   }
 
   private boolean feedIsInside() {
@@ -101,6 +109,15 @@ final class HardwareList {
                 + " kg ("
                 + Figures.newtons(held.kilograms())
                 + " N), filled and weighed on site");
+      }
+    }
+    for (HangParts.Margins span : HangingList.margins(job)) {
+      if (span.weakLink() != null) {
+        add(
+            "weak link, parts at " + Figures.whole(Math.floor(span.weakLink())) + " N",
+            1,
+            1,
+            "in one rope of each span that has one");
       }
     }
     add("cleats", Math.max(0, lifts - weights), 0, null);

@@ -43,6 +43,10 @@ final class ListPages {
     flow.gap(GAP);
     flow.add(wide(rig.attachments()));
     flow.gap(GAP);
+    if (!rig.margins().isEmpty()) {
+      flow.add(wide(rig.margins()));
+      flow.gap(GAP);
+    }
     flow.add(wide(work.setOut()));
     flow.gap(GAP);
     left = new ArrayList<>(List.of(narrow(work.people()), narrow(work.order())));

@@ -70,6 +70,7 @@ public record ListPart(
                 rig.rope(),
                 rig.sags(),
                 rig.attachments(),
+                rig.margins(),
                 work.setOut(),
                 work.people(),
                 work.order(),

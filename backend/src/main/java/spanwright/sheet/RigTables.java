@@ -220,6 +220,9 @@ final class RigTables {
                           + Figures.newtons(h.kilograms())
                           + " N")));
     }
+    List<String> notes = new ArrayList<>();
+    notes.add("Pulls are whole forces on the point. A weight swings: keep people from under it.");
+    notes.addAll(travel());
     return ListPart.table(
         "Attachments, pulls, what to hang",
         List.of(
@@ -232,8 +235,75 @@ final class RigTables {
             ListPart.Column.right("May take, N", 26),
             ListPart.Column.right("Hang", 24)),
         rows,
+        notes);
+  }
+
+  /** Margins are rounded down: 1.96 is not 2. */
+  private static ListPart.Cell margin(Double margin) {
+    return ListPart.Cell.of(
+        margin == null ? "–" : Figures.fixed(Math.floor(margin * 10 + 1e-6) / 10, 1));
+  }
+
+  ListPart margins() {
+    List<List<ListPart.Cell>> rows = new ArrayList<>();
+    for (HangParts.Margins m : model.margins()) {
+      rows.add(
+          List.of(
+              ListPart.Cell.bold(m.span()),
+              ListPart.Cell.bold(Figures.whole(m.set())),
+              ListPart.Cell.of(m.worst() == null ? "–" : Figures.whole(Math.ceil(m.worst()))),
+              ListPart.Cell.of(m.weather() == null ? "–" : m.weather()),
+              margin(m.wire()),
+              margin(m.rope()),
+              margin(m.insulator()),
+              margin(m.support()),
+              ListPart.Cell.of(m.partsFirst()),
+              ListPart.Cell.of(
+                  m.weakLink() == null ? "none fits" : Figures.whole(Math.floor(m.weakLink())))));
+    }
+    return ListPart.table(
+        "How far from parting",
         List.of(
-            "Pulls are whole forces on the point. A weight swings: keep people from under it."));
+            ListPart.Column.left("Span", 13),
+            ListPart.Column.right("Rig with, N", 17),
+            ListPart.Column.right("Worst, N", 17),
+            ListPart.Column.left("in", 0),
+            ListPart.Column.right("Wire", 14),
+            ListPart.Column.right("Rope, knotted", 22),
+            ListPart.Column.right("Insulator", 18),
+            ListPart.Column.right("Support", 18),
+            ListPart.Column.left("Parts first", 19),
+            ListPart.Column.right("Weak link, N", 20)),
+        rows,
+        rows.isEmpty()
+            ? List.of()
+            : List.of(
+                "Times the greatest tension in any weather; a support's against what it may take,"
+                    + " not what breaks it. A weak link in a span's rope parts before all else."));
+  }
+
+  /** How a weight moves, and whether its rope has room for it. */
+  private List<String> travel() {
+    List<String> say = new ArrayList<>();
+    for (HangParts.Holding h : model.attachments()) {
+      if (h.kilograms() == null || h.weightUp() == null || h.weightDown() == null) {
+        continue;
+      }
+      say.add(
+          "Point "
+              + h.point()
+              + ": the weight rises up to "
+              + figures.say(h.weightUp())
+              + " and sinks up to "
+              + figures.say(h.weightDown())
+              + " in wind and sway"
+              + (h.slackAtPulley() == null
+                  ? "."
+                  : "; at its lowest "
+                      + figures.sayFound(Math.max(0, h.slackAtPulley()))
+                      + " of rope is left between wire and pulley."));
+    }
+    return say;
   }
 
   ListPart sags() {

@@ -149,11 +149,23 @@ final class RopeList {
     return pieces.stream()
         .filter(p -> p.far() == attachment && !p.loop())
         .findFirst()
-        .map(p -> "end of " + p.mark())
+        .map(
+            p ->
+                p.free() > 0
+                    ? "insulator on "
+                        + p.mark()
+                        + ", "
+                        + job.figures.say(p.free())
+                        + " from its end as it hangs"
+                    : "end of " + p.mark())
         .orElse(
             "centre".equals(job.placement.attachments().get(attachment).held())
                 ? "centre piece"
-                : "insulator on the wire");
+                : isLoop() ? "insulator at a corner of the loop" : "insulator on the wire");
+  }
+
+  private boolean isLoop() {
+    return pieces.stream().anyMatch(WireList.Piece::loop);
   }
 
   private void addGuys(Placement.NewMast mast) {

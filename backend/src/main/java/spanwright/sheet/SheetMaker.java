@@ -47,6 +47,7 @@ final class SheetMaker {
         HardwareList.of(job, wires, line, ropes),
         HangingList.holdings(job, setOut),
         sags,
+        HangingList.margins(job),
         setOut,
         sweep(job),
         work.steps(),

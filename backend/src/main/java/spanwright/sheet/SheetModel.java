@@ -22,6 +22,7 @@ import spanwright.plan.Plan;
  * @param hardware to lay out before work begins
  * @param attachments where it hangs and with what pull
  * @param sags to sight, span by span
+ * @param margins how far each span is from parting
  * @param setOut every point by two tapes
  * @param sweep what the sweep at the station should find
  * @param order of work
@@ -49,6 +50,7 @@ public record SheetModel(
     List<CutParts.Item> hardware,
     List<HangParts.Holding> attachments,
     List<HangParts.Sag> sags,
+    List<HangParts.Margins> margins,
     SetOutParts.SetOut setOut,
     List<WorkParts.Expected> sweep,
     List<String> order,
@@ -71,6 +73,7 @@ public record SheetModel(
     hardware = List.copyOf(hardware);
     attachments = List.copyOf(attachments);
     sags = List.copyOf(sags);
+    margins = List.copyOf(margins);
     sweep = List.copyOf(sweep);
     order = List.copyOf(order);
     before = List.copyOf(before);
@@ -115,6 +118,7 @@ public record SheetModel(
         hardware,
         attachments,
         sags,
+        margins,
         setOut,
         sweep,
         order,

@@ -25,6 +25,7 @@ final class WholeRecord {
           "SpanStrength.rope",
           "SpanStrength.insulator",
           "SpanStrength.weakLink",
+          "SpanStrength.weather",
           "BandResult.rose",
           "BandResult.profiles",
           "Matching.inductance",

@@ -16,19 +16,20 @@ class CutListTest {
 
   @Test
   void wire_is_cut_with_both_ends_turned_back_and_two_per_cent_to_trim() {
-    // 30.20 m fed at 0.54: 16.308 and 13.892; ends 2 × 0.15; trim 2 %, up to 10 mm: 0.33 and 0.28
+    // 30.20 m fed at 0.54: 16.308 and 13.892; ends 2 × 0.15; trim 2 %: 0.32616 and 0.27784
     CutParts.WirePiece w1 = model.wires().get(0);
     assertEquals("W1", w1.mark());
     assertEquals("feedpoint to Old ash", w1.piece());
     assertEquals(16.308, w1.finished(), EXACT);
     assertEquals(0.30, w1.turnsBack(), EXACT);
-    assertEquals(0.33, w1.trim(), EXACT);
+    assertEquals(0.32616, w1.trim(), EXACT);
+    // 16.93416, up to 16.94: rounded once
     assertEquals(16.94, w1.cut(), EXACT);
     CutParts.WirePiece w2 = model.wires().get(1);
     assertEquals(13.892, w2.finished(), EXACT);
-    assertEquals(0.28, w2.trim(), EXACT);
-    // 13.892 + 0.30 + 0.28 = 14.472, up to 14.48
-    assertEquals(14.48, w2.cut(), EXACT);
+    assertEquals(0.27784, w2.trim(), EXACT);
+    // 13.892 + 0.30 + 0.27784 = 14.46984, up to 14.47
+    assertEquals(14.47, w2.cut(), EXACT);
     assertEquals(2, model.wires().size());
   }
 
@@ -134,8 +135,8 @@ class CutListTest {
     CutParts.Item rope = item("polyester, 5 mm");
     // 7.5 + 16 + 3 + 14 + 10.5 + 3 × 9
     assertEquals(78.0, rope.length(), EXACT);
-    // 16.94 + 14.48
-    assertEquals(31.42, item("covered copper, 1.6 mm").length(), EXACT);
+    // 16.94 + 14.47
+    assertEquals(31.41, item("covered copper, 1.6 mm").length(), EXACT);
   }
 
   private int count(String what) {

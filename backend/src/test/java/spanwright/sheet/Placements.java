@@ -10,19 +10,23 @@ final class Placements {
   private Placements() {}
 
   static Placement withConductors(Placement p, List<Placement.Conductor> conductors) {
-    return copy(p, p.attachments(), conductors, p.feed(), p.clearances(), p.state());
+    return copy(p, p.attachments(), conductors, p.feed(), p.clearances(), p.spans(), p.state());
   }
 
   static Placement withAttachments(Placement p, List<Placement.Attachment> attachments) {
-    return copy(p, attachments, p.conductors(), p.feed(), p.clearances(), p.state());
+    return copy(p, attachments, p.conductors(), p.feed(), p.clearances(), p.spans(), p.state());
   }
 
   static Placement withFeed(Placement p, Placement.Feed feed) {
-    return copy(p, p.attachments(), p.conductors(), feed, p.clearances(), p.state());
+    return copy(p, p.attachments(), p.conductors(), feed, p.clearances(), p.spans(), p.state());
   }
 
   static Placement withClearances(Placement p, List<Clearance> clearances, State state) {
-    return copy(p, p.attachments(), p.conductors(), p.feed(), clearances, state);
+    return copy(p, p.attachments(), p.conductors(), p.feed(), clearances, p.spans(), state);
+  }
+
+  static Placement withSpans(Placement p, List<Placement.Span> spans) {
+    return copy(p, p.attachments(), p.conductors(), p.feed(), p.clearances(), spans, p.state());
   }
 
   private static Placement copy(
@@ -31,6 +35,7 @@ final class Placements {
       List<Placement.Conductor> conductors,
       Placement.Feed feed,
       List<Clearance> clearances,
+      List<Placement.Span> spans,
       State state) {
     return new Placement(
         p.id(),
@@ -43,7 +48,7 @@ final class Placements {
         feed,
         clearances,
         p.bands(),
-        p.spans(),
+        spans,
         p.ropes(),
         p.masts(),
         state,
