@@ -20,9 +20,9 @@ final class BenchModels {
   /** The frequency of a size [MHz]. */
   static double frequencyMHz(int size) {
     return switch (size) {
-      case 30 -> 5.35;
-      case 60 -> 10.12;
-      case 120 -> 21.2;
+      case 30 -> 6.6;
+      case 60 -> 4.25;
+      case 120 -> 19.0;
       default -> throw new IllegalArgumentException("sizes are " + SIZES);
     };
   }
@@ -30,16 +30,17 @@ final class BenchModels {
   /** The wires of a size. */
   static AntennaModel model(int size) {
     List<WireSpec> wires = new ArrayList<>();
-    wires.add(
-        WireSpec.of(
-            List.of(
-                new Vertex(-13, 3, 4.5),
-                new Vertex(-9, -0.5, 7.2),
-                new Vertex(0, 0, 9.4),
-                new Vertex(9.5, 0.7, 6.8),
-                new Vertex(12.5, 4, 5.1)),
-            0.001,
-            WireSpec.COPPER));
+    List<Vertex> legs = new ArrayList<>();
+    if (size >= 60) {
+      legs.add(new Vertex(-13, 3, 4.5));
+    }
+    legs.add(new Vertex(-9, -0.5, 7.2));
+    legs.add(new Vertex(0, 0, 9.4));
+    legs.add(new Vertex(9.5, 0.7, 6.8));
+    if (size >= 60) {
+      legs.add(new Vertex(12.5, 4, 5.1));
+    }
+    wires.add(WireSpec.of(legs, 0.001, WireSpec.COPPER));
     if (size >= 60) {
       wires.add(
           WireSpec.of(
