@@ -49,6 +49,9 @@ final class CsvWriter {
     }
     section("Allowances", "What", "Value", "Unit", "Source");
     model.allowances().forEach(a -> row(a.what(), plain(a.value(), 2), a.unit(), a.source()));
+    if (model.head().since() != null) {
+      sentences("Changed since revision " + model.head().since(), model.head().changes());
+    }
     return out.toString();
   }
 
@@ -68,6 +71,7 @@ final class CsvWriter {
     row("Weather", String.join(" ", h.weather()));
     row("Plan saved", h.savedAt() == null ? "" : h.savedAt());
     row("Revision", h.revision());
+    row("Issued", h.date() == null ? "not yet" : h.date());
   }
 
   private void overhead() {

@@ -75,6 +75,8 @@ final class GeoJsonWriter {
     rigging();
     ObjectNode root = Json.mapper().createObjectNode();
     root.put("type", "FeatureCollection");
+    // A member of our own, as RFC 7946 section 6.1 lets one add.
+    root.set("sheet", Revisions.members(model.head()));
     root.set("features", features);
     try {
       return Json.mapper().writerWithDefaultPrettyPrinter().writeValueAsString(root) + "\n";

@@ -1,6 +1,8 @@
 package spanwright.sheet;
 
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.List;
+import spanwright.plan.Json;
 
 /** Which revision a sheet is, held against those issued before it. */
 final class Revisions {
@@ -32,6 +34,31 @@ final class Revisions {
         last.date(),
         before.revision(),
         Facts.changes(before.facts(), last.facts()));
+  }
+
+  /** Which revision a sheet is and what it changes, as it reads where there is no table. */
+  static String sentences(SheetModel.Head head) {
+    StringBuilder words = new StringBuilder("Revision " + head.revision());
+    words.append(head.date() == null ? ", not yet issued." : ", issued " + head.date() + ".");
+    if (head.since() != null) {
+      words.append(" Changed since revision ").append(head.since()).append(": ");
+      words.append(String.join(" ", head.changes()));
+    }
+    return words.toString();
+  }
+
+  /** The same for programs; what is not known yet is left out. */
+  static ObjectNode members(SheetModel.Head head) {
+    ObjectNode members = Json.mapper().createObjectNode();
+    members.put("revision", head.revision());
+    if (head.date() != null) {
+      members.put("issued", head.date());
+    }
+    if (head.since() != null) {
+      members.put("since", head.since());
+      head.changes().forEach(members.putArray("changes")::add);
+    }
+    return members;
   }
 
   /** A to Z, then AA and on. */

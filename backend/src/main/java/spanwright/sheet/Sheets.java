@@ -76,6 +76,7 @@ public final class Sheets {
   public static String toSvg(SheetModel model) {
     return SvgWriter.write(
         "Site drawing of " + model.head().title() + ", " + model.head().name(),
+        Revisions.sentences(model.head()),
         PageMaker.drawing(model));
   }
 

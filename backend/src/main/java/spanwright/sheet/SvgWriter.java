@@ -18,7 +18,7 @@ final class SvgWriter {
 
   private SvgWriter() {}
 
-  static String write(String title, PaperPage page) {
+  static String write(String title, String words, PaperPage page) {
     SvgWriter writer = new SvgWriter();
     writer.out.append("<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n<svg");
     writer.attribute("xmlns", "http://www.w3.org/2000/svg");
@@ -27,6 +27,7 @@ final class SvgWriter {
     writer.attribute("viewBox", "0 0 " + number(page.width()) + " " + number(page.height()));
     writer.attribute("role", "img");
     writer.out.append(">\n<title>").append(escape(title)).append("</title>\n");
+    writer.out.append("<desc>").append(escape(words)).append("</desc>\n");
     writer.out.append("<rect width=\"100%\" height=\"100%\" fill=\"#ffffff\"/>\n");
     writer.draw(page.inks());
     return writer.out.append("</svg>\n").toString();

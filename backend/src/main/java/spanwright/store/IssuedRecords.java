@@ -77,11 +77,15 @@ public final class IssuedRecords {
     }
   }
 
-  /** Gives a plan that was brought back under another id the record it had, unless it has one. */
+  /**
+   * Gives a plan that was brought back under another id the record it had; not while the old one is
+   * there, nor when the new one has a record.
+   */
   public void carry(String from, String to) {
     synchronized (store) {
       IssuedRecord old = of(from);
-      if (!old.sheets().isEmpty() && store.find(to).isPresent() && of(to).sheets().isEmpty()) {
+      boolean gone = store.find(from).isEmpty() && store.find(to).isPresent();
+      if (gone && !old.sheets().isEmpty() && of(to).sheets().isEmpty()) {
         write(to, old.sheets(), null);
       }
     }

@@ -7,6 +7,7 @@ final class Api implements AutoCloseable {
   private final PlanRoutes plans;
   private final SearchRoutes searchRoutes;
   private final PlacementRoutes placements;
+  private final SheetRoutes sheets;
   private final ReferenceRoutes reference;
   private final Searches searches;
   private final Assessments assessments;
@@ -16,7 +17,8 @@ final class Api implements AutoCloseable {
     this.assessments = new Assessments(engine);
     this.plans = new PlanRoutes(options.store());
     this.searchRoutes = new SearchRoutes(options.store(), searches);
-    this.placements = new PlacementRoutes(searches, assessments);
+    this.placements = new PlacementRoutes(assessments);
+    this.sheets = new SheetRoutes(options.store(), searches, assessments);
     this.reference = new ReferenceRoutes(options);
   }
 
@@ -24,6 +26,7 @@ final class Api implements AutoCloseable {
     plans.install(routes);
     searchRoutes.install(routes);
     placements.install(routes);
+    sheets.install(routes);
     reference.install(routes);
   }
 

@@ -41,6 +41,10 @@ final class PlanRoutes {
 
   private void create(Context ctx) {
     SavedPlan saved = store.create(admitted(ctx));
+    String before = ctx.queryParam("restores");
+    if (before != null) {
+      store.issued().carry(before, saved.id());
+    }
     ctx.status(201);
     ctx.header("Location", "/api/plans/" + saved.id());
     ctx.header("ETag", Requests.etag(saved.version()));
@@ -99,7 +103,7 @@ final class PlanRoutes {
     return store.find(id).orElseThrow(() -> gone(id));
   }
 
-  private static ProblemException gone(String id) {
+  static ProblemException gone(String id) {
     String shown = id.length() > 64 ? id.substring(0, 64) + "…" : id;
     return new ProblemException(
         Problem.notFound(

@@ -13,6 +13,7 @@ import spanwright.plan.Json;
 import spanwright.plan.Plan;
 import spanwright.search.Result;
 import spanwright.search.Search;
+import spanwright.store.SavedPlan;
 
 /**
  * One search, from its asking to its answer. It hears of its own progress from the searching
@@ -23,8 +24,9 @@ final class SearchJob implements Search.Listener {
   private static final int MOST_FOUND = 500;
 
   private final String id;
-  private final Plan plan;
+  private final String planId;
   private final Instant savedAt;
+  private final Plan plan;
   private final Search.Options options;
 
   private State state = State.RUNNING;
@@ -69,16 +71,22 @@ final class SearchJob implements Search.Listener {
     }
   }
 
-  SearchJob(String id, Plan plan, Instant savedAt, Search.Options options) {
+  SearchJob(String id, SavedPlan saved, Plan plan, Search.Options options) {
     this.id = id;
+    this.planId = saved.id();
+    this.savedAt = saved.savedAt();
     this.plan = plan;
-    this.savedAt = savedAt;
     this.options = options;
     this.progress = new Search.Progress(0, "waiting for its turn", 0, 0, 0);
   }
 
   String id() {
     return id;
+  }
+
+  /** Id of the saved plan that is searched. */
+  String planId() {
+    return planId;
   }
 
   Plan plan() {

@@ -45,7 +45,7 @@ final class SearchRoutes {
       throw new ProblemException(Problem.faulty("The plan", outcome.faults()));
     }
     Plan plan = outcome.plan();
-    SearchJob job = searches.start(plan, saved.savedAt(), options);
+    SearchJob job = searches.start(saved, plan, options);
     ctx.status(202);
     ctx.header("Location", "/api/searches/" + job.id());
     ctx.json(job.document());

@@ -1,7 +1,6 @@
 package spanwright.web;
 
 import java.security.SecureRandom;
-import java.time.Instant;
 import java.util.ArrayList;
 import java.util.HexFormat;
 import java.util.LinkedHashMap;
@@ -15,6 +14,7 @@ import java.util.concurrent.TimeUnit;
 import spanwright.plan.Plan;
 import spanwright.search.Result;
 import spanwright.search.Search;
+import spanwright.store.SavedPlan;
 
 /** Searches beside the requests: a few at once, a few waiting, the last few kept. */
 final class Searches implements AutoCloseable {
@@ -52,10 +52,10 @@ final class Searches implements AutoCloseable {
     return thread;
   }
 
-  SearchJob start(Plan plan, Instant savedAt, Search.Options options) {
+  SearchJob start(SavedPlan saved, Plan plan, Search.Options options) {
     byte[] bytes = new byte[ID_BYTES];
     random.nextBytes(bytes);
-    SearchJob job = new SearchJob(HexFormat.of().formatHex(bytes), plan, savedAt, options);
+    SearchJob job = new SearchJob(HexFormat.of().formatHex(bytes), saved, plan, options);
     try {
       pool.execute(() -> run(job));
     } catch (RejectedExecutionException e) {

@@ -132,7 +132,7 @@ class SheetFormatsTest {
     assertEquals("210mm", root.getAttribute("width"));
     assertEquals("297mm", root.getAttribute("height"));
     assertEquals("0 0 210 297", root.getAttribute("viewBox"));
-    Set<String> allowed = Set.of("svg", "title", "rect", "path", "text", "g", "clipPath");
+    Set<String> allowed = Set.of("svg", "title", "desc", "rect", "path", "text", "g", "clipPath");
     NodeList all = document.getElementsByTagName("*");
     Set<String> ids = new HashSet<>();
     for (int i = 0; i < all.getLength(); i++) {
