@@ -152,35 +152,6 @@ final class GroundTable implements Reflection {
   }
 
   @Override
-  public void ratios(double rho, double zeta, double[] out) {
-    long zetaBits = Double.doubleToRawLongBits(zeta) >>> MANTISSA;
-    double edge = Double.longBitsToDouble(zetaBits << MANTISSA);
-    double past = rho + edge;
-    long pastBits = Double.doubleToRawLongBits(past) >>> MANTISSA;
-    int index = (int) ((zetaBits - (BIAS + LOW)) * ACROSS + (pastBits - zetaBits));
-    GroundBlock b = rho <= FARTHEST && index >>> 10 == 0 ? blocks[index] : null;
-    if (b == null) {
-      b = block(rho, zeta);
-    }
-    double x = (past - Double.longBitsToDouble(pastBits << MANTISSA)) * b.perRho;
-    double y = (zeta - edge) * b.perZeta;
-    int ix = (int) x;
-    int iy = (int) y;
-    double u = 2 * (x - ix) - 1;
-    double v = 2 * (y - iy) - 1;
-    double[] c = b.cells;
-    int at = (iy * b.across + ix) * (CellPolynomials.SHORT * RATIOS);
-    out[0] = cubic(c, at, u, v);
-    out[1] = cubic(c, at + CellPolynomials.SHORT, u, v);
-    out[2] = cubic(c, at + 2 * CellPolynomials.SHORT, u, v);
-    out[3] = cubic(c, at + 3 * CellPolynomials.SHORT, u, v);
-    out[4] = cubic(c, at + 4 * CellPolynomials.SHORT, u, v);
-    out[5] = cubic(c, at + 5 * CellPolynomials.SHORT, u, v);
-    out[6] = cubic(c, at + 6 * CellPolynomials.SHORT, u, v);
-    out[7] = cubic(c, at + 7 * CellPolynomials.SHORT, u, v);
-  }
-
-  @Override
   public void ratios(double[] rhos, double[] zetas, int count, double[][] out) {
     double[] out0 = out[0];
     double[] out1 = out[1];

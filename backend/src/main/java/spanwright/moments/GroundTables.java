@@ -92,16 +92,16 @@ public final class GroundTables {
             next.set(work.size());
           }
         };
-    Thread[] helpers = new Thread[Math.max(0, Math.min(threads, work.size()) - 1)];
-    for (int i = 0; i < helpers.length; i++) {
-      helpers[i] = new Thread(some, "ground-table-" + i);
-      helpers[i].setDaemon(true);
-      helpers[i].start();
+    Thread[] others = new Thread[Math.max(0, Math.min(threads, work.size()) - 1)];
+    for (int i = 0; i < others.length; i++) {
+      others[i] = new Thread(some, "ground-table-" + i);
+      others[i].setDaemon(true);
+      others[i].start();
     }
     some.run();
-    for (Thread helper : helpers) {
+    for (Thread other : others) {
       try {
-        helper.join();
+        other.join();
       } catch (InterruptedException e) {
         Thread.currentThread().interrupt();
         return;

@@ -15,32 +15,15 @@ interface Reflection {
   boolean present();
 
   /**
-   * The ratios GA, GP, GZ, F (re, im in turn).
-   *
-   * @param rho horizontal distance [m]
-   * @param zeta sum of the heights [m]
-   * @param out eight values
-   */
-  void ratios(double rho, double zeta, double[] out);
-
-  /**
-   * The ratios of many places at once: out[m][i] is what {@link #ratios(double, double, double[])}
-   * gives at m for rhos[i], zetas[i].
+   * The ratios GA, GP, GZ, F (re, im in turn) of many places: out[m][i] is the m-th for rhos[i],
+   * zetas[i].
    *
    * @param rhos horizontal distances [m]
    * @param zetas sums of the heights [m]
    * @param count how many
    * @param out eight rows of at least so many values
    */
-  default void ratios(double[] rhos, double[] zetas, int count, double[][] out) {
-    double[] one = new double[RATIOS];
-    for (int i = 0; i < count; i++) {
-      ratios(rhos[i], zetas[i], one);
-      for (int m = 0; m < RATIOS; m++) {
-        out[m][i] = one[m];
-      }
-    }
-  }
+  void ratios(double[] rhos, double[] zetas, int count, double[][] out);
 
   /**
    * The ratios GA, GP, GZ, F, GT (re, im in turn), then their derivatives by ρ, then by ζ.
@@ -60,17 +43,22 @@ interface Reflection {
   /** Ratios that are the same everywhere. */
   record Constant(boolean present, double size) implements Reflection {
     @Override
-    public void ratios(double rho, double zeta, double[] out) {
-      java.util.Arrays.fill(out, 0, RATIOS, 0);
-      out[0] = -size;
-      out[2] = -size;
-      out[4] = size;
+    public void ratios(double[] rhos, double[] zetas, int count, double[][] out) {
+      for (int m = 0; m < RATIOS; m++) {
+        java.util.Arrays.fill(out[m], 0, count, of(m));
+      }
+    }
+
+    private double of(int m) {
+      return m == 0 || m == 2 ? -size : m == 4 ? size : 0;
     }
 
     @Override
     public void ratiosAndSlopes(double rho, double zeta, double[] out) {
       java.util.Arrays.fill(out, 0, 3 * ALL, 0);
-      ratios(rho, zeta, out);
+      for (int m = 0; m < RATIOS; m++) {
+        out[m] = of(m);
+      }
       out[8] = size;
     }
   }
