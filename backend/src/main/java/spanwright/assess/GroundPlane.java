@@ -121,8 +121,11 @@ final class GroundPlane {
       yh += s[3] * dy * dh;
     }
     double det = xx * yy - xy * xy;
-    double east = straightened((yy * xh - xy * yh) / det);
-    double north = straightened((xx * yh - xy * xh) / det);
+    double spread = xx + yy;
+    // under an upright wire all samples lie in one line: level across it, for want of a slope there
+    boolean inLine = det <= 1e-12 * spread * spread;
+    double east = straightened(inLine ? xh / spread : (yy * xh - xy * yh) / det);
+    double north = straightened(inLine ? yh / spread : (xx * yh - xy * xh) / det);
     double departure = 0;
     for (double[] s : samples) {
       double there = mean[2] + east * (s[0] - mean[0]) + north * (s[1] - mean[1]);

@@ -55,6 +55,13 @@ class GroundPlaneTest {
   }
 
   @Test
+  void an_upright_wire_gets_the_slope_of_the_one_line_it_can_see() {
+    GroundPlane plane = under(hillside(0.05, -0.12), new Place(3, 7, 2), new Place(3, 7, 9));
+    assertEquals(2 + 0.05 * 3 - 0.12 * 7, plane.heightAt(3, 7), 1e-9);
+    assertEquals(Math.atan(0.05), plane.slope(), 1e-9);
+  }
+
+  @Test
   void ground_beyond_the_surveyed_spots_counts_next_to_nothing() {
     GroundPlane edge = under(hillside(0, 0.1), new Place(-9, 39.9, 12), new Place(9, 39.9, 12));
     assertEquals(Math.atan(0.1), edge.slope(), 2e-3);
