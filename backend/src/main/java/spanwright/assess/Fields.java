@@ -79,19 +79,29 @@ final class Fields {
     }
     List<Row> middles = refine ? rows.stream().filter(Row::middle).toList() : List.of();
     for (Row middle : middles) {
-      tasks.add(
-          () -> {
-            Solution finer = solve(model, List.of(middle), MeshAim.FINE).get(0);
-            return List.of(new Seen(middle, finer, null, finer.impedance()));
-          });
+      tasks.add(() -> finer(model, middle));
     }
     List<List<Seen>> done = all(tasks, together);
-    List<Seen> fine = done.subList(groups.size(), done.size()).stream().map(s -> s.get(0)).toList();
+    List<Seen> fine =
+        done.subList(groups.size(), done.size()).stream().flatMap(List::stream).toList();
     return done.subList(0, groups.size()).stream()
         .flatMap(List::stream)
         .sorted(Comparator.comparingInt(seen -> rows.indexOf(seen.row)))
         .map(seen -> refined(seen, fine))
         .toList();
+  }
+
+  /**
+   * One row on the finer mesh; none where only that mesh grows too large to solve, for what the
+   * full one says is no worse for it.
+   */
+  private List<Seen> finer(AntennaModel model, Row middle) {
+    try {
+      Solution finer = solve(model, List.of(middle), MeshAim.FINE).get(0);
+      return List.of(new Seen(middle, finer, null, finer.impedance()));
+    } catch (ModelFault tooLarge) {
+      return List.of();
+    }
   }
 
   private static Seen refined(Seen seen, List<Seen> fine) {

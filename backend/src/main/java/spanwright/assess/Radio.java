@@ -54,7 +54,7 @@ final class Radio {
   /** All that a row shows. */
   static Far look(Row row, Solution solution, GroundPlane plane) {
     Peak peak = peak(solution, plane);
-    solution.efficiency();
+    solution.efficiency(); // a solution keeps it: found here, where several rows go on at once
     double[] drawn = null;
     if (row.middle()) {
       Directions toPeak = Directions.profile(peak.azimuth(), 0, Math.PI / 2, Rows.PROFILE);

@@ -1,6 +1,5 @@
 package spanwright.assess;
 
-import java.time.LocalDate;
 import java.util.List;
 import spanwright.moments.Solver;
 import spanwright.plan.Catalogues;
@@ -22,7 +21,7 @@ public final class WarmUp {
   /** Assesses a wire on a demo plot again and again; call it once when a server starts. */
   public static void run() {
     Solver.warmUp();
-    Plan plan = PlanReader.read(DemoPlans.list().get(0).json(), LocalDate.now()).plan();
+    Plan plan = PlanReader.read(DemoPlans.list().get(0).json()).plan();
     Assessor assessor = Assessor.of(plan, Catalogues.standard());
     Layout.Hold one = top(assessor, plan.supports().get(0));
     Layout.Hold other = top(assessor, plan.supports().get(1));

@@ -171,10 +171,12 @@ public final class Search {
       }
       List<Placement> tried =
           workers.map(next, one -> assessor.refined(untried.get(one)), () -> {});
+      Map<Placement, Placement> instead = new IdentityHashMap<>();
       for (int i = 0; i < next.size(); i++) {
         untried.remove(next.get(i));
-        all.set(all.indexOf(next.get(i)), tried.get(i));
+        instead.put(next.get(i), tried.get(i));
       }
+      all.replaceAll(one -> instead.getOrDefault(one, one));
     }
   }
 
