@@ -36,14 +36,15 @@ final class IssuedSheets {
       List<Issued> list =
           Json.mapper().readValue(Files.readString(record), new TypeReference<List<Issued>>() {});
       boolean sound =
-          list.stream()
-              .allMatch(
-                  i -> i != null && i.revision() != null && i.revision().matches("[A-Z]{1,6}"));
+          list != null
+              && list.stream()
+                  .allMatch(
+                      i -> i != null && i.revision() != null && i.revision().matches("[A-Z]{1,6}"));
       if (!sound) {
         throw damaged(record);
       }
       return new IssuedSheets(record, list);
-    } catch (IOException | NullPointerException e) {
+    } catch (IOException e) {
       throw damaged(record);
     }
   }
