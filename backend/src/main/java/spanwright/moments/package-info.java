@@ -12,8 +12,8 @@
  * integrals out, {@code GroundTable} keeps them divided by the image's own wave, as polynomials
  * over cells, for all candidates and threads.
  *
- * <p><b>Basis.</b> Straight elements with polynomials up to the third order ({@code Shapes}). Few
- * elements follow the physics: up to a third of a wavelength in the middle of a wire, short ones
+ * <p><b>Basis.</b> Straight elements with polynomials up to the fourth order ({@code Shapes}). Few
+ * elements follow the physics: up to two fifths of a wavelength in the middle of a wire, short ones
  * beside feed, ends, bends and junctions, where the charge changes quickly ({@code MeshRule}). A
  * hanging shape of many points is drawn together into straight pieces within a small part of a
  * wavelength and of its height ({@code Outline}). At a node the currents add up to nothing, so
@@ -22,10 +22,9 @@
  * <p><b>Close pairs.</b> The static part of the kernel in closed form along the inner element
  * ({@code StaticPairs}); it does not depend on frequency and is kept for neighbouring frequencies.
  *
- * <p><b>Feed.</b> One volt across the middle of the gap; the gap's width sets how fine the mesh may
- * be there, and how far the feed keeps from ends and junctions. Spreading the field over the gap
- * would add the charging current of that length of wire, some 0.3 pF for 0.10 m, which a centre
- * insulator does not carry; below 1000 ohm nobody could tell.
+ * <p><b>Feed.</b> One volt, its field spread over the middle tenth of the gap and over no less than
+ * four radii: at a point it would never converge. The gap's width sets how fine the mesh may be
+ * there, and how far the feed keeps from ends and junctions.
  *
  * <p><b>Known limits.</b> Round wires thin against wavelength and length; current crowding between
  * wires closer than a few radii, steel roofs and ground connections are not modelled; insulation is
