@@ -90,9 +90,9 @@ final class Overhead {
       boolean closely,
       List<Clearance> into) {
     for (Line line : lines) {
-      into.add(keptDistance(line, strands));
+      double enough = closely ? line.kept() + margin : Double.POSITIVE_INFINITY;
+      into.add(keptDistance(line, strands, enough));
       if (!line.isTelephone()) {
-        double enough = closely ? line.kept() + margin : Double.POSITIVE_INFINITY;
         letGo(line, rigged, holders, enough, into);
         mastLetGo(line, rigged, holders, ground, into);
       }
@@ -101,10 +101,15 @@ final class Overhead {
 
   // --- kept distance
 
-  private Clearance keptDistance(Line line, List<Strand> strands) {
+  private Clearance keptDistance(Line line, List<Strand> strands, double enough) {
     Space.Near near = new Space.Near();
     Strand nearest = strands.get(0);
-    double least = Double.POSITIVE_INFINITY;
+    double least = enough;
+    if (least < Double.POSITIVE_INFINITY) {
+      // should nothing come nearer, some place must still be named
+      double[] p = nearest.states[0];
+      Space.pointSegment(p[0], p[1], p[2], line.path(), 0, 3, true, near);
+    }
     for (Strand strand : strands) {
       if (Space.boxes(strand.box, line.box) - strand.mostSlack() >= least) {
         continue;
