@@ -96,9 +96,14 @@ export async function readPlan(id) {
   return { plan: await response.json(), etag: etagOf(response) };
 }
 
-/** @param {any} plan may be a draft @returns {Promise<{id: string, etag: string}>} */
-export async function createPlan(plan) {
-  const response = await call('POST', '/api/plans?draft=true', { body: plan });
+/**
+ * @param {any} plan may be a draft
+ * @param {string} [restores] id of a deleted plan that this one brings back, with the record of its issued sheets
+ * @returns {Promise<{id: string, etag: string}>}
+ */
+export async function createPlan(plan, restores) {
+  const more = restores ? `&restores=${encodeURIComponent(restores)}` : '';
+  const response = await call('POST', `/api/plans?draft=true${more}`, { body: plan });
   const { id } = await response.json();
   return { id, etag: etagOf(response) };
 }
@@ -206,11 +211,30 @@ export async function heldSheet(address) {
 }
 
 /**
+ * The sheets issued of a plan, in order.
+ * @param {string} planId
+ * @returns {Promise<{revision: string, date: string, placement: string, what: string}[]>}
+ */
+export async function issuedSheets(planId) {
+  return (await call('GET', `/api/plans/${encodeURIComponent(planId)}/issued`)).json();
+}
+
+/**
+ * Issues the sheet of a placement.
+ * @param {string} planId
+ * @param {any} what the placement of a search, or a plan and a placement; and the revision that was looked at
+ * @returns {Promise<{revision: string, date: string, placement: string, what: string}>}
+ */
+export async function issueSheet(planId, what) {
+  return (await call('POST', `/api/plans/${encodeURIComponent(planId)}/issued`, { body: what })).json();
+}
+
+/**
  * The sheet of a placement the server no longer holds.
  * @param {any} plan
  * @param {any} placement
  * @param {'pdf'|'csv'|'json'|'svg'|'geojson'} type
- * @param {{paper?: string, units?: string}} [options]
+ * @param {{paper?: string, units?: string, search?: string, saved?: string}} [options]
  * @returns {Promise<Blob>}
  */
 export async function sheet(plan, placement, type, options = {}) {

@@ -58,7 +58,7 @@ export function createPlots(store, keeper, say) {
     if (gone) {
       const back = gone;
       told.replaceChildren(`${entry.title || 'The plot'} is deleted. `, link('Bring it back', () => act(async () => {
-        await keeper.restore(back.plan);
+        await keeper.restore(back.plan, back.id);
         gone = null;
         return `${entry.title || 'The plot'} is back.`;
       })));

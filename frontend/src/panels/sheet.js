@@ -3,14 +3,17 @@ import { html, redrawer } from '../charts/html.js';
 import { stateMark } from '../charts/marks.js';
 import { signed } from '../units/figures.js';
 import { isStale, listOf, ownOf, placementOf, placementTitle, planOf, shapeTitle } from './placement-facts.js';
+import { issuePart } from './sheet-issue.js';
 import { sheetList } from './sheet-list.js';
+import { heldAddress, issuedOf, issueSheet, sheetPart } from './sheet-source.js';
 
 /**
  * Sheet: the rigging list and the drawing as they print, and the downloads.
  * @typedef {import('../state/store.js').Store} Store
  * @typedef {import('../state/types.js').State} State
  * @typedef {import('./placements-search.js').Shell} Shell
- * @typedef {{key: string, model: any|null, drawing: string|null, error: string|null}} Loaded
+ * @typedef {import('./sheet-issue.js').Issued} Issued
+ * @typedef {{key: string, model: any|null, drawing: string|null, issued: Issued[], error: string|null}} Loaded
  */
 
 const FORMATS = /** @type {const} */ ([
@@ -30,12 +33,14 @@ export function mount(root, store, shell) {
   root.classList.add('sheet');
   const choice = { paper: 'A4' };
   /** @type {Loaded} */
-  let loaded = { key: '', model: null, drawing: null, error: null };
+  let loaded = nothing('');
+  /** Whether a sheet is being issued, and what went wrong with that. @type {{busy: boolean, trouble: string|null}} */
+  let issuing = { busy: false, trouble: null };
   /** What went wrong with a download. @type {string|null} */
   let trouble = null;
   const ask = redrawer(root, () => render(store.get()));
   store.subscribe(
-    (state) => [state.place, state.chosen, state.search, state.units, state.plan],
+    (state) => [state.place, state.chosen, state.search, state.units, state.plan, state.planId],
     () => {
       if (store.get().place !== 'sheet') return;
       void load();
@@ -45,34 +50,62 @@ export function mount(root, store, shell) {
 
   /**
    * Fetches list and drawing for what is chosen, once for each choice; the latest wins.
+   * @param {boolean} [again] what is shown may have changed; it stays in sight meanwhile
    */
-  async function load() {
+  async function load(again = false) {
     const state = store.get();
     const placement = placementOf(state);
     if (!placement) return;
     const key = [
+      state.planId,
       state.search.id,
       placement.id,
       choice.paper,
       state.units,
       placement.madeFrom ? JSON.stringify(placement.attachments) : '',
     ].join(' ');
-    if (loaded.key === key) return;
-    if (loaded.drawing) URL.revokeObjectURL(loaded.drawing);
-    loaded = { key, model: null, drawing: null, error: null };
+    if (loaded.key === key && !again) return;
+    const before = loaded;
+    loaded = again ? { ...before, key } : nothing(key);
+    issuing = { ...issuing, trouble: null };
     const options = { paper: choice.paper, units: state.units };
     try {
-      const [list, drawing] = await Promise.all([
-        part(state, placement, 'json', options),
-        part(state, placement, 'svg', options),
+      const [list, drawing, issued] = await Promise.all([
+        sheetPart(shell.api, state, placement, 'json', options),
+        sheetPart(shell.api, state, placement, 'svg', options),
+        issuedOf(shell.api, state.planId),
       ]);
       const model = JSON.parse(await list.text());
       if (loaded.key !== key) return;
-      loaded = { key, model, drawing: URL.createObjectURL(drawing), error: null };
+      loaded = { key, model, drawing: URL.createObjectURL(drawing), issued, error: null };
     } catch (problem) {
       if (loaded.key !== key) return;
-      loaded = { key, model: null, drawing: null, error: /** @type {Error} */ (problem).message };
+      loaded = { ...nothing(key), error: /** @type {Error} */ (problem).message };
+    } finally {
+      if (before.drawing) URL.revokeObjectURL(before.drawing);
     }
+    ask();
+  }
+
+  /** Hands out the sheet that is shown: as the revision that is shown, or not at all. */
+  async function issue() {
+    const state = store.get();
+    const placement = placementOf(state);
+    if (!placement || !loaded.model) return;
+    const { revision } = loaded.model.head;
+    issuing = { busy: true, trouble: null };
+    ask();
+    let trouble = null;
+    try {
+      const planId = state.planId ?? (await shell.saveNow());
+      const done = await issueSheet(shell.api, state, placement, planId, revision);
+      shell.say(`Revision ${done.revision} is issued.`);
+    } catch (problem) {
+      trouble = /** @type {Error} */ (problem).message;
+    }
+    // Shown anew from the server also when it said no: another window may have been first.
+    await load(true);
+    issuing = { busy: false, trouble };
     ask();
   }
 
@@ -177,45 +210,13 @@ export function mount(root, store, shell) {
         html('ul', {}, ...FORMATS.map(([type, words]) => html('li', {}, downloadLink(state, placement, type, words)))),
         trouble ? html('p', { class: 'problem', role: 'alert' }, stateMark('foul', 'Error'), ` ${trouble}`) : null,
       ),
+      loaded.model ? issuePart(loaded.model.head, loaded.issued, { ...issuing, issue: () => void issue() }) : null,
       html(
         'button',
         { type: 'button', class: 'go', 'data-key': 'print', disabled: !loaded.model, onclick: () => window.print() },
         'Print',
       ),
     );
-  }
-
-  /**
-   * One format of the sheet: by its address while the server holds the search, which knows when the plan was saved;
-   * a placement made by hand, or one of a search the server has forgotten, is sent along.
-   * @param {State} state
-   * @param {any} placement
-   * @param {typeof FORMATS[number][0]} type
-   * @param {{paper: string, units: string}} options
-   * @returns {Promise<Blob>}
-   */
-  async function part(state, placement, type, options) {
-    const address = heldAddress(state, placement, type, options);
-    if (address !== null) {
-      try {
-        return await shell.api.heldSheet(address);
-      } catch (problem) {
-        if (/** @type {any} */ (problem).status !== 404) throw problem;
-      }
-    }
-    return shell.api.sheet(planOf(state), placement, type, { ...options, ...(state.search.id ? { search: state.search.id } : {}) });
-  }
-
-  /**
-   * @param {State} state
-   * @param {any} placement
-   * @param {typeof FORMATS[number][0]} type
-   * @param {{paper: string, units: string}} options
-   * @returns {string|null}
-   */
-  function heldAddress(state, placement, type, options) {
-    const held = state.search.id !== null && state.search.result && !placement.madeFrom;
-    return held ? shell.api.sheetAddress(/** @type {string} */ (state.search.id), placement.id, type, options) : null;
   }
 
   /**
@@ -233,12 +234,12 @@ export function mount(root, store, shell) {
         `${words}: give the site its latitude and longitude in the survey first.`,
       );
     }
-    const name = fileName(planOf(state), placement, type);
+    const name = fileName(planOf(state), placement, type, loaded.model?.head.revision);
     const options = { paper: choice.paper, units: state.units };
     return html(
       'a',
       {
-        href: heldAddress(state, placement, type, options) ?? '#sheet',
+        href: heldAddress(shell.api, state, placement, type, options) ?? '#sheet',
         download: name,
         'data-key': `get-${type}`,
         onclick: (/** @type {Event} */ event) => {
@@ -262,7 +263,7 @@ export function mount(root, store, shell) {
   async function save(state, placement, type, options, name) {
     trouble = null;
     try {
-      const address = URL.createObjectURL(await part(state, placement, type, options));
+      const address = URL.createObjectURL(await sheetPart(shell.api, state, placement, type, options));
       html('a', { href: address, download: name }).click();
       setTimeout(() => URL.revokeObjectURL(address), 10000);
     } catch (problem) {
@@ -290,7 +291,7 @@ export function mount(root, store, shell) {
               type: 'button',
               class: 'link',
               onclick: () => {
-                loaded = { key: '', model: null, drawing: null, error: null };
+                loaded = nothing('');
                 void load();
                 ask();
               },
@@ -324,13 +325,19 @@ export function mount(root, store, shell) {
   }
 }
 
+/** @param {string} key @returns {Loaded} nothing yet for that choice */
+function nothing(key) {
+  return { key, model: null, drawing: null, issued: [], error: null };
+}
+
 /**
  * @param {any} plan
  * @param {any} placement
  * @param {string} type
+ * @param {string} [revision] from B on the name carries it, so that no file is written over
  * @returns {string} "corner-lot-p01.pdf"
  */
-export function fileName(plan, placement, type) {
+export function fileName(plan, placement, type, revision = 'A') {
   const title =
     (plan.title ?? '')
       .normalize('NFKD')
@@ -341,5 +348,5 @@ export function fileName(plan, placement, type) {
       .replace(/^-|-$/g, '')
       .slice(0, 48)
       .replace(/-$/, '') || 'plot';
-  return `${title}-${placement.id}.${type}`;
+  return `${title}-${placement.id}${revision === 'A' ? '' : `-${revision}`}.${type}`;
 }

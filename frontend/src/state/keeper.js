@@ -244,9 +244,9 @@ export function createKeeper(store, api, keep, say) {
       }
       return plan;
     },
-    /** @param {any} plan */
-    async restore(plan) {
-      const made = await api.createPlan(plan);
+    /** @param {any} plan @param {string} id it had; the sheets issued under it are remembered */
+    async restore(plan, id) {
+      const made = await api.createPlan(plan, id);
       show(plan, made.id, made.etag, true);
       await list();
     },

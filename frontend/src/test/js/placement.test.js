@@ -10,6 +10,7 @@ import { parsePlace } from '/src/panels/brief-targets.js';
 import { bandSummaries, clearanceConcern, concerns, nameOf, toBuild } from '/src/panels/placement-facts.js';
 import { cureRank, freeId } from '/src/panels/refusals.js';
 import { fileName } from '/src/panels/sheet.js';
+import { changeWords, issuePart, revisionWords } from '/src/panels/sheet-issue.js';
 import { assert, equal, near, test } from './harness.js';
 
 const VIEW = { x: -5, y: -10, width: 40, height: 30, ppm: 15 };
@@ -292,6 +293,28 @@ test('faults are told at the part they belong to', () => {
 
 test('a download is named after its plot and placement', () => {
   equal(fileName({ title: 'Côte lot, 7 × 22 m!' }, { id: 'p01' }, 'pdf'), 'cote-lot-7-22-m-p01.pdf');
+  equal(fileName({ title: 'Lot' }, { id: 'p01' }, 'csv', 'B'), 'lot-p01-B.csv');
+});
+
+test('a sheet says its revision, what it changes, and is issued once', () => {
+  const first = { revision: 'A', changes: [] };
+  equal([revisionWords(first), changeWords(first)], ['Revision A, not yet issued', '']);
+  const changes = ['One.', 'Two.', 'Three.', 'Four.', 'Five.', 'Six.'];
+  const next = { revision: 'B', since: 'A', changes };
+  equal(changeWords(next), '6 changes since revision A:');
+  equal(changeWords({ revision: 'B', since: 'A', changes: ['One.'] }), '1 change since revision A:');
+  let issued = 0;
+  const act = { busy: false, trouble: null, issue: () => (issued += 1) };
+  const list = [{ revision: 'A', date: '2026-05-14', placement: 'p01', what: 'level, 14.00 m' }];
+  const part = issuePart(next, list, act);
+  part.querySelector('button')?.click();
+  issuePart(next, list, { ...act, busy: true }).querySelector('button')?.click();
+  equal(issued, 1);
+  assert(part.textContent?.includes('2 more at the end of the list.'), part.textContent ?? '');
+  assert(part.textContent?.includes('A 2026-05-14'), part.textContent ?? '');
+  const done = issuePart({ ...next, date: '2026-06-01' }, list, act);
+  assert.same(done.querySelector('button'), null);
+  assert.same(done.querySelector('h2')?.textContent, 'Revision B, issued 2026-06-01');
 });
 
 test('a cured placement never takes the id of one that is still there', () => {
