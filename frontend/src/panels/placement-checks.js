@@ -3,7 +3,7 @@ import { html } from '../charts/html.js';
 import { pullBar } from '../charts/bars.js';
 import { number } from '../units/figures.js';
 import { stateMark } from '../charts/marks.js';
-import { nameOf } from './placement-facts.js';
+import { nameOf, pullFigure } from './placement-facts.js';
 
 /** Tables of what is checked on a placement: pulls at its holding points, clearances. */
 
@@ -54,8 +54,8 @@ export function pullsTable(plan, placement) {
             'tr',
             {},
             html('th', { scope: 'row' }, nameOf(plan, hold.on), held(hold)),
-            html('td', { class: 'n' }, number(hold.pull, 0)),
-            html('td', { class: 'n' }, number(hold.pullInWind, 0)),
+            html('td', { class: 'n' }, pullFigure(hold.pull)),
+            html('td', { class: 'n' }, pullFigure(hold.pullInWind)),
             html(
               'td',
               { class: 'bar-cell' },
@@ -96,7 +96,7 @@ function held(hold) {
  * @param {any} plan
  * @param {any} placement
  * @param {any} catalogue
- * @param {(metres: number) => string} length
+ * @param {import('./placement-facts.js').Length} length
  * @param {'m'|'ft'} units
  * @returns {HTMLElement}
  */
@@ -107,8 +107,8 @@ export function clearancesTable(plan, placement, catalogue, length, units) {
       {},
       html('td', { class: 'mark-cell' }, stateMark(one.state, one.state)),
       html('th', { scope: 'row' }, nameOf(plan, one.to), html('span', { class: 'soft' }, ` ${part(one, catalogue)}`)),
-      html('td', { class: 'n' }, html('b', {}, length(one.distance))),
-      html('td', { class: 'n soft' }, length(one.required)),
+      html('td', { class: 'n' }, html('b', {}, length(one.distance, 'found'))),
+      html('td', { class: 'n soft' }, length(one.required, 'required')),
     ),
   );
   const bad = placement.clearances.filter((/** @type {any} */ one) => one.state !== 'clear').length;

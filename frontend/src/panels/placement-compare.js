@@ -7,6 +7,7 @@ import {
   bandSummaries,
   concerns,
   distanceWords,
+  pullFigure,
   placementOf,
   placementTitle,
   planOf,
@@ -30,7 +31,7 @@ export function comparison(state, placement, store) {
   const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
   const bandsHere = bandSummaries(plan, placement);
   const bandsThere = bandSummaries(plan, pinned);
-  const worstOf = (/** @type {any} */ one) => concerns(plan, one, (metres) => distanceWords(metres, state.units))[0];
+  const worstOf = (/** @type {any} */ one) => concerns(plan, one, (metres, sense) => distanceWords(metres, state.units, sense))[0];
   const gust = (/** @type {any} */ one) =>
     Math.max(...one.attachments.map((/** @type {any} */ hold) => hold.pullInWind));
   /** @type {[string, string|Node, string|Node, string][]} */
@@ -54,9 +55,9 @@ export function comparison(state, placement, store) {
     ],
     [
       'greatest pull in the gust, N',
-      number(gust(placement), 0),
-      number(gust(pinned), 0),
-      signed(gust(placement) - gust(pinned), 0),
+      pullFigure(gust(placement)),
+      pullFigure(gust(pinned)),
+      signed(Math.ceil(gust(placement)) - Math.ceil(gust(pinned)), 0),
     ],
     ['nearest', concernCell(worstOf(placement)), concernCell(worstOf(pinned)), ''],
     ['to build', toBuild(placement).replace(/^new: /, ''), toBuild(pinned).replace(/^new: /, ''), ''],

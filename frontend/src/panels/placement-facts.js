@@ -1,7 +1,7 @@
 // @ts-check
 import { worst } from '../charts/marks.js';
 import { number, signed } from '../units/figures.js';
-import { formatLength } from '../units/length.js';
+import { distanceFigure } from '../units/length.js';
 
 /**
  * What the panels say of a placement, read from its result element and the plan it was found on. Pure.
@@ -9,6 +9,8 @@ import { formatLength } from '../units/length.js';
  * @typedef {import('../state/types.js').State} State
  * @typedef {{name: string, over: number, state: string}} BandSummary over the reference, dB, and how it matches
  * @typedef {{state: string, distance: number|null, words: string, rule: string}} Concern
+ * @typedef {import('../units/length.js').Sense} Sense
+ * @typedef {(metres: number, sense?: Sense) => string} Length
  */
 
 /**
@@ -191,7 +193,7 @@ const RANK = { foul: 0, tight: 1, clear: 2 };
  * The worst distance or pull, for where there is room for one.
  * @param {any} plan
  * @param {any} placement
- * @param {(metres: number) => string} length
+ * @param {Length} length
  * @returns {Concern|undefined}
  */
 export function nearestConcern(plan, placement, length) {
@@ -202,7 +204,7 @@ export function nearestConcern(plan, placement, length) {
  * Distances and pulls, worst first.
  * @param {any} plan
  * @param {any} placement
- * @param {(metres: number) => string} length
+ * @param {Length} length
  * @returns {Concern[]}
  */
 function hangingConcerns(plan, placement, length) {
@@ -213,7 +215,7 @@ function hangingConcerns(plan, placement, length) {
       state: hold.state,
       distance: null,
       rule: 'pull',
-      words: `pull of ${Math.round(hold.pullInWind)} N at ${nameOf(plan, hold.on)} in the gust; it may take ${Math.round(hold.pullLimit)} N`,
+      words: `pull of ${pullFigure(hold.pullInWind)} N at ${nameOf(plan, hold.on)} in the gust; it may take ${Math.round(hold.pullLimit)} N`,
     }));
   return [...clearances, ...pulls].sort((a, b) => RANK[a.state] - RANK[b.state]);
 }
@@ -222,7 +224,7 @@ function hangingConcerns(plan, placement, length) {
  * Everything checked that is tight or foul, worst first; when all is clear, the nearest clearance alone.
  * @param {any} plan
  * @param {any} placement
- * @param {(metres: number) => string} length
+ * @param {Length} length
  * @returns {Concern[]}
  */
 export function concerns(plan, placement, length) {
@@ -249,7 +251,7 @@ export function concerns(plan, placement, length) {
 /**
  * @param {any} plan
  * @param {any} clearance
- * @param {(metres: number) => string} length
+ * @param {Length} length
  * @returns {Concern}
  */
 export function clearanceConcern(plan, clearance, length) {
@@ -258,7 +260,7 @@ export function clearanceConcern(plan, clearance, length) {
     state: clearance.state,
     distance: clearance.distance,
     rule: clearance.rule,
-    words: `${clearance.distance < 0 ? `${length(-clearance.distance)} inside` : `${length(clearance.distance)} to`} ${nameOf(plan, clearance.to)}${part}; must keep ${length(clearance.required)}`,
+    words: `${clearance.distance < 0 ? `${length(-clearance.distance, 'required')} inside` : `${length(clearance.distance, 'found')} to`} ${nameOf(plan, clearance.to)}${part}; must keep ${length(clearance.required, 'required')}`,
   };
 }
 
@@ -270,24 +272,19 @@ export function scoreWords(score) {
   return score < 0 ? `${number(-score, 1)} dB below the reference` : `${signed(score, 1)} dB over the reference`;
 }
 
-/**
- * A distance held against a rule: small ones to the millimetre, so that 0.075 is not read as 0.07.
- * @param {number} metres
- * @param {'m'|'ft'} units
- * @returns {string} without the unit in metres
- */
-export function distanceFigure(metres, units) {
-  return formatLength(metres, units, metres > 0 && metres < 0.1 ? 3 : 2);
-}
+/** @param {number} newtons @returns {string} a pull, never less than it is, as on the sheet */
+export const pullFigure = (newtons) => number(Math.ceil(newtons), 0);
 
 /**
- * The same in a sentence.
+ * A distance held against a rule, in a sentence.
  * @param {number} metres
  * @param {'m'|'ft'} units
+ * @param {Sense} [sense] found where left out
  * @returns {string} with its unit
  */
-export function distanceWords(metres, units) {
-  return units === 'm' ? `${distanceFigure(metres, units)} m` : distanceFigure(metres, units);
+export function distanceWords(metres, units, sense) {
+  const figure = distanceFigure(metres, units, sense);
+  return units === 'm' ? `${figure} m` : figure;
 }
 
 /**

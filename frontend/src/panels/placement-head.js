@@ -15,7 +15,7 @@ import { concerns, distanceWords, listOf, planOf, scoreWords, shapeTitle } from 
  */
 export function headLine(state, placement, index, store) {
   const list = listOf(state);
-  const concern = concerns(planOf(state), placement, (metres) => distanceWords(metres, state.units))[0];
+  const concern = concerns(planOf(state), placement, (metres, sense) => distanceWords(metres, state.units, sense))[0];
   const step = (/** @type {number} */ way) => {
     const next = list[index + way];
     if (next) store.set({ chosen: next.id });

@@ -2,14 +2,13 @@
 import { html, redrawer } from '../charts/html.js';
 import { number } from '../units/figures.js';
 import { launchProfile } from '../charts/launch-profile.js';
-import { lengthWithUnit } from '../units/length.js';
+import { distanceFigure, lengthWithUnit } from '../units/length.js';
 import { stateMark } from '../charts/marks.js';
 import { clearancesTable, pullsTable } from './placement-checks.js';
 import { comparison } from './placement-compare.js';
 import {
   bandsOf,
   concerns,
-  distanceFigure,
   distanceWords,
   doubtsOf,
   hangsOn,
@@ -81,7 +80,8 @@ export function mount(root, store, shell) {
     if (!placement) return [unchosen(state)];
     const plan = planOf(state);
     const band = shownBand(state, placement);
-    const length = (/** @type {number} */ metres) => distanceFigure(metres, state.units);
+    /** @type {import('./placement-facts.js').Length} */
+    const length = (metres, sense) => distanceFigure(metres, state.units, sense);
     const rank = listOf(state).indexOf(placement);
     return [
       headLine(state, placement, rank, store),
@@ -128,7 +128,7 @@ export function mount(root, store, shell) {
    * @param {any} placement
    */
   function head(state, plan, placement) {
-    const list = concerns(plan, placement, (metres) => distanceWords(metres, state.units));
+    const list = concerns(plan, placement, (metres, sense) => distanceWords(metres, state.units, sense));
     const pinned = state.pinned === placement.id;
     return html(
       'section',

@@ -52,7 +52,7 @@ export function placementRows(state, order, choose) {
 function row(state, placement, rank, choose) {
   const plan = planOf(state);
   const bars = bandSummaries(plan, placement);
-  const concern = nearestConcern(plan, placement, (metres) => distanceWords(metres, state.units));
+  const concern = nearestConcern(plan, placement, (metres, sense) => distanceWords(metres, state.units, sense));
   const names = hangsOn(plan, placement).join(', ');
   return html(
     'li',

@@ -210,7 +210,7 @@ export function mount(root, store, shell) {
     const said =
       search.state === 'cancelled'
         ? 'cancelled'
-        : `searched ${count(search.result.counts.considered)} in ${search.result.seconds < 10 ? number(search.result.seconds, 1) : number(search.result.seconds, 0)} s`;
+        : `searched ${count(search.result.counts.considered)} in ${search.result.seconds < 10 ? number(Math.max(0.1, search.result.seconds), 1) : number(search.result.seconds, 0)} s`;
     return html(
       'div',
       { class: 'search-ended' },

@@ -3,6 +3,10 @@
 import { MINUS, number, plain } from './figures.js';
 
 /** @typedef {'m'|'ft'} Units */
+/** @typedef {'found'|'required'} Sense whether a distance was found or must be kept */
+
+/** What rounding up or down leaves alone, in its steps. */
+const CRUMB = 1e-6;
 
 export const FOOT = 0.3048;
 export const INCH = 0.0254;
@@ -71,6 +75,22 @@ export function formatLength(metres, units, digits = 1) {
 /** @param {number} metres @param {Units} units @param {number} [digits] @returns {string} with its unit */
 export const lengthWithUnit = (metres, units, digits = 1) =>
   units === 'm' ? `${formatLength(metres, 'm', digits)} m` : formatLength(metres, 'ft', digits);
+
+/**
+ * A distance held against a rule: small ones to the millimetre, so that 0.075 is not read as 0.07. What was found is
+ * never shown greater than it is, what is required never less, as on the sheet.
+ * @param {number} metres
+ * @param {'m'|'ft'} units
+ * @param {Sense} [sense] found where left out
+ * @returns {string} without the unit in metres
+ */
+export function distanceFigure(metres, units, sense = 'found') {
+  const small = metres > 0 && metres < 0.1;
+  const step = units === 'ft' ? INCH / 4 : small ? 0.001 : 0.01;
+  const steps = metres / step;
+  const whole = sense === 'required' ? Math.ceil(steps - CRUMB) : Math.floor(steps + CRUMB);
+  return formatLength(whole * step, units, small ? 3 : 2);
+}
 
 /** @param {number} squareMetres @param {Units} units @returns {string} with its unit */
 export function area(squareMetres, units) {

@@ -1,7 +1,7 @@
 // @ts-check
 import { bearing as bearingText } from '../../charts/figures.js';
 import { number } from '../../units/figures.js';
-import { formatLength } from '../../units/length.js';
+import { distanceFigure, formatLength } from '../../units/length.js';
 import { dimension, dimensionLabel, toDimension } from './dimensions.js';
 import { handles } from './drag.js';
 import { candidates, ghosts } from './ghosts.js';
@@ -98,8 +98,8 @@ export function mount(planView, store, shell) {
     const plan = state.search.planAtSearch ?? state.plan;
     const planNorth = plan.site?.planNorth ?? 0;
     const length = (/** @type {number} */ metres) => formatLength(metres, state.units, 2);
-    const distance = (/** @type {number} */ metres) =>
-      formatLength(metres, state.units, metres > 0 && metres < 0.1 ? 3 : 2);
+    /** @type {(metres: number, sense?: import('../../units/length.js').Sense) => string} */
+    const distance = (metres, sense) => distanceFigure(metres, state.units, sense);
     const clearances = toDimension(chosen.clearances);
     const band = bandShown(state, chosen);
     const frame = roseFrame(chosen, view);
@@ -120,10 +120,10 @@ export function mount(planView, store, shell) {
       labels: [
         ...clearances.map((one, index) =>
           dimensionLabel(one, index, {
-            figure: one.distance < 0 ? `inside by ${distance(-one.distance)}` : distance(one.distance),
+            figure: one.distance < 0 ? `inside by ${distance(-one.distance, 'required')}` : distance(one.distance),
             words: [
               `${one.distance < 0 ? '' : 'to '}${nameIn(plan, one.to)}${one.what && one.what !== 'wire' ? `, ${one.what}` : ''}`,
-              `must keep ${distance(one.required)}`,
+              `must keep ${distance(one.required, 'required')}`,
             ],
           }),
         ),

@@ -1,7 +1,7 @@
 // @ts-check
 import { formatDirection, formatVariation, parseDegrees, parseDirection, parseDirectionFrom } from '../../units/angle.js';
 import { number, parseNumber, signed } from '../../units/figures.js';
-import { area, formatLength, lengthInBox, parseLength } from '../../units/length.js';
+import { area, distanceFigure, formatLength, lengthInBox, parseLength } from '../../units/length.js';
 import { assert, test } from './harness.js';
 
 test('lengths are read however they are written', () => {
@@ -49,6 +49,17 @@ test('directions have three figures before the point and are read as degrees or 
   assert.near(parseDirection('NE'), 45);
   assert.near(parseDirection('-45'), 315);
   assert.same(parseDirection('up'), null);
+});
+
+test('a distance found is never shown greater than it is, one required never less', () => {
+  assert.same(distanceFigure(3.099, 'm'), '3.09');
+  assert.same(distanceFigure(3.05, 'm'), '3.05');
+  assert.same(distanceFigure(3.05, 'm', 'required'), '3.05');
+  assert.same(distanceFigure(3.051, 'm', 'required'), '3.06');
+  assert.same(distanceFigure(0.075, 'm', 'required'), '0.075');
+  assert.same(distanceFigure(0.0926, 'm'), '0.092');
+  assert.same(distanceFigure(0.3047, 'ft'), '0′ 11¾″');
+  assert.same(distanceFigure(0.3049, 'ft', 'required'), '1′ ¼″');
 });
 
 test('a direction can be typed from the last wall', () => {
