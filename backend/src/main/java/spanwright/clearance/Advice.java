@@ -80,12 +80,17 @@ final class Advice {
       said.add(
           String.format(
               Locale.ROOT,
-              "%s passes %.1f m on the plan from this rigging: speak with its operator before any"
-                  + " work within %.0f m of it.",
+              "%s passes %s: speak with its operator before any work within %.0f m of it.",
               clearances.name(line.source().id()),
-              near.distance(),
+              apart(near.distance()),
               within));
     }
+  }
+
+  private static String apart(double distance) {
+    return distance < 0.05
+        ? "straight over or under this rigging"
+        : String.format(Locale.ROOT, "%.1f m on the plan from this rigging", distance);
   }
 
   private static double[] flattened(double[] points) {

@@ -120,7 +120,8 @@ final class HardwareList {
             "in one rope of each span that has one");
       }
     }
-    add("cleats", Math.max(0, lifts - weights), 0, null);
+    int cleats = Math.max(0, lifts - weights);
+    add(cleats == 1 ? "cleat" : "cleats", cleats, 0, null);
   }
 
   private void addMasts() {

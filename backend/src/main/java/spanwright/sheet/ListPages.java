@@ -124,7 +124,7 @@ final class ListPages {
       title = Setting.wrap(head.title(), width - side - 6, size, true);
     }
     double y = TOP + 3.2;
-    pen.text(MARGIN, y, "Rigging list, job", Setting.TEXT, Ink.Anchor.START, false);
+    pen.text(MARGIN, y, "Rigging list", Setting.TEXT, Ink.Anchor.START, false);
     for (String line : title.subList(0, Math.min(4, title.size()))) {
       y += size * Letters.POINT * 1.08;
       pen.text(MARGIN, y, line, size, Ink.Anchor.START, true);
