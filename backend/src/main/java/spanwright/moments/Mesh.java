@@ -146,7 +146,10 @@ final class Mesh {
     WireSpec fed = model.wires().get(model.feedWire());
     double total = fed.length();
     double feed = model.feedFraction() * total;
-    double width = Math.max(FIELD * model.gap(), FIELD_RADII * fed.radius());
+    // beyond the wire's ends there is nothing to put the field on, and some of the volt would be
+    // lost
+    double room = ModelCheck.closed(fed) ? total : 2 * Math.min(feed, total - feed);
+    double width = Math.min(room, Math.max(FIELD * model.gap(), FIELD_RADII * fed.radius()));
     spread(model.feedWire(), feed, width, out);
     if (ModelCheck.closed(fed)) {
       spread(model.feedWire(), feed + total, width, out);

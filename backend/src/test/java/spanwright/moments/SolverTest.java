@@ -154,6 +154,17 @@ class SolverTest {
   }
 
   @Test
+  void a_thick_wire_fed_beside_a_joint_gets_the_whole_volt() {
+    double radius = 0.035;
+    WireSpec whole = WireSpec.perfect(List.of(v(-5, 0, 8), v(5, 0, 8)), radius);
+    WireSpec left = WireSpec.perfect(List.of(v(-5, 0, 8), v(-2, 0, 8)), radius);
+    WireSpec right = WireSpec.perfect(List.of(v(-2, 0, 8), v(5, 0, 8)), radius);
+    Complex one = solve(AntennaModel.of(List.of(whole), 0, 0.305)).impedance();
+    Complex two = solve(AntennaModel.of(List.of(left, right), 1, 0.05 / 7)).impedance();
+    assertEquals(0, SolveCase.reflection(one).subtract(SolveCase.reflection(two)).abs(), 0.01);
+  }
+
+  @Test
   void currents_run_along_the_wires_and_vanish_at_open_ends() {
     Solution found = solve(fed(LEVEL));
     List<CurrentSample> samples = found.currents();
