@@ -152,9 +152,9 @@ final class Overhead {
         if ((main || !far) && gap(strand, state, i, line) - slack < least) {
           Space.Near here = new Space.Near();
           piece(strand.states[state], i, line, here);
-          if (!far && state + 1 < strand.sweep) {
-            between(strand.states[state], strand.states[state + 1], i, line, here);
-            slack = Math.max(slack, strand.slack(state + 1, i));
+          for (int next : far ? new int[0] : strand.onward(state)) {
+            between(strand.states[state], strand.states[next], i, line, here);
+            slack = Math.max(slack, strand.slack(next, i));
           }
           double distance = Math.max(0, here.distance() - slack);
           if (distance < least) {
@@ -171,12 +171,13 @@ final class Overhead {
   /** How far a piece is at least, on its way to the next state too. */
   private static double gap(Strand strand, int state, int i, Line line) {
     double here = Obstacle.gap(strand.states[state], i, line.box());
-    if (state + 1 >= strand.sweep) {
-      return here;
-    }
     double[] one = strand.states[state];
-    double[] next = strand.states[state + 1];
-    return here - Math.max(apart(one, i, next, i), apart(one, i + 3, next, i + 3));
+    double moves = 0;
+    for (int onward : strand.onward(state)) {
+      double[] next = strand.states[onward];
+      moves = Math.max(moves, Math.max(apart(one, i, next, i), apart(one, i + 3, next, i + 3)));
+    }
+    return here - moves;
   }
 
   private static void piece(double[] ours, int i, Line line, Space.Near near) {

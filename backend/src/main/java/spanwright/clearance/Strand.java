@@ -10,8 +10,10 @@ import spanwright.rigging.Rigged;
  *
  * <p>States are polylines of the same number of points, x, y, z in turn; those of the sweep follow
  * one another from blown left over calm to blown right, in steps small enough that the surface
- * between neighbours holds everything in between but for {@link #slack}. The steps between calm and
- * gust turn each point about the chord of its span, its distance from the chord growing evenly.
+ * between neighbours holds everything in between but for {@link #slack}. Ice comes by degrees too:
+ * what lies between calm and iced, and between either and its gust, is passed on the way. The steps
+ * between calm and gust turn each point about the chord of its span, its distance from the chord
+ * growing evenly.
  */
 final class Strand {
   /** What it is. */
@@ -34,8 +36,7 @@ final class Strand {
   /** Steps from calm to the gust. */
   static final int STEPS = 4;
 
-  /** Another model of the same gust may put a wire this share of its shift farther out. */
-  private static final double MODEL = 0.03;
+  private static final int[] NOWHERE = {};
 
   final Part part;
   final int from;
@@ -104,7 +105,7 @@ final class Strand {
     List<double[][]> sweeps = new ArrayList<>();
     for (Rigged.Span span : rigged.spans()) {
       double[] slack = new double[span.shapes().calm().size()];
-      double[][] states = sweep(span.shapes(), null, slack);
+      double[][] states = Sweep.of(span.shapes(), Sweep.turning(null), slack);
       sweeps.add(states);
       int points = span.shapes().calm().size();
       add(strands, Part.ROPE, span, states, 0, span.wireFrom(), slack, false, false);
@@ -122,7 +123,7 @@ final class Strand {
     }
     for (Rigged.Tail tail : rigged.tails()) {
       double[] slack = new double[tail.shapes().calm().size()];
-      double[][] states = sweep(tail.shapes(), null, slack);
+      double[][] states = Sweep.of(tail.shapes(), Sweep.SWINGING, slack);
       strands.add(
           strand(Part.WIRE, tail.attachment(), tail.attachment(), states, slack, false, true));
     }
@@ -142,7 +143,7 @@ final class Strand {
     strands.add(feedLine(rigged, sweeps));
     for (Rigged.Shapes other : rigged.feedLine().others()) {
       double[] slack = new double[other.calm().size()];
-      double[][] states = sweep(other, null, slack);
+      double[][] states = Sweep.of(other, Sweep.turning(null), slack);
       int at = rigged.feedLine().held();
       strands.add(strand(Part.FEED_LINE, at, at, states, slack, false, false));
     }
@@ -207,115 +208,9 @@ final class Strand {
       }
     }
     double[] slack = new double[line.shapes().calm().size()];
-    double[][] states = sweep(line.shapes(), firsts, slack);
+    double[][] states = Sweep.of(line.shapes(), Sweep.turning(firsts), slack);
     int at = line.held() >= 0 ? line.held() : -1;
     return strand(Part.FEED_LINE, at, at, states, slack, false, false);
-  }
-
-  /** The states of one thing: left to right in steps, then iced, still and in its gust. */
-  private static double[][] sweep(Rigged.Shapes shapes, double[][] firsts, double[] slack) {
-    double[] calm = flat(shapes.calm());
-    if (shapes.left().equals(shapes.calm()) && shapes.right().equals(shapes.calm())) {
-      return shapes.iced().isEmpty() || shapes.iced().equals(shapes.calm())
-          ? new double[][] {calm}
-          : threeOf(calm, flat(shapes.iced()));
-    }
-    double[] left = flat(shapes.left());
-    double[] right = flat(shapes.right());
-    int iced = shapes.iced().isEmpty() ? 0 : shapes.icedLeft().isEmpty() ? 1 : 3;
-    double[][] states = new double[2 * STEPS + 1 + iced][];
-    states[0] = left;
-    states[STEPS] = calm;
-    states[2 * STEPS] = right;
-    for (int k = 1; k < STEPS; k++) {
-      double share = (double) k / STEPS;
-      states[STEPS - k] =
-          between(calm, left, share, firsts == null ? null : firsts[STEPS - k], slack);
-      states[STEPS + k] =
-          between(calm, right, share, firsts == null ? null : firsts[STEPS + k], slack);
-    }
-    if (iced > 0) {
-      states[2 * STEPS + 1] = flat(shapes.iced());
-    }
-    if (iced > 1) {
-      states[2 * STEPS + 2] = flat(shapes.icedLeft());
-      states[2 * STEPS + 3] = flat(shapes.icedRight());
-    }
-    return states;
-  }
-
-  private static double[][] threeOf(double[] calm, double[] iced) {
-    double[][] states = new double[2 * STEPS + 2][];
-    java.util.Arrays.fill(states, calm);
-    states[2 * STEPS + 1] = iced;
-    return states;
-  }
-
-  /** A state between calm and blown. */
-  private static double[] between(
-      double[] calm, double[] blown, double share, double[] first, double[] slack) {
-    int end = calm.length - 3;
-    double[] state = new double[calm.length];
-    double[] e0 = axis(calm, end);
-    double[] e1 = axis(blown, end);
-    double[] o0 = new double[3];
-    double[] o1 = new double[3];
-    double[] start = new double[3];
-    double[] finish = new double[3];
-    for (int k = 0; k < 3; k++) {
-      start[k] = first == null ? mix(calm[k], blown[k], share) : first[k];
-      finish[k] = mix(calm[end + k], blown[end + k], share);
-    }
-    for (int i = 0; i <= end; i += 3) {
-      double a0 = offset(calm, i, e0, o0);
-      double a1 = offset(blown, i, e1, o1);
-      double along = mix(a0, a1, share);
-      double r0 = size(o0);
-      double r1 = size(o1);
-      double cos =
-          r0 * r1 < 1e-12 ? 1 : (o0[0] * o1[0] + o0[1] * o1[1] + o0[2] * o1[2]) / (r0 * r1);
-      double angle = Math.acos(Math.max(-1, Math.min(1, cos)));
-      double radius = mix(r0, r1, share);
-      boolean turns = angle > 1e-3 && angle < 3.1;
-      double f0 = turns ? radius / r0 * Math.sin((1 - share) * angle) / Math.sin(angle) : 1 - share;
-      double f1 = turns ? radius / r1 * Math.sin(share * angle) / Math.sin(angle) : share;
-      for (int k = 0; k < 3; k++) {
-        state[i + k] = start[k] + along * (finish[k] - start[k]) + f0 * o0[k] + f1 * o1[k];
-      }
-      double greater = Math.max(r0, r1);
-      double facet = greater * (1 - Math.cos(angle / STEPS / 2));
-      double rest = MODEL * greater + 4 * greater / (end / 3.0 * end / 3.0);
-      slack[i / 3] = Math.max(slack[i / 3], facet + rest);
-    }
-    return state;
-  }
-
-  /** The chord as a vector, with its length squared last. */
-  private static double[] axis(double[] points, int end) {
-    double x = points[end] - points[0];
-    double y = points[end + 1] - points[1];
-    double z = points[end + 2] - points[2];
-    return new double[] {x, y, z, x * x + y * y + z * z};
-  }
-
-  /** Splits a point into its share along the chord (returned) and its offset from the chord. */
-  private static double offset(double[] points, int i, double[] axis, double[] into) {
-    double x = points[i] - points[0];
-    double y = points[i + 1] - points[1];
-    double z = points[i + 2] - points[2];
-    double share = axis[3] < 1e-12 ? 0 : (x * axis[0] + y * axis[1] + z * axis[2]) / axis[3];
-    into[0] = x - share * axis[0];
-    into[1] = y - share * axis[1];
-    into[2] = z - share * axis[2];
-    return share;
-  }
-
-  private static double size(double[] v) {
-    return Math.sqrt(v[0] * v[0] + v[1] * v[1] + v[2] * v[2]);
-  }
-
-  private static double mix(double a, double b, double share) {
-    return a + share * (b - a);
   }
 
   static double[] flat(List<Place> points) {
@@ -337,6 +232,21 @@ final class Strand {
   /** Whether a state is calm, or iced in calm air. */
   boolean isStill(int state) {
     return state == calm || state == sweep;
+  }
+
+  /** The states that a state goes over into, each such step told once. */
+  int[] onward(int state) {
+    if (state + 1 < sweep) {
+      boolean ices = states.length > sweep;
+      boolean blown = state == 0 && states.length > sweep + 1;
+      return state == calm && ices
+          ? new int[] {state + 1, sweep}
+          : blown ? new int[] {state + 1, sweep + 1} : new int[] {state + 1};
+    }
+    if (state == sweep - 1 && sweep > 1) {
+      return states.length > sweep + 2 ? new int[] {sweep + 2} : NOWHERE;
+    }
+    return state == sweep && states.length > sweep + 2 ? new int[] {sweep + 1, sweep + 2} : NOWHERE;
   }
 
   /** How much farther than a state's piece from offset i things may be [m]; 0 on a calm day. */

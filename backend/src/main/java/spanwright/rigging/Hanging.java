@@ -136,7 +136,8 @@ public final class Hanging {
 
     /**
      * Lets the wire draw the spring out: its pull is that of still air and so much more for each
-     * metre that has run over the pulley. With more pull less wire runs, so there is one answer.
+     * metre that has run over the pulley. With more pull less wire runs, so there is one answer at
+     * most; false where a spring so soft lets out more wire than its own pull could then hold.
      */
     private boolean spring(double first) {
       double whole = chain.totalLength();
@@ -160,7 +161,8 @@ public final class Hanging {
       double pull =
           new BracketingNthOrderBrentSolver(1e-12, 1e-9, 1e-9 * given.pull(), 5)
               .solve(200, over, low, high, AllowedSolution.ANY_SIDE);
-      return run(pull, first);
+      // Below the wire's least pull nothing hangs, and the balance leaps there without an answer.
+      return Math.abs(over.value(pull)) < 1e-4 * pull && run(pull, first);
     }
 
     private String tooSlack() {

@@ -9,6 +9,7 @@ import java.util.Locale;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import spanwright.plan.Catalogues;
+import spanwright.plan.Place;
 import spanwright.plan.Plan;
 import spanwright.rigging.Layout;
 import spanwright.rigging.Plots;
@@ -98,6 +99,67 @@ class OverheadRulesTest {
     y = 30 + (r0 + r1) / 2 * Math.sin(angle);
     Clearance kept = get(check(plan("telephone", across(y, z), ""), LEVEL), "overhead-telephone");
     assertTrue(kept.distance() < 0.02, "told " + kept.distance());
+  }
+
+  @Test
+  void a_line_that_growing_ice_would_let_the_wire_down_on_is_not_missed() {
+    Plan bare = Plots.bare().poles("").rules("\"wind\": 10, \"ice\": 8").plan();
+    Rigged rigged = Rigging.hang(bare, Catalogues.standard(), LEVEL);
+    var shapes = rigged.spans().get(0).shapes();
+    int middle = shapes.calm().size() / 2;
+    Place calm = shapes.calm().get(middle);
+    Place iced = shapes.iced().get(middle);
+    Place icedLeft = shapes.icedLeft().get(middle);
+    Place left = shapes.left().get(middle);
+    assertTrue(calm.z() - iced.z() > 0.4, calm + " " + iced);
+    for (Place[] step : new Place[][] {{calm, iced}, {iced, icedLeft}, {left, icedLeft}}) {
+      double y = (step[0].y() + step[1].y()) / 2;
+      double z = (step[0].z() + step[1].z()) / 2;
+      String line =
+          String.format(
+              Locale.ROOT,
+              "[ { \"id\": \"line\", \"name\": \"The line\", \"kind\": \"telephone\", \"path\": %s } ]",
+              across(y, z));
+      Plan plan =
+          Plots.bare()
+              .poles("")
+              .rules("\"wind\": 10, \"ice\": 8")
+              .with("overheadLines", line)
+              .plan();
+      Clearance kept = get(check(plan, LEVEL), "overhead-telephone");
+      assertTrue(kept.distance() < 0.02, "told " + kept.distance());
+    }
+  }
+
+  @Test
+  void a_drooping_end_swings_on_an_arc_and_not_across_it() {
+    Layout drooping =
+        new Layout(
+            "drooping",
+            List.of(Plots.hold("west", 15, 30, 10), Plots.hold("east", 45, 30, 10)),
+            List.of(
+                new Layout.Run(
+                    List.of(
+                        new Place(17, 30, 5),
+                        new Place(17, 30, 10),
+                        new Place(43, 30, 10),
+                        new Place(43, 30, 5)),
+                    null)),
+            new Layout.FeedChoice(0, 0.5, null, null));
+    Rigged rigged = Rigging.hang(Plots.bare().poles("").plan(), Catalogues.standard(), drooping);
+    var shapes = rigged.tails().get(0).shapes();
+    int last = shapes.calm().size() - 1;
+    Place top = shapes.calm().get(0);
+    double length = top.z() - shapes.calm().get(last).z();
+    Place blown = shapes.left().get(last);
+    double way = blown.y() > 30 ? 1 : -1;
+    assertTrue(way * (blown.y() - 30) > 4, "blown to " + blown);
+    // Half way round, where its end comes by in a lighter wind.
+    double y = 30 + way * (length * Math.sin(Math.PI / 4) + 0.2);
+    double z = top.z() - length * Math.cos(Math.PI / 4);
+    Clearance kept =
+        get(check(plan("telephone", across(y, z), ""), drooping), "overhead-telephone");
+    assertTrue(kept.distance() < 0.2, "told " + kept.distance());
   }
 
   @Test
