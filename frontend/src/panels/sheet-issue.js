@@ -10,9 +10,6 @@ import { stateMark } from '../charts/marks.js';
  * @typedef {{revision: string, date?: string, since?: string, changes: string[]}} Head of the sheet's own document
  */
 
-/** A list of changes longer than this goes on on the sheet itself. */
-const MOST_CHANGES = 4;
-
 /**
  * @param {Head} head
  * @returns {string} "Revision B, not yet issued"
@@ -28,7 +25,7 @@ export function revisionWords(head) {
 export function changeWords(head) {
   if (!head.since) return '';
   const some = head.changes.length === 1 ? '1 change' : `${head.changes.length} changes`;
-  return `${some} since revision ${head.since}:`;
+  return `${some} since revision ${head.since}`;
 }
 
 /**
@@ -38,22 +35,11 @@ export function changeWords(head) {
  * @returns {HTMLElement}
  */
 export function issuePart(head, issued, act) {
-  const shown = head.changes.slice(0, MOST_CHANGES);
-  const more = head.changes.length - shown.length;
   return html(
     'section',
     { class: 'revision', 'aria-label': 'Revision' },
     // Where the button was, so that the focus has a place to go once the sheet is issued.
     html('h2', head.date ? { tabindex: -1, 'data-key': 'issue' } : {}, revisionWords(head)),
-    head.since
-      ? html(
-          'div',
-          {},
-          html('p', { class: 'soft' }, changeWords(head)),
-          html('ul', { class: 'notes' }, ...shown.map((words) => html('li', {}, words))),
-          more > 0 ? html('p', { class: 'soft' }, `${more} more at the end of the list.`) : null,
-        )
-      : null,
     head.date
       ? null
       : html(
@@ -73,6 +59,14 @@ export function issuePart(head, issued, act) {
       ? null
       : html('p', { class: 'soft' }, 'Issue it when you hand it out: later sheets then say what has changed since.'),
     act.trouble ? html('p', { class: 'problem', role: 'alert' }, stateMark('foul', 'Error'), ` ${act.trouble}`) : null,
+    head.since
+      ? html(
+          'details',
+          {},
+          html('summary', { 'data-key': 'changes' }, changeWords(head)),
+          html('ul', { class: 'notes' }, ...head.changes.map((words) => html('li', {}, words))),
+        )
+      : null,
     issued.length
       ? html(
           'div',
@@ -83,7 +77,7 @@ export function issuePart(head, issued, act) {
             { class: 'issued' },
             ...[...issued]
               .reverse()
-              .map((one) => html('li', {}, html('b', {}, one.revision), ` ${one.date}`, html('span', { class: 'soft' }, one.what))),
+              .map((one) => html('li', {}, html('b', {}, one.revision), ` ${one.date} `, html('span', { class: 'soft' }, one.what))),
           ),
         )
       : null,

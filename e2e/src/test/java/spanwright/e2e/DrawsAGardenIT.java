@@ -9,6 +9,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.microsoft.playwright.Download;
 import com.microsoft.playwright.Locator;
 import com.microsoft.playwright.options.ColorScheme;
+import com.microsoft.playwright.options.SelectOption;
 import com.microsoft.playwright.options.WaitForSelectorState;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -47,6 +48,7 @@ class DrawsAGardenIT extends BrowserTest {
     checkPlacement();
     page.locator("[data-key=sheet]").click();
     checkSheet();
+    checkIssue();
   }
 
   @Test
@@ -264,6 +266,27 @@ class DrawsAGardenIT extends BrowserTest {
     for (JsonNode wire : sheet.at("/wires")) {
       assertTrue(shown.contains(String.format("%.2f", wire.at("/cut").asDouble())), shown);
     }
+  }
+
+  /**
+   * Handed out by keyboard; another placement is then the next revision and says what it changes.
+   */
+  private void checkIssue() throws IOException {
+    page.locator(".revision h2", text("Revision A, not yet issued")).waitFor();
+    tabTo("[data-key=issue]");
+    press("Enter");
+    page.locator(".revision h2", text("Revision A, issued")).waitFor();
+    assertEquals("Revision A is issued.", page.locator("#news").textContent());
+    assertEquals(1, page.locator(".revision .issued li").count());
+    assertTrue(
+        (Boolean) page.evaluate("() => document.activeElement.matches('.revision h2')"),
+        "the focus stays where the button was");
+    page.locator("#sheet-placement").selectOption(new SelectOption().setIndex(1));
+    page.locator(".revision h2", text("Revision B, not yet issued")).waitFor();
+    JsonNode head = Served.json(new String(take("json"), StandardCharsets.UTF_8)).at("/head");
+    assertEquals("A", head.at("/since").asText());
+    String summary = page.locator(".revision summary").innerText();
+    assertEquals(head.at("/changes").size() + " changes since revision A", summary);
   }
 
   private void checkModel(JsonNode sheet) {
