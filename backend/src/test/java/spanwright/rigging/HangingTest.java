@@ -168,6 +168,15 @@ class HangingTest {
     says("spring: holds nothing", spring(5.0, HangCase.Held.TIED));
   }
 
+  @Test
+  void a_spring_too_soft_to_balance_is_refused_and_not_told_a_pull_it_does_not_have() {
+    Place a = new Place(0, 0, 8);
+    Place b = new Place(20, 0, 7);
+    says(
+        "stiffer spring",
+        new HangCase(a, b, WIRE, null, 15.0, HangCase.Held.SPRING, 45.0, null, null, 2.0));
+  }
+
   private static HangCase spring(Double spring, HangCase.Held held) {
     return new HangCase(
         new Place(0, 0, 8), new Place(20, 0, 7), WIRE, null, 80.0, held, 25.0, null, null, spring);
