@@ -210,12 +210,12 @@ export function mount(root, store, shell) {
         html('ul', {}, ...FORMATS.map(([type, words]) => html('li', {}, downloadLink(state, placement, type, words)))),
         trouble ? html('p', { class: 'problem', role: 'alert' }, stateMark('foul', 'Error'), ` ${trouble}`) : null,
       ),
-      loaded.model ? issuePart(loaded.model.head, loaded.issued, { ...issuing, issue: () => void issue() }) : null,
       html(
         'button',
         { type: 'button', class: 'go', 'data-key': 'print', disabled: !loaded.model, onclick: () => window.print() },
         'Print',
       ),
+      loaded.model ? issuePart(loaded.model.head, loaded.issued, { ...issuing, issue: () => void issue() }) : null,
     );
   }
 
