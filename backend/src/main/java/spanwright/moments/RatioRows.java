@@ -195,6 +195,10 @@ final class RatioRows {
       work.rho[j] = Math.max(Math.sqrt(dx * dx + dy * dy), 1e-3 * work.zeta[j]);
     }
     reflection.ratios(work.rho, work.zeta, count, work.ratios);
+    for (double[] values : work.ratios) {
+      // what a weight of 0 reaches must be a number
+      java.util.Arrays.fill(values, count, count + MOST_NODES, 0);
+    }
   }
 
   /** Makes the pair's three ratios of the table's four; they take the place of the first six. */

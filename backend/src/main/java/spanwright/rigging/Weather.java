@@ -1,9 +1,10 @@
 package spanwright.rigging;
 
 /**
- * The weathers that a wire must stand. The gust never meets the full ice: ISO 12494 and EN 50341
- * take 0.4 of the wind's pressure with it (from memory), and ice without wind and wind without ice
- * as cases of their own. The worst of all governs.
+ * The weathers that a wire must stand; the worst of all governs. A brief that asks for ice and a
+ * gust gets both at once, in full: the safe reading. Standards let less of the wind's pressure meet
+ * the ice (ISO 12494 and EN 50341: a share of about 0.4, from memory); who works by one asks for a
+ * lower gust.
  */
 enum Weather {
   /** Still air. */
@@ -12,8 +13,8 @@ enum Weather {
   GUST(1, false, "gust"),
   /** Ice in still air. */
   ICE(0, true, "ice"),
-  /** Ice, and the gust with the share of its pressure that goes with it. */
-  ICY_GUST(0.4, true, "ice and gust");
+  /** The design gust on the iced wire. */
+  ICY_GUST(1, true, "ice and gust");
 
   /** Share of the design gust's pressure. */
   final double windShare;

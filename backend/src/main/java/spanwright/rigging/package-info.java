@@ -9,8 +9,8 @@
  * one end is the minimum of the chain's complementary energy, which is convex, so a damped Newton
  * iteration always arrives. Where ropes hold the wire at bends, and in loops, the chains form a net
  * whose nodes are found together, by the same convexity. Wind is ½ρv²·Cd·d for each metre, level
- * and square to the span (EN 1991-1-4 for ½ρv²); ice is a sleeve of 900 kg/m³, and meets 0.4 of the
- * gust's pressure (ISO 12494 and EN 50341, from memory).
+ * and square to the span (EN 1991-1-4 for ½ρv²); ice is a sleeve of 900 kg/m³ that widens what the
+ * gust meets.
  *
  * <p>What it does not do: dynamics (galloping, gusts against a moving tree), bending stiffness,
  * friction in pulleys, wire that runs through its holding points, creep. The level pull of a slack

@@ -81,15 +81,6 @@ public class PointLoadTest extends PublishedChecks {
             "N",
             MIXED));
     checks.add(strength());
-    checks.add(
-        Check.within(
-            "share of the gust's pressure that goes with ice",
-            0.4,
-            Weather.ICY_GUST.windShare,
-            1e-9,
-            1,
-            "",
-            "ISO 12494 and EN 50341, from memory"));
     return checks;
   }
 
