@@ -8,35 +8,31 @@ import org.locationtech.jts.geom.Polygon;
 import spanwright.assess.Placement;
 import spanwright.clearance.Clearance;
 import spanwright.clearance.State;
-import spanwright.plan.GroundSurface;
-import spanwright.plan.Place;
 import spanwright.plan.Plan;
 import spanwright.plan.Point;
 
-/** Lays out the site drawing: plan above, side view below at the same scale, title block. */
+/** Lays out the plan of the site on a page of its own, with a title block. */
 final class DrawingPage {
   /** Scales that a scale rule carries, as n of 1 : n; the last few are for very large plots. */
   static final int[] SCALES = {
-    50, 75, 100, 125, 200, 250, 300, 400, 500, 1000, 2000, 2500, 5000, 10_000, 25_000, 50_000,
+    50, 75, 100, 125, 150, 200, 250, 300, 400, 500, 1000, 2000, 2500, 5000, 10_000, 25_000, 50_000,
     100_000, 1_000_000
   };
 
   /** Largest denominator at which the whole boundary is shown; beyond it only where work is. */
   private static final int WHOLE = 500;
 
-  private static final double TOP = 12;
-  private static final double RULER = 7;
-  private static final double CAPTION = 8;
-  private static final double SIDE_FOOT = 6.5;
+  static final double TOP = 12;
+
+  /** Width kept for the figures outside a frame [mm]. */
+  static final double RULER = 7;
 
   private final SheetModel model;
   private final Plan plan;
   private final Placement placement;
-  private final GroundSurface ground;
   private final Figures figures;
   private final double left;
   private final double width;
-  private final double titleTop;
   private final List<Polygon> lettering = new ArrayList<>();
   private boolean partly;
 
@@ -45,10 +41,8 @@ final class DrawingPage {
     this.plan = model.source().plan();
     this.placement = model.source().placement();
     this.figures = new Figures(model.options().units());
-    this.ground = GroundSurface.of(plan);
     this.left = ListPages.MARGIN + RULER;
     this.width = model.options().paper().width() - ListPages.MARGIN - left;
-    this.titleTop = model.options().paper().height() - ListPages.FOOT - 3 - TitleBlock.HEIGHT;
   }
 
   /** Boxes of all lettering that found room, for whoever wants to check that none overlap. */
@@ -60,81 +54,53 @@ final class DrawingPage {
     Pen pen = new Pen();
     int scale = scale();
     Envelope extent = extent(partly);
-    List<List<SideInk.Leg>> rows = SideInk.rows(placement, metres(width, scale));
-    double sideHeight = sideHeight(scale);
-    double planHeight = titleTop - TOP - RULER - 3 - rows.size() * (sideHeight + CAPTION) - 2;
+    double height = room();
     Frame frame =
         new Frame(
             left,
             TOP,
             width,
-            planHeight,
+            height,
             extent.centre().x - metres(width, scale) / 2,
-            extent.centre().y - metres(planHeight, scale) / 2,
+            extent.centre().y - metres(height, scale) / 2,
             scale);
     plan(pen, frame);
-    double y = TOP + planHeight + RULER + 3;
-    for (int i = 0; i < rows.size(); i++) {
-      side(pen, rows.get(i), y + CAPTION, sideHeight, scale, i);
-      y += sideHeight + CAPTION;
-    }
-    new TitleBlock(model, scale, partly)
-        .draw(pen, ListPages.MARGIN, titleTop, width + RULER, sheet, sheets);
+    new TitleBlock(model, scale, partly ? "Plan, part of the plot" : "Plan", true)
+        .draw(pen, ListPages.MARGIN, titleTop(model), width + RULER, sheet, sheets);
     return pen;
   }
 
-  private static double metres(double mm, int scale) {
+  static double metres(double mm, int scale) {
     return mm * scale / 1000;
   }
 
-  /** The largest scale at which plan and side view fit the page. */
+  /** Where the title block begins [mm]. */
+  static double titleTop(SheetModel model) {
+    return model.options().paper().height() - ListPages.FOOT - 3 - TitleBlock.HEIGHT;
+  }
+
+  private double room() {
+    return titleTop(model) - TOP - RULER - 2;
+  }
+
+  /** The largest scale at which the plan fits the page. */
   int scale() {
     for (int scale : SCALES) {
       partly = scale > WHOLE;
       Envelope extent = extent(partly);
-      double rows = SideInk.rows(placement, metres(width, scale)).size();
-      double room = titleTop - TOP - RULER - 3 - rows * (sideHeight(scale) + CAPTION) - 2;
-      boolean sideFits =
-          placement.spans().stream()
-              .allMatch(
-                  s ->
-                      s.points().size() < 2
-                          || level(s) + 2 * SideInk.BEYOND <= metres(width, scale));
-      if (sideFits
-          && extent.getWidth() <= metres(width, scale)
-          && extent.getHeight() <= metres(room, scale)) {
+      if (extent.getWidth() <= metres(width, scale)
+          && extent.getHeight() <= metres(room(), scale)) {
         return scale;
       }
     }
-    throw new IllegalArgumentException(
+    throw tooLarge(model);
+  }
+
+  static IllegalArgumentException tooLarge(SheetModel model) {
+    return new IllegalArgumentException(
         "The plot is too large to draw on "
             + model.options().paper().label()
             + ": it must fit at 1 : 1,000,000.");
-  }
-
-  private static double level(Placement.Span span) {
-    return span.points()
-        .get(0)
-        .onPlan()
-        .distance(span.points().get(span.points().size() - 1).onPlan());
-  }
-
-  private double lowest() {
-    double low = Double.POSITIVE_INFINITY;
-    for (Placement.Span span : placement.spans()) {
-      for (Place p : span.points()) {
-        low = Math.min(low, ground.heightAt(p.onPlan()));
-      }
-    }
-    return Double.isFinite(low) ? low : 0;
-  }
-
-  private double sideHeight(int scale) {
-    double high = Double.NEGATIVE_INFINITY;
-    for (Placement.Attachment held : placement.attachments()) {
-      high = Math.max(high, held.at().z());
-    }
-    return (high + SideInk.ABOVE - lowest()) * 1000 / scale + 4 + SIDE_FOOT;
   }
 
   /** What the plan must show: the plot with some air, or only where there is work. */
@@ -153,6 +119,9 @@ final class DrawingPage {
     if (model.setOut().c() != null) {
       add(box, model.setOut().c().at().onPlan());
     }
+    if (model.setOut().proposed() != null) {
+      add(box, model.setOut().proposed().known().at().onPlan());
+    }
     for (Clearance c : placement.clearances()) {
       if (c.state() != State.CLEAR && c.toAt() != null) {
         Coordinate to = new Coordinate(c.toAt().x(), c.toAt().y());
@@ -161,7 +130,7 @@ final class DrawingPage {
         }
       }
     }
-    box.expandBy(Math.max(1, 0.04 * Math.max(box.getWidth(), box.getHeight())));
+    box.expandBy(Math.max(1, 0.025 * Math.max(box.getWidth(), box.getHeight())));
     return box;
   }
 
@@ -182,7 +151,7 @@ final class DrawingPage {
     rulers(pen, frame, survey.gridStep());
   }
 
-  private static void window(Pen pen, Frame frame, Pen inside) {
+  static void window(Pen pen, Frame frame, Pen inside) {
     pen.add(
         new Ink.Window(frame.left(), frame.top(), frame.width(), frame.height(), inside.inks()));
   }
@@ -201,43 +170,5 @@ final class DrawingPage {
       pen.text(
           frame.left() - 1.8, frame.y(y) + 0.9, figures.axis(y), 7, Ink.Anchor.END, false, 0.8);
     }
-  }
-
-  private void side(
-      Pen pen, List<SideInk.Leg> legs, double top, double height, int scale, int row) {
-    SideInk.Leg last = legs.get(legs.size() - 1);
-    double length = last.start() + last.length();
-    double base = lowest() - metres(SIDE_FOOT, scale);
-    Frame frame =
-        new Frame(left, top, width, height, length / 2 - metres(width, scale) / 2, base, scale);
-    Pen inside = new Pen();
-    Labels labels = new Labels(frame);
-    labels.block(
-        Labels.box(left + width / 2, top + height - SIDE_FOOT / 2, width, SIDE_FOOT - 1.4, 0));
-    new SideInk(model, frame, legs, labels, inside).draw();
-    labels.settle(inside);
-    lettering.addAll(labels.placed());
-    pen.text(
-        left,
-        top - 2.2,
-        row == 0 ? "Along the wire" : "Along the wire, continued",
-        10,
-        Ink.Anchor.START,
-        true);
-    pen.text(
-        left + width,
-        top - 2.2,
-        "1 : "
-            + Figures.whole(scale)
-            + ", heights true, "
-            + (figures.unit().equals("m") ? "metres" : "feet")
-            + " from the plan's zero at the edge,"
-            + " above the ground at the points",
-        7.5,
-        Ink.Anchor.END,
-        false,
-        0.8);
-    // heights stand outside the window
-    window(pen, new Frame(left - RULER, top, width + RULER, height, 0, 0, scale), inside);
   }
 }

@@ -155,6 +155,15 @@ final class GeoJsonWriter {
           m.at().onPlan(),
           properties("point", "", m.name()).put("number", m.number()).put("height", m.height()));
     }
+    if (model.setOut().proposed() != null) {
+      SetOutParts.Known datum = model.setOut().proposed().known();
+      point(datum.at().onPlan(), properties("new datum", "", datum.letter()));
+    }
+    List<Place> line = placement.feed().path();
+    for (double along : model.feedLine().standOffsAt()) {
+      Place at = WireList.at(line, Math.max(0, Job.length(line) - along));
+      point(at.onPlan(), properties("stand-off", "", "").put("fromEntry", along));
+    }
   }
 
   private static ObjectNode properties(String kind, String id, String name) {

@@ -11,8 +11,7 @@ final class PageMaker {
     List<Pen> pens = new ArrayList<>(ListPages.of(model));
     double width = model.options().paper().width();
     double height = model.options().paper().height();
-    int sheets = pens.size() + 1;
-    pens.add(new DrawingPage(model).draw(sheets, sheets));
+    pens.addAll(drawings(model, pens.size() + 1));
     List<PaperPage> pages = new ArrayList<>();
     for (int i = 0; i < pens.size(); i++) {
       foot(pens.get(i), model, i + 1, pens.size(), height);
@@ -21,13 +20,28 @@ final class PageMaker {
     return pages;
   }
 
-  /** The site drawing on a page of its own. */
-  static PaperPage drawing(SheetModel model) {
-    int sheets = ListPages.of(model).size() + 1;
-    Pen pen = new DrawingPage(model).draw(sheets, sheets);
-    foot(pen, model, sheets, sheets, model.options().paper().height());
-    return new PaperPage(
-        model.options().paper().width(), model.options().paper().height(), pen.inks());
+  /** Plan and side views, numbered from a sheet on. */
+  private static List<Pen> drawings(SheetModel model, int first) {
+    SidePages sides = new SidePages(model);
+    int sheets = first + sides.plan().pages().size();
+    List<Pen> pens = new ArrayList<>();
+    pens.add(new DrawingPage(model).draw(first, sheets));
+    pens.addAll(sides.draw(first + 1, sheets));
+    return pens;
+  }
+
+  /** The site drawing on pages of its own: the plan, then the side views. */
+  static List<PaperPage> drawing(SheetModel model) {
+    int first = ListPages.of(model).size() + 1;
+    double width = model.options().paper().width();
+    double height = model.options().paper().height();
+    List<Pen> pens = drawings(model, first);
+    List<PaperPage> pages = new ArrayList<>();
+    for (int i = 0; i < pens.size(); i++) {
+      foot(pens.get(i), model, first + i, first + pens.size() - 1, height);
+      pages.add(new PaperPage(width, height, pens.get(i).inks()));
+    }
+    return pages;
   }
 
   private static void foot(Pen pen, SheetModel model, int number, int of, double height) {

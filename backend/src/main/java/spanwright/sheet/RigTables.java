@@ -114,9 +114,9 @@ final class RigTables {
         List.of(
             ListPart.Column.left("", 8.5),
             ListPart.Column.left("Piece", 0),
-            ListPart.Column.right("Hangs", 15),
-            ListPart.Column.right("Ends + trim", wide(21, 24)),
-            ListPart.Column.right("Cut", 15)),
+            ListPart.Column.right("Hangs", wide(15, 18)),
+            ListPart.Column.right("Ends + trim", wide(21, 23)),
+            ListPart.Column.right("Cut", wide(15, 17))),
         rows,
         notes);
   }
@@ -272,7 +272,7 @@ final class RigTables {
             ListPart.Column.right("Rope, knotted", 22),
             ListPart.Column.right("Insulator", 18),
             ListPart.Column.right("Support", 18),
-            ListPart.Column.right("Parts first", 19),
+            ListPart.Column.right("Parts first", 20),
             ListPart.Column.right("Weak link, N", 20)),
         rows,
         rows.isEmpty()

@@ -106,6 +106,9 @@ final class RiggingInk {
     if (model.setOut().c() != null) {
       known.add(model.setOut().c());
     }
+    if (model.setOut().proposed() != null) {
+      known.add(model.setOut().proposed().known());
+    }
     for (SetOutParts.Known k : known) {
       double[] at = frame.at(k.at());
       Symbols.datum(pen, at[0], at[1]);

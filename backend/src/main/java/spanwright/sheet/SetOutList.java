@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import spanwright.assess.Placement;
 import spanwright.plan.Building;
 import spanwright.plan.Datum;
@@ -74,8 +75,20 @@ final class SetOutList {
     for (int i = 0; i < wanted.size(); i++) {
       marks.add(mark(i + 1, wanted.get(i), a, b, c));
     }
-    addNotes(marks, c);
-    return new SetOutParts.SetOut(a, b, c, marks, notes);
+    addNotes(c);
+    SetOutParts.Proposed proposed = propose(marks, a, b, c);
+    String poor =
+        marks.stream()
+            .filter(SetOutParts.Mark::waits)
+            .map(m -> String.valueOf(m.number()))
+            .collect(Collectors.joining(", "));
+    if (!poor.isEmpty()) {
+      notes.add("No pair of known points serves " + poor + " well: measure twice.");
+    }
+    if (marks.stream().anyMatch(SetOutParts.Mark::onBuilding)) {
+      notes.add("What stands on a building is found from its walls; the tapes only check it.");
+    }
+    return new SetOutParts.SetOut(a, b, c, marks, proposed, notes);
   }
 
   private List<Wanted> wanted() {
@@ -196,6 +209,68 @@ final class SetOutList {
         .orElse(null);
   }
 
+  /**
+   * Gives points that no known points serve their tapes from a new datum, and says where it goes.
+   */
+  private SetOutParts.Proposed propose(
+      List<SetOutParts.Mark> marks, SetOutParts.Known a, SetOutParts.Known b, SetOutParts.Known c) {
+    List<SetOutParts.Mark> waiting = marks.stream().filter(SetOutParts.Mark::waits).toList();
+    if (waiting.isEmpty()) {
+      return null;
+    }
+    List<SetOutParts.Known> lettered = new ArrayList<>(List.of(a, b));
+    if (c != null) {
+      lettered.add(c);
+    }
+    List<String> taken = lettered.stream().map(SetOutParts.Known::letter).toList();
+    String letter =
+        Stream.of("D", "E", "F", "G").filter(l -> !taken.contains(l)).findFirst().orElse("D");
+    NewDatum.Found found =
+        new NewDatum(job, lettered, waiting.stream().map(SetOutParts.Mark::at).toList())
+            .find(letter);
+    if (found == null) {
+      return null;
+    }
+    for (int i = 0; i < waiting.size(); i++) {
+      SetOutParts.Mark mark = waiting.get(i);
+      marks.set(marks.indexOf(mark), mark.with(found.pairs().get(i)));
+    }
+    SetOutParts.Pair fixed = found.fixed();
+    SetOutParts.Known from = named(lettered, fixed.from());
+    SetOutParts.Known with = named(lettered, fixed.with());
+    double off = offset(from, with, found.at());
+    boolean inLine = Math.abs(off) < 1e-6;
+    String side = inLine ? "on" : off > 0 ? "left" : "right";
+    notes.add(
+        "Drive a new datum "
+            + letter
+            + " first, "
+            + job.figures.say(fixed.fromTape())
+            + " from "
+            + fixed.from()
+            + " and "
+            + job.figures.say(fixed.withTape())
+            + " from "
+            + fixed.with()
+            + (inLine
+                ? ", sighted into the line between them."
+                : ", on the "
+                    + side
+                    + " of the line "
+                    + fixed.from()
+                    + " to "
+                    + fixed.with()
+                    + ": these tapes cross at "
+                    + Figures.degrees(fixed.crossing())
+                    + "."));
+    return new SetOutParts.Proposed(
+        new SetOutParts.Known(letter, "new datum, to be driven", found.at()), fixed, side);
+  }
+
+  private static SetOutParts.Known named(List<SetOutParts.Known> known, String letter) {
+    return known.stream().filter(k -> k.letter().equals(letter)).findFirst().orElseThrow();
+  }
+
   private static String letter(SetOutParts.Known c, SetOutParts.Known a, SetOutParts.Known b) {
     List<String> taken = List.of(a.letter(), b.letter());
     if (!c.letter().isEmpty() && !taken.contains(c.letter())) {
@@ -236,6 +311,10 @@ final class SetOutList {
   }
 
   private String blocked(Place at, SetOutParts.Known a, SetOutParts.Known b) {
+    Building under = job.between(at.onPlan(), at.onPlan());
+    if (under != null) {
+      return SetOutParts.Mark.ON + job.name(under.id());
+    }
     List<String> found = new ArrayList<>();
     for (SetOutParts.Known known : List.of(a, b)) {
       Building building = job.between(known.at().onPlan(), at.onPlan());
@@ -311,19 +390,11 @@ final class SetOutList {
     return Math.toDegrees(Math.abs(Math.atan2(ax * by - ay * bx, ax * bx + ay * by)));
   }
 
-  private void addNotes(List<SetOutParts.Mark> marks, SetOutParts.Known c) {
+  private void addNotes(SetOutParts.Known c) {
     notes.add("Hold tapes level, and plumb down where the ground falls.");
     if (c == null) {
       notes.add(
           "No third known point lies off the line from A to B: check each point by its side.");
-    }
-    String poor =
-        marks.stream()
-            .filter(m -> (m.flat() || m.blocked() != null) && m.better() == null)
-            .map(m -> String.valueOf(m.number()))
-            .collect(Collectors.joining(", "));
-    if (!poor.isEmpty()) {
-      notes.add("No pair of known points serves " + poor + " well: measure twice.");
     }
   }
 }

@@ -14,14 +14,26 @@ public final class SetOutParts {
    * @param b second known point
    * @param c third known point, for the check; null when the plan has none off the line A to B
    * @param points numbered from 1
+   * @param proposed a new datum to drive, for points that no known points serve; null when there
+   *     are none, or nothing serves them
    * @param notes as sentences
    */
-  public record SetOut(Known a, Known b, Known c, List<Mark> points, List<String> notes) {
+  public record SetOut(
+      Known a, Known b, Known c, List<Mark> points, Proposed proposed, List<String> notes) {
     public SetOut {
       points = List.copyOf(points);
       notes = List.copyOf(notes);
     }
   }
+
+  /**
+   * A place for a new datum.
+   *
+   * @param known its letter, words and place
+   * @param fixed the two tapes that it is set out by
+   * @param side of the line between those two, walking from the first: "left", "right" or "on"
+   */
+  public record Proposed(Known known, Pair fixed, String side) {}
 
   /**
    * A known point that a tape is held at.
@@ -64,7 +76,26 @@ public final class SetOutParts {
       Pair better,
       double bearing,
       double magnetic,
-      double height) {}
+      double height) {
+    /** How {@link #blocked} begins for what stands on a building. */
+    static final String ON = "on ";
+
+    /** Whether it must be set out otherwise, and nothing is known that serves. */
+    boolean waits() {
+      return (flat || blocked != null) && better == null && !onBuilding();
+    }
+
+    /** Whether it stands on a building, where no tape from the ground is level. */
+    boolean onBuilding() {
+      return blocked != null && blocked.startsWith(ON);
+    }
+
+    Mark with(Pair pair) {
+      return new Mark(
+          number, name, at, fromA, fromB, side, check, crossing, flat, blocked, pair, bearing,
+          magnetic, height);
+    }
+  }
 
   /**
    * Two tapes that serve better than those from A and B.

@@ -72,7 +72,9 @@ public final class Sheets {
     }
   }
 
-  /** The site drawing as a page of SVG, true to scale in millimetres, standing alone. */
+  /**
+   * The site drawing, plan over side views, as SVG, true to scale in millimetres, standing alone.
+   */
   public static String toSvg(SheetModel model) {
     return SvgWriter.write(
         "Site drawing of " + model.head().title() + ", " + model.head().name(),

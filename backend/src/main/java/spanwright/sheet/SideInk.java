@@ -1,10 +1,8 @@
 package spanwright.sheet;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import spanwright.assess.Placement;
-import spanwright.clearance.Clearance;
 import spanwright.plan.GroundSurface;
 import spanwright.plan.Place;
 import spanwright.plan.Plan;
@@ -18,6 +16,9 @@ import spanwright.plan.Support;
 final class SideInk {
   /** Metres shown beyond the first and last attachment. */
   static final double BEYOND = 2.5;
+
+  /** A place of a run this near to a wire is on it [m]. */
+  private static final double ON_WIRE = 0.06;
 
   /** Metres of paper's height kept over the highest attachment. */
   static final double ABOVE = 1.6;
@@ -126,7 +127,7 @@ final class SideInk {
     holders();
     legs.forEach(this::ropesAndLine);
     legs.forEach(this::wire);
-    levels();
+    new SideFigures(model, frame, legs, labels, pen).draw();
   }
 
   private void axis() {
@@ -236,114 +237,68 @@ final class SideInk {
   private void wire(Leg leg) {
     List<double[]> run = new ArrayList<>();
     for (Place p : leg.span().points()) {
-      run.add(new double[] {frame.x(leg.along(p.onPlan())), frame.y(p.z())});
+      run.add(at(leg, p));
     }
     pen.path(run, 0.35, 1, 1.8, 0.9);
-    for (Placement.Conductor conductor : placement.conductors()) {
-      List<double[]> wire = new ArrayList<>();
-      for (Place p : conductor.points()) {
-        double s = leg.along(p.onPlan());
-        boolean on =
-            Math.abs(leg.aside(p.onPlan())) < 0.6
-                && s > leg.start() - 0.3
-                && s < leg.start() + leg.length() + 0.3;
-        if (on) {
-          wire.add(new double[] {frame.x(s), frame.y(p.z())});
-        }
-      }
-      pen.path(wire, 0.8, 1);
-    }
+    heavy(leg);
+    placement.conductors().forEach(c -> freeEnds(leg, c.points()));
     labels.avoid(run, 8);
     Place feed = placement.feed().at();
     double s = leg.along(feed.onPlan());
-    if (Math.abs(leg.aside(feed.onPlan())) < 0.6
-        && s > leg.start() - 0.3
-        && s < leg.start() + leg.length() + 0.3) {
+    boolean here = leg.span().points().stream().anyMatch(p -> p.distance(feed) < 0.6);
+    if (here && s > leg.start() - 0.3 && s < leg.start() + leg.length() + 0.3) {
       pen.rect(frame.x(s) - 1, frame.y(feed.z()) - 1, 2, 2, 0.4, 0, 1);
     }
-    dimensions(leg, run);
-    nearest(leg);
   }
 
-  /** The distance to whatever stands nearest to this span, with its name. */
-  private void nearest(Leg leg) {
-    placement.clearances().stream()
-        .filter(c -> c.at() != null && c.toAt() != null && !c.to().equals("boundary"))
-        .filter(c -> OverheadList.regime(c) == OverheadList.Regime.AS_IT_HANGS)
-        .filter(c -> c.what() != null && c.what().startsWith("wire"))
-        .filter(c -> Math.abs(leg.aside(c.at().onPlan())) < 2)
-        .filter(c -> leg.along(c.at().onPlan()) >= leg.start() - 0.5)
-        .filter(c -> leg.along(c.at().onPlan()) <= leg.start() + leg.length() + 0.5)
-        .min(Comparator.comparingDouble(Clearance::distance))
-        .ifPresent(
-            c ->
-                labels.ask(
-                    24,
-                    Dimensions.between(
-                        new double[] {frame.x(leg.along(c.at().onPlan())), frame.y(c.at().z())},
-                        new double[] {frame.x(leg.along(c.toAt().onPlan())), frame.y(c.toAt().z())},
-                        figures.found(c.distance()) + " to " + model.source().name(c.to()))));
+  private double[] at(Leg leg, Place p) {
+    return new double[] {frame.x(leg.along(p.onPlan())), frame.y(p.z())};
   }
 
-  private void dimensions(Leg leg, List<double[]> run) {
-    Place middle = HangingList.middle(leg.span().points());
-    double s = leg.along(middle.onPlan());
-    double low = ground.heightAt(leg.at(s));
-    double[] up = {frame.x(s), frame.y(middle.z())};
-    double[] down = {frame.x(s), frame.y(low)};
-    labels.ask(
-        22, Dimensions.beside(up, down, figures.height(middle.z() - low), 0.01, 4, -4, 8, -8));
-    model.sags().stream()
-        .filter(g -> g.span().equals((leg.span().from() + 1) + "–" + (leg.span().to() + 1)))
-        .findFirst()
-        .ifPresent(
-            g ->
-                labels.ask(
-                    20,
-                    Labels.around(
-                        up[0],
-                        up[1],
-                        "sag " + figures.length(g.middle()),
-                        SurveyInk.BODY,
-                        true,
-                        2)));
-  }
-
-  /** Point numbers, heights and level distances along the ground. */
-  private void levels() {
-    double y = frame.top() + frame.height() - 2.4;
-    List<double[]> ends = new ArrayList<>();
-    for (int i = 0; i < legs.size(); i++) {
-      Leg leg = legs.get(i);
-      if (i == 0) {
-        ends.add(new double[] {leg.start(), leg.span().from()});
-      }
-      ends.add(new double[] {leg.start() + leg.length(), leg.span().to()});
-      double a = frame.x(leg.start()) + 2.6;
-      double b = frame.x(leg.start() + leg.length()) - 2.6;
-      String text = figures.length(leg.length());
-      if (b - a > Letters.width(text, 8, true, true) + 4) {
-        pen.line(a, y, b, y, 0.2, 1);
-        pen.add(
-            new Ink.Lettering(
-                (a + b) / 2, y + 1, text, 8, Ink.Anchor.MIDDLE, true, true, 0, 0.8, 1));
+  /** What of a span's run is wire: the rest of it is rope. */
+  private void heavy(Leg leg) {
+    List<double[]> wire = new ArrayList<>();
+    for (Place p : leg.span().points()) {
+      if (placement.conductors().stream().anyMatch(c -> on(c.points(), p))) {
+        wire.add(at(leg, p));
+      } else {
+        pen.path(wire, 0.8, 1);
+        wire = new ArrayList<>();
       }
     }
-    double last = Double.NEGATIVE_INFINITY;
-    for (double[] end : ends) {
-      Placement.Attachment held = placement.attachments().get((int) end[1]);
-      double x = Math.max(frame.x(end[0]), last + 4.6);
-      Symbols.number(pen, x, y, String.valueOf((int) end[1] + 1));
-      last = x;
-      labels.ask(
-          5,
-          Labels.around(
-              frame.x(end[0]),
-              frame.y(held.at().z()),
-              figures.height(held.aboveGround()),
-              9,
-              true,
-              1.4));
+    pen.path(wire, 0.8, 1);
+  }
+
+  /** Whether a place lies on a wire, which is told at most by sixty points. */
+  private static boolean on(List<Place> wire, Place p) {
+    for (int i = 1; i < wire.size(); i++) {
+      Place a = wire.get(i - 1);
+      Place b = wire.get(i);
+      double dx = b.x() - a.x();
+      double dy = b.y() - a.y();
+      double dz = b.z() - a.z();
+      double square = dx * dx + dy * dy + dz * dz;
+      double t = (p.x() - a.x()) * dx + (p.y() - a.y()) * dy + (p.z() - a.z()) * dz;
+      double share = square < 1e-12 ? 0 : Math.max(0, Math.min(1, t / square));
+      Place foot = new Place(a.x() + share * dx, a.y() + share * dy, a.z() + share * dz);
+      if (foot.distance(p) < ON_WIRE) {
+        return true;
+      }
+    }
+    return false;
+  }
+
+  /** Wire that hangs down beyond what holds it. */
+  private void freeEnds(Leg leg, List<Place> wire) {
+    for (List<Place> run : List.of(wire, WireList.back(wire))) {
+      double free = WireList.free(run);
+      Place top = WireList.at(run, Job.length(run) - free);
+      if (free > 0 && on(leg.span().points(), top)) {
+        List<double[]> down = new ArrayList<>();
+        WireList.part(run, 1 - free / Job.length(run), 1).forEach(p -> down.add(at(leg, p)));
+        pen.path(down, 0.8, 1);
+        labels.avoid(down, 8);
+      }
     }
   }
 }

@@ -37,12 +37,14 @@ final class Sight {
         points.stream().map(p -> new Coordinate(p.x(), p.y())).toArray(Coordinate[]::new));
   }
 
+  /** What of an outline stops a tape; empty when it has no area. */
+  static Geometry core(List<Point> footprint) {
+    return footprint.size() < 3 ? SHAPES.createPolygon() : polygon(footprint).buffer(-SKIN);
+  }
+
   /** Whether an outline stands in the way of a tape. */
   static boolean blocks(List<Point> footprint, Point from, Point to) {
-    if (footprint.size() < 3) {
-      return false;
-    }
-    Geometry core = polygon(footprint).buffer(-SKIN);
+    Geometry core = core(footprint);
     return !core.isEmpty() && core.intersects(path(List.of(from, to)));
   }
 

@@ -4,7 +4,7 @@ import java.util.List;
 import java.util.Locale;
 
 /**
- * Writes a page of marks as SVG in millimetres, true to scale, standing alone. Presentation
+ * Writes pages of marks as SVG in millimetres, true to scale, standing alone. Presentation
  * attributes only: no style, no script, nothing fetched, so that it shows under the strictest
  * policy.
  */
@@ -18,18 +18,27 @@ final class SvgWriter {
 
   private SvgWriter() {}
 
-  static String write(String title, String words, PaperPage page) {
+  /** Pages of one size, one under another. */
+  static String write(String title, String words, List<PaperPage> pages) {
     SvgWriter writer = new SvgWriter();
+    double width = pages.get(0).width();
+    double height = pages.get(0).height() * pages.size();
     writer.out.append("<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n<svg");
     writer.attribute("xmlns", "http://www.w3.org/2000/svg");
-    writer.attribute("width", number(page.width()) + "mm");
-    writer.attribute("height", number(page.height()) + "mm");
-    writer.attribute("viewBox", "0 0 " + number(page.width()) + " " + number(page.height()));
+    writer.attribute("width", number(width) + "mm");
+    writer.attribute("height", number(height) + "mm");
+    writer.attribute("viewBox", "0 0 " + number(width) + " " + number(height));
     writer.attribute("role", "img");
     writer.out.append(">\n<title>").append(escape(title)).append("</title>\n");
     writer.out.append("<desc>").append(escape(words)).append("</desc>\n");
     writer.out.append("<rect width=\"100%\" height=\"100%\" fill=\"#ffffff\"/>\n");
-    writer.draw(page.inks());
+    for (int i = 0; i < pages.size(); i++) {
+      writer.out.append("<g");
+      writer.attribute("transform", "translate(0 " + number(i * pages.get(0).height()) + ")");
+      writer.out.append(">\n");
+      writer.draw(pages.get(i).inks());
+      writer.out.append("</g>\n");
+    }
     return writer.out.append("</svg>\n").toString();
   }
 

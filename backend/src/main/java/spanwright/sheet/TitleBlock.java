@@ -12,31 +12,29 @@ final class TitleBlock {
 
   private final SheetModel model;
   private final int scale;
-  private final boolean partly;
+  private final String what;
+  private final boolean plan;
 
-  TitleBlock(SheetModel model, int scale, boolean partly) {
+  TitleBlock(SheetModel model, int scale, String what, boolean plan) {
     this.model = model;
     this.scale = scale;
-    this.partly = partly;
+    this.what = what;
+    this.plan = plan;
   }
 
   void draw(Pen pen, double x, double y, double width, int sheet, int sheets) {
-    double north = x + width - 24;
+    double north = plan ? x + width - 24 : x + width;
     double second = north - 30;
     double third = second - 52;
     pen.rect(x, y, width, HEIGHT, 0.5, 1, Ink.NONE);
     pen.line(x, y + ROW, north, y + ROW, 0.2, 1);
-    pen.line(north, y, north, y + HEIGHT, 0.2, 1);
+    if (plan) {
+      pen.line(north, y, north, y + HEIGHT, 0.2, 1);
+      north(pen, north + 12, y + 21);
+    }
     pen.line(second, y, second, y + ROW, 0.2, 1);
     pen.line(third, y, third, y + ROW, 0.2, 1);
-    cell(
-        pen,
-        x,
-        y,
-        third - x,
-        partly ? "Site drawing, part of the plot" : "Site drawing",
-        model.head().name(),
-        holders());
+    cell(pen, x, y, third - x, what, model.head().name(), holders());
     cell(pen, third, y, second - third, "Plot", model.head().title(), "");
     cell(
         pen,
@@ -48,7 +46,6 @@ final class TitleBlock {
         "sheet " + sheet + " of " + sheets + ", revision " + model.head().revision());
     double bar = scaleBar(pen, north - 3, y + ROW + 9.5);
     legend(pen, x + 2.5, y + ROW + 4.2, bar - 5);
-    north(pen, north + 12, y + 21);
     pen.text(
         x + 2.5,
         y + HEIGHT - 2,

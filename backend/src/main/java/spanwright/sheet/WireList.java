@@ -100,7 +100,7 @@ final class WireList {
     return new Piece(mark, conductor, from, to, fed, far, loop, back, free);
   }
 
-  private static List<Place> back(List<Place> run) {
+  static List<Place> back(List<Place> run) {
     List<Place> other = new ArrayList<>(run);
     Collections.reverse(other);
     return other;
@@ -113,7 +113,7 @@ final class WireList {
   }
 
   /** How much of a run hangs plumb at its last end [m]; 0 when less than can be told. */
-  private static double free(List<Place> run) {
+  static double free(List<Place> run) {
     double sum = 0;
     for (int i = run.size() - 1; i > 0; i--) {
       Place low = run.get(i);

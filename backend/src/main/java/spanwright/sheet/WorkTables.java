@@ -35,7 +35,7 @@ final class WorkTables {
       rows.add(
           List.of(
               ListPart.Cell.square(m.number()),
-              ListPart.Cell.of(m.name()),
+              ListPart.Cell.of(m.name() + better(m)),
               ListPart.Cell.bold(figures.length(m.fromA())),
               ListPart.Cell.bold(figures.length(m.fromB())),
               ListPart.Cell.of(m.side()),
@@ -48,14 +48,6 @@ final class WorkTables {
     }
     List<String> notes = new ArrayList<>();
     notes.add(known(s.a()) + "; " + known(s.b()) + (third ? "; " + known(s.c()) : "") + ".");
-    String better =
-        s.points().stream()
-            .filter(m -> m.flat() || m.blocked() != null)
-            .map(this::better)
-            .collect(Collectors.joining(" "));
-    if (!better.isEmpty()) {
-      notes.add(better);
-    }
     notes.addAll(
         List.of(
             String.join(" ", s.notes())
@@ -71,16 +63,17 @@ final class WorkTables {
     return known.letter() + ": " + known.what();
   }
 
+  /** Behind a point's name where the tapes from A and B do not serve. */
   private String better(SetOutParts.Mark m) {
-    String why = m.blocked() != null ? m.blocked() : "tapes cross flat";
+    if (!m.flat() && m.blocked() == null) {
+      return "";
+    }
     SetOutParts.Pair p = m.better();
-    return "Point "
-        + m.number()
-        + ", "
-        + why
+    String why = m.blocked() == null ? "" : ", " + m.blocked();
+    return why
         + (p == null
-            ? "."
-            : ": better "
+            ? m.onBuilding() ? "" : ": measure twice"
+            : ": rather "
                 + figures.length(p.fromTape())
                 + " from "
                 + p.from()
@@ -89,8 +82,7 @@ final class WorkTables {
                 + " from "
                 + p.with()
                 + ", at "
-                + Figures.degrees(p.crossing())
-                + ".");
+                + Figures.degrees(p.crossing()));
   }
 
   ListPart order() {

@@ -135,6 +135,66 @@ class SetOutTest {
   }
 
   @Test
+  void where_no_known_points_serve_a_new_datum_is_found_inside_the_plot_and_off_buildings() {
+    // a thin plot whose corners all lie on the line of the wire's foot: tapes to it cross flat
+    Plan p = Fixture.plan();
+    Plan plan =
+        new Plan(
+            p.format(),
+            "Strip",
+            "",
+            p.site(),
+            Fixture.points(0, 0, 60, 0, 60, 2.4, 0, 2.4),
+            List.of(),
+            List.of(),
+            p.supports(),
+            List.of(),
+            List.of(),
+            p.mastZones(),
+            List.of(),
+            List.of(),
+            List.of(),
+            List.of(),
+            List.of(),
+            p.entry(),
+            List.of(new Datum("A", new Point(1, 0.4)), new Datum("B", new Point(59, 0.4))),
+            p.brief());
+    Place middle = new Place(30, 1.2, 7);
+    List<spanwright.assess.Placement.Attachment> held =
+        new java.util.ArrayList<>(Fixture.placement().attachments());
+    held.set(
+        0,
+        new spanwright.assess.Placement.Attachment(
+            held.get(0).on(),
+            middle,
+            7,
+            50,
+            90,
+            null,
+            spanwright.clearance.State.CLEAR,
+            "tied",
+            null));
+    SheetModel model =
+        Sheets.of(
+            plan,
+            Fixture.catalogue(),
+            Placements.withAttachments(Fixture.placement(), held),
+            SheetOptions.standard());
+    SetOutParts.Mark mark = model.setOut().points().get(0);
+    assertTrue(mark.flat());
+    SetOutParts.Proposed proposed = model.setOut().proposed();
+    assertNotNull(proposed, "a new datum");
+    Place at = proposed.known().at();
+    assertTrue(at.x() > 0.29 && at.x() < 59.71 && at.y() > 0.29 && at.y() < 2.11, at.toString());
+    assertTrue(proposed.side().equals("on") || !SetOutList.isFlat(proposed.fixed().crossing()));
+    assertEquals(proposed.known().letter(), mark.better().from());
+    assertFalse(SetOutList.isFlat(mark.better().crossing()));
+    assertEquals(at.onPlan().distance(middle.onPlan()), mark.better().fromTape(), 1e-9);
+    String notes = String.join(" ", model.setOut().notes());
+    assertTrue(notes.contains("Drive a new datum " + proposed.known().letter()), notes);
+  }
+
+  @Test
   void heights_are_told_from_the_ground_there_and_from_the_ground_at_the_first_datum() {
     Terrain slope =
         new Terrain(List.of(new Place(-50, -50, 0), new Place(50, -50, 0), new Place(0, 60, 5.5)));

@@ -95,11 +95,11 @@ class SheetFormatsTest {
   @Test
   void a_cell_that_a_spreadsheet_would_reckon_is_made_harmless() {
     for (String evil : List.of("=1+1", "+1+1", "-1+1", "@SUM(A1)", "\t=1", "\r=1")) {
-      String read = parse(CsvWriter.field(evil) + "\r\n").get(0).get(0);
+      String read = parse(CsvText.field(evil) + "\r\n").get(0).get(0);
       assertEquals("'" + evil, read);
     }
-    assertEquals("-3.25", CsvWriter.field("-3.25"));
-    assertEquals("'-", CsvWriter.field("-"));
+    assertEquals("-3.25", CsvText.field("-3.25"));
+    assertEquals("'-", CsvText.field("-"));
     List<List<String>> rows = parse(Sheets.toCsv(named(NASTY)));
     assertTrue(rows.contains(List.of("Plot", "'" + NASTY)));
   }
@@ -130,8 +130,8 @@ class SheetFormatsTest {
     Document document = xml(Sheets.toSvg(named(NASTY)));
     Element root = document.getDocumentElement();
     assertEquals("210mm", root.getAttribute("width"));
-    assertEquals("297mm", root.getAttribute("height"));
-    assertEquals("0 0 210 297", root.getAttribute("viewBox"));
+    assertEquals("594mm", root.getAttribute("height"));
+    assertEquals("0 0 210 594", root.getAttribute("viewBox"));
     Set<String> allowed = Set.of("svg", "title", "desc", "rect", "path", "text", "g", "clipPath");
     NodeList all = document.getElementsByTagName("*");
     Set<String> ids = new HashSet<>();
@@ -154,7 +154,34 @@ class SheetFormatsTest {
     SheetModel letter = Fixture.model(SheetOptions.Paper.LETTER, SheetOptions.Units.FEET);
     Element root = xml(Sheets.toSvg(letter)).getDocumentElement();
     assertEquals("215.9mm", root.getAttribute("width"));
-    assertEquals("279.4mm", root.getAttribute("height"));
+    assertEquals("558.8mm", root.getAttribute("height"));
+  }
+
+  @Test
+  void the_csv_says_all_that_the_model_says() {
+    String csv = Sheets.toCsv(model);
+    for (String part :
+        List.of(
+            "Issued,",
+            "Place,",
+            "Stand-offs",
+            "Margins",
+            "People",
+            "Measure and write down",
+            "Look again",
+            "What the consents buy")) {
+      assertTrue(csv.contains("\r\n" + part), part);
+    }
+    model.people().forEach(p -> assertTrue(csv.contains(CsvText.field(p)), p));
+    model
+        .measures()
+        .forEach(m -> assertTrue(csv.contains(m.when() + "," + CsvText.field(m.what())), m.what()));
+    model.inspections().forEach(i -> assertTrue(csv.contains(CsvText.field(i.what())), i.what()));
+    List<Double> at = model.feedLine().standOffsAt();
+    for (int i = 0; i < at.size(); i++) {
+      String row = "\r\n" + (i + 1) + "," + CsvText.plain(at.get(i), 2) + "\r\n";
+      assertTrue(csv.contains(row), row);
+    }
   }
 
   @Test
