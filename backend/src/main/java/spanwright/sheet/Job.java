@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.Stream;
+import org.locationtech.jts.geom.Coordinate;
 import spanwright.assess.Placement;
 import spanwright.plan.Building;
 import spanwright.plan.Catalogue;
@@ -189,6 +190,15 @@ final class Job {
     double right = (corner.x() - (x.getMin() + x.getMax()) / 2) / (x.getMax() - x.getMin());
     double up = (corner.y() - (y.getMin() + y.getMax()) / 2) / (y.getMax() - y.getMin());
     return wind(bearing(new Point(0, 0), new Point(right, up)));
+  }
+
+  /** The building that a point of the plan stands on, or null. */
+  Building under(Point at) {
+    var point = Sight.SHAPES.createPoint(new Coordinate(at.x(), at.y()));
+    return plan.buildings().stream()
+        .filter(b -> Sight.core(b.footprint()).covers(point))
+        .findFirst()
+        .orElse(null);
   }
 
   /** A building that stands between two points of the plan, or null. */

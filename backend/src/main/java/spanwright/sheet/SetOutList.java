@@ -311,7 +311,7 @@ final class SetOutList {
   }
 
   private String blocked(Place at, SetOutParts.Known a, SetOutParts.Known b) {
-    Building under = job.between(at.onPlan(), at.onPlan());
+    Building under = job.under(at.onPlan());
     if (under != null) {
       return SetOutParts.Mark.ON + job.name(under.id());
     }

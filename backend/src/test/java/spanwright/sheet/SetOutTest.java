@@ -135,6 +135,33 @@ class SetOutTest {
   }
 
   @Test
+  void what_stands_on_a_building_is_said_to_and_asks_for_no_datum() {
+    List<spanwright.assess.Placement.Attachment> held =
+        new java.util.ArrayList<>(Fixture.placement().attachments());
+    held.set(
+        1,
+        new spanwright.assess.Placement.Attachment(
+            held.get(1).on(),
+            new Place(9, 5, 8.5),
+            8.5,
+            50,
+            90,
+            null,
+            spanwright.clearance.State.CLEAR,
+            "tied",
+            null));
+    SetOutParts.SetOut roof =
+        Sheets.of(
+                Fixture.plan(),
+                Fixture.catalogue(),
+                Placements.withAttachments(Fixture.placement(), held),
+                SheetOptions.standard())
+            .setOut();
+    assertEquals("on House", roof.points().get(1).blocked());
+    assertTrue(String.join(" ", roof.notes()).contains("found from its walls"));
+  }
+
+  @Test
   void where_no_known_points_serve_a_new_datum_is_found_inside_the_plot_and_off_buildings() {
     // a thin plot whose corners all lie on the line of the wire's foot: tapes to it cross flat
     Plan p = Fixture.plan();
