@@ -20,6 +20,12 @@ final class Mesher {
    */
   private static final double LEAST_RADII = 6;
 
+  /**
+   * Beside an open end of the fed wire, where most of that charge is: a finer mesh there makes the
+   * resonance lower than published solutions of the same equation have it.
+   */
+  private static final double FED_END_RADII = 12;
+
   /** And so many outer radii of insulation, whose share of the charge's field is taken as local. */
   private static final double LEAST_SHEATH_RADII = 10;
 
@@ -236,7 +242,9 @@ final class Mesher {
     if (outline.degree[node] == 1) {
       // the charge at an open end crowds into a few radii: thick wires need shorter ends
       double thickness = k * model.wires().get(piece.wire()).radius();
-      return rule.end() / k / (1 + thickness / 0.004);
+      double pace = rule.end() / k / (1 + thickness / 0.004);
+      boolean fed = piece.wire() == model.feedWire();
+      return fed ? Math.max(FED_END_RADII * model.wires().get(piece.wire()).radius(), pace) : pace;
     }
     if (outline.degree[node] > 2) {
       return rule.bend() / k;
