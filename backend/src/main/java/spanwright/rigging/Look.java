@@ -2,7 +2,9 @@ package spanwright.rigging;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Objects;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.Stream;
 import spanwright.plan.Place;
 
 /**
@@ -38,6 +40,11 @@ record Look(
     double chord,
     boolean slack,
     boolean lifted) {
+
+  /** In the gust from either side, without ice and, where there is any, with it. */
+  List<Solved> blown() {
+    return Stream.of(left, right, iceLeft, iceRight).filter(Objects::nonNull).toList();
+  }
 
   /** Greatest tension of the wire in any weather [N]. */
   double greatest() {

@@ -143,7 +143,12 @@ final class ReadOut {
     Course.Stretch stretch = course.spans().get(i);
     Look look = looks.get(i);
     Materials materials = hang.materials(stretch.conductor());
-    double sagInWind = Math.max(sag(look.left()), sag(look.right()));
+    double sagInWind = 0;
+    double blowOut = 0;
+    for (Solved blown : look.blown()) {
+      sagInWind = Math.max(sagInWind, sag(blown));
+      blowOut = Math.max(blowOut, shift(look, blown));
+    }
     return new Rigged.Span(
         stretch.fromHold(),
         stretch.toHold(),
@@ -153,7 +158,7 @@ final class ReadOut {
         look.calm().wireTo(),
         sag(look.calm()),
         sagInWind,
-        Math.max(shift(look, look.left()), shift(look, look.right())),
+        blowOut,
         stretch.wire(),
         look.ropeFrom(),
         look.ropeTo(),
