@@ -4,7 +4,7 @@ package spanwright.moments;
  * How elements are sized, as phase k·length, and which polynomial order an element carries. Found
  * by refining 360 garden antennas (level, sloping, apex, bent, drooping, looped, folded, branched,
  * parallel, hung in many points, insulated, low, beside gutters) from 1.85 to 53.9 MHz over six
- * grounds until they stood still; a test holds the aims of {@link MeshAim}.
+ * grounds until they stood still; a test holds the aims of {@link MeshAim} on others.
  *
  * <p>Tried and left: lower orders in the short elements beside feed, ends and bends (a cubic on two
  * elements does what three quadratics do), and the fourth order everywhere (two unknowns more in

@@ -197,7 +197,7 @@ class DenseAuditTest {
       List<Place> path = ground.raise(each.path());
       double kept = kept(each);
       for (Place p : all) {
-        hold(nearest(p, path) >= kept - 1e-9, where, p);
+        hold(RuleOracle.toPath(p, path) >= kept - 1e-9, where, p);
       }
       if (each.kind() != OverheadLine.Kind.TELEPHONE) {
         letGo(plan, rigged, path, kept, where + each.id());
@@ -249,17 +249,17 @@ class DenseAuditTest {
         }
         double reach = span.ropeFrom() + span.wireLength() + span.ropeTo();
         for (Place p : region(shape, reach, ground)) {
-          hold(nearest(p, path) >= kept - 1e-9, where, p);
+          hold(RuleOracle.toPath(p, path) >= kept - 1e-9, where, p);
         }
       }
     }
     for (Rigged.Mast mast : rigged.masts()) {
-      hold(nearest(mast.foot(), path) >= mast.height() + kept - 1e-9, where, mast.foot());
+      hold(RuleOracle.toPath(mast.foot(), path) >= mast.height() + kept - 1e-9, where, mast.foot());
     }
     for (Rigged.Attachment each : rigged.attachments()) {
       if (each.on().equals("mast")) {
         Place foot = new Place(30, 14, ground.heightAt(30, 14));
-        hold(nearest(foot, path) >= 8 + kept - 1e-9, where, foot);
+        hold(RuleOracle.toPath(foot, path) >= 8 + kept - 1e-9, where, foot);
       }
     }
   }
@@ -333,24 +333,5 @@ class DenseAuditTest {
                 a.z() + t * (b.z() - a.z())));
       }
     }
-  }
-
-  /** From a point to a path, by the foot on each of its pieces. */
-  private static double nearest(Place p, List<Place> path) {
-    double least = Double.POSITIVE_INFINITY;
-    for (int i = 0; i + 1 < path.size(); i++) {
-      Place a = path.get(i);
-      Place b = path.get(i + 1);
-      double ux = b.x() - a.x();
-      double uy = b.y() - a.y();
-      double uz = b.z() - a.z();
-      double along = (p.x() - a.x()) * ux + (p.y() - a.y()) * uy + (p.z() - a.z()) * uz;
-      double t = Math.max(0, Math.min(1, along / (ux * ux + uy * uy + uz * uz)));
-      double dx = p.x() - a.x() - t * ux;
-      double dy = p.y() - a.y() - t * uy;
-      double dz = p.z() - a.z() - t * uz;
-      least = Math.min(least, dx * dx + dy * dy + dz * dz);
-    }
-    return Math.sqrt(least);
   }
 }

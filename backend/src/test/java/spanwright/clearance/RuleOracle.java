@@ -349,7 +349,7 @@ final class RuleOracle {
   }
 
   /** From a point to a path, by the foot on each of its pieces. */
-  private static double toPath(Place p, List<Place> path) {
+  static double toPath(Place p, List<Place> path) {
     double least = Double.POSITIVE_INFINITY;
     for (int i = 0; i + 1 < path.size(); i++) {
       Place a = path.get(i);
