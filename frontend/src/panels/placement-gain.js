@@ -5,7 +5,7 @@ import { bearing, impedance, megahertz, range, count } from '../charts/figures.j
 import { number, signed } from '../units/figures.js';
 import { lengthWithUnit } from '../units/length.js';
 import { stateMark, worst } from '../charts/marks.js';
-import { bandsOf } from './placement-facts.js';
+import { bandsOf, doubtsOf } from './placement-facts.js';
 
 /** Tables of the radio side of a placement: delivered gain, feed, score, remarks. */
 
@@ -222,6 +222,11 @@ export function scoreTable(placement) {
  * @returns {HTMLElement}
  */
 export function remarks(placement) {
+  // what is doubtful stands at the head of the placement already
+  const doubts = doubtsOf(placement);
+  const notes = placement.notes.filter(
+    (/** @type {string} */ note) => !doubts.some((/** @type {string} */ doubt) => note.endsWith(doubt)),
+  );
   return html(
     'section',
     { class: 'remarks' },
@@ -229,7 +234,7 @@ export function remarks(placement) {
     html(
       'ul',
       {},
-      ...placement.notes.map((/** @type {string} */ note) => html('li', {}, note)),
+      ...notes.map((/** @type {string} */ note) => html('li', {}, note)),
       html('li', {}, `${placement.exposure}.`.replace(/\.\.$/, '.')),
     ),
   );

@@ -1,5 +1,7 @@
 package spanwright.moments;
 
+import java.util.Arrays;
+
 /**
  * The ground's ratios along whole elements. They vary over the distance to the image, which is most
  * often far more than an element is long: so they are looked up at one to four Gauss points of an
@@ -197,7 +199,7 @@ final class RatioRows {
     reflection.ratios(work.rho, work.zeta, count, work.ratios);
     for (double[] values : work.ratios) {
       // what a weight of 0 reaches must be a number
-      java.util.Arrays.fill(values, count, count + MOST_NODES, 0);
+      Arrays.fill(values, count, count + MOST_NODES, 0);
     }
   }
 
